@@ -1,0 +1,128 @@
+/**
+ * The answer for one run. The same object is what `--json` writes and what the window shows; its JSON Schema is
+ * generated from `report/run-result-schema.ts`. SI units, temperatures in °C; heat flow is positive outwards.
+ */
+
+export type LimitName = 'touch' | 'loss' | 'damp' | 'frost' | 'arrival' | 'code' | 'space' | 'service'
+export type Governing = LimitName | 'money' | 'smallest' | 'fixed' | 'bare' | 'unmet'
+export type ConditionName = 'loss' | 'touch' | 'damp' | 'frost' | 'survey'
+
+/** Something a reader should know: an assumption made, a range left, a caution. */
+export interface Note {
+  readonly code: string
+  readonly text: string
+}
+
+/** One limit judged on one rung. */
+export interface LimitResult {
+  readonly limit: LimitName
+  readonly pass: boolean
+  readonly value: number
+  readonly bound: number
+  readonly unit: string
+  readonly condition: ConditionName
+  /** What was judged, in words: "surface, top" or "jacket", "stone wool, inside". */
+  readonly what: string
+}
+
+/** Money of one rung, per metre of run (per m² for a flat surface), in the currency of the run. */
+export interface RungMoney {
+  readonly installed: number
+  readonly energyPerYear: number
+  /** Installed cost plus the present value of the energy over the life. */
+  readonly lifeCycle: number
+}
+
+/** One build-up rated: the bare run, or one rung of the ladder. At the loss condition. */
+export interface Rating {
+  /** Total thickness of insulation [m]; 0 bare. */
+  readonly thicknessM: number
+  /** What an inch series calls the thickness [m]; null elsewhere. */
+  readonly nominalThicknessM: number | null
+  /** Thickness of each piece, inside to outside [m]. */
+  readonly piecesM: readonly number[]
+  /** Of a pipe or round duct [m]; else null. */
+  readonly outerDiameterM: number | null
+  /** Null for a flat surface. */
+  readonly heatLossWPerM: number | null
+  readonly heatFluxWPerM2: number
+  /** Whole run [W]; null where neither length nor area is known. */
+  readonly heatLossW: number | null
+  readonly yearlyKWh: number | null
+  readonly surfaceTempC: number
+  readonly convectionWPerM2K: number
+  readonly radiationWPerM2K: number
+  readonly interfaceTempsC: readonly number[]
+  /** Mean surface at the touch condition [°C]: the hottest day, no wind, new finish, worst face. */
+  readonly touchSurfaceC: number
+  readonly limits: readonly LimitResult[]
+  readonly pass: boolean
+  readonly money: RungMoney | null
+}
+
+export interface RunMoney {
+  readonly currency: string
+  /** Per metre of run, or per m² of a flat surface. */
+  readonly per: 'm' | 'm2'
+  readonly hoursPerYear: number
+  readonly fuel: string
+  readonly fuelPricePerKWh: number
+  readonly efficiency: number
+  readonly discount: number
+  readonly growth: number
+  readonly lifeYears: number
+  /** Present-value factor of the yearly energy. */
+  readonly presentValueFactor: number
+  /** Energy cost per year of the bare run, per metre or m². */
+  readonly bareEnergyPerYear: number
+  /** Of the whole run; null without length or area, or without a chosen rung. */
+  readonly installedTotal: number | null
+  readonly savingPerYearTotal: number | null
+  /** Years until the installed cost is saved; null where nothing is saved. */
+  readonly paybackYears: number | null
+  readonly co2KgPerYear: number | null
+  readonly co2SavedKgPerYear: number | null
+  /** Thickness of the cheapest rung whether or not it passes [m]. */
+  readonly cheapestThicknessM: number
+  /** Smallest and largest passing thickness that cost at most 2 % more than the chosen one [m]. */
+  readonly withinTwoPercentM: readonly [number, number] | null
+}
+
+/** Exact end of the thicknesses that pass a limit, for the ladder picture; only computed on request. */
+export interface LimitEnd {
+  readonly limit: LimitName
+  /** Passes from this thickness on [m]; null where no thickness up to the search end passes. */
+  readonly fromM: number | null
+}
+
+export interface RunResult {
+  readonly tag: string
+  readonly bare: Rating
+  readonly chosen: Rating | null
+  readonly governing: Governing
+  /** One plain sentence or two, with the numbers that decided. */
+  readonly reason: string
+  /** The limits of the chosen rung; of the thickest rung where none passes. */
+  readonly limits: readonly LimitResult[]
+  readonly ladder: readonly Rating[]
+  readonly money: RunMoney | null
+  readonly notes: readonly Note[]
+}
+
+/** One thing wrong with the input of a run: what was found, where, what is allowed, what to do. */
+export interface Issue {
+  /** CSV column, e.g. `air_c`. */
+  readonly column: string
+  readonly found: string
+  readonly allowed: string
+}
+
+/** Either the run was sized, or everything that is wrong with its input. */
+export type RunOutcome =
+  | { readonly ok: true; readonly result: RunResult }
+  | { readonly ok: false; readonly issues: readonly Issue[] }
+
+/** What the run sheet asks for the selected run only: exact ends of the limits. */
+export interface RunDetail {
+  readonly ends: readonly LimitEnd[]
+}
