@@ -1,0 +1,97 @@
+/** Burn thresholds: the lower curve of ISO 13732-1 for a touchable surface and a contact time. */
+import type { BurnThreshold, TouchClass } from '#catalogue/types.ts'
+
+export interface TouchedSurface {
+  readonly touchClass: TouchClass
+  /** Kind of coating on metal, e.g. `lacquer`; null for none or unknown. */
+  readonly coating: string | null
+  /** Null where unknown: then the coating gives no relief. */
+  readonly coatingThicknessM: number | null
+}
+
+export interface Threshold {
+  /** Temperature at which a burn begins to be possible [°C]; a surface passes only below it. */
+  readonly thresholdC: number
+  /** The class whose row decided, e.g. `smooth-metal`. */
+  readonly surface: string
+  /** Why another row than the surface's own decided; null where its own did. */
+  readonly because: string | null
+}
+
+/** Contact times above eight hours have the eight-hour value. Source: ISO 13732-1, as `domain` data of the catalogue. */
+const LONGEST_CONTACT_S = 8 * 3600
+
+/** Who decides where a class has no confirmed cell: always the next stricter one. */
+const stricter: Readonly<Record<string, string>> = {
+  wood: 'plastic',
+  plastic: 'ceramic-glass-stone',
+  'ceramic-glass-stone': 'smooth-metal',
+}
+
+/**
+ * The threshold that a surface is judged by.
+ *
+ * Contact time [s], at least 0.5. Between the columns of the table the threshold is straight in log10(t). A cell of low
+ * confidence never passes a surface: the next stricter class with confirmed cells decides, and says so. Null where the
+ * table has no row at all. Source: ISO 13732-1 lower curve, rows and grades as in the catalogue.
+ */
+export function burnThreshold(
+  table: readonly BurnThreshold[],
+  surface: TouchedSurface,
+  contactS: number,
+): Threshold | null {
+  const own = rowName(table, surface)
+  let name = own.name
+  let because = own.because
+  for (;;) {
+    const cells = table.filter((cell) => cell.surface === name)
+    const found = cells.length > 0 ? interpolate(cells, Math.min(contactS, LONGEST_CONTACT_S)) : null
+    if (found?.confirmed) return { thresholdC: found.thresholdC, surface: name, because }
+    const next = stricter[name] ?? (name === 'smooth-metal' ? null : 'smooth-metal')
+    if (next === null) {
+      return found ? { thresholdC: found.thresholdC, surface: name, because } : null
+    }
+    because ??= `the threshold for ${name} at this contact time is not confirmed`
+    name = next
+  }
+}
+
+/** Which row of the table is the surface's own. */
+function rowName(
+  table: readonly BurnThreshold[],
+  { touchClass, coating, coatingThicknessM }: TouchedSurface,
+): { name: string; because: string | null } {
+  if (touchClass !== 'coated-metal') return { name: touchClass, because: null }
+  if (coating === null || coatingThicknessM === null) {
+    return { name: 'smooth-metal', because: 'a coating of unknown thickness gives no relief' }
+  }
+  // The thickest row of that coating that is not thicker than the coating itself.
+  const coatingUm = Math.round(coatingThicknessM * 1e6)
+  const rows = new Set(table.map((cell) => cell.surface))
+  const fitting = [...rows]
+    .map((name) => ({ name, um: Number(new RegExp(`^${coating}-(\\d+)$`).exec(name)?.[1] ?? Number.NaN) }))
+    .filter(({ um }) => um <= coatingUm)
+    .sort((a, b) => b.um - a.um)[0]
+  return fitting
+    ? { name: fitting.name, because: null }
+    : { name: 'smooth-metal', because: `a coating of ${coatingUm} µm is too thin to give relief` }
+}
+
+function interpolate(
+  cells: readonly BurnThreshold[],
+  contactS: number,
+): { thresholdC: number; confirmed: boolean } | null {
+  const sorted = [...cells].sort((a, b) => a.contactS - b.contactS)
+  const after = sorted.findIndex((cell) => cell.contactS >= contactS)
+  const high = after < 0 ? sorted[sorted.length - 1] : sorted[after]
+  const low = after <= 0 ? high : sorted[after - 1]
+  if (!high || !low) return null
+  if (high === low || high.contactS === contactS) {
+    return { thresholdC: high.lowerC, confirmed: high.grade !== 'L' }
+  }
+  const share = Math.log10(contactS / low.contactS) / Math.log10(high.contactS / low.contactS)
+  return {
+    thresholdC: low.lowerC + share * (high.lowerC - low.lowerC),
+    confirmed: low.grade !== 'L' && high.grade !== 'L',
+  }
+}
