@@ -23,7 +23,9 @@ function relativeLuminance(hex: string): number {
 
 /** WCAG 2.2, definition of contrast ratio. */
 function contrastRatio(one: string, other: string): number {
-  const [dark = 0, light = 0] = [relativeLuminance(one), relativeLuminance(other)].sort((a, b) => a - b)
+  const [dark = 0, light = 0] = [relativeLuminance(one), relativeLuminance(other)].sort(
+    (a, b) => a - b,
+  )
   return (light + 0.05) / (dark + 0.05)
 }
 
@@ -35,7 +37,9 @@ function colour(name: string, theme: Theme): string {
 
 const grounds = ['paper', 'sheet', 'act-ground']
 const textPairs: readonly (readonly [string, string])[] = [
-  ...['ink', 'soft', 'act', 'fail', 'heed'].flatMap((text) => grounds.map((ground) => [text, ground] as const)),
+  ...['ink', 'soft', 'act', 'fail', 'heed'].flatMap((text) =>
+    grounds.map((ground) => [text, ground] as const),
+  ),
   ['pass', 'pass-ground'],
   ['pass', 'sheet'],
   ['pass', 'paper'],
@@ -46,9 +50,11 @@ const textPairs: readonly (readonly [string, string])[] = [
   ['ink', 'heed-ground'],
   ['on-act', 'act'],
 ]
-const drawnPairs: readonly (readonly [string, string])[] = ['edge', 'chart-heat', 'chart-lagging'].flatMap(
-  (mark) => ['paper', 'sheet'].map((ground) => [mark, ground] as const),
-)
+const drawnPairs: readonly (readonly [string, string])[] = [
+  'edge',
+  'chart-heat',
+  'chart-lagging',
+].flatMap((mark) => ['paper', 'sheet'].map((ground) => [mark, ground] as const))
 
 for (const theme of ['light', 'dark'] as const) {
   // WCAG 2.2, 1.4.3: at least 4.5:1 for text.
