@@ -3,34 +3,55 @@
 export type Failure =
   | { readonly code: 'job/not-found'; readonly path: string }
   | { readonly code: 'job/not-a-job'; readonly path: string; readonly why: string }
-  | { readonly code: 'job/too-new'; readonly path: string; readonly found: number; readonly known: number }
+  | {
+      readonly code: 'job/too-new'
+      readonly path: string
+      readonly found: number
+      readonly known: number
+    }
   | { readonly code: 'job/damaged'; readonly path: string; readonly why: string }
   | { readonly code: 'job/exists'; readonly path: string }
   | { readonly code: 'job/not-writable'; readonly path: string; readonly why: string }
   | { readonly code: 'job/in-use'; readonly path: string }
   | { readonly code: 'job/stale'; readonly found: number; readonly expected: number }
   | { readonly code: 'job/wrong-ending'; readonly path: string }
+  | {
+      readonly code: 'catalogue/too-new'
+      readonly path: string
+      readonly found: number
+      readonly known: number
+    }
   | { readonly code: 'request/unknown'; readonly name: string }
   | { readonly code: 'request/invalid'; readonly issues: string }
   | { readonly code: 'host/gone' }
   | { readonly code: 'internal'; readonly reference: string }
 
 const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
-  'job/not-found': ({ path }) => `There is no file at ${path}. Check the path, or create a new job.`,
-  'job/not-a-job': ({ path, why }) => `${path} is not a Lagwright job (${why}). It was not changed. Choose a file that ends in .lagjob.`,
+  'job/not-found': ({ path }) =>
+    `There is no file at ${path}. Check the path, or create a new job.`,
+  'job/not-a-job': ({ path, why }) =>
+    `${path} is not a Lagwright job (${why}). It was not changed. Choose a file that ends in .lagjob.`,
   'job/too-new': ({ path, found, known }) =>
     `${path} was written by a newer Lagwright (version ${found} of the file, this program knows ${known}). It was not changed. Update Lagwright to open it.`,
-  'job/damaged': ({ path, why }) => `${path} is damaged (${why}). It was not changed. Open a backup copy, or the file on another machine.`,
-  'job/exists': ({ path }) => `${path} is already there. Choose another name, or say that it may be replaced.`,
-  'job/not-writable': ({ path, why }) => `${path} cannot be written (${why}). Your work is kept here; save it under another name.`,
+  'job/damaged': ({ path, why }) =>
+    `${path} is damaged (${why}). It was not changed. Open a backup copy, or the file on another machine.`,
+  'job/exists': ({ path }) =>
+    `${path} is already there. Choose another name, or say that it may be replaced.`,
+  'job/not-writable': ({ path, why }) =>
+    `${path} cannot be written (${why}). Your work is kept here; save it under another name.`,
   'job/in-use': ({ path }) => `${path} is open in another Lagwright window. Close it there first.`,
   'job/stale': ({ found, expected }) =>
     `This window is behind its file (change ${found}, the file is at ${expected}): another window wrote to it. Reopen the job to go on.`,
-  'job/wrong-ending': ({ path }) => `${path} does not end in .lagjob. Give the file a name that does.`,
+  'job/wrong-ending': ({ path }) =>
+    `${path} does not end in .lagjob. Give the file a name that does.`,
+  'catalogue/too-new': ({ path, found, known }) =>
+    `The catalogue ${path} was written by a newer Lagwright (version ${found}, this program knows ${known}). It was not changed. Update Lagwright, or start it with another data folder.`,
   'request/unknown': ({ name }) => `The program does not know the request ${name}.`,
   'request/invalid': ({ issues }) => `The request was not understood: ${issues}`,
-  'host/gone': () => 'Lagwright is no longer running behind this page. Start it again; what you saved is safe.',
-  internal: ({ reference }) => `Something went wrong inside Lagwright (reference ${reference}). Your saved work is safe.`,
+  'host/gone': () =>
+    'Lagwright is no longer running behind this page. Start it again; what you saved is safe.',
+  internal: ({ reference }) =>
+    `Something went wrong inside Lagwright (reference ${reference}). Your saved work is safe.`,
 }
 
 /** The sentence of a failure. */
