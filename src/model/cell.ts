@@ -7,8 +7,8 @@ export interface CellOptions {
   readonly decimalComma: boolean
   /** The number is in the US unit of the field: in, ft or °F. */
   readonly twin?: boolean
-  /** The mark that parts no decimals elsewhere in this file: where it could part thousands, it is not guessed. */
-  readonly doubtfulMark?: '.' | ','
+  /** Marks that may part thousands in this file: a number that reads either way is refused, not guessed. */
+  readonly doubtfulMarks?: readonly ('.' | ',')[]
 }
 
 /** No field takes more, however it is spaced; keeps a pasted novel away from the patterns. */
@@ -103,8 +103,8 @@ const flags: ReadonlyMap<string, boolean> = new Map([
 const choiceForm = (text: string): string => text.toLowerCase().replace(/[\s_]+/g, '-')
 
 function readNumber(field: NumberField, text: string, options: CellOptions): number | null {
-  const { decimalComma, doubtfulMark } = options
-  if (doubtfulMark && couldBeThousands(text, doubtfulMark)) return null
+  const { decimalComma } = options
+  if (isDoubtful(text, options)) return null
   const twin = options.twin ? twinOf(field) : undefined
   const typed = readDecimal(text, { decimalComma, shift: twin ? 0 : decimalShift(field) })
   if (typed === null) return null
@@ -115,8 +115,7 @@ function readNumber(field: NumberField, text: string, options: CellOptions): num
 
 function refusal(field: Field, text: string, options: CellOptions): string {
   const allowed = allowedIn(field, options.twin)
-  const { doubtfulMark } = options
-  if (field.kind === 'number' && doubtfulMark && couldBeThousands(text, doubtfulMark)) {
+  if (field.kind === 'number' && isDoubtful(text, options)) {
     return `${allowed}, without a mark between the thousands`
   }
   if (field.kind === 'choice') {
@@ -125,6 +124,10 @@ function refusal(field: Field, text: string, options: CellOptions): string {
       return `${allowed} (${wanted} is not yet supported)`
   }
   return allowed
+}
+
+function isDoubtful(text: string, { doubtfulMarks = [] }: CellOptions): boolean {
+  return doubtfulMarks.some((mark) => couldBeThousands(text, mark))
 }
 
 /** Power of ten between the unit of the column and SI. */
@@ -140,8 +143,8 @@ interface Twin {
 
 /** The US form of a field's column, where it has one. */
 export function twinOf(field: NumberField): Twin | undefined {
-  const form: { readonly twin?: Twin } = quantities[field.quantity]
-  return form.twin
+  const form = quantities[field.quantity]
+  return 'twin' in form ? form.twin : undefined
 }
 
 function rangeIn(field: NumberField, inTwin: boolean): string {

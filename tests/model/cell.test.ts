@@ -93,7 +93,7 @@ describe('a number cell', () => {
   })
 
   it('does not guess where a mark could part thousands', () => {
-    const doubtful = { decimalComma: true, doubtfulMark: '.' as const }
+    const doubtful = { decimalComma: true, doubtfulMarks: ['.'] as const }
     expect(value('hoursPerYear', '8.760', doubtful)).toEqual({
       ok: false,
       found: '"8.760"',
