@@ -32,7 +32,12 @@ export interface Material extends Provenance {
   readonly note: string
 }
 
-export type TouchClass = 'smooth-metal' | 'coated-metal' | 'ceramic-glass-stone' | 'plastic' | 'wood'
+export type TouchClass =
+  | 'smooth-metal'
+  | 'coated-metal'
+  | 'ceramic-glass-stone'
+  | 'plastic'
+  | 'wood'
 
 export interface Finish extends Provenance {
   readonly id: string

@@ -48,25 +48,41 @@ export type Preferences = z.output<typeof preferencesSchema>
 const pathSchema = z.string().min(1).max(4096)
 
 export const hostCalls = {
-  'catalogue.read': call(z.strictObject({}), z.custom<Catalogue>((value) => typeof value === 'object' && value !== null)),
+  'catalogue.read': call(
+    z.strictObject({}),
+    z.custom<Catalogue>((value) => typeof value === 'object' && value !== null),
+  ),
   /** The job last open, or the demo on first start. */
   'job.current': call(z.strictObject({}), openJobSchema),
   'job.new': call(z.strictObject({}), openJobSchema),
   'job.demo': call(z.strictObject({}), openJobSchema),
   /** Without a path the desktop shell shows its dialog; null when the user turned back. */
   'job.open': call(z.strictObject({ path: pathSchema.optional() }), openJobSchema.nullable()),
-  'job.saveAs': call(z.strictObject({ path: pathSchema.optional(), overwrite: z.boolean() }), openJobSchema.nullable()),
+  'job.saveAs': call(
+    z.strictObject({ path: pathSchema.optional(), overwrite: z.boolean() }),
+    openJobSchema.nullable(),
+  ),
   'job.commit': call(jobChangeSchema, z.strictObject({ revision: z.int(), savedAt: z.string() })),
   'preferences.read': call(z.strictObject({}), preferencesSchema),
   'preferences.write': call(preferencesSchema, z.strictObject({})),
   /** What this host can do: `dialogs` is false on the loopback host, where the window asks for a path itself. */
-  'host.about': call(z.strictObject({}), z.strictObject({ kind: z.enum(['desktop', 'loopback']), dialogs: z.boolean(), folder: z.string(), version: z.string() })),
+  'host.about': call(
+    z.strictObject({}),
+    z.strictObject({
+      kind: z.enum(['desktop', 'loopback']),
+      dialogs: z.boolean(),
+      folder: z.string(),
+      version: z.string(),
+    }),
+  ),
 } as const
 
 export type CallName = keyof typeof hostCalls
 export type Input<N extends CallName> = z.input<(typeof hostCalls)[N]['input']>
 export type Output<N extends CallName> = z.output<(typeof hostCalls)[N]['output']>
 export type Handlers = {
-  readonly [N in CallName]: (input: z.output<(typeof hostCalls)[N]['input']>) => Output<N> | Promise<Output<N>>
+  readonly [N in CallName]: (
+    input: z.output<(typeof hostCalls)[N]['input']>,
+  ) => Output<N> | Promise<Output<N>>
 }
 export type Host = { readonly [N in CallName]: (input: Input<N>) => Promise<Output<N>> }

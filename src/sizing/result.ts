@@ -3,7 +3,15 @@
  * generated from `report/run-result-schema.ts`. SI units, temperatures in °C; heat flow is positive outwards.
  */
 
-export type LimitName = 'touch' | 'loss' | 'damp' | 'frost' | 'arrival' | 'code' | 'space' | 'service'
+export type LimitName =
+  | 'touch'
+  | 'loss'
+  | 'damp'
+  | 'frost'
+  | 'arrival'
+  | 'code'
+  | 'space'
+  | 'service'
 export type Governing = LimitName | 'money' | 'smallest' | 'fixed' | 'bare' | 'unmet'
 export type ConditionName = 'loss' | 'touch' | 'damp' | 'frost' | 'survey'
 
@@ -53,7 +61,7 @@ export interface Rating {
   readonly convectionWPerM2K: number
   readonly radiationWPerM2K: number
   readonly interfaceTempsC: readonly number[]
-  /** Mean surface at the touch condition [°C]: the hottest day, no wind, new finish, worst face. */
+  /** Surface at the touch condition [°C]: the hottest day, no wind, new finish, worst face. */
   readonly touchSurfaceC: number
   readonly limits: readonly LimitResult[]
   readonly pass: boolean
@@ -82,8 +90,8 @@ export interface RunMoney {
   readonly paybackYears: number | null
   readonly co2KgPerYear: number | null
   readonly co2SavedKgPerYear: number | null
-  /** Thickness of the cheapest rung whether or not it passes [m]. */
-  readonly cheapestThicknessM: number
+  /** Thickness of the cheapest rung whether or not it passes [m]; null where nothing has a price. */
+  readonly cheapestThicknessM: number | null
   /** Smallest and largest passing thickness that cost at most 2 % more than the chosen one [m]. */
   readonly withinTwoPercentM: readonly [number, number] | null
 }
@@ -100,6 +108,8 @@ export interface RunResult {
   readonly bare: Rating
   readonly chosen: Rating | null
   readonly governing: Governing
+  /** Where damp governs under a bright jacket: the thickness a matt finish would need [m]; else null. */
+  readonly mattThicknessM: number | null
   /** One plain sentence or two, with the numbers that decided. */
   readonly reason: string
   /** The limits of the chosen rung; of the thickest rung where none passes. */

@@ -18,11 +18,7 @@ export function conductivityAtWPerMK(conductivity: Conductivity, tempC: number):
  * ∫λ dT = q·G (Kirchhoff's transform, exact); for a `mean` curve λ is read at the layer's mean temperature.
  * Source: ASHRAE Handbook Fundamentals 2021, ch. 23; Incropera, conduction with variable λ.
  */
-export function layerDifferenceK(
-  conductivity: Conductivity,
-  outerC: number,
-  flow: number,
-): number {
+export function layerDifferenceK(conductivity: Conductivity, outerC: number, flow: number): number {
   if (flow === 0) return 0
   if (conductivity.kind === 'constant') return flow / conductivity.conductivityWPerMK
   return conductivity.basis === 'point'

@@ -14,7 +14,12 @@ export interface Wall {
   readonly faces: readonly FaceShape[]
 }
 
-export type FlowKind = 'horizontal-cylinder' | 'vertical-cylinder' | 'vertical-plate' | 'up' | 'down'
+export type FlowKind =
+  | 'horizontal-cylinder'
+  | 'vertical-cylinder'
+  | 'vertical-plate'
+  | 'up'
+  | 'down'
 
 /** One face as its films see it. */
 export interface FaceShape {
@@ -74,7 +79,7 @@ function cylinderWall(shape: Extract<Shape, { kind: 'pipe' }>, layers: readonly 
  * Rectangular duct with the mean-perimeter form R_l = 2d/(λ(P_i + P_e)), P_e = P_i + 8d, layer by layer.
  *
  * Side faces are vertical plates of the outer height; top and bottom are taken as long strips, area over perimeter =
- * half the outer width. Source: ISO 12241:2022 as quoted in a public building-energy model; Incropera, example 9.3.
+ * half the outer width. A riser is a vertical plate of its height all round. Source: ISO 12241:2022 as quoted in a public building-energy model; Incropera, example 9.3.
  */
 function rectangularWall(
   shape: Extract<Shape, { kind: 'rect-duct' }>,
@@ -106,11 +111,14 @@ function rectangularWall(
     outerOverInner: outerPerimeterM / innerPerimeterM,
     outerAreaM2PerM: outerPerimeterM,
     outerDiameterM: null,
-    faces: [
-      face('side', 'vertical-plate', outerHeightM, 2 * outerHeightM),
-      face('top', 'up', acrossM, outerWidthM),
-      face('bottom', 'down', acrossM, outerWidthM),
-    ],
+    faces:
+      shape.riseM === null
+        ? [
+            face('side', 'vertical-plate', outerHeightM, 2 * outerHeightM),
+            face('top', 'up', acrossM, outerWidthM),
+            face('bottom', 'down', acrossM, outerWidthM),
+          ]
+        : [face('all round', 'vertical-plate', shape.riseM, outerPerimeterM)],
   }
 }
 

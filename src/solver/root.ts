@@ -72,7 +72,7 @@ export function bracketedRoot(
     const smooth = phi * phi < xi && (1 - phi) * (1 - phi) < 1 - xi
     step = smooth
       ? (f1 / (f2 - f1)) * (f3 / (f2 - f3)) +
-        (((x3 - x1) / (x2 - x1)) * (f1 / (f3 - f1))) * (f2 / (f3 - f2))
+        ((x3 - x1) / (x2 - x1)) * (f1 / (f3 - f1)) * (f2 / (f3 - f2))
       : 0.5
     const least = (0.5 * smallest) / width
     step = Math.min(Math.max(step, least), 1 - least)

@@ -79,9 +79,7 @@ function solveFace(
       surfaceTempC: airC + excessK,
       heatFluxWPerM2: flux,
       convectionWPerM2K:
-        excessK === 0
-          ? convectionWPerM2K(face, weather, 0)
-          : (flux - radiationFlux) / excessK,
+        excessK === 0 ? convectionWPerM2K(face, weather, 0) : (flux - radiationFlux) / excessK,
       radiationWPerM2K: radiationWPerM2K(system.emissivity, airC + excessK, surroundingsC),
       interfaceTempsC,
       share: face.share,

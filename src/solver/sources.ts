@@ -2,16 +2,24 @@
 export const sources = {
   ashrae2021ch1: 'ASHRAE Handbook Fundamentals 2021 (SI), chapter 1, Psychrometrics',
   ashrae2021ch4: 'ASHRAE Handbook Fundamentals 2021 (SI), chapter 4, Heat Transfer',
-  ashrae2021ch23: 'ASHRAE Handbook Fundamentals 2021 (SI), chapter 23, Insulation for Mechanical Systems',
-  churchillChu1975cylinder: 'Churchill and Chu 1975, laminar and turbulent free convection from a horizontal cylinder',
-  churchillChu1975plate: 'Churchill and Chu 1975, laminar and turbulent free convection from a vertical plate',
-  churchillBernstein1977: 'Churchill and Bernstein 1977, forced convection to a circular cylinder in crossflow',
-  hylandWexler1983: 'Hyland and Wexler 1983, as ASHRAE Handbook Fundamentals 2021 (SI), chapter 1, eqs. 5 and 6',
+  ashrae2021ch23:
+    'ASHRAE Handbook Fundamentals 2021 (SI), chapter 23, Insulation for Mechanical Systems',
+  churchillChu1975cylinder:
+    'Churchill and Chu 1975, laminar and turbulent free convection from a horizontal cylinder',
+  churchillChu1975plate:
+    'Churchill and Chu 1975, laminar and turbulent free convection from a vertical plate',
+  churchillBernstein1977:
+    'Churchill and Bernstein 1977, forced convection to a circular cylinder in crossflow',
+  hylandWexler1983:
+    'Hyland and Wexler 1983, as ASHRAE Handbook Fundamentals 2021 (SI), chapter 1, eqs. 5 and 6',
   incropera: 'Incropera, DeWitt, Bergman and Lavine, Fundamentals of Heat and Mass Transfer',
   iso12241duct: 'ISO 12241:2022, rectangular duct, as quoted in a public building-energy model',
-  leFevreEde1956: 'Le Fevre and Ede 1956, free convection from the outer surface of a vertical cylinder',
-  lemmonJacobsen2004: 'Lemmon and Jacobsen 2004, viscosity and thermal conductivity of air (dilute gas)',
-  airHeatCapacityFit: 'Polynomial of c_p of air, 200 to 1000 K, from memory; agrees with printed tables to 0.2 %',
+  leFevreEde1956:
+    'Le Fevre and Ede 1956, free convection from the outer surface of a vertical cylinder',
+  lemmonJacobsen2004:
+    'Lemmon and Jacobsen 2004, viscosity and thermal conductivity of air (dilute gas)',
+  airHeatCapacityFit:
+    'Polynomial of c_p of air, 200 to 1000 K, from memory; agrees with printed tables to 0.2 %',
 } as const
 
 export type SourceKey = keyof typeof sources

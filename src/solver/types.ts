@@ -28,7 +28,13 @@ export type Shape =
       /** Height of the run [m]: the length of the boundary layer. */
       readonly riseM: number
     }
-  | { readonly kind: 'rect-duct'; readonly widthM: number; readonly heightM: number }
+  | {
+      readonly kind: 'rect-duct'
+      readonly widthM: number
+      readonly heightM: number
+      /** Height of a riser [m]; null for a duct that lies, with sides, top and bottom. */
+      readonly riseM: number | null
+    }
   | {
       readonly kind: 'flat'
       readonly facing: 'vertical' | 'up' | 'down'

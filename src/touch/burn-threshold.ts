@@ -45,7 +45,8 @@ export function burnThreshold(
   let because = own.because
   for (;;) {
     const cells = table.filter((cell) => cell.surface === name)
-    const found = cells.length > 0 ? interpolate(cells, Math.min(contactS, LONGEST_CONTACT_S)) : null
+    const found =
+      cells.length > 0 ? interpolate(cells, Math.min(contactS, LONGEST_CONTACT_S)) : null
     if (found?.confirmed) return { thresholdC: found.thresholdC, surface: name, because }
     const next = stricter[name] ?? (name === 'smooth-metal' ? null : 'smooth-metal')
     if (next === null) {
@@ -69,7 +70,10 @@ function rowName(
   const coatingUm = Math.round(coatingThicknessM * 1e6)
   const rows = new Set(table.map((cell) => cell.surface))
   const fitting = [...rows]
-    .map((name) => ({ name, um: Number(new RegExp(`^${coating}-(\\d+)$`).exec(name)?.[1] ?? Number.NaN) }))
+    .map((name) => ({
+      name,
+      um: Number(new RegExp(`^${coating}-(\\d+)$`).exec(name)?.[1] ?? Number.NaN),
+    }))
     .filter(({ um }) => um <= coatingUm)
     .sort((a, b) => b.um - a.um)[0]
   return fitting

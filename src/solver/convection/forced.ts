@@ -18,8 +18,7 @@ export const nusseltCylinderInWind = correlation<Wind>(
   },
   ({ reynolds, prandtl }) =>
     0.3 +
-    ((0.62 * Math.sqrt(reynolds) * Math.cbrt(prandtl)) /
-      (1 + (0.4 / prandtl) ** (2 / 3)) ** 0.25) *
+    ((0.62 * Math.sqrt(reynolds) * Math.cbrt(prandtl)) / (1 + (0.4 / prandtl) ** (2 / 3)) ** 0.25) *
       (1 + (reynolds / 282000) ** (5 / 8)) ** (4 / 5),
 )
 
@@ -37,8 +36,6 @@ export const nusseltPlateInWind = correlation<Wind>(
   ({ reynolds, prandtl }) => {
     const rough = 0.037 * reynolds ** 0.8
     const laminar = 0.664 * Math.sqrt(reynolds)
-    return (
-      Math.cbrt(prandtl) * (reynolds < TURBULENT_REYNOLDS && laminar > rough ? laminar : rough)
-    )
+    return Math.cbrt(prandtl) * (reynolds < TURBULENT_REYNOLDS && laminar > rough ? laminar : rough)
   },
 )

@@ -69,7 +69,8 @@ export const nusseltPlateDrivingFlow = correlation<FreeFlow>(
   {
     name: 'Horizontal surface, warm up or cold down',
     source: 'ashrae2021ch4',
-    equation: 'Nu = 0.96 Ra^(1/6) to 200; 0.59 Ra^(1/4) to 1e4; 0.54 Ra^(1/4) to 8e6; 0.15 Ra^(1/3) above',
+    equation:
+      'Nu = 0.96 Ra^(1/6) to 200; 0.59 Ra^(1/4) to 1e4; 0.54 Ra^(1/4) to 8e6; 0.15 Ra^(1/3) above',
     valid: { rayleigh: [1, 1e11] },
   },
   ({ rayleigh }) => {

@@ -25,9 +25,7 @@ const VISCOSITY_SCALE =
  */
 export function airViscosityPaS(temperatureK: number): number {
   const x = Math.log(temperatureK / COLLISION_ENERGY_K)
-  const omega = Math.exp(
-    0.431 + x * (-0.4623 + x * (0.08406 + x * (0.005341 + x * -0.00331))),
-  )
+  const omega = Math.exp(0.431 + x * (-0.4623 + x * (0.08406 + x * (0.005341 + x * -0.00331))))
   return (1e-6 * VISCOSITY_SCALE * Math.sqrt(temperatureK)) / omega
 }
 

@@ -1,0 +1,42 @@
+/** The solved states of one build-up: one solution for each design condition that a question needs. */
+
+import { solve } from '#solver/index.ts'
+import type { Solution, System } from '#solver/types.ts'
+import { type Settled, solverLayers } from './build-up.ts'
+import type { Condition, Problem } from './problem.ts'
+
+export interface States {
+  /** Yearly mean, aged finish: loss and money. */
+  readonly loss: Solution
+  /** Hottest day and medium, no wind, new finish: touch and the hot end of service. */
+  readonly touch: Solution
+  /** Most humid air, coldest medium, no wind, new finish: damp and the cold end of service. */
+  readonly damp: Solution | null
+}
+
+export function systemOf(problem: Problem, settled: Settled, condition: Condition): System {
+  const isBare = settled.layers.length === 0
+  return {
+    shape: problem.shape,
+    layers: solverLayers(settled),
+    emissivity: isBare ? condition.bareEmissivity : condition.emissivity,
+    mediumC: condition.mediumC,
+    insideFilmWPerM2K: problem.insideFilmWPerM2K,
+    around: condition.around,
+  }
+}
+
+/** True where the medium gets colder than the air it passes through, so that the cold side is a question. */
+export function getsCold(problem: Problem): boolean {
+  const { damp } = problem.conditions
+  return damp.mediumC < damp.around.airC
+}
+
+export function solveStates(problem: Problem, settled: Settled): States {
+  const { loss, touch, damp } = problem.conditions
+  return {
+    loss: solve(systemOf(problem, settled, loss)),
+    touch: solve(systemOf(problem, settled, touch)),
+    damp: getsCold(problem) ? solve(systemOf(problem, settled, damp)) : null,
+  }
+}
