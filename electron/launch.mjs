@@ -1,8 +1,8 @@
 import { spawn } from 'node:child_process'
 import { fileURLToPath } from 'node:url'
 import { electronBinary, fetchElectron } from './binary.mjs'
-import { buildIfStale } from './build.mjs'
 import { hasDisplay, openInBrowser } from './browser.mjs'
+import { buildIfStale } from './build.mjs'
 
 const program = fileURLToPath(new URL('..', import.meta.url))
 

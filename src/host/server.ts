@@ -30,9 +30,11 @@ export async function startHost(options: Options): Promise<LoopbackHost> {
 
   const server = createServer((request, response) => {
     respond(request, response).catch((error: unknown) => {
+      // A sender that broke off is gone, and no bug.
+      if (!request.complete) return response.destroy()
       options.report('host', request.url ?? '', error)
-      if (response.headersSent) response.destroy()
-      else refuse(response, 500, 'The host failed to answer.')
+      if (response.headersSent) return response.destroy()
+      return refuse(response, 500, 'The host failed to answer.')
     })
   })
 

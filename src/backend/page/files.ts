@@ -21,7 +21,8 @@ interface PageFile {
 /** A file of the window by the path of its URL, or null where there is none. */
 export async function readPageFile(folder: string, urlPath: string): Promise<PageFile | null> {
   const path = decoded(urlPath === '/' ? '/index.html' : urlPath)
-  if (path === null || path.includes('\0')) return null
+  // `resolve` would take a slash at the end away, and serve a file as if it were a folder.
+  if (path === null || path.includes('\0') || path.endsWith('/')) return null
   const root = resolve(folder)
   const file = resolve(root, `.${path}`)
   const type = typeOf.get(extname(file))
