@@ -23,7 +23,9 @@ export type Failure =
     }
   | { readonly code: 'request/unknown'; readonly name: string }
   | { readonly code: 'request/invalid'; readonly issues: string }
+  | { readonly code: 'request/too-large'; readonly maxBytes: number }
   | { readonly code: 'host/gone' }
+  | { readonly code: 'host/no-key' }
   | { readonly code: 'internal'; readonly reference: string }
 
 const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
@@ -48,6 +50,10 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
     `The catalogue ${path} was written by a newer Lagwright (version ${found}, this program knows ${known}). It was not changed. Update Lagwright, or start it with another data folder.`,
   'request/unknown': ({ name }) => `The program does not know the request ${name}.`,
   'request/invalid': ({ issues }) => `The request was not understood: ${issues}`,
+  'request/too-large': ({ maxBytes }) =>
+    `This is more than Lagwright takes at once (${Math.round(maxBytes / 1024 / 1024)} MiB). Do it in smaller parts.`,
+  'host/no-key': () =>
+    'This page has no key to Lagwright. Open the whole address that Lagwright printed when it started, with what follows the #.',
   'host/gone': () =>
     'Lagwright is no longer running behind this page. Start it again; what you saved is safe.',
   internal: ({ reference }) =>

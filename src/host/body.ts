@@ -1,18 +1,16 @@
 import type { IncomingMessage } from 'node:http'
-
-/** A paste of 10 000 runs with every field filled stays below a third of this. */
-export const MAX_BODY_BYTES = 32 * 1024 * 1024
+import { maxCallBytes } from '#contract/wire.ts'
 
 /** The whole body of a request as text, or null where it is larger than any call can be. */
 export function readBody(request: IncomingMessage): Promise<string | null> {
   return new Promise((resolve, reject) => {
-    if (Number(request.headers['content-length'] ?? 0) > MAX_BODY_BYTES) return resolve(null)
+    if (Number(request.headers['content-length'] ?? 0) > maxCallBytes) return resolve(null)
     const chunks: Buffer[] = []
     let bytes = 0
     request.on('data', (chunk: Buffer) => {
       bytes += chunk.length
       // Reading goes on, so that the sender is able to hear the answer; nothing is kept any more.
-      if (bytes > MAX_BODY_BYTES) {
+      if (bytes > maxCallBytes) {
         chunks.length = 0
         resolve(null)
       } else chunks.push(chunk)

@@ -2,8 +2,7 @@ import { once } from 'node:events'
 import { createConnection } from 'node:net'
 import { setTimeout } from 'node:timers/promises'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
-import { decode, encode } from '#contract/wire.ts'
-import { MAX_BODY_BYTES } from '#host/body.ts'
+import { decode, encode, maxCallBytes } from '#contract/wire.ts'
 import { handlersWith } from '../contract/handlers.ts'
 import { startTestHost, type TestHost } from './loopback.ts'
 
@@ -75,14 +74,14 @@ describe('a call', () => {
   })
 
   test('is refused unread when it says that it is too large', async () => {
-    const headers = { 'content-length': String(MAX_BODY_BYTES + 1) }
+    const headers = { 'content-length': String(maxCallBytes + 1) }
     const answer = await its.call({ headers, body: [] })
     expect(answer.status).toBe(413)
   })
 
   test('is refused when it turns out too large without having said so', async () => {
     const chunk = Buffer.alloc(1024 * 1024, 'x')
-    const body = Array.from({ length: MAX_BODY_BYTES / chunk.length + 1 }, () => chunk)
+    const body = Array.from({ length: maxCallBytes / chunk.length + 1 }, () => chunk)
     const answer = await its.call({ headers: { 'transfer-encoding': 'chunked' }, body })
     expect(answer.status).toBe(413)
   })
@@ -95,7 +94,7 @@ describe('a call', () => {
     })
     const putRuns = Array.from({ length: 10_000 }, (_, index) => run(index))
     const body = encode(['job.commit', { revision: 1, putRuns, removeRuns: [] }])
-    expect(body.length).toBeLessThan(MAX_BODY_BYTES / 3)
+    expect(body.length).toBeLessThan(maxCallBytes / 3)
     const answer = await its.call({ body })
     expect(answer.status).toBe(200)
   })

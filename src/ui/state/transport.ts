@@ -1,6 +1,14 @@
 /** How the window reaches its host: through Electron's preload where there is one, else by HTTP. */
+import type { Failure } from '#contract/failures.ts'
 import type { Host } from '#contract/host.ts'
-import { connect, decode, encode, type Reply, type Transport } from '#contract/wire.ts'
+import {
+  connect,
+  decode,
+  encode,
+  maxCallBytes,
+  type Reply,
+  type Transport,
+} from '#contract/wire.ts'
 
 declare global {
   interface Window {
@@ -27,7 +35,7 @@ function takeToken(): string {
   return sessionStorage.getItem('token') ?? ''
 }
 
-const gone: Reply = { ok: false, failure: { code: 'host/gone' } }
+const failed = (failure: Failure): Reply => ({ ok: false, failure })
 
 function overHttp(token: string): Transport {
   const headers = { authorization: `Bearer ${token}`, 'content-type': 'application/json' }
@@ -35,10 +43,13 @@ function overHttp(token: string): Transport {
     try {
       const body = encode([name, input])
       const response = await fetch('/call', { method: 'POST', headers, body })
+      if (response.status === 403) return failed({ code: 'host/no-key' })
+      if (response.status === 413)
+        return failed({ code: 'request/too-large', maxBytes: maxCallBytes })
       // `serve` made this text on the other side; a page cannot check more than its shape here.
-      return response.ok ? (decode(await response.text()) as Reply) : gone
+      return response.ok ? (decode(await response.text()) as Reply) : failed({ code: 'host/gone' })
     } catch {
-      return gone
+      return failed({ code: 'host/gone' })
     }
   }
 }
