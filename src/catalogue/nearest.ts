@@ -42,7 +42,7 @@ function cost(wanted: string, name: string): number {
 
 /** A long word in common: `mineral wool` is close to `Glass wool slab`. */
 function sharesWord(text: string, name: string): boolean {
-  const words = (of: string) => of.toLowerCase().match(/[\p{L}\d]{4,}/gu) ?? []
+  const words = (of: string): string[] => [...(of.toLowerCase().match(/[\p{L}\d]{4,}/gu) ?? [])]
   return words(text.slice(0, 200)).some((word) => words(name).includes(word))
 }
 
