@@ -1,0 +1,193 @@
+/** The design conditions: the same place judged at its worst for each question. */
+
+import { saturationTemperatureC } from '#catalogue/lookup.ts'
+import type { Finish } from '#catalogue/types.ts'
+import type { Condition } from '#sizing/problem.ts'
+import type { RunValues } from '../fields.ts'
+import { type Findings, plain } from './findings.ts'
+import type { CatalogueIndex } from './index-catalogue.ts'
+import type { Thing } from './thing.ts'
+
+/** A medium and a pressure may both be given if they agree within this [K]. */
+const SAME_TEMPERATURE_K = 1
+/** Emissivity of a surface without a finish of the catalogue. Source: non-metallic surfaces, ASHRAE 2021 ch. 23 table 12. */
+const PLAIN_EMISSIVITY = 0.9
+/** Emissivity of bare steel pipe in service. Source: ASHRAE Handbook Fundamentals 2021, ch. 23, table 12. */
+const BARE_STEEL_EMISSIVITY = 0.8
+
+export interface Medium {
+  readonly mediumC: number
+  readonly hottestC: number
+  readonly coldestC: number
+}
+
+export function resolveMedium(
+  values: RunValues,
+  index: CatalogueIndex,
+  findings: Findings,
+): Medium | null {
+  const mediumC = mediumTemperatureC(values, index, findings)
+  if (mediumC === null) return null
+  const hottestC = values.mediumMaxC ?? mediumC
+  const coldestC = values.mediumMinC ?? mediumC
+  if (hottestC < mediumC) {
+    findings.fault(
+      'mediumMaxC',
+      `${plain(hottestC)} °C`,
+      `${plain(mediumC)} °C or more, since the medium itself is at that`,
+    )
+  }
+  if (coldestC > mediumC) {
+    findings.fault(
+      'mediumMinC',
+      `${plain(coldestC)} °C`,
+      `${plain(mediumC)} °C or less, since the medium itself is at that`,
+    )
+  }
+  return { mediumC, hottestC, coldestC }
+}
+
+function mediumTemperatureC(
+  values: RunValues,
+  index: CatalogueIndex,
+  findings: Findings,
+): number | null {
+  if (values.pressureGaugePa === undefined) {
+    if (values.mediumC !== undefined) return values.mediumC
+    findings.fault(
+      'mediumC',
+      'nothing',
+      'the temperature of the medium in °C, or pressure_bar_g of saturated steam',
+    )
+    return null
+  }
+  if (values.medium !== undefined && values.medium !== 'steam') {
+    findings.fault(
+      'pressureGaugePa',
+      `a pressure beside medium ${values.medium}`,
+      'nothing: only saturated steam is given by its pressure',
+    )
+    return null
+  }
+  const steam = saturationTemperatureC(index.catalogue.steam, values.pressureGaugePa)
+  if (!steam.ok) {
+    findings.fault(
+      'pressureGaugePa',
+      `${plain(values.pressureGaugePa / 1e5, 3)} bar g`,
+      steam.message,
+    )
+    return null
+  }
+  if (
+    values.mediumC !== undefined &&
+    Math.abs(values.mediumC - steam.temperatureC) > SAME_TEMPERATURE_K
+  ) {
+    findings.fault(
+      'mediumC',
+      `${plain(values.mediumC)} °C beside ${plain(values.pressureGaugePa / 1e5, 3)} bar g`,
+      `nothing, or ${plain(steam.temperatureC)} °C, at which steam of that pressure is saturated`,
+    )
+    return null
+  }
+  findings.note(
+    'steam-saturated',
+    `Steam of ${plain(values.pressureGaugePa / 1e5, 2)} bar g is saturated at ${plain(steam.temperatureC)} °C.`,
+  )
+  return steam.temperatureC
+}
+
+export interface Conditions {
+  readonly loss: Condition
+  readonly touch: Condition
+  readonly damp: Condition
+}
+
+export function resolveConditions(
+  values: RunValues,
+  medium: Medium,
+  thing: Thing,
+  finish: Finish | null,
+  findings: Findings,
+): Conditions | null {
+  const { airC } = values
+  if (airC === undefined) {
+    findings.fault('airC', 'nothing', 'the temperature of the air around the run in °C')
+    return null
+  }
+  const bareEmissivity = bareEmissivityOf(values, thing, findings)
+  const jacket = jacketEmissivity(values, finish)
+  const at = (
+    conditionAirC: number,
+    windMPerS: number,
+    mediumC: number,
+    emissivity: number,
+  ): Condition => ({
+    around: {
+      airC: conditionAirC,
+      surroundingsC: values.surroundingsC ?? conditionAirC,
+      windMPerS,
+      altitudeM: values.altitudeM ?? 0,
+    },
+    mediumC,
+    emissivity,
+    bareEmissivity,
+  })
+  return {
+    loss: at(airC, values.windMPerS ?? 0, medium.mediumC, jacket.agedEmissivity),
+    touch: at(values.touchAirC ?? airC, 0, medium.hottestC, jacket.newEmissivity),
+    damp: at(values.dampAirC ?? airC, 0, medium.coldestC, jacket.newEmissivity),
+  }
+}
+
+function jacketEmissivity(
+  { emissivity }: RunValues,
+  finish: Finish | null,
+): { agedEmissivity: number; newEmissivity: number } {
+  return {
+    agedEmissivity: emissivity ?? finish?.emissivityAged ?? PLAIN_EMISSIVITY,
+    newEmissivity: emissivity ?? finish?.emissivityNew ?? PLAIN_EMISSIVITY,
+  }
+}
+
+function bareEmissivityOf(values: RunValues, { wall }: Thing, findings: Findings): number {
+  if (values.thicknessM === 0 && values.emissivity !== undefined) return values.emissivity
+  if (values.bareEmissivity !== undefined) return values.bareEmissivity
+  const emissivity = wall?.emissivityBare ?? BARE_STEEL_EMISSIVITY
+  findings.note(
+    'bare-emissivity-assumed',
+    `The bare surface is taken with an emissivity of ${plain(emissivity, 2)}${wall ? `, ${wall.name.toLowerCase()} as found in service` : ''}.`,
+  )
+  return emissivity
+}
+
+/** Says what was assumed of the surface and of the air, once the limits are known. */
+export function noteConditions(
+  values: RunValues,
+  finish: Finish | null,
+  judged: { readonly touch: boolean; readonly damp: boolean },
+  findings: Findings,
+): void {
+  if (
+    values.thicknessM !== 0 &&
+    values.finish === undefined &&
+    values.emissivity === undefined &&
+    !finish
+  ) {
+    findings.note(
+      'finish-assumed',
+      `No finish is given: the surface is taken with an emissivity of ${PLAIN_EMISSIVITY}.`,
+    )
+  }
+  if (judged.touch && values.touchAirC === undefined) {
+    findings.note(
+      'touch-air-assumed',
+      `Touch is judged at the air of the run, ${plain(values.airC ?? 0)} °C: no hottest-day air is given.`,
+    )
+  }
+  if (judged.damp && values.dampAirC === undefined) {
+    findings.note(
+      'damp-air-assumed',
+      `Damp is judged at the air of the run, ${plain(values.airC ?? 0)} °C: no most-humid air is given.`,
+    )
+  }
+}

@@ -1,0 +1,127 @@
+/** The limits of a run: touch, loss and damp, with the assumptions behind them. */
+import type { Finish, TouchClass } from '#catalogue/types.ts'
+import type { Limits } from '#sizing/problem.ts'
+import { dewPointC } from '#solver/index.ts'
+import { burnThreshold, type TouchedSurface } from '#touch/burn-threshold.ts'
+import type { RunValues } from '../fields.ts'
+import type { Conditions } from './conditions.ts'
+import { type Findings, plain } from './findings.ts'
+import type { CatalogueIndex } from './index-catalogue.ts'
+import type { Thing } from './thing.ts'
+
+/** Contact time where adults work [s]. Source: ASTM C1055 industrial design time, as quoted publicly. */
+const USUAL_CONTACT_S = 5
+/** Margin above the dew point [K]. Source: common practice, 0.5 to 1 K. */
+const USUAL_DEW_MARGIN_K = 1
+
+export function resolveLimits(
+  values: RunValues,
+  thing: Thing,
+  finish: Finish | null,
+  conditions: Conditions,
+  index: CatalogueIndex,
+  findings: Findings,
+): Limits {
+  if (thing.shape.kind === 'flat' && values.maxLossWPerM !== undefined) {
+    findings.fault(
+      'maxLossWPerM',
+      `${plain(values.maxLossWPerM)} W/m`,
+      'nothing for a flat surface: give max_loss_w_m2',
+    )
+  }
+  return {
+    maxSurfaceC: values.maxSurfaceC ?? null,
+    burn: resolveBurn(values, thing, finish, index, findings),
+    maxLossWPerM: values.maxLossWPerM ?? null,
+    maxLossWPerM2: values.maxLossWPerM2 ?? null,
+    damp: resolveDamp(values, conditions, findings),
+  }
+}
+
+function resolveBurn(
+  values: RunValues,
+  thing: Thing,
+  finish: Finish | null,
+  index: CatalogueIndex,
+  findings: Findings,
+): Limits['burn'] {
+  if (values.reach === false) {
+    if (values.reachReason === undefined) {
+      findings.fault(
+        'reachReason',
+        'nothing',
+        'why nobody can touch the run: reach no needs a reason',
+      )
+    } else {
+      findings.note('out-of-reach', `Touch is not judged: out of reach (${values.reachReason}).`)
+    }
+    return null
+  }
+  const contactS = values.contactS ?? USUAL_CONTACT_S
+  if (values.contactS === undefined && values.reach === undefined) {
+    findings.note(
+      'reach-assumed',
+      `Touch is judged for a surface within reach of adults at work, ${USUAL_CONTACT_S} s of contact: nothing else is given.`,
+    )
+  } else if (values.contactS === undefined) {
+    findings.note(
+      'contact-assumed',
+      `Touch is judged for ${USUAL_CONTACT_S} s of contact, where adults work.`,
+    )
+  }
+  const surface = touchedSurface(values, thing, finish, findings)
+  const threshold = burnThreshold(index.catalogue.burnThresholds, surface, contactS)
+  if (!threshold) {
+    findings.note(
+      'threshold-missing',
+      'The catalogue holds no burn thresholds: touch was not judged.',
+    )
+    return null
+  }
+  if (threshold.because !== null) {
+    findings.note(
+      'threshold-stricter',
+      `Touch is judged as ${threshold.surface}: ${threshold.because}.`,
+    )
+  }
+  return { thresholdC: threshold.thresholdC, contactS, surface: threshold.surface }
+}
+
+function touchedSurface(
+  values: RunValues,
+  { wall }: Thing,
+  finish: Finish | null,
+  findings: Findings,
+): TouchedSurface {
+  const bareRun = values.thicknessM === 0
+  const own = bareRun ? (wall?.touchClass ?? null) : (finish?.touchClass ?? null)
+  let touchClass: TouchClass | null = values.touchClass ?? own
+  if (touchClass === null) {
+    touchClass = 'smooth-metal'
+    findings.note(
+      'touch-class-assumed',
+      'The surface is judged as smooth metal, the strictest class: no finish is given.',
+    )
+  }
+  const coated = !bareRun && finish !== null
+  return {
+    touchClass,
+    coating: coated ? finish.coating : null,
+    coatingThicknessM: coated ? finish.coatingThicknessM : null,
+  }
+}
+
+function resolveDamp(values: RunValues, { damp }: Conditions, findings: Findings): Limits['damp'] {
+  if (values.humidity === undefined) return null
+  if (damp.mediumC >= damp.around.airC) return null
+  if (values.dewMarginK === undefined) {
+    findings.note(
+      'dew-margin-assumed',
+      `The surface is kept ${USUAL_DEW_MARGIN_K} K above the dew point: no other margin is given.`,
+    )
+  }
+  return {
+    dewPointC: dewPointC({ airC: damp.around.airC, humidity: values.humidity }),
+    marginK: values.dewMarginK ?? USUAL_DEW_MARGIN_K,
+  }
+}

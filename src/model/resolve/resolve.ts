@@ -1,0 +1,81 @@
+/** From the values of a run to a problem that can be sized: everything looked up, checked and, where assumed, said. */
+import type { Problem } from '#sizing/problem.ts'
+import type { Issue } from '#sizing/result.ts'
+import type { RunValues } from '../fields.ts'
+import { resolveBuildUp, resolveFinish } from './build-up.ts'
+import { noteConditions, resolveConditions, resolveMedium } from './conditions.ts'
+import { Findings } from './findings.ts'
+import type { CatalogueIndex } from './index-catalogue.ts'
+import { resolveLimits } from './limits.ts'
+import { resolveMoney } from './money.ts'
+import { resolveThing } from './thing.ts'
+
+export type Resolved =
+  | { readonly ok: true; readonly problem: Problem }
+  | { readonly ok: false; readonly issues: readonly Issue[] }
+
+/** All faults of a run come back at once: each part is resolved even where another has failed. */
+export function resolve(values: RunValues, index: CatalogueIndex): Resolved {
+  const findings = new Findings()
+  const { tag } = values
+  if (tag === undefined || tag.trim() === '') {
+    findings.fault('tag', 'nothing', 'a tag that no other run has')
+  }
+  const thing = resolveThing(values, index, findings)
+  const medium = resolveMedium(values, index, findings)
+  const finish = resolveFinish(values, index, findings)
+  const conditions =
+    thing && medium ? resolveConditions(values, medium, thing, finish, findings) : null
+  if (!conditions && values.airC === undefined && !(thing && medium)) {
+    findings.fault('airC', 'nothing', 'the temperature of the air around the run in °C')
+  }
+  const buildUp = thing ? resolveBuildUp(values, thing, index, findings) : null
+  const gainsHeat = conditions !== null && conditions.loss.mediumC < conditions.loss.around.airC
+  const money = resolveMoney(values, gainsHeat, index, findings)
+  const limits =
+    thing && conditions ? resolveLimits(values, thing, finish, conditions, index, findings) : null
+  if (limits && buildUp && buildUp.steps.length > 0 && money === null && !setsAny(limits)) {
+    findings.fault(
+      'reach',
+      'no limit and no money',
+      'something to size by: reach yes, a limit such as max_loss_w_m, or fuel and hours_per_year; or a thickness_mm to rate',
+    )
+  }
+  if (findings.issues.length > 0 || !tag || !thing || !conditions || !buildUp || !limits) {
+    return { ok: false, issues: findings.issues }
+  }
+  noteConditions(
+    values,
+    finish,
+    { touch: limits.burn !== null || limits.maxSurfaceC !== null, damp: limits.damp !== null },
+    findings,
+  )
+  return {
+    ok: true,
+    problem: {
+      tag,
+      shape: thing.shape,
+      insideFilmWPerM2K: thing.insideFilmWPerM2K,
+      extent: thing.extent,
+      layers: buildUp.layers,
+      finish: finish && {
+        name: finish.name,
+        surfaceMaxC: finish.surfaceMaxC,
+        price: index.finishPrice(finish.id),
+      },
+      steps: buildUp.steps,
+      conditions,
+      limits,
+      money,
+      hoursPerYear: values.hoursPerYear ?? null,
+      notes: findings.notes,
+    },
+  }
+}
+
+const setsAny = (limits: Problem['limits']): boolean =>
+  limits.maxSurfaceC !== null ||
+  limits.burn !== null ||
+  limits.maxLossWPerM !== null ||
+  limits.maxLossWPerM2 !== null ||
+  limits.damp !== null
