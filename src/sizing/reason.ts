@@ -3,13 +3,19 @@ import type { LimitName, LimitResult, Rating, RunResult } from './result.ts'
 
 /** How numbers are said; the window and the documents pass their own units. */
 export interface Words {
-  thickness(thicknessM: number): string
+  /** A thickness, and what an inch series calls it where it is one of those. */
+  thickness(thicknessM: number, nominalThicknessM: number | null): string
   /** A number in one of the units of `LimitResult`, with its unit; `digits` after the point in SI. */
   quantity(value: number, unit: string, digits: number): string
 }
 
 export const siWords: Words = {
-  thickness: (thicknessM) => `${Number((thicknessM * 1000).toFixed(1))} mm`,
+  thickness: (thicknessM, nominalThicknessM) => {
+    const mm = `${Number((thicknessM * 1000).toFixed(1))} mm`
+    return nominalThicknessM === null
+      ? mm
+      : `${Number((nominalThicknessM / 0.0254).toFixed(3))} in (${mm})`
+  },
   quantity: (value, unit, digits) => `${minus(value.toFixed(digits))} ${unit}`,
 }
 
@@ -28,9 +34,12 @@ export function writeReason(facts: ReasonFacts, words: Words = siWords): string 
   if (!chosen) return unmet(facts, words)
   switch (governing) {
     case 'bare':
-      return `Bare. ${failures(chosen, words) || bareWords(facts, words)}`
+      return sentences('Bare.', failures(chosen, words) || bareWords(facts, words))
     case 'fixed':
-      return `Fixed at ${words.thickness(chosen.thicknessM)}. ${failures(chosen, words) || passes(chosen, words)}`
+      return sentences(
+        `Fixed at ${said(chosen, words)}.`,
+        failures(chosen, words) || passes(chosen, words),
+      )
     case 'money':
       return sentences('Cost decides.', allowed(facts, words), cheapest(facts, words))
     case 'smallest':
@@ -61,69 +70,79 @@ const names: Readonly<Record<LimitName, string>> = {
 const sentences = (...parts: readonly string[]): string =>
   parts.filter((part) => part !== '').join(' ')
 
-/** Value and bound with as many digits as keep them apart, at least one. */
-function against({ value, bound, unit }: LimitResult, words: Words): string {
-  const digits = [1, 2, 3].find((count) => value.toFixed(count) !== bound.toFixed(count)) ?? 3
-  return `${words.quantity(value, unit, digits)} against ${words.quantity(bound, unit, Number.isInteger(bound) ? 0 : digits)}`
+const said = (rung: Rating, words: Words): string =>
+  words.thickness(rung.thicknessM, rung.nominalThicknessM)
+
+/** A thickness that is a rung of the ladder, with the name its series gives it. */
+function saidThickness(thicknessM: number, { ladder }: ReasonFacts, words: Words): string {
+  const rung = ladder.find((candidate) => candidate.thicknessM === thicknessM)
+  return words.thickness(thicknessM, rung?.nominalThicknessM ?? null)
+}
+
+/** As many digits as tell a value from its bound, at least one. */
+const tellingDigits = ({ value, bound }: LimitResult): number =>
+  [1, 2, 3].find((digits) => value.toFixed(digits) !== bound.toFixed(digits)) ?? 3
+
+function against(limit: LimitResult, words: Words): string {
+  const { value, bound, unit } = limit
+  const digits = tellingDigits(limit)
+  const boundDigits = Number.isInteger(bound) ? 0 : digits
+  return `${words.quantity(value, unit, digits)} against ${words.quantity(bound, unit, boundDigits)}`
 }
 
 /** A result that came through JSON or a worker holds the chosen rung twice: compared by thickness. */
 const isSame = (a: Rating, b: Rating): boolean => a.thicknessM === b.thicknessM
 
-const worst = (rating: Rating, limit: LimitName): LimitResult | undefined => {
-  const own = rating.limits.filter((result) => result.limit === limit)
-  return own.find(({ pass }) => !pass) ?? own[0]
-}
-
 function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
   const { chosen, ladder } = facts
   if (!chosen) return ''
   const thinner = ladder[ladder.findIndex((rung) => isSame(rung, chosen)) - 1]
-  const failed = thinner && worst(thinner, limit)
-  // The same question on both rungs: the failed one may be one of two touch limits.
-  const here = chosen.limits.find(
-    (result) => result.limit === limit && (!failed || result.bound === failed.bound),
-  )
-  const first = here ? `${words.thickness(chosen.thicknessM)} gives ${against(here, words)}` : ''
-  const second = failed
-    ? `${words.thickness(thinner.thicknessM)} would give ${words.quantity(failed.value, failed.unit, 1)}`
-    : ''
-  return `${[first, second].filter(Boolean).join('; ')}.`
+  const failed = thinner?.limits.find((result) => result.limit === limit && !result.pass)
+  // Touch may be judged twice: the chosen rung is shown against the bound that the thinner one failed. Service may
+  // meet another bound on the next rung; there the narrowest is shown.
+  const own = chosen.limits.filter((result) => result.limit === limit)
+  const here = own.find((result) => result.bound === failed?.bound) ?? own[0]
+  const first = here ? `${said(chosen, words)} gives ${against(here, words)}` : ''
+  const second =
+    thinner && failed
+      ? `${said(thinner, words)} would give ${words.quantity(failed.value, failed.unit, tellingDigits(failed))}`
+      : ''
+  return `${[first, second].filter((part) => part !== '').join('; ')}.`
 }
 
-function matt({ mattThicknessM, chosen }: ReasonFacts, words: Words): string {
+function matt(facts: ReasonFacts, words: Words): string {
+  const { mattThicknessM, chosen } = facts
   if (mattThicknessM === null || !chosen || mattThicknessM >= chosen.thicknessM) return ''
-  return `Under a matt finish ${words.thickness(mattThicknessM)} would do.`
+  return `Under a matt finish ${saidThickness(mattThicknessM, facts, words)} would do.`
 }
 
 /** Where the limits cost something: the thickness that money alone would take. */
-function dearer({ money, chosen }: ReasonFacts, words: Words): string {
-  const free = money?.cheapestThicknessM ?? null
-  if (free === null || !chosen || free === chosen.thicknessM) return ''
-  return `Cost alone would take ${words.thickness(free)}.`
+function dearer(facts: ReasonFacts, words: Words): string {
+  const free = facts.money?.cheapestThicknessM ?? null
+  if (free === null || free === facts.chosen?.thicknessM) return ''
+  return `Cost alone would take ${saidThickness(free, facts, words)}.`
 }
 
 /** The thinnest rung that passes, where cost took a thicker one. */
 function allowed({ ladder, chosen }: ReasonFacts, words: Words): string {
   const first = ladder.find((rung) => rung.pass)
-  if (!first || !chosen || first.limits.length === 0 || first.thicknessM >= chosen.thicknessM)
-    return ''
+  if (!first || !chosen || first.thicknessM >= chosen.thicknessM) return ''
   const limit = nearest(first.limits)
   if (!limit) return ''
-  return `The limits would allow ${words.thickness(first.thicknessM)} (${limit.limit}: ${against(limit, words)}).`
+  return `The limits would allow ${said(first, words)} (${limit.limit}: ${against(limit, words)}).`
 }
 
-/** The limit that a rung passes most narrowly, by its share of the bound; service last, since it is always there. */
+/** The asked limit that a rung passes most narrowly, by its share of the bound; service is not asked for. */
 function nearest(limits: readonly LimitResult[]): LimitResult | undefined {
   const share = ({ value, bound }: LimitResult): number =>
     Math.abs(bound - value) / Math.max(1, Math.abs(bound))
-  const asked = limits.filter(({ limit }) => limit !== 'service')
-  return [...(asked.length > 0 ? asked : limits)].sort((a, b) => share(a) - share(b))[0]
+  return limits.filter(({ limit }) => limit !== 'service').sort((a, b) => share(a) - share(b))[0]
 }
 
 function cheapest({ chosen, ladder, money }: ReasonFacts, words: Words): string {
   if (!chosen || !money) return ''
-  const own = `${words.thickness(chosen.thicknessM)} is the cheapest to own over ${money.lifeYears} years`
+  const years = money.lifeYears === 1 ? '1 year' : `${money.lifeYears} years`
+  const own = `${said(chosen, words)} is the cheapest to own over ${years}`
   const most = (chosen.money?.lifeCycle ?? 0) * 1.02
   const near = ladder.filter(
     (rung) =>
@@ -131,18 +150,16 @@ function cheapest({ chosen, ladder, money }: ReasonFacts, words: Words): string 
   )
   const [first] = near
   const last = near[near.length - 1]
-  if (!first || !last) return `${own}; every other thickness costs over 2 % more.`
-  if (first === last) return `${own}; ${words.thickness(first.thicknessM)} costs within 2 % of it.`
+  if (!first || !last) return `${own}; every other thickness that passes costs over 2 % more.`
+  if (first === last) return `${own}; ${said(first, words)} costs within 2 % of it.`
   const joint = near.length === 2 ? 'and' : 'to'
-  return `${own}; ${words.thickness(first.thicknessM)} ${joint} ${words.thickness(last.thicknessM)} cost within 2 % of it.`
+  return `${own}; ${said(first, words)} ${joint} ${said(last, words)} cost within 2 % of it.`
 }
 
 /** How the narrowest limit stands. */
 function standing(chosen: Rating, words: Words): string {
   const limit = nearest(chosen.limits)
-  return limit
-    ? `${words.thickness(chosen.thicknessM)} gives ${against(limit, words)} (${limit.limit}).`
-    : ''
+  return limit ? `${said(chosen, words)} gives ${against(limit, words)} (${limit.limit}).` : ''
 }
 
 function failures(rating: Rating, words: Words): string {
@@ -156,19 +173,22 @@ function passes(rating: Rating, words: Words): string {
   const limit = nearest(rating.limits)
   return limit
     ? `It passes every limit; the narrowest is ${limit.limit}, ${against(limit, words)}.`
-    : 'No limit is set.'
+    : 'It is rated as given.'
 }
 
-function bareWords({ bare }: ReasonFacts, words: Words): string {
-  return `The surface is at ${words.quantity(bare.surfaceTempC, '°C', 1)}; no limit is broken.`
+function bareWords({ bare, limits }: ReasonFacts, words: Words): string {
+  const surface = `The surface is at ${words.quantity(bare.surfaceTempC, '°C', 1)}`
+  return limits.length > 0
+    ? `${surface}; every limit is met.`
+    : `${surface}; no limit is set for it.`
 }
 
 function unmet({ ladder, limits }: ReasonFacts, words: Words): string {
   const thickest = ladder[ladder.length - 1]
   if (!thickest) return 'No thickness of this material can be bought for this size.'
-  const failed = limits.filter(({ pass }) => !pass)
-  const detail = failed
-    .map((limit) => `${names[limit.limit]} reaches ${against(limit, words)} (${limit.what})`)
+  const detail = limits
+    .filter(({ pass }) => !pass)
+    .map((limit) => `${limit.limit} stands at ${against(limit, words)} (${limit.what})`)
     .join('; ')
-  return `No thickness passes every limit. At the thickest, ${words.thickness(thickest.thicknessM)}: ${detail}.`
+  return `No thickness passes every limit. At the thickest, ${said(thickest, words)}, ${detail}.`
 }
