@@ -1,10 +1,8 @@
 /** All that the window may ask of its host, Electron or the loopback host. One line per call. */
+import '#model/zod-settings.ts'
 import { z } from 'zod'
 import type { Catalogue } from '#catalogue/types.ts'
 import { type Job, jobSchema, runSchema, runValuesSchema } from '#model/job.ts'
-
-// zod compiles parsers with `new Function`, which the page's content security policy forbids.
-z.config({ jitless: true })
 
 const call = <I extends z.ZodType, O extends z.ZodType>(input: I, output: O) => ({ input, output })
 

@@ -15,11 +15,17 @@ const backend = makeHandlers({
   dialogs: null,
   kind: 'loopback',
 })
+const port = Number(process.env.LAGWRIGHT_PORT || 0)
 const host = await startHost({
   handlers: backend.handlers,
   report: (reference, name, error) => console.error(`[${reference}] ${name}:`, error),
   pageFolder: join(program, 'dist', 'ui'),
-  port: Number(process.env.LAGWRIGHT_PORT ?? 0),
+  port,
+}).catch((error: unknown) => {
+  console.error(
+    `Lagwright cannot listen on port ${port} (${error}). Set LAGWRIGHT_PORT to a free one.`,
+  )
+  process.exit(1)
 })
 
 /** Where the window is; `start` opens it in a browser. */

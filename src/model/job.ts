@@ -1,4 +1,5 @@
 /** The job as the window and the command line hold it: immutable values; SQLite keeps one row per run. */
+import './zod-settings.ts'
 import { z } from 'zod'
 import { type FieldKey, fields, type RunValues } from './fields.ts'
 

@@ -1,7 +1,7 @@
 /** A stand-in for the module `electron`: what this program uses of it, with Chromium for a window. */
 import { app } from './app.ts'
 import { debuggingAddress } from './browser.ts'
-import { ipcMain } from './ipc.ts'
+import { invokeFrom, ipcMain } from './ipc.ts'
 import { protocol } from './scheme.ts'
 import { BrowserWindow } from './window.ts'
 
@@ -23,7 +23,8 @@ export const screen = {
 
 export const Menu = { setApplicationMenu() {} }
 
-const electron = { app, BrowserWindow, dialog, ipcMain, protocol, screen, session }
+/** What a test may use in main: the module's own, and a call as if from a frame elsewhere. */
+const electron = { invokeFrom, app, BrowserWindow, dialog, ipcMain, protocol, screen, session }
 export type StandIn = typeof electron
 
 /** One function of a test to be run here, in the main process. */

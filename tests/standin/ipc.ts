@@ -15,13 +15,21 @@ export const ipcMain = {
 /** Answers one `ipcRenderer.invoke` of a frame; what cannot be cloned is refused, as in Electron. */
 export async function answerInvoke(frameUrl: string, text: string): Promise<string> {
   const [channel, args] = unpack(text) as [string, unknown[]]
-  const url = toAppUrl(frameUrl)
-  const senderFrame = { url, origin: /^[a-z]+:\/\/[^/]*/.exec(url)?.[0] ?? 'null' }
   try {
-    const listener = listeners.get(channel)
-    if (!listener) throw new Error(`No handler registered for '${channel}'`)
-    return pack([true, await listener({ senderFrame }, ...args)])
+    return pack([true, await invokeFrom(toAppUrl(frameUrl), channel, ...args)])
   } catch (error) {
     return pack([false, String(error)])
   }
+}
+
+/** What main answers to a frame at that address. */
+export async function invokeFrom(
+  url: string,
+  channel: string,
+  ...args: unknown[]
+): Promise<unknown> {
+  const listener = listeners.get(channel)
+  if (!listener) throw new Error(`No handler registered for '${channel}'`)
+  const origin = /^[a-z]+:\/\/[^/]*/.exec(url)?.[0] ?? 'null'
+  return listener({ senderFrame: { url, origin } }, ...args)
 }
