@@ -1,0 +1,39 @@
+/** Cautions that stand beside the numbers they belong to (product requirement: in the window where the number is). */
+import type { RunValues } from '#model/fields.ts'
+import type { RunResult } from '#sizing/result.ts'
+
+/** Below the limits of a run: what a passed limit does not promise. */
+export function limitCautions(values: RunValues, result: RunResult): string[] {
+  const judged = new Set(result.limits.map(({ limit }) => limit))
+  return [
+    ...(judged.has('touch')
+      ? [
+          'Burn thresholds are for a brief touch of a small area of healthy skin. Where children, the public or older people can reach it, ask for a longer contact time.',
+        ]
+      : []),
+    ...(judged.has('damp')
+      ? [
+          'The vapour barrier has to stay closed at every joint and support, else damp gets in behind it.',
+        ]
+      : []),
+    ...(isLaggedOutdoorsOrWarm(values, result)
+      ? ['Keep the weather barrier sealed: wet lagging hides corrosion of the pipe.']
+      : []),
+  ]
+}
+
+/** Below every run sheet. */
+export const standingCaution =
+  'Estimate for competent people. Valves, flanges, supports and damaged spots run hotter than the run itself. Local codes and the licensed professional decide.'
+
+/** Beside costs. */
+export const priceCaution =
+  'Prices and labour are illustrative until you put your own in their place.'
+
+/** Carbon steel under lagging corrodes fastest in this band; common practice, no source. */
+const CORROSION_BAND_C = { from: -4, to: 175 }
+
+function isLaggedOutdoorsOrWarm({ mediumC, windMPerS }: RunValues, { chosen }: RunResult): boolean {
+  if (!chosen || chosen.thicknessM === 0 || mediumC === undefined) return false
+  return (windMPerS ?? 0) > 0 && mediumC >= CORROSION_BAND_C.from && mediumC <= CORROSION_BAND_C.to
+}

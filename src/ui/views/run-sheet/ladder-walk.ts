@@ -1,0 +1,76 @@
+/** Walking the rungs with the keyboard, and what a rung says about itself. */
+import type { Rating } from '#sizing/result.ts'
+import { formatWithUnit } from '#units/format.ts'
+import type { UnitSystem } from '#units/quantities.ts'
+import { limitWords } from './words.ts'
+
+interface Place {
+  readonly shown: number | null
+  readonly chosen: number | null
+  readonly count: number
+}
+
+/** Where a key leads: a rung, null for back to the chosen one, undefined where the key is not ours. */
+export function walkedTo(key: string, { shown, chosen, count }: Place): number | null | undefined {
+  if (count === 0) return undefined
+  const from = shown ?? chosen ?? 0
+  switch (key) {
+    case 'ArrowRight':
+    case 'ArrowUp':
+      return Math.min(count - 1, from + 1)
+    case 'ArrowLeft':
+    case 'ArrowDown':
+      return Math.max(0, from - 1)
+    case 'Home':
+      return 0
+    case 'End':
+      return count - 1
+    case 'Escape':
+      return null
+    default:
+      return undefined
+  }
+}
+
+/** All that the picture says of one rung, as one sentence for a screen reader. */
+export function rungWords(
+  rung: Rating,
+  isChosen: boolean,
+  units: UnitSystem,
+  per: 'm' | 'm2',
+  currency: string,
+): string {
+  const failed = rung.limits.filter(({ pass }) => !pass).map(({ limit }) => limitWords[limit])
+  const verdict = failed.length > 0 ? `fails ${[...new Set(failed)].join(', ')}` : 'passes'
+  const cost =
+    rung.money === null
+      ? []
+      : [`life-cycle cost ${moneyWords(rung.money.lifeCycle, per, units)} ${currency}`.trim()]
+  return [
+    `${formatWithUnit(rung.thicknessM, 'thickness', units)}${isChosen ? ', chosen' : ''}`,
+    verdict,
+    lossWords(rung, units),
+    `surface ${formatWithUnit(rung.surfaceTempC, 'temperature', units)}`,
+    ...cost,
+  ].join('; ')
+}
+
+/** Loss per length where there is one, else per area. */
+export function lossWords(rung: Rating, units: UnitSystem): string {
+  return rung.heatLossWPerM === null
+    ? formatWithUnit(rung.heatFluxWPerM2, 'heatFlux', units)
+    : formatWithUnit(rung.heatLossWPerM, 'heatLossPerLength', units)
+}
+
+export function moneyWords(value: number, per: 'm' | 'm2', units: UnitSystem): string {
+  return formatWithUnit(value, per === 'm' ? 'moneyPerLength' : 'moneyPerArea', units)
+}
+
+/** Index of a thickness on the ladder; null where it is not a rung. */
+export function rungIndex(
+  ladder: readonly Rating[],
+  thicknessM: number | undefined,
+): number | null {
+  const index = ladder.findIndex((rung) => Math.abs(rung.thicknessM - (thicknessM ?? -1)) < 1e-9)
+  return index < 0 ? null : index
+}

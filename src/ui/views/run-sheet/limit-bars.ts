@@ -1,0 +1,65 @@
+/** Over which thicknesses each limit passes: stretches of the ladder, their ends exact where they are known. */
+import type { LimitEnd, LimitName, Rating } from '#sizing/result.ts'
+
+export interface PassStretch {
+  /** Passes from this thickness on [m]; null from the very start. */
+  readonly fromM: number | null
+  /** To this thickness [m]; null without end. */
+  readonly toM: number | null
+}
+
+export interface LimitBar {
+  readonly limit: LimitName
+  /** None where no rung passes. */
+  readonly stretches: readonly PassStretch[]
+}
+
+/** One bar per limit that is judged, in the order of the results. */
+export function limitBars(ladder: readonly Rating[], ends: readonly LimitEnd[]): LimitBar[] {
+  const names = [...new Set(ladder.flatMap((rung) => rung.limits.map(({ limit }) => limit)))]
+  return names.map((limit) => ({
+    limit,
+    stretches: stretches(limit, ladder, exactStartM(limit, ends)),
+  }))
+}
+
+/** A rung passes a limit that is judged more than once only if it passes every time. */
+export function passesLimit(rung: Rating, limit: LimitName): boolean {
+  return rung.limits.every((result) => result.limit !== limit || result.pass)
+}
+
+/** Several ends of one limit: the strictest counts. */
+function exactStartM(limit: LimitName, ends: readonly LimitEnd[]): number | null {
+  const starts = ends.filter((end) => end.limit === limit).map(({ fromM }) => fromM)
+  const known = starts.filter((fromM) => fromM !== null)
+  return known.length === 0 || known.length < starts.length ? null : Math.max(...known)
+}
+
+function stretches(
+  limit: LimitName,
+  ladder: readonly Rating[],
+  exactM: number | null,
+): PassStretch[] {
+  const found: PassStretch[] = []
+  ladder.forEach((rung, at) => {
+    if (!passesLimit(rung, limit)) return
+    const previous = ladder[at - 1]
+    const goesOn = previous !== undefined && passesLimit(previous, limit)
+    const last = found.at(-1)
+    const isTop = at === ladder.length - 1
+    const toM = isTop ? null : rung.thicknessM
+    if (goesOn && last) {
+      found[found.length - 1] = { ...last, toM }
+      return
+    }
+    found.push({ fromM: startM(rung.thicknessM, previous?.thicknessM ?? null, exactM), toM })
+  })
+  return found
+}
+
+/** The exact start where it lies between the rung that fails and the one that passes, else the rung itself. */
+function startM(rungM: number, previousM: number | null, exactM: number | null): number | null {
+  const isBetween = exactM !== null && exactM <= rungM && exactM > (previousM ?? 0)
+  if (isBetween) return exactM
+  return previousM === null ? null : rungM
+}
