@@ -70,24 +70,23 @@ function solveFace(
   const drivenK = (excessK: number, flux: number): number =>
     acrossLayersK(system.layers, wall.formsM, airC + excessK, flux) + flux * insideKPerWPerM2
 
-  const finish = (excessK: number, flux: number): Face => {
-    noteFilm(notes, face, weather, excessK)
-    const radiationFlux = radiated(excessK)
-    const interfaceTempsC = interfaces(system.layers, wall.formsM, airC + excessK, flux)
+  const finish = (excessK: number, flux: number, convection: number): Face => {
+    for (const text of filmNotes(face, weather, excessK)) notes.push({ code: 'film-range', text })
     return {
       side: face.side,
       surfaceTempC: airC + excessK,
       heatFluxWPerM2: flux,
-      convectionWPerM2K:
-        excessK === 0 ? convectionWPerM2K(face, weather, 0) : (flux - radiationFlux) / excessK,
+      convectionWPerM2K: convection,
       radiationWPerM2K: radiationWPerM2K(system.emissivity, airC + excessK, surroundingsC),
-      interfaceTempsC,
+      interfaceTempsC: interfaces(system.layers, wall.formsM, airC + excessK, flux),
       share: face.share,
     }
   }
+  const finishOnFilm = (excessK: number): Face =>
+    finish(excessK, released(excessK), convectionWPerM2K(face, weather, excessK))
 
   if (system.layers.length === 0 && insideKPerWPerM2 === 0) {
-    return finish(mediumExcessK, released(mediumExcessK))
+    return finishOnFilm(mediumExcessK)
   }
 
   const root = bracketedRoot(
@@ -100,7 +99,7 @@ function solveFace(
   )
   const excessK = root.at
   const differenceK = Math.max(Math.abs(mediumExcessK - excessK), Math.abs(excessK))
-  if (Math.abs(root.value) <= JUMP * differenceK) return finish(excessK, released(excessK))
+  if (Math.abs(root.value) <= JUMP * differenceK) return finishOnFilm(excessK)
 
   // The bracket closed in on a jump between two ranges of a correlation: the flux that the layers carry lies between
   // the fluxes of the two sides, and that flux closes the balance.
@@ -115,7 +114,7 @@ function solveFace(
     code: 'film-jump',
     text: `${capital(face.side)}: the balance falls on the jump between two ranges of the film formula; the coefficient that closes it lies between the two.`,
   })
-  return finish(excessK, flux)
+  return finish(excessK, flux, (flux - radiated(excessK)) / excessK)
 }
 
 /** Inner minus outer temperature over all layers [K], for a flux on the outer area. */
@@ -152,10 +151,6 @@ function interfaces(
     tempsC.unshift(tempC)
   }
   return tempsC
-}
-
-function noteFilm(notes: Note[], face: FaceShape, weather: Weather, excessK: number): void {
-  for (const text of filmNotes(face, weather, excessK)) notes.push({ code: 'film-range', text })
 }
 
 /** A layer read beyond the ends of its curve, judged at the layer's mean temperature. */

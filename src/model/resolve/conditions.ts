@@ -116,16 +116,26 @@ export function resolveConditions(
   }
   const bareEmissivity = bareEmissivityOf(values, thing, findings)
   const jacket = jacketEmissivity(values, finish)
+  const touchAirC = values.touchAirC ?? airC
+  const dampAirC = values.dampAirC ?? airC
+  const given = values.surroundingsC
+  // Surroundings are given once, for the yearly mean. Where a question's air is harder than they are, they follow it.
+  const surroundings = {
+    loss: given ?? airC,
+    touch: Math.max(given ?? touchAirC, touchAirC),
+    damp: Math.min(given ?? dampAirC, dampAirC),
+  }
+  noteSurroundings(given, surroundings, findings)
   const at = (
+    question: 'loss' | 'touch' | 'damp',
     conditionAirC: number,
-    windMPerS: number,
     mediumC: number,
     emissivity: number,
   ): Condition => ({
     around: {
       airC: conditionAirC,
-      surroundingsC: values.surroundingsC ?? conditionAirC,
-      windMPerS,
+      surroundingsC: surroundings[question],
+      windMPerS: question === 'loss' ? (values.windMPerS ?? 0) : 0,
       altitudeM: values.altitudeM ?? 0,
     },
     mediumC,
@@ -133,9 +143,29 @@ export function resolveConditions(
     bareEmissivity,
   })
   return {
-    loss: at(airC, values.windMPerS ?? 0, medium.mediumC, jacket.agedEmissivity),
-    touch: at(values.touchAirC ?? airC, 0, medium.hottestC, jacket.newEmissivity),
-    damp: at(values.dampAirC ?? airC, 0, medium.coldestC, jacket.newEmissivity),
+    loss: at('loss', airC, medium.mediumC, jacket.agedEmissivity),
+    touch: at('touch', touchAirC, medium.hottestC, jacket.newEmissivity),
+    damp: at('damp', dampAirC, medium.coldestC, jacket.newEmissivity),
+  }
+}
+
+function noteSurroundings(
+  given: number | undefined,
+  taken: { readonly touch: number; readonly damp: number },
+  findings: Findings,
+): void {
+  if (given === undefined) return
+  if (taken.touch > given) {
+    findings.note(
+      'touch-surroundings',
+      `Touch is judged with surroundings at the air of the hottest day, ${plain(taken.touch)} °C, since those given are cooler.`,
+    )
+  }
+  if (taken.damp < given) {
+    findings.note(
+      'damp-surroundings',
+      `Damp is judged with surroundings at the most humid air, ${plain(taken.damp)} °C, since those given are warmer.`,
+    )
   }
 }
 
