@@ -24,6 +24,7 @@ export default defineConfig({
         test: {
           name: 'browser',
           include: ['tests/ui/**/*.browser.test.ts'],
+          globalSetup: ['tests/ui/node-results.ts'],
           browser: {
             enabled: true,
             headless: true,
