@@ -1,5 +1,7 @@
 -- A job file is one database: the job itself is a single row, each run a row of its own, so that an edit writes only
--- what changed. The layout of the JSON is checked by the schema in src/model, not here.
+-- what changed. The layout of the JSON is checked by the schema in src/model, not here. A program that writes fields
+-- an older one does not know needs a new migration, if only an empty one: then the older one says that the file is too
+-- new instead of calling it damaged.
 CREATE TABLE meta (
   id         INTEGER PRIMARY KEY CHECK (id = 1),
   -- Counts the committed edits.

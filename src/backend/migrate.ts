@@ -15,14 +15,16 @@ export function schemaVersion(db: Database.Database): number {
 
 /**
  * Brings a database up to date, all or nothing. The version is read again under the lock, so that two windows that
- * start at once do not both migrate. `tooNew` makes the failure for a database from a later program.
+ * start at once do not both migrate. `tooNew` makes the failure for a database from a later program; `upTo` stops at
+ * an earlier version.
  */
 export function migrate(
   db: Database.Database,
   folder: string,
   tooNew: (found: number, known: number) => Error,
+  upTo = Number.POSITIVE_INFINITY,
 ): void {
-  const files = migrationFiles(folder)
+  const files = migrationFiles(folder).slice(0, upTo)
   const refuseTooNew = () => {
     const version = schemaVersion(db)
     if (version > files.length) throw tooNew(version, files.length)

@@ -12,6 +12,7 @@ export type Failure =
   | { readonly code: 'job/damaged'; readonly path: string; readonly why: string }
   | { readonly code: 'job/exists'; readonly path: string }
   | { readonly code: 'job/not-writable'; readonly path: string; readonly why: string }
+  | { readonly code: 'job/unreadable'; readonly path: string; readonly why: string }
   | { readonly code: 'job/in-use'; readonly path: string }
   | { readonly code: 'job/stale'; readonly found: number; readonly expected: number }
   | { readonly code: 'job/wrong-ending'; readonly path: string }
@@ -41,6 +42,8 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
     `${path} is already there. Choose another name, or say that it may be replaced.`,
   'job/not-writable': ({ path, why }) =>
     `${path} cannot be written (${why}). Your work is kept here; save it under another name.`,
+  'job/unreadable': ({ path, why }) =>
+    `${path} cannot be read (${why}). Check that the drive is there and that you may read the file.`,
   'job/in-use': ({ path }) => `${path} is open in another Lagwright window. Close it there first.`,
   'job/stale': ({ found, expected }) =>
     `This window is behind its file (change ${found}, the file is at ${expected}): another window wrote to it. Reopen the job to go on.`,

@@ -15,12 +15,15 @@ export interface OpenJob {
   readonly fileName: string | null
   /** Counts the commits written; a commit must name the revision it builds on. */
   readonly revision: number
+  /** What the user should know about how this job came to be open, in a sentence; absent where there is nothing. */
+  readonly notice?: string
 }
 const openJobSchema = z.strictObject({
   job: jobSchema,
   path: z.string().nullable(),
   fileName: z.string().nullable(),
   revision: z.int().min(0),
+  notice: z.string().optional(),
 }) as z.ZodType<OpenJob>
 
 /** Only what changed: each committed edit is written at once, in one transaction. */

@@ -1,0 +1,139 @@
+/**
+ * The job that is open in this host. A job without a name of its own is a draft: a file in the data folder like any
+ * other, so that every edit of it is on the disk at once.
+ */
+import { randomUUID } from 'node:crypto'
+import { mkdirSync, rmSync, writeFileSync } from 'node:fs'
+import { basename, dirname, join, resolve } from 'node:path'
+import { z } from 'zod'
+import { AppError } from '#contract/failures.ts'
+import type { JobChange, OpenJob } from '#contract/host.ts'
+import type { Job } from '#model/job.ts'
+import { type Committed, JobFile } from './job-file.ts'
+import { readJson } from './preferences.ts'
+import { replaceFile } from './replace-file.ts'
+
+const emptyJob: Job = { name: 'New job', site: '', defaults: {}, runs: [] }
+const sessionSchema = z.object({ lastJob: z.string().min(1) })
+
+interface Place {
+  readonly dataFolder: string
+  readonly dbFolder: string
+}
+
+export class OpenJobs {
+  readonly #place: Place
+  #file: JobFile | null = null
+
+  constructor(place: Place) {
+    this.#place = place
+  }
+
+  /** The open job, else the one last open; null where there never was one. */
+  current(): OpenJob | null {
+    if (this.#file) return this.#shown(this.#file)
+    const session = sessionSchema.safeParse(readJson(this.#sessionFile))
+    if (!session.success) return null
+    const { lastJob } = session.data
+    try {
+      return this.#take(JobFile.open(lastJob, this.#place.dbFolder))
+    } catch (error) {
+      if (!(error instanceof AppError)) throw error
+      return { ...this.start(emptyJob), notice: `${error.message} A new job was started instead.` }
+    }
+  }
+
+  startEmpty(): OpenJob {
+    return this.start(emptyJob)
+  }
+
+  /** A draft with this job in it. */
+  start(job: Job): OpenJob {
+    mkdirSync(this.#drafts, { recursive: true })
+    const path = join(
+      this.#drafts,
+      `${new Date().toISOString().slice(0, 10)}-${randomUUID()}.lagjob`,
+    )
+    return this.#take(JobFile.create(path, job, this.#place.dbFolder))
+  }
+
+  open(path: string): OpenJob {
+    if (this.#file && resolve(path) === resolve(this.#file.path)) return this.#shown(this.#file)
+    return this.#take(JobFile.open(path, this.#place.dbFolder))
+  }
+
+  saveAs(path: string, overwrite: boolean): OpenJob {
+    const file = this.#opened()
+    if (resolve(path) === resolve(file.path)) return this.#shown(file)
+    const copy = file.saveAs(path, overwrite)
+    // The draft lives on under its name.
+    const isDraft = this.#isDraft(file)
+    const shown = this.#take(copy)
+    if (isDraft) removeJob(file.path)
+    return shown
+  }
+
+  commit(change: JobChange): Committed {
+    return this.#opened().commit(change)
+  }
+
+  /** The name of the open job. */
+  get name(): string {
+    return this.#opened().read().job.name
+  }
+
+  close(): void {
+    this.#file?.close()
+    this.#file = null
+  }
+
+  #opened(): JobFile {
+    if (!this.#file) throw new AppError({ code: 'request/invalid', issues: 'No job is open.' })
+    return this.#file
+  }
+
+  /** The new one is open before the old one is let go: a failure leaves everything as it was. */
+  #take(file: JobFile): OpenJob {
+    const shown = this.#shown(file)
+    const old = this.#file
+    this.#file = file
+    if (old) {
+      const isUntouched = this.#isDraft(old) && old.revision === 0
+      old.close()
+      if (isUntouched) removeJob(old.path)
+    }
+    this.#remember(file.path)
+    return shown
+  }
+
+  #shown(file: JobFile): OpenJob {
+    const isDraft = this.#isDraft(file)
+    return {
+      ...file.read(),
+      path: isDraft ? null : file.path,
+      fileName: isDraft ? null : basename(file.path),
+    }
+  }
+
+  #isDraft(file: JobFile): boolean {
+    return resolve(dirname(file.path)) === resolve(this.#drafts)
+  }
+
+  #remember(path: string): void {
+    replaceFile(this.#sessionFile, (temporary) =>
+      writeFileSync(temporary, `${JSON.stringify({ lastJob: resolve(path) })}\n`),
+    )
+  }
+
+  get #drafts(): string {
+    return join(this.#place.dataFolder, 'drafts')
+  }
+  get #sessionFile(): string {
+    return join(this.#place.dataFolder, 'session.json')
+  }
+}
+
+function removeJob(path: string): void {
+  rmSync(path, { force: true })
+  rmSync(`${path}-journal`, { force: true })
+}
