@@ -5,9 +5,6 @@ import { existsSync, readFileSync } from 'node:fs'
 import { createRequire } from 'node:module'
 import { dirname, join } from 'node:path'
 
-const SILENCE_MS = 5000
-const WHOLE_MS = 20_000
-
 const packageFile = createRequire(import.meta.url).resolve('electron/package.json')
 const folder = dirname(packageFile)
 
@@ -21,15 +18,18 @@ export function electronBinary() {
   return existsSync(file) ? file : null
 }
 
-/** Downloads Electron into its cache and unpacks it, as its own installer would; gives up on silence. */
-export async function fetchElectron() {
+/**
+ * Downloads Electron into its cache and unpacks it, as its own installer would; gives up after a silence, and when the
+ * whole takes too long.
+ */
+export async function fetchElectron({ silenceMs = 5000, wholeMs = 20_000 } = {}) {
   const load = createRequire(packageFile)
   const { downloadArtifact } = load('@electron/get')
   const stop = new AbortController()
   const giveUp = (/** @type {string} */ why) => stop.abort(new Error(why))
-  const whole = setTimeout(giveUp, WHOLE_MS, `not done after ${WHOLE_MS / 1000} s`)
-  const quiet = `nothing arrived for ${SILENCE_MS / 1000} s`
-  let silence = setTimeout(giveUp, SILENCE_MS, quiet)
+  const whole = setTimeout(giveUp, wholeMs, `not done after ${wholeMs / 1000} s`)
+  const quiet = `nothing arrived for ${silenceMs / 1000} s`
+  let silence = setTimeout(giveUp, silenceMs, quiet)
   try {
     const download = downloadArtifact({
       version: load('./package.json').version,
@@ -43,7 +43,7 @@ export async function fetchElectron() {
         signal: stop.signal,
         getProgressCallback: async () => {
           clearTimeout(silence)
-          silence = setTimeout(giveUp, SILENCE_MS, quiet)
+          silence = setTimeout(giveUp, silenceMs, quiet)
         },
       },
     })

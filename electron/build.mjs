@@ -2,20 +2,25 @@
 import { existsSync, readdirSync, statSync } from 'node:fs'
 import { join } from 'node:path'
 
-/** The four bundles, the last one built last. */
+/** One file of each bundle. */
 const bundles = ['ui/index.html', 'preload/preload.cjs', 'main/main.cjs', 'host/host.js']
 const sources = ['src', 'electron', 'vite.config.ts', 'package.json']
 
 /** @param {string} program */
 export async function buildIfStale(program) {
-  const files = bundles.map((bundle) => join(program, 'dist', bundle))
-  const isBuilt = files.every((file) => existsSync(file))
-  const builtMs = isBuilt ? statSync(files.at(-1) ?? '').mtimeMs : 0
-  if (isBuilt && sources.every((source) => newestMs(join(program, source)) <= builtMs)) return
+  if (!isStale(program)) return
   const { createBuilder } = await import('vite')
   const configFile = join(program, 'vite.config.ts')
   const builder = await createBuilder({ configFile, logLevel: 'warn' }, null)
   await builder.buildApp()
+}
+
+/** @param {string} program */
+export function isStale(program) {
+  const files = bundles.map((bundle) => join(program, 'dist', bundle))
+  if (!files.every((file) => existsSync(file))) return true
+  const builtMs = Math.min(...files.map((file) => statSync(file).mtimeMs))
+  return sources.some((source) => newestMs(join(program, source)) > builtMs)
 }
 
 /**

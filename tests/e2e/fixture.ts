@@ -71,6 +71,7 @@ interface Opened {
 
 async function openApp(dataFolder: string, _browser: Browser, problems: string[]): Promise<Opened> {
   const app = await launchApp(dataFolder)
+  problems.push(...(await app.main(({ pageErrors }) => pageErrors, null)))
   watch(app.page, problems)
   return app
 }

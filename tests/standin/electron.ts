@@ -3,7 +3,7 @@ import { app } from './app.ts'
 import { debuggingAddress } from './browser.ts'
 import { invokeFrom, ipcMain } from './ipc.ts'
 import { protocol } from './scheme.ts'
-import { BrowserWindow } from './window.ts'
+import { BrowserWindow, pageErrors } from './window.ts'
 
 export { app, BrowserWindow, ipcMain, protocol }
 
@@ -23,8 +23,18 @@ export const screen = {
 
 export const Menu = { setApplicationMenu() {} }
 
-/** What a test may use in main: the module's own, and a call as if from a frame elsewhere. */
-const electron = { invokeFrom, app, BrowserWindow, dialog, ipcMain, protocol, screen, session }
+/** What a test may use in main: the module's own, a call as if from any frame, what the page logged. */
+const electron = {
+  app,
+  BrowserWindow,
+  dialog,
+  invokeFrom,
+  ipcMain,
+  pageErrors,
+  protocol,
+  screen,
+  session,
+}
 export type StandIn = typeof electron
 
 /** One function of a test to be run here, in the main process. */

@@ -27,6 +27,9 @@ interface WindowOptions extends Partial<Bounds> {
 export const windowEvents = new EventEmitter()
 const windows = new Set<BrowserWindow>()
 
+/** What pages logged as errors, from their first line on: a test attaches too late for those. */
+export const pageErrors: string[] = []
+
 class WebContents extends EventEmitter {
   /** Accepted, and left to Electron: this Chromium is not under its control. */
   setWindowOpenHandler(): void {}
@@ -84,7 +87,10 @@ export class BrowserWindow extends EventEmitter {
     await answerRequests(page)
     await page.exposeBinding('toMain', ({ frame }, text: string) => answerInvoke(frame.url(), text))
     if (preload) await page.addInitScript(await withPreload(preload))
-    page.on('pageerror', (error) => console.error('[page]', error.message))
+    page.on('pageerror', (error) => pageErrors.push(error.message))
+    page.on('console', (message) => {
+      if (message.type() === 'error') pageErrors.push(message.text())
+    })
     page.on('load', () => this.emit('ready-to-show'))
     page.once('close', () => {
       windows.delete(this)
