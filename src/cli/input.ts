@@ -1,0 +1,113 @@
+/** Reads the list of runs: a CSV file, standard input, or a job. */
+import { readFileSync } from 'node:fs'
+import { join } from 'node:path'
+import { JobFile } from '#backend/job-file.ts'
+import { issuesOfDrafts } from '#model/draft-issues.ts'
+import type { RunValues } from '#model/fields.ts'
+import type { Job } from '#model/job.ts'
+import { parseRunsCsv, sentence } from '#report/runs-csv.ts'
+import type { Issue } from '#sizing/result.ts'
+import { isJobPath } from './arguments.ts'
+import { fullPath, programFolder } from './place.ts'
+
+export interface InputRun {
+  readonly values: RunValues
+  /** A problem of this run as a line of text. */
+  readonly problem: (issue: Issue) => string
+}
+
+export type Input =
+  | { readonly ok: true; readonly runs: readonly InputRun[]; readonly defaults: RunValues }
+  | Refused
+export interface Refused {
+  readonly ok: false
+  readonly problems: readonly string[]
+}
+
+export async function readInput(path: string): Promise<Input> {
+  if (isJobPath(path)) return jobInput(path)
+  const source = path === '-' ? await readStandardInput() : readListFile(path)
+  return typeof source === 'string' ? refused([source]) : listInput(source)
+}
+
+/** The values that a job gives to every run. */
+export function readJobDefaults(
+  path: string,
+): { readonly ok: true; readonly defaults: RunValues } | Refused {
+  const job = readJob(path)
+  return typeof job === 'string' ? refused([job]) : { ok: true, defaults: job.defaults }
+}
+
+function listInput(source: Uint8Array): Input {
+  const read = parseRunsCsv(source)
+  if (!read.ok) return refused(read.issues.map(sentence))
+  const runs = read.runs.map((values, index) => ({
+    values,
+    problem: (issue: Issue) => sentence({ row: read.lines[index] ?? 0, ...issue }),
+  }))
+  return { ok: true, runs, defaults: {} }
+}
+
+function jobInput(path: string): Input {
+  const job = readJob(path)
+  if (typeof job === 'string') return refused([job])
+  if (job.runs.length === 0) return refused([`${path}: found no runs; allowed: a job with runs`])
+  const runs = job.runs.map(({ values }, index) => ({
+    values,
+    problem: (issue: Issue) => jobSentence(index, values, issue),
+  }))
+  const drafts = job.runs.flatMap((run, index) =>
+    issuesOfDrafts(run).map((issue) => jobSentence(index, run.values, issue)),
+  )
+  return drafts.length > 0 ? refused(drafts) : { ok: true, runs, defaults: job.defaults }
+}
+
+function jobSentence(index: number, { tag }: RunValues, { column, found, allowed }: Issue): string {
+  const run = tag === undefined ? `run ${index + 1}` : `run ${index + 1} (${tag})`
+  return `${run}, column ${column}: found ${found}; allowed: ${allowed}`
+}
+
+/** The job, or what stands against reading it. */
+function readJob(path: string): Job | string {
+  try {
+    const file = JobFile.open(fullPath(path), join(programFolder, 'db'))
+    try {
+      return file.read().job
+    } finally {
+      file.close()
+    }
+  } catch (error) {
+    if (error instanceof Error && error.name === 'AppError') return error.message
+    throw error
+  }
+}
+
+function refused(problems: readonly string[]): Refused {
+  return { ok: false, problems }
+}
+
+async function readStandardInput(): Promise<Uint8Array> {
+  const chunks: Uint8Array[] = []
+  for await (const chunk of process.stdin) chunks.push(chunk)
+  return Buffer.concat(chunks)
+}
+
+/** The bytes of the file, or what stands against reading them. */
+function readListFile(path: string): Uint8Array | string {
+  try {
+    return readFileSync(fullPath(path))
+  } catch (error) {
+    return `${path}: ${whyNotRead(error)}; allowed: a list of runs as CSV, a job that ends in .lagjob, or -`
+  }
+}
+
+function whyNotRead(error: unknown): string {
+  const code = error instanceof Error && 'code' in error ? String(error.code) : ''
+  const known: Readonly<Record<string, string>> = {
+    ENOENT: 'there is no such file',
+    EISDIR: 'this is a folder',
+    EACCES: 'this file may not be read',
+    EPERM: 'this file may not be read',
+  }
+  return known[code] ?? `the file cannot be read (${code || String(error)})`
+}

@@ -1,0 +1,3 @@
+import about from '../../package.json' with { type: 'json' }
+
+export const version = about.version

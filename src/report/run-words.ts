@@ -1,0 +1,78 @@
+/** A run in the words of tables and documents, in either system of units. */
+import type { RunValues } from '#model/fields.ts'
+import { type Words, writeReason } from '#sizing/reason.ts'
+import type { Governing, RunResult } from '#sizing/result.ts'
+import { formatNumber, formatQuantity, formatWithUnit } from '#units/format.ts'
+import type { QuantityName, UnitSystem } from '#units/quantities.ts'
+
+/** One run and its answer; the values are those it was sized with, the defaults of the job included. */
+export interface SizedRun {
+  readonly values: RunValues
+  readonly result: RunResult
+}
+
+export const governingWords: Readonly<Record<Governing, string>> = {
+  touch: 'Touch',
+  loss: 'Loss',
+  damp: 'Damp',
+  frost: 'Frost',
+  arrival: 'Arrival',
+  code: 'Code',
+  space: 'Space',
+  service: 'Service',
+  money: 'Cost',
+  smallest: 'Thinnest',
+  fixed: 'Fixed',
+  bare: 'Bare',
+  unmet: 'Unmet',
+}
+
+/** Whether every limit of the run is met by what is chosen. */
+export function meetsLimits({ chosen }: RunResult): boolean {
+  return chosen?.pass ?? false
+}
+
+/** What decided, and whether it is not enough: "Touch", "Unmet", "Fixed, fails". */
+export function governedBy(result: RunResult): string {
+  const word = governingWords[result.governing]
+  return meetsLimits(result) || result.governing === 'unmet' ? word : `${word}, fails`
+}
+
+/** The size as it was given, else its measures: "DN 80", "600 × 400", "Ø 500", "26.0 m²". */
+export function sizeWords(values: RunValues, system: UnitSystem): string {
+  const { size, widthM, heightM, outerDiameterM, areaM2 } = values
+  if (size !== undefined) return size
+  if (widthM !== undefined && heightM !== undefined) {
+    return `${sizeNumber(widthM, system)} × ${sizeNumber(heightM, system)}`
+  }
+  if (outerDiameterM !== undefined) return `Ø ${sizeNumber(outerDiameterM, system)}`
+  return formatWithUnit(areaM2, 'area', system)
+}
+
+function sizeNumber(sizeM: number, system: UnitSystem): string {
+  return formatQuantity(sizeM, 'size', system, 1).replace(/\.0$/, '')
+}
+
+/** The reason in the units of the reader. */
+export function reasonWords(result: RunResult, system: UnitSystem): string {
+  return system === 'si' ? result.reason : writeReason(result, usWords)
+}
+
+const quantityOf: Readonly<Record<string, QuantityName>> = {
+  '°C': 'temperature',
+  K: 'temperatureDifference',
+  'W/m': 'heatLossPerLength',
+  'W/m²': 'heatFlux',
+}
+
+const usWords: Words = {
+  thickness: (thicknessM) => formatWithUnit(thicknessM, 'thickness', 'us'),
+  quantity: (value, unit, digits) => {
+    const quantity = quantityOf[unit]
+    // A bound that is round in SI is not so here.
+    const decimals = Math.max(1, digits)
+    return quantity
+      ? formatWithUnit(value, quantity, 'us', decimals)
+      : `${formatNumber(value, decimals)} ${unit}`
+  },
+}
