@@ -1,12 +1,11 @@
 import { yearlyKWh } from '#money/energy-cost.ts'
-import { solve } from '#solver/index.ts'
 import type { Note as SolverNote } from '#solver/types.ts'
 import type { Settled } from './build-up.ts'
 import { flowPerUnit, rungMoney } from './cost.ts'
 import { hottestFace, judge } from './limits.ts'
 import type { Problem } from './problem.ts'
 import type { Rating } from './result.ts'
-import { solveStates, systemOf } from './states.ts'
+import { solveStates } from './states.ts'
 
 export interface Rated {
   readonly rating: Rating
@@ -44,9 +43,4 @@ export function rate(problem: Problem, settled: Settled): Rated {
     },
     notes: [...loss.notes, ...touch.notes, ...(damp?.notes ?? [])],
   }
-}
-
-/** Heat flow of a settled build-up at the loss condition, per metre or m². */
-export function heatFlowOf(problem: Problem, settled: Settled): number {
-  return flowPerUnit(solve(systemOf(problem, settled, problem.conditions.loss)))
 }

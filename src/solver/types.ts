@@ -63,9 +63,7 @@ export interface System {
   readonly around: Surroundings
 }
 
-export type NoteCode = 'film-range' | 'film-jump' | 'conductivity-extrapolated'
-
-/** A finding of the solver that a reader should know; never an exception. */
+/** A finding of the solver that a reader should know; never an exception. `code` is film-range, film-jump or conductivity-extrapolated. */
 export interface Note {
   readonly code: string
   readonly text: string
