@@ -1,0 +1,264 @@
+/** Edits: pure functions from one job to the next. What does not change keeps its identity. */
+import { type CellResult, parseCell } from './cell.ts'
+import { type FieldKey, fieldOf, type RunValues } from './fields.ts'
+import type { Job, JobDefaults, Run } from './job.ts'
+
+/** How typed text is read: in SI units of the columns, or in the units the window shows. */
+export interface CellReader {
+  readonly read: (key: FieldKey, text: string) => CellResult
+  /** Metres of one unit in `600 x 400`. */
+  readonly sideM: number
+}
+
+/** Reads as the columns are written: SI, mm, per cent; the decimals after a point or a comma. */
+export const columnReader: CellReader = {
+  read: (key, text) => parseCell(fieldOf(key), text, { decimalComma: true, doubtfulMarks: [','] }),
+  sideM: 0.001,
+}
+
+/** Makes the id of a new run; given by the caller, so that edits stay pure. */
+export type NewId = () => string
+
+/** One cell and what was typed into it. */
+export interface CellText {
+  readonly runId: string
+  readonly key: FieldKey
+  readonly text: string
+}
+
+/** What a run added to the schedule has in common with the one above it. */
+const handedDown = [
+  'place',
+  'service',
+  'group',
+  'shape',
+  'pipeMaterial',
+  'medium',
+  'mediumC',
+  'mediumMaxC',
+  'mediumMinC',
+  'pressureGaugePa',
+  'airC',
+  'surroundingsC',
+  'windMPerS',
+  'humidity',
+  'altitudeM',
+  'touchAirC',
+  'dampAirC',
+  'material',
+  'finish',
+  'steps',
+  'method',
+  'maxSurfaceC',
+  'reach',
+  'reachReason',
+  'contactS',
+  'maxLossWPerM',
+  'maxLossWPerM2',
+  'dewMarginK',
+  'money',
+  'fuel',
+  'hoursPerYear',
+  'fuelPricePerKWh',
+  'efficiency',
+  'cop',
+] as const satisfies readonly FieldKey[]
+
+/** A run like another one, but for what makes it this run: tag, name, size and length. */
+export function runLike(above: Run | undefined, id: string): Run {
+  const values = Object.fromEntries(
+    handedDown.flatMap((key) =>
+      above?.values[key] === undefined ? [] : [[key, above.values[key]]],
+    ),
+  )
+  return { id, values: above ? values : { shape: 'pipe' }, drafts: {} }
+}
+
+/** Puts a new run below the named one, or at the end; it takes over what the run above it has in common. */
+export function addRun(job: Job, id: string, belowId: string | null): Job {
+  const at = belowId === null ? -1 : job.runs.findIndex((run) => run.id === belowId)
+  const place = at < 0 ? job.runs.length : at + 1
+  return { ...job, runs: job.runs.toSpliced(place, 0, runLike(job.runs[place - 1], id)) }
+}
+
+/** Copies runs, each below its original, with the next free tag. */
+export function duplicateRuns(job: Job, ids: ReadonlySet<string>, newId: NewId): Job {
+  if (!job.runs.some((run) => ids.has(run.id))) return job
+  const tags = new Set(job.runs.map((run) => run.values.tag))
+  const runs = job.runs.flatMap((run) => {
+    if (!ids.has(run.id)) return [run]
+    const { tag } = run.values
+    if (tag === undefined) return [run, { ...run, id: newId() }]
+    const next = nextTag(tag, tags)
+    tags.add(next)
+    return [run, { ...run, id: newId(), values: { ...run.values, tag: next } }]
+  })
+  return { ...job, runs }
+}
+
+export function removeRuns(job: Job, ids: ReadonlySet<string>): Job {
+  const runs = job.runs.filter((run) => !ids.has(run.id))
+  return runs.length === job.runs.length ? job : { ...job, runs }
+}
+
+/** Moves runs, in the order they have, to before the named run; null moves them to the end. */
+export function moveRuns(job: Job, ids: ReadonlySet<string>, beforeId: string | null): Job {
+  if (beforeId !== null && ids.has(beforeId)) return job
+  const moved = job.runs.filter((run) => ids.has(run.id))
+  const rest = job.runs.filter((run) => !ids.has(run.id))
+  const at = beforeId === null ? -1 : rest.findIndex((run) => run.id === beforeId)
+  const runs = rest.toSpliced(at < 0 ? rest.length : at, 0, ...moved)
+  return runs.every((run, index) => run === job.runs[index]) ? job : { ...job, runs }
+}
+
+/** Reads what was typed into one cell: a valid value, nothing, or text that is kept until it is mended. */
+export function setCell(
+  job: Job,
+  runId: string,
+  key: FieldKey,
+  text: string,
+  reader: CellReader,
+): Job {
+  return setCells(job, [{ runId, key, text }], reader)
+}
+
+/** The same for many cells at once. */
+export function setCells(job: Job, cells: readonly CellText[], reader: CellReader): Job {
+  const byRun = Map.groupBy(cells, (cell) => cell.runId)
+  let changed = false
+  const runs = job.runs.map((run) => {
+    const next = (byRun.get(run.id) ?? []).reduce(
+      (now, cell) => withCell(now, cell.key, cell.text, reader),
+      run,
+    )
+    changed ||= next !== run
+    return next
+  })
+  return changed ? { ...job, runs } : job
+}
+
+export function clearCells(job: Job, ids: ReadonlySet<string>, keys: readonly FieldKey[]): Job {
+  const cells = [...ids].flatMap((runId) => keys.map((key) => ({ runId, key, text: '' })))
+  return setCells(job, cells, columnReader)
+}
+
+/** Sets one value that is known to be valid, as a list or a switch gives it; undefined takes it away. */
+export function setValue<K extends FieldKey>(
+  job: Job,
+  runId: string,
+  key: K,
+  value: RunValues[K],
+): Job {
+  const index = job.runs.findIndex((run) => run.id === runId)
+  const run = job.runs[index]
+  if (!run) return job
+  const next = {
+    ...run,
+    values: withValue(run.values, key, value),
+    drafts: without(run.drafts, key),
+  }
+  return isSameRun(run, next) ? job : { ...job, runs: job.runs.with(index, next) }
+}
+
+export function setJobName(job: Job, name: string): Job {
+  return name === job.name ? job : { ...job, name }
+}
+
+export function setSite(job: Job, site: string): Job {
+  return site === job.site ? job : { ...job, site }
+}
+
+/** Sets what every run takes unless it has its own. */
+export function setDefault<K extends FieldKey>(job: Job, key: K, value: JobDefaults[K]): Job {
+  return job.defaults[key] === value
+    ? job
+    : { ...job, defaults: withValue(job.defaults, key, value) }
+}
+
+/** One run with one cell as typed. */
+export function withCell(run: Run, key: FieldKey, text: string, reader: CellReader): Run {
+  const typed = text.trim()
+  const next = key === 'size' ? withSize(run, typed, reader.sideM) : null
+  const read = next ?? readInto(run, key, typed, reader)
+  return isSameRun(run, read) ? run : read
+}
+
+function readInto(run: Run, key: FieldKey, typed: string, reader: CellReader): Run {
+  if (typed === '') {
+    return {
+      ...run,
+      values: withValue(run.values, key, undefined),
+      drafts: without(run.drafts, key),
+    }
+  }
+  const cell = reader.read(key, typed)
+  if (cell.ok && cell.value !== undefined) {
+    const values = { ...run.values, [key]: cell.value }
+    return { ...run, values, drafts: without(run.drafts, key) }
+  }
+  const values = withValue(run.values, key, undefined)
+  return { ...run, values, drafts: { ...run.drafts, [key]: typed.slice(0, longestDraft) } }
+}
+
+/** As long as the job file takes. */
+const longestDraft = 2000
+
+/** `600 x 400` typed as the size of a run is a rectangular duct, or the extent of a flat surface. */
+const sides = /^(\d+(?:\.\d+)?)\s*[x×*]\s*(\d+(?:\.\d+)?)(?:\s*mm)?$/i
+
+function withSize(run: Run, typed: string, sideM: number): Run | null {
+  const [, width, height] = sides.exec(typed) ?? []
+  if (width === undefined || height === undefined) return null
+  const widthM = decimal(width, sideM)
+  const heightM = decimal(height, sideM)
+  const { min, max } = sideRange
+  if (![widthM, heightM].every((side) => side >= min && side <= max)) return null
+  const shape = run.values.shape === 'flat' ? 'flat' : 'rect-duct'
+  const { size: _, ...values } = run.values
+  return {
+    ...run,
+    values: { ...values, shape, widthM, heightM },
+    drafts: without(run.drafts, 'size'),
+  }
+}
+
+/** Twelve digits, so that 600 mm is 0.6 m and not a hair less. */
+const decimal = (text: string, unitM: number) => Number((Number(text) * unitM).toPrecision(12))
+
+const width = fieldOf('widthM')
+const sideRange = width.kind === 'number' ? width : { min: 0, max: 0 }
+
+function withValue<K extends FieldKey>(values: RunValues, key: K, value: RunValues[K]): RunValues {
+  if (values[key] === value) return values
+  const { [key]: _, ...rest } = values
+  return value === undefined ? rest : { ...values, [key]: value }
+}
+
+function without(drafts: Run['drafts'], key: FieldKey): Run['drafts'] {
+  if (drafts[key] === undefined) return drafts
+  const { [key]: _, ...rest } = drafts
+  return rest
+}
+
+function isSameRun(one: Run, other: Run): boolean {
+  return isSameRecord(one.values, other.values) && isSameRecord(one.drafts, other.drafts)
+}
+
+function isSameRecord(one: object, other: object): boolean {
+  if (one === other) return true
+  const [before, after] = [Object.entries(one), new Map(Object.entries(other))]
+  return (
+    before.length === after.size && before.every(([key, value]) => Object.is(after.get(key), value))
+  )
+}
+
+/** ST-104 becomes ST-105, or the next number that is free; a tag without a number gets one. */
+function nextTag(tag: string, taken: ReadonlySet<string | undefined>): string {
+  const [, stem = tag, digits = ''] = /^(.*?)(\d*)$/.exec(tag) ?? []
+  const start = digits === '' ? 1 : Number(digits)
+  for (let number = start + 1; ; number++) {
+    const next =
+      digits === '' ? `${stem} ${number}` : `${stem}${String(number).padStart(digits.length, '0')}`
+    if (!taken.has(next)) return next.slice(0, 60)
+  }
+}

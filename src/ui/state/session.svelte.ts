@@ -1,0 +1,86 @@
+/** The one open job: its history, where it lives, and what is selected in it. */
+import type { OpenJob } from '#contract/host.ts'
+import type { Job, Run } from '#model/job.ts'
+import { History } from './history.svelte.ts'
+
+type Change<A extends readonly unknown[]> = (job: Job, ...args: A) => Job
+
+export class Session {
+  #history: History<Job> = $state.raw() as History<Job>
+  #activeRunId: string | null = $state(null)
+  path: string | null = $state(null)
+  fileName: string | null = $state(null)
+  /** Counts the jobs opened, so that views can start afresh with each. */
+  opened = $state(0)
+  readonly #changed: () => void
+  readonly activeRun: Run | null = $derived.by(
+    () => this.job.runs.find((run) => run.id === this.#activeRunId) ?? null,
+  )
+
+  /** `changed` is told after every change of the job or of the active run. */
+  constructor(open: OpenJob, changed: () => void) {
+    this.#changed = changed
+    this.#take(open)
+  }
+
+  get job(): Job {
+    return this.#history.present
+  }
+  get canUndo(): boolean {
+    return this.#history.canUndo
+  }
+  get canRedo(): boolean {
+    return this.#history.canRedo
+  }
+  get activeRunId(): string | null {
+    return this.#activeRunId
+  }
+  set activeRunId(id: string | null) {
+    if (id === this.#activeRunId) return
+    this.#activeRunId = id
+    this.#changed()
+  }
+
+  /** Applies one edit as one step that undo takes back. */
+  edit<A extends readonly unknown[]>(change: Change<A>, ...args: A): void {
+    this.#history.push(change(this.job, ...args))
+    this.#changed()
+  }
+
+  /** Applies an edit that carries on the step of the same name, as while a field is typed in. */
+  amend<A extends readonly unknown[]>(step: string, change: Change<A>, ...args: A): void {
+    this.#history.push(change(this.job, ...args), step)
+    this.#changed()
+  }
+  closeStep(): void {
+    this.#history.closeStep()
+  }
+
+  undo(): void {
+    this.#history.undo()
+    this.#changed()
+  }
+  redo(): void {
+    this.#history.redo()
+    this.#changed()
+  }
+
+  /** Another job takes the place of this one; its history begins anew. */
+  replace(open: OpenJob): void {
+    this.#take(open)
+    this.#changed()
+  }
+
+  /** The same job, in another file. */
+  movedTo({ path, fileName }: OpenJob): void {
+    this.path = path
+    this.fileName = fileName
+  }
+
+  #take(open: OpenJob): void {
+    this.#history = new History(open.job)
+    this.#activeRunId = open.job.runs[0]?.id ?? null
+    this.opened++
+    this.movedTo(open)
+  }
+}

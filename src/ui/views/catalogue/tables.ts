@@ -1,0 +1,248 @@
+/** The catalogue as tables of words: one line per row, with where it comes from. */
+import type { Catalogue, Confidence, Provenance } from '#catalogue/types.ts'
+import { wordsFor } from '#ui/state/cell-text.ts'
+import { formatNumber, formatQuantity, unitLabel } from '#units/format.ts'
+import type { QuantityName, UnitSystem } from '#units/quantities.ts'
+
+export interface CatalogueRow {
+  readonly id: string
+  readonly cells: readonly string[]
+  readonly note: string
+  readonly source: string
+  readonly confidence: Confidence
+  /** All of it in lower case, to search in. */
+  readonly text: string
+}
+export interface CatalogueTable {
+  readonly title: string
+  readonly about: string
+  readonly heads: readonly { readonly label: string; readonly isNumber: boolean }[]
+  readonly rows: readonly CatalogueRow[]
+}
+
+type Head = readonly [label: string, isNumber?: boolean]
+
+function table<T extends Provenance>(
+  title: string,
+  about: string,
+  heads: readonly Head[],
+  list: readonly T[],
+  describe: (row: T) => {
+    readonly id: string
+    readonly cells: readonly string[]
+    readonly note?: string
+  },
+): CatalogueTable {
+  const rows = list.map((row) => {
+    const { id, cells, note = '' } = describe(row)
+    const { source, confidence } = row
+    return {
+      id,
+      cells,
+      note,
+      source,
+      confidence,
+      text: [...cells, note, source].join(' ').toLowerCase(),
+    }
+  })
+  return {
+    title,
+    about,
+    heads: heads.map(([label, isNumber = false]) => ({ label, isNumber })),
+    rows,
+  }
+}
+
+export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly CatalogueTable[] {
+  const shown = (value: number | null, quantity: QuantityName, decimals?: number) =>
+    formatQuantity(value, quantity, units, decimals)
+  const unit = (quantity: QuantityName) => unitLabel(quantity, units)
+  const temperature = unit('temperature')
+  const size = unit('size')
+
+  return [
+    table(
+      'Materials',
+      'Conductivity at mean temperatures, and the service range that is never exceeded.',
+      [
+        ['Material'],
+        ['Family'],
+        [`Conductivity, ${unit('conductivity')} at ${temperature}`],
+        [`Service ${temperature}`, true],
+        ['Density kg/m³', true],
+        ['µ', true],
+      ],
+      // The confidence of the curve is what a thickness stands on.
+      catalogue.materials.map((row) => ({
+        ...row,
+        confidence: row.curveConfidence,
+        source: row.curveSource || row.source,
+      })),
+      (row) => ({
+        id: row.id,
+        cells: [
+          row.name,
+          row.family,
+          row.conductivity.pointsC
+            .map(
+              (pointC, at) =>
+                `${shown(row.conductivity.valuesWPerMK[at] ?? null, 'conductivity', units === 'si' ? 3 : 2)} at ${shown(pointC, 'temperature', 0)}`,
+            )
+            .join(', '),
+          `${shown(row.serviceMinC, 'temperature', 0)} to ${shown(row.serviceMaxC, 'temperature', 0)}`,
+          formatNumber(row.densityKgPerM3, 0),
+          row.vapourResistance === null ? '–' : formatNumber(row.vapourResistance, 0),
+        ],
+        note: row.note,
+      }),
+    ),
+    table(
+      'Finishes',
+      'New emissivity judges touch and damp, aged emissivity loss and money.',
+      [
+        ['Finish'],
+        ['Kind'],
+        ['Emissivity, new', true],
+        ['aged', true],
+        ['Touch class'],
+        [`At most ${temperature}`, true],
+        ['Outdoors'],
+      ],
+      catalogue.finishes,
+      (row) => ({
+        id: row.id,
+        cells: [
+          row.name,
+          row.category,
+          formatNumber(row.emissivityNew, 2),
+          formatNumber(row.emissivityAged, 2),
+          wordsFor(row.touchClass),
+          shown(row.surfaceMaxC, 'temperature', 0),
+          row.outdoor ? 'yes' : 'no',
+        ],
+        note: row.note,
+      }),
+    ),
+    table(
+      'Pipe sizes',
+      'Outside diameter and wall, as the run takes them from its size.',
+      [['Size'], ['Standard'], ['Series'], [`Outside ${size}`, true], [`Wall ${size}`, true]],
+      catalogue.pipeSizes,
+      (row) => ({
+        id: `${row.system} ${row.label} ${row.series}`,
+        cells: [
+          row.label,
+          row.standard,
+          row.series,
+          shown(row.outerDiameterM, 'size'),
+          shown(row.wallM, 'size', units === 'si' ? 2 : 3),
+        ],
+      }),
+    ),
+    table(
+      'Duct sizes',
+      'Sizes that are usually made; any other can be typed.',
+      [['Size'], ['Standard'], [`Width or diameter ${size}`, true], [`Height ${size}`, true]],
+      catalogue.ductSizes,
+      (row) => ({
+        id: `${row.standard} ${row.label}`,
+        cells: [
+          row.label,
+          row.standard,
+          shown(row.diameterM ?? row.widthM, 'size', units === 'si' ? 0 : 2),
+          shown(row.heightM, 'size', units === 'si' ? 0 : 2),
+        ],
+      }),
+    ),
+    table(
+      'Fuels',
+      'Price, efficiency and CO₂ belong to the same calorific basis. Prices are illustrative.',
+      [['Fuel'], ['Basis'], ['Price per kWh', true], ['Efficiency', true], ['CO₂ kg/kWh', true]],
+      catalogue.fuels,
+      (row) => ({
+        id: row.id,
+        cells: [
+          row.name,
+          row.basis,
+          formatNumber(row.pricePerKWh, 3),
+          formatNumber(row.efficiency, 2),
+          formatNumber(row.co2KgPerKWh, 3),
+        ],
+        note: row.note,
+      }),
+    ),
+    table(
+      'Burn thresholds',
+      'Lower curve of ISO 13732-1 by surface and contact time. Cells of grade L never pass a surface.',
+      [
+        ['Surface'],
+        ['Contact s', true],
+        [`Burns from ${temperature}`, true],
+        [`surely above ${temperature}`, true],
+        ['Grade'],
+      ],
+      catalogue.burnThresholds,
+      (row) => ({
+        id: `${row.surface} ${row.contactS}`,
+        cells: [
+          wordsFor(row.surface),
+          formatNumber(row.contactS, row.contactS < 10 ? 1 : 0),
+          shown(row.lowerC, 'temperature'),
+          shown(row.upperC, 'temperature'),
+          row.grade,
+        ],
+      }),
+    ),
+    table(
+      'Prices',
+      `Installed, without tax, in ${catalogue.labour.currency}. All of them illustrate until your own are in.`,
+      [
+        ['For'],
+        ['per m³', true],
+        ['per m²', true],
+        ['per m', true],
+        ['Hours per m', true],
+        ['Hours per m²', true],
+        ['Waste %', true],
+      ],
+      [
+        ...catalogue.priceModels.map((row) => ({
+          ...row,
+          name: nameIn(catalogue.materials, row.materialId),
+        })),
+        ...catalogue.finishPrices.map((row) => ({
+          ...row,
+          name: nameIn(catalogue.finishes, row.finishId),
+          perM3: null,
+          perM: null,
+        })),
+      ],
+      (row) => ({
+        id: row.name,
+        cells: [
+          row.name,
+          formatNumber(row.perM3, 0),
+          formatNumber(row.perM2, 2),
+          formatNumber(row.perM, 2),
+          formatNumber(row.labourHoursPerM, 2),
+          formatNumber(row.labourHoursPerM2, 2),
+          formatNumber(row.wasteFraction * 100, 0),
+        ],
+      }),
+    ),
+  ]
+}
+
+function nameIn(
+  list: readonly { readonly id: string; readonly name: string }[],
+  id: string,
+): string {
+  return list.find((row) => row.id === id)?.name ?? id
+}
+
+/** How far a row can be trusted, in words. */
+export const confidenceWords: Readonly<Record<Confidence, string>> = {
+  found: 'read in the source',
+  memory: 'verify against your own copy',
+  estimate: 'illustrative',
+}

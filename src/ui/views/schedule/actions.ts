@@ -1,0 +1,122 @@
+/** What can be done in the schedule, whichever way it is asked for. */
+import { addRun, clearCells, duplicateRuns, removeRuns, setCell } from '#model/edits.ts'
+import type { FieldKey } from '#model/fields.ts'
+import type { Run } from '#model/job.ts'
+import { type Block, headerKeys, pasteBlock } from '#model/paste.ts'
+import { editText } from '#ui/state/cell-text.ts'
+import type { UnitSystem } from '#units/quantities.ts'
+import { copyText, type Showing } from './cell-view.ts'
+import type { Grid } from './grid.svelte.ts'
+import { readTsv, writeTsv } from './tsv.ts'
+
+const newId = () => crypto.randomUUID()
+
+/** Adds a run below the active one and goes to its tag. */
+export function addRunBelow(grid: Grid): void {
+  const { session } = grid.workspace
+  const id = newId()
+  // A filter would hide the new run at once.
+  grid.filterText = ''
+  grid.onlyNeedy = false
+  session.edit(addRun, id, session.activeRunId)
+  grid.goToRun(id, 'tag')
+}
+
+export function duplicateMarked(grid: Grid): void {
+  const ids = markedIds(grid)
+  if (ids.size > 0) grid.workspace.session.edit(duplicateRuns, ids, newId)
+}
+
+export function removeMarked(grid: Grid): void {
+  const { session } = grid.workspace
+  const ids = markedIds(grid)
+  if (ids.size === 0) return
+  const { top, bottom } = grid.extent
+  const next = grid.rows[bottom + 1] ?? grid.rows[top - 1]
+  session.edit(removeRuns, ids)
+  if (next) grid.goToRun(next.id, 'tag')
+  else session.activeRunId = null
+}
+
+/** Empties what can be typed in the marked cells. */
+export function clearMarked(grid: Grid): void {
+  const keys = grid.markedColumns().flatMap(({ key }) => (key ? [key] : []))
+  grid.workspace.session.edit(clearCells, markedIds(grid), keys)
+}
+
+/** Opens the active cell; `typed` replaces what stands in it. */
+export function startEditing(grid: Grid, typed?: string): void {
+  const run = grid.rows[grid.activeRow]
+  const column = grid.columns[grid.activeColumn]
+  if (!run || !column?.key) return
+  const { key } = column
+  const text = typed ?? standingText(grid, run, key)
+  grid.editing = { runId: run.id, columnId: column.id, key, text }
+}
+
+export function commitEditing(grid: Grid, text: string): void {
+  const { editing } = grid
+  grid.editing = null
+  const run = grid.rows.find(({ id }) => id === editing?.runId)
+  if (!editing || !run || text === standingText(grid, run, editing.key)) return
+  grid.workspace.session.edit(setCell, run.id, editing.key, text, grid.workspace.reader)
+}
+
+/** What an open cell begins with. */
+function standingText(grid: Grid, run: Run, key: FieldKey): string {
+  const { words, preferences } = grid.workspace
+  const value = run.values[key]
+  const draft = run.drafts[key]
+  if (draft !== undefined) return draft
+  if (value === undefined) return key === 'size' ? sidesText(run, preferences.units) : ''
+  if (typeof value === 'string' && words.isListed(key)) return words.nameOf(key, value)
+  return editText(key, value, preferences.units)
+}
+
+function sidesText({ values: { widthM, heightM } }: Run, units: UnitSystem): string {
+  if (widthM === undefined || heightM === undefined) return ''
+  return `${editText('widthM', widthM, units)} x ${editText('heightM', heightM, units)}`
+}
+
+export function copyMarked(grid: Grid, showing: Showing): string {
+  const columns = grid.markedColumns()
+  const { briefs } = grid.workspace.sizing
+  return writeTsv(
+    grid
+      .markedRuns()
+      .map((run) => columns.map((column) => copyText(run, briefs.get(run.id), column, showing))),
+  )
+}
+
+/** Pastes at the top left of what is marked; one line or cell fills all lines and cells that are marked. */
+export function pasteText(grid: Grid, text: string): void {
+  if (text.trim() === '') return
+  const { session, reader } = grid.workspace
+  const { top, left, bottom, right } = grid.extent
+  const rows = filling(readTsv(text), bottom - top + 1, right - left + 1)
+  const first = top < 0 ? [] : grid.rows.slice(top)
+  const isNamed = headerKeys(rows[0] ?? []) !== null
+  const block: Block = {
+    // A list with its own header is a take-off: it is added, never written over what stands here.
+    runIds: isNamed ? [] : first.map(({ id }) => id),
+    keys: grid.columns
+      .slice(Math.max(0, left))
+      .map((column) => (column.result ? null : column.key)),
+    rows,
+  }
+  const known = new Set(session.job.runs.map(({ id }) => id))
+  session.edit(pasteBlock, block, newId, reader)
+  const added = session.job.runs.find(({ id }) => !known.has(id))
+  if (added && isNamed) grid.goToRun(added.id, 'tag')
+}
+
+function filling(rows: string[][], height: number, width: number): string[][] {
+  const [only] = rows
+  if (rows.length !== 1 || !only || height <= 1) return rows
+  const line = only.length === 1 ? Array.from({ length: width }, () => only[0] ?? '') : only
+  return Array.from({ length: height }, () => line)
+}
+
+function markedIds(grid: Grid): ReadonlySet<string> {
+  return new Set(grid.markedRuns().map(({ id }) => id))
+}
