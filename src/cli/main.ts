@@ -15,7 +15,7 @@ async function run(words: readonly string[]): Promise<ExitCode> {
       await print([help])
       return exitCodes.done
     case 'version':
-      await print([`lagwright ${version}\n`])
+      await print([`lagwright ${version()}\n`])
       return exitCodes.done
     case 'mistaken':
       await printProblems(request.problems)

@@ -1,0 +1,113 @@
+import Papa from 'papaparse'
+import { describe, expect, it } from 'vitest'
+import { cautions } from '#report/cautions.ts'
+import { writeResultsCsv } from '#report/results-csv.ts'
+import { countWords, writeRunTable } from '#report/run-table.ts'
+import { sizeWords } from '#report/run-words.ts'
+import { textWidth } from '#report/text-table.ts'
+import { sizedDemo } from './demo-runs.ts'
+
+const runs = sizedDemo()
+const table = (units: 'si' | 'us', width: number | null = null) =>
+  writeRunTable(runs, { units, width }).split('\n')
+const line = (lines: readonly string[], tag: string) =>
+  lines.find((text) => text.startsWith(tag)) ?? ''
+
+describe('the table of results', () => {
+  it('has a line per run, the units in the header, the count and the cautions', () => {
+    const lines = table('si')
+    expect(lines[0]).toMatch(
+      /^Tag +Size +Lagging mm +Loss W\/m +Bare W\/m +Surface °C +Governed by +Reason$/,
+    )
+    for (const { result } of runs) expect(line(lines, result.tag)).toContain(result.reason)
+    expect(lines).toContain(countWords(runs))
+    for (const { text } of cautions) expect(lines.join('\n')).toContain(text)
+  })
+
+  it('lines numbers up at their right end', () => {
+    const [header = '', ...rows] = table('si')
+    const end = header.indexOf('Loss W/m') + 'Loss W/m'.length
+    for (const { result } of runs) expect(line(rows, result.tag).slice(end, end + 2)).toBe('  ')
+  })
+
+  it('prints US units throughout, bounds included', () => {
+    const lines = table('us')
+    expect(lines[0]).toMatch(/Lagging in +Loss Btu\/h·ft +Bare Btu\/h·ft +Surface °F/)
+    for (const { result } of runs) expect(line(lines, result.tag)).not.toMatch(/°C|W\/m|\d mm/)
+  })
+
+  it('keeps to the width of the terminal', () => {
+    const { length } = runs
+    for (const text of table('si', 120).slice(0, length + 1))
+      expect(textWidth(text)).toBeLessThanOrEqual(120)
+  })
+
+  it('gives each note once, with its runs', () => {
+    const lines = table('si')
+    const notes = lines.slice(lines.indexOf('Notes') + 1, lines.indexOf('Cautions') - 1)
+    expect(new Set(notes).size).toBe(notes.length)
+    expect(notes.length).toBe(
+      new Set(runs.flatMap(({ result }) => result.notes.map(({ text }) => text))).size,
+    )
+  })
+
+  it('counts what is met', () => {
+    expect(countWords(runs)).toBe(
+      `${runs.length} runs. ${runs.length - 1} meet their limits; not so: GL-322.`,
+    )
+    expect(countWords(runs.slice(0, 1))).toBe('1 run. All limits are met.')
+  })
+})
+
+describe('the size in words', () => {
+  it.each([
+    [{ size: 'DN 80', outerDiameterM: 0.0889 }, 'DN 80', 'DN 80'],
+    [{ widthM: 0.6, heightM: 0.4 }, '600 × 400', '23.6 × 15.7'],
+    [{ outerDiameterM: 0.0603 }, 'Ø 60.3', 'Ø 2.4'],
+    [{ areaM2: 26 }, '26.0\u00a0m²', '279.9\u00a0ft²'],
+    [{}, '–', '–'],
+  ])('of %j is %s or %s', (values, si, us) => {
+    expect(sizeWords(values, 'si')).toBe(si)
+    expect(sizeWords(values, 'us')).toBe(us)
+  })
+})
+
+describe('results as CSV', () => {
+  const { data, errors } = Papa.parse<Record<string, string>>(writeResultsCsv(runs).trimEnd(), {
+    header: true,
+  })
+
+  it('has a row per run with every cell in its column', () => {
+    expect(errors).toEqual([])
+    expect(data.map(({ tag }) => tag)).toEqual(runs.map(({ result }) => result.tag))
+  })
+
+  it('holds the numbers of the results in mm and SI, empty where there is none', () => {
+    for (const [index, row] of data.entries()) {
+      const chosen = runs[index]?.result.chosen
+      expect(row.thickness_mm).toBe(
+        chosen ? String(Number((chosen.thicknessM * 1000).toPrecision(6))) : '',
+      )
+      expect(Number(row.surface_c)).toBeCloseTo(chosen?.surfaceTempC ?? 0, 3)
+      expect(row.reason).toBe(runs[index]?.result.reason)
+    }
+  })
+
+  it('keeps a tag that looks like a formula from being run', () => {
+    const [first] = runs
+    if (!first) throw new Error('no runs')
+    const csv = writeResultsCsv([{ ...first, result: { ...first.result, tag: '=cmd' } }])
+    expect(csv.split('\n')[1]).toMatch(/^'=cmd,/)
+  })
+})
+
+describe('cautions', () => {
+  it('have a code of their own, a text and somebody to defer to', () => {
+    expect(new Set(cautions.map(({ code }) => code)).size).toBe(cautions.length)
+    for (const { text, deferTo } of cautions) {
+      expect(text).toMatch(/^[A-Z].*\.$/)
+      expect(text.length).toBeLessThan(180)
+      expect(deferTo).not.toBe('')
+    }
+  })
+})
