@@ -48,6 +48,8 @@ export function solve(system: System): Solution {
 const CLOSED = 1e-12
 /** More than this share left over means that the search ended on a jump of a correlation. */
 const JUMP = 1e-9
+/** And never less than this is left over [K]: a difference of almost nothing has no share to judge by. */
+const NOTHING_K = 1e-12
 
 function solveFace(
   system: System,
@@ -99,7 +101,7 @@ function solveFace(
   )
   const excessK = root.at
   const differenceK = Math.max(Math.abs(mediumExcessK - excessK), Math.abs(excessK))
-  if (Math.abs(root.value) <= JUMP * differenceK) return finishOnFilm(excessK)
+  if (Math.abs(root.value) <= Math.max(JUMP * differenceK, NOTHING_K)) return finishOnFilm(excessK)
 
   // The bracket closed in on a jump between two ranges of a correlation: the flux that the layers carry lies between
   // the fluxes of the two sides, and that flux closes the balance.

@@ -15,10 +15,11 @@ export type Resolved =
   | { readonly ok: false; readonly issues: readonly Issue[] }
 
 /** All faults of a run come back at once: each part is resolved even where another has failed. */
-export function resolve(values: RunValues, index: CatalogueIndex): Resolved {
+export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   const findings = new Findings()
+  const values = withoutBlanks(given)
   const { tag } = values
-  if (tag === undefined || tag.trim() === '') {
+  if (tag === undefined) {
     findings.fault('tag', 'nothing', 'a tag that no other run has')
   }
   const thing = resolveThing(values, index, findings)
@@ -71,6 +72,14 @@ export function resolve(values: RunValues, index: CatalogueIndex): Resolved {
       notes: findings.notes,
     },
   }
+}
+
+/** A text of nothing but spaces is not given: a blank reason is none, a blank material is no name to look up. */
+function withoutBlanks(values: RunValues): RunValues {
+  const kept = Object.entries(values).filter(
+    ([, value]) => typeof value !== 'string' || value.trim() !== '',
+  )
+  return Object.fromEntries(kept)
 }
 
 const setsAny = (limits: Problem['limits']): boolean =>
