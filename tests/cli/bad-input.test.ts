@@ -1,0 +1,169 @@
+import { readdirSync } from 'node:fs'
+import { describe, expect, it } from 'vitest'
+import { goodList, place, slow } from './command.ts'
+
+const sized = 'tag,shape,size,medium_c,air_c,material,max_loss_w_m'
+const run = (tag: string, ...cells: readonly string[]) => [tag, 'pipe', ...cells].join(',')
+
+/** Every kind of bad list once, through a real process; all the fine cases are in the tests of the reader. */
+const badLists: readonly (readonly [
+  name: string,
+  list: string | Uint8Array,
+  problems: readonly string[],
+])[] = [
+  [
+    'an empty file',
+    '',
+    ['the file: found nothing in it; allowed: a header row and a row for every run'],
+  ],
+  [
+    'no runs',
+    `${sized}\n`,
+    ['the file: found no runs; allowed: a row for every run below the header'],
+  ],
+  [
+    'bad cells in several rows',
+    `${sized}\n${run('A', 'DN 50', 'hot', '20', 'x', '1e999')}\n${run('A', 'DN 50', '80', 'NaN', 'x', '5')}\n`,
+    [
+      'row 2, column medium_c: found "hot"; allowed: a number from -200 to 1000 °C',
+      'row 2, column max_loss_w_m: found "1e999"; allowed: a number from 0.01 to 1000000 W/m',
+      'row 3, column air_c: found "NaN"; allowed: a number from -70 to 200 °C',
+      'row 3, column tag: found "A", as in row 2; allowed: a tag of its own for every run',
+    ],
+  ],
+  [
+    'columns unknown, repeated and to come',
+    'tag,meduim_c,air_c,Air_F,valves\nA,80,20,68,2\n',
+    [
+      'row 1, column meduim_c: found an unknown column; allowed: known columns, of which medium_c is the nearest',
+      'row 1, column air_f: found the same as column air_c again; allowed: each column once, in one unit',
+      'row 1, column valves: found a column that is not yet supported; allowed: the list without it',
+    ],
+  ],
+  [
+    'choices to come',
+    'tag,shape,orientation\nA,sphere,inclined\n',
+    [
+      'row 2, column shape: found "sphere"; allowed: one of pipe, round-duct, rect-duct, flat (sphere is not yet supported)',
+      'row 2, column orientation: found "inclined"; allowed: one of horizontal, vertical, up, down (inclined is not yet supported)',
+    ],
+  ],
+  ['a torn row', `${sized}\nA,pipe,DN`, ['row 2: found 3 cells; allowed: 7, as in the header']],
+  [
+    'bytes that are not text',
+    Uint8Array.of(0x74, 0x61, 0x67, 0x0a, 0xff),
+    [
+      'row 2: found a byte (hexadecimal ff) that is not UTF-8 text; allowed: UTF-8 text; save the file as "CSV UTF-8"',
+    ],
+  ],
+]
+
+describe('bad input', slow, () => {
+  it.each(badLists)(
+    '%s: ends with 2, every problem on a line, nothing written',
+    async (_name, list, problems) => {
+      const { folder, put, lagwright } = place()
+      put('runs.csv', list)
+      for (const extra of [['--out', 'result.csv'], ['--json']]) {
+        const { code, out, err } = await lagwright('size', 'runs.csv', ...extra)
+        expect(err).toEqual(problems)
+        expect(out).toBe('')
+        expect(code).toBe(2)
+      }
+      expect(readdirSync(folder)).toEqual(['runs.csv'])
+    },
+  )
+
+  it('that shows only when runs are sized is named with its rows, all at once', async () => {
+    const list = [
+      sized,
+      run('A', '', '80', '20', 'stone_wool_pipe_section', '20'),
+      run('OK', 'DN 50', '80', '20', 'stone_wool_pipe_section', '20'),
+      '',
+      run('B', 'DN 50', '', '20', 'stone_wool_pipe_section', '20'),
+      run('C', 'DN 50', '80', '20', 'no_such_wool', '20'),
+    ].join('\n')
+    const { code, out, err } = await place().lagwrightReading(list, 'size', '-')
+    expect(err.map((line) => line.split(':')[0])).toEqual([
+      'row 2, column size',
+      'row 5, column medium_c',
+      'row 6, column material',
+    ])
+    expect(err[2]).toContain('no_such_wool')
+    expect(out).toBe('')
+    expect(code).toBe(2)
+  })
+
+  it.each([
+    [[], ['found no command; allowed: size. See --help.']],
+    [['frob'], ['found the unknown command "frob"; allowed: size. See --help.']],
+    [['size'], ['found no list of runs; allowed: RUNS.csv, JOB.lagjob, or - for standard input']],
+    [['size', 'a.csv', 'b.csv'], ['found 2 inputs; allowed: one list of runs']],
+    [['size', 'a.csv', '--units'], ['--units: found no value; allowed: --units si|us']],
+    [['size', 'a.csv', '--json', '--json'], ['--json: found twice; allowed: once']],
+    [
+      [
+        'size',
+        'a.csv',
+        '--jsn',
+        '--units',
+        'metric',
+        '--out',
+        'a.pdf',
+        '--job',
+        'b.csv',
+        '--force=yes',
+      ],
+      [
+        'found the unknown option "--jsn"; allowed: --json, --out FILE, --force, --units si|us, --job JOB.lagjob, --help, --version',
+        '--force: found a value; allowed: none',
+        '--out: found "a.pdf"; allowed: a file name that ends in .json, .csv, .txt',
+        '--units: found "metric"; allowed: si, us',
+        '--job: found "b.csv"; allowed: a file name that ends in .lagjob',
+      ],
+    ],
+    [
+      ['size', 'nowhere.csv', '--out', 'no/such/folder.csv'],
+      [
+        expect.stringMatching(
+          /^--out: there is no folder .*such; allowed: a folder that is there$/,
+        ),
+        'nowhere.csv: there is no such file; allowed: a list of runs as CSV, a job that ends in .lagjob, or -',
+      ],
+    ],
+    [
+      ['size', '.'],
+      ['.: this is a folder; allowed: a list of runs as CSV, a job that ends in .lagjob, or -'],
+    ],
+  ])('on the command line %j', async (words, problems) => {
+    const { code, out, err } = await place().lagwright(...words)
+    expect(err).toEqual(problems)
+    expect(out).toBe('')
+    expect(code).toBe(2)
+  })
+
+  it.each(['touch', 'loss', 'quote', 'walkdown', 'working'])(
+    '%s is refused by name',
+    async (door) => {
+      const { put, lagwright } = place()
+      const { code, err } = await lagwright(door, put('runs.csv', goodList))
+      expect(err).toEqual([`the command ${door} is not yet supported; allowed: size`])
+      expect(code).toBe(2)
+    },
+  )
+})
+
+describe('asking', slow, () => {
+  it.each([['--help'], ['size', '--help'], ['-h']])('for help with %s', async (...words) => {
+    const { code, out, err } = await place().lagwright(...words)
+    expect(out).toContain('lagwright size RUNS.csv|JOB.lagjob|-')
+    expect(err).toEqual([])
+    expect(code).toBe(0)
+  })
+
+  it('for the version', async () => {
+    const { code, out } = await place().lagwright('--version')
+    expect(out).toMatch(/^lagwright \d+\.\d+\.\d+\n$/)
+    expect(code).toBe(0)
+  })
+})
