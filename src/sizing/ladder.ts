@@ -16,16 +16,20 @@ const same = (a: number, b: number): boolean => Math.abs(a - b) < EQUAL_M
 /** Section thicknesses of a conductivity given by hand [m]. Source: product rule, a common section series. */
 const PLAIN_STEPS_M = [0.02, 0.025, 0.03, 0.04, 0.05, 0.06, 0.07, 0.08, 0.09, 0.1]
 
-/** Rungs for a conductivity without a material: single pieces up to 50 mm, pairs above. */
+/** Rungs for a conductivity without a material: single pieces up to 50 mm, pairs above, up to 100 mm. */
 export function plainSteps(): Step[] {
-  return metricSteps(PLAIN_STEPS_M, { largestM: 0.1, single: false })
+  const largestM = Math.max(...PLAIN_STEPS_M)
+  return metricSteps(PLAIN_STEPS_M, { largestM, single: false }).filter(
+    ({ thicknessM }) => thicknessM <= largestM + EQUAL_M,
+  )
 }
 
 /**
  * Rungs of one material and series, thinnest first.
  *
  * Up to 50 mm one piece; above, the fewest pieces: a first layer of 40 or 50 mm and the piece that differs least from
- * it, up to twice the largest piece. A form sold as a single layer stays single.
+ * it; beyond what such a pair reaches, the two pieces that differ least, up to twice the largest piece. A form sold as
+ * a single layer stays single.
  */
 export function metricLadder(steps: readonly ThicknessStep[]): Step[] {
   const metric = steps.filter((step) => step.series === 'metric')
@@ -47,7 +51,7 @@ function metricSteps(
     .filter((thicknessM) => form.single || thicknessM <= SINGLE_UP_TO_M + EQUAL_M)
     .map((thicknessM) => step([thicknessM]))
   if (!form.single) {
-    found.push(...pairs(pieces, FIRST_PIECES_M))
+    found.push(...layered(pieces, FIRST_PIECES_M, SINGLE_UP_TO_M))
     // Listed thicknesses above the largest piece that no pair has made: wound up from the largest pieces.
     for (const totalM of sold) {
       if (!found.some((known) => same(known.thicknessM, totalM)))
@@ -57,16 +61,29 @@ function metricSteps(
   return thinnestFirst(found)
 }
 
-/** First layer of a fixed choice, second one free; for each total the pair with the smallest difference. */
-function pairs(pieces: readonly number[], firstPiecesM: readonly number[]): Step[] {
+/** Every pair above what is laid in one: with a usual first piece as far as that reaches, then with any. */
+function layered(
+  pieces: readonly number[],
+  firstPiecesM: readonly number[],
+  singleUpToM: number,
+): Step[] {
+  const usual = pieces.filter((piece) => firstPiecesM.some((firstM) => same(firstM, piece)))
+  const withUsual = pairs(usual, pieces, singleUpToM)
+  const reachM = Math.max(singleUpToM, ...withUsual.map(({ thicknessM }) => thicknessM))
+  return [...withUsual, ...pairs(pieces, pieces, reachM)]
+}
+
+/** For each total above a thickness, the pair with the smallest difference; the thinner first among equals. */
+function pairs(firsts: readonly number[], seconds: readonly number[], aboveM: number): Step[] {
   const best: Step[] = []
-  for (const firstM of pieces.filter((piece) => firstPiecesM.some((m) => same(m, piece)))) {
-    for (const secondM of pieces) {
+  for (const firstM of firsts) {
+    for (const secondM of seconds) {
       const candidate = step([firstM, secondM])
-      if (candidate.thicknessM <= SINGLE_UP_TO_M + EQUAL_M) continue
+      if (candidate.thicknessM <= aboveM + EQUAL_M) continue
       const known = best.findIndex(({ thicknessM }) => same(thicknessM, candidate.thicknessM))
-      if (known < 0) best.push(candidate)
-      else if (difference(candidate) < difference(best[known] ?? candidate)) best[known] = candidate
+      const before = best[known]
+      if (before === undefined) best.push(candidate)
+      else if (difference(candidate) < difference(before) - EQUAL_M) best[known] = candidate
     }
   }
   return best
@@ -109,7 +126,7 @@ export function inchLadder(
     ...pieces
       .filter((thicknessM) => single || thicknessM <= SINGLE_UP_TO_INCH_M + EQUAL_M)
       .map((thicknessM) => step([thicknessM])),
-    ...(single ? [] : pairs(pieces, FIRST_PIECES_INCH_M)),
+    ...(single ? [] : layered(pieces, FIRST_PIECES_INCH_M, SINGLE_UP_TO_INCH_M)),
   ]
   const fitting = sections.filter(
     (section) =>
