@@ -1,5 +1,5 @@
 /** What the schedule shows of a sized run: small, since ten thousand of them cross from the worker to the window. */
-import type { Governing, Issue, Rating, RunOutcome, RunResult } from '#sizing/result.ts'
+import type { Governing, Issue, LimitResult, RunOutcome, RunResult } from '#sizing/result.ts'
 
 /** Said by a shape first: disc, lozenge, triangle. */
 export type RunState = 'passes' | 'heed' | 'fails'
@@ -57,15 +57,16 @@ function sizedBrief(result: RunResult): SizedBrief {
   }
 }
 
-/** A limit that is not met fails; one that is met by a hair needs a look. */
 function stateOf({ chosen }: RunResult): RunState {
   if (!chosen?.pass) return 'fails'
-  return isClose(chosen) ? 'heed' : 'passes'
+  return chosen.limits.some((limit) => limitState(limit) === 'heed') ? 'heed' : 'passes'
 }
 
 /** Kelvin: closer to its bound than the film correlations are sure of the surface. */
 const closeK = 0.5
 
-function isClose({ limits }: Rating): boolean {
-  return limits.some(({ unit, value, bound }) => unit === '°C' && Math.abs(value - bound) < closeK)
+/** A limit that is not met fails; one that is met by a hair needs a look. */
+export function limitState({ pass, unit, value, bound }: LimitResult): RunState {
+  if (!pass) return 'fails'
+  return unit === '°C' && Math.abs(value - bound) < closeK ? 'heed' : 'passes'
 }

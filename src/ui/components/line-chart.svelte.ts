@@ -12,6 +12,7 @@ import {
   Tooltip,
 } from 'chart.js'
 import type { Attachment } from 'svelte/attachments'
+import { formatNumber } from '#units/format.ts'
 import { prefersStillness, themeColour } from './theme.svelte.ts'
 
 Chart.register(LineController, LineElement, LinearScale, PointElement, Tooltip)
@@ -109,7 +110,7 @@ function dataset(
     borderColor: colour,
     borderDash: [...series.dash],
     borderWidth: 1.75,
-    pointRadius: xs.map((_, at) => (isMarked(at) ? 5 : 2.5)),
+    pointRadius: xs.map((_, at) => (isMarked(at) ? 5 : xs.length > 14 ? 1.75 : 2.5)),
     pointHoverRadius: 5,
     pointBorderWidth: 1.5,
     pointBorderColor: colour,
@@ -161,8 +162,14 @@ function options(data: LineChartData, canvas: HTMLCanvasElement): LineChart['opt
 function axisOptions(look: { soft: string; hair: string; font: { family: string; size: number } }) {
   return (title: string): ScaleOptions<'linear'> => ({
     title: { display: true, text: title, color: look.soft, font: look.font, padding: 2 },
-    ticks: { color: look.soft, font: look.font, maxTicksLimit: 6, padding: 4 },
+    ticks: { color: look.soft, font: look.font, maxTicksLimit: 6, padding: 4, callback: tickWords },
     border: { color: look.hair },
     grid: { color: look.hair, tickLength: 0 },
   })
+}
+
+/** Whole numbers plain, others with the decimals they need. */
+function tickWords(value: number | string): string {
+  const exact = Number(Number(value).toPrecision(6))
+  return formatNumber(exact, String(Math.abs(exact)).split('.')[1]?.length ?? 0)
 }

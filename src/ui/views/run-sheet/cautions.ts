@@ -16,8 +16,8 @@ export function limitCautions(values: RunValues, result: RunResult): string[] {
           'The vapour barrier has to stay closed at every joint and support, else damp gets in behind it.',
         ]
       : []),
-    ...(isLaggedOutdoorsOrWarm(values, result)
-      ? ['Keep the weather barrier sealed: wet lagging hides corrosion of the pipe.']
+    ...(isLaggedOutdoors(values, result)
+      ? ['Keep the weather barrier sealed: a pipe corrodes unseen under wet lagging.']
       : []),
   ]
 }
@@ -30,10 +30,7 @@ export const standingCaution =
 export const priceCaution =
   'Prices and labour are illustrative until you put your own in their place.'
 
-/** Carbon steel under lagging corrodes fastest in this band; common practice, no source. */
-const CORROSION_BAND_C = { from: -4, to: 175 }
-
-function isLaggedOutdoorsOrWarm({ mediumC, windMPerS }: RunValues, { chosen }: RunResult): boolean {
-  if (!chosen || chosen.thicknessM === 0 || mediumC === undefined) return false
-  return (windMPerS ?? 0) > 0 && mediumC >= CORROSION_BAND_C.from && mediumC <= CORROSION_BAND_C.to
+/** Wind on a lagged run means that it lies outdoors. */
+function isLaggedOutdoors({ windMPerS }: RunValues, { chosen }: RunResult): boolean {
+  return (windMPerS ?? 0) > 0 && chosen !== null && chosen.thicknessM > 0
 }

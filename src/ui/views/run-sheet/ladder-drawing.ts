@@ -1,50 +1,37 @@
 /** Pixels of the ladder: rungs at their true thickness, the cost above them, one bar per limit below. */
 import type { LimitEnd, LimitName, Rating } from '#sizing/result.ts'
-import { formatQuantity, formatWithUnit, thicknessDecimals } from '#units/format.ts'
+import { formatQuantity, thicknessDecimals } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
-import { limitBars, type PassStretch } from './limit-bars.ts'
+import { type BarPiece, barPiece } from './bar-pieces.ts'
+import { type DrawnCost, drawCost } from './ladder-cost.ts'
+import { limitBars } from './limit-bars.ts'
 
 const LABELS = 62
-const RIGHT = 48
+/** Room for the names of the cost lines. */
+const NAMES = 46
+/** How far bars go on beyond the thickest rung. */
+const OVERHANG = 14
 const COST_TOP = 26
 const COST_HEIGHT = 104
 const BAR_HEIGHT = 16
 const BAR_STEP = 25
+/** More rungs than this stand close. */
+const DENSE = 14
 /** Room one thickness label needs beside the next. */
 const LABEL_ROOM = 21
-/** The dearest rung shown: beyond this many times the cheapest the curve leaves through the top. */
-const COST_REACH = 2.2
-
-interface Point {
-  readonly x: number
-  readonly y: number
-}
-
-export interface DrawnRung extends Point {
+export interface DrawnRung {
   readonly index: number
+  readonly x: number
   readonly label: string
   /** False where the label would run into its neighbour. */
   readonly hasLabel: boolean
-  readonly passes: boolean
 }
 
 export interface DrawnBar {
   readonly limit: LimitName
   readonly y: number
-  readonly pieces: readonly {
-    readonly x: number
-    readonly width: number
-    readonly words: string
-    readonly isTight: boolean
-  }[]
-}
-
-export interface DrawnCost {
-  readonly total: readonly Point[]
-  readonly lagging: readonly Point[]
-  readonly heat: readonly Point[]
-  /** Right of the last point: name of each line, pushed apart where they would touch. */
-  readonly names: readonly { readonly name: 'total' | 'lagging' | 'heat'; readonly y: number }[]
+  /** None where no rung passes. */
+  readonly pieces: readonly BarPiece[]
 }
 
 export interface LadderDrawing {
@@ -57,6 +44,8 @@ export interface LadderDrawing {
   readonly costBottom: number
   readonly barHeight: number
   readonly rungs: readonly DrawnRung[]
+  /** Rungs stand so close that full marks would touch. */
+  readonly isDense: boolean
   readonly bars: readonly DrawnBar[]
   readonly cost: DrawnCost | null
 }
@@ -64,44 +53,49 @@ export interface LadderDrawing {
 export interface LadderInput {
   readonly ladder: readonly Rating[]
   readonly ends: readonly LimitEnd[]
-  /** The rung that must keep its label. */
-  readonly marked: number | null
+  /** Rungs with an upright of their own: the shown one and the chosen one. The first keeps its label. */
+  readonly marked: readonly number[]
   readonly width: number
   readonly units: UnitSystem
 }
 
 export function drawLadder({ ladder, ends, marked, width, units }: LadderInput): LadderDrawing {
-  const x = thicknessScale(ladder, LABELS + 12, width - RIGHT)
   const hasMoney = ladder.length > 0 && ladder.every((rung) => rung.money !== null)
-  const top = hasMoney ? COST_TOP : 8
+  // With costs the names of their lines stand to the right.
+  const right = width - (hasMoney ? NAMES : 2)
+  const x = thicknessScale(ladder, LABELS + 12, right - OVERHANG)
+  const top = hasMoney ? COST_TOP : 4
   const costBottom = hasMoney ? COST_TOP + COST_HEIGHT : top
-  const barsTop = costBottom + (hasMoney ? 20 : 0)
+  const barsTop = costBottom + (hasMoney ? 20 : 6)
+  const uprights = marked.map((index) => x(ladder[index]?.thicknessM ?? 0))
   const bars = limitBars(ladder, ends).map(({ limit, stretches }, at) => ({
     limit,
     y: barsTop + at * BAR_STEP,
     pieces: stretches.map((stretch) =>
-      piece(stretch, { x, left: LABELS, right: width - RIGHT + 18, units }),
+      barPiece(stretch, { x, left: LABELS, right, uprights, units }),
     ),
   }))
   const bottom = barsTop + bars.length * BAR_STEP + 2
-  const cost = hasMoney ? drawCost(ladder, x) : null
+  const labels = rungLabels(ladder, units)
   const rungs = ladder.map((rung, index) => ({
-    ...rungAt(rung, index, units, ladder),
+    index,
+    label: labels[index] ?? '',
+    hasLabel: true,
     x: x(rung.thicknessM),
-    y: cost?.total[index]?.y ?? top,
   }))
   return {
-    width,
     height: bottom + 22,
+    width,
     left: LABELS,
-    right: width - RIGHT + 18,
+    right,
     top,
     bottom,
     costBottom,
     barHeight: BAR_HEIGHT,
-    rungs: withRoom(rungs, marked),
+    rungs: withRoom(rungs, marked[0]),
+    isDense: ladder.length > DENSE,
     bars,
-    cost,
+    cost: hasMoney ? drawCost(ladder, { x, top: COST_TOP, height: COST_HEIGHT }) : null,
   }
 }
 
@@ -114,13 +108,10 @@ export function nearestRung({ rungs }: LadderDrawing, x: number): number | null 
   return nearest?.index ?? null
 }
 
-function rungAt(rung: Rating, index: number, units: UnitSystem, ladder: readonly Rating[]) {
-  const decimals = thicknessDecimals(
-    ladder.map(({ thicknessM }) => thicknessM),
-    units,
-  )
-  const label = formatQuantity(rung.thicknessM, 'thickness', units, units === 'us' ? 1 : decimals)
-  return { index, label, hasLabel: true, passes: rung.pass }
+function rungLabels(ladder: readonly Rating[], units: UnitSystem): string[] {
+  const thicknessesM = ladder.map(({ thicknessM }) => thicknessM)
+  const decimals = units === 'us' ? 1 : thicknessDecimals(thicknessesM, units)
+  return thicknessesM.map((thicknessM) => formatQuantity(thicknessM, 'thickness', units, decimals))
 }
 
 /** From a little below the thinnest rung, or nought where that is near, to the thickest. */
@@ -136,58 +127,13 @@ function thicknessScale(
   return (thicknessM) => left + ((thicknessM - startM) / spanM) * (right - left)
 }
 
-function piece(
-  { fromM, toM }: PassStretch,
-  field: { x: (m: number) => number; left: number; right: number; units: UnitSystem },
-) {
-  const start = fromM === null ? field.left : Math.max(field.left, field.x(fromM))
-  const end = toM === null ? field.right : field.x(toM)
-  const shown = (thicknessM: number) => formatWithUnit(thicknessM, 'thickness', field.units)
-  const words =
-    fromM !== null && toM !== null
-      ? `${shown(fromM)} to ${shown(toM)}`
-      : fromM !== null
-        ? `passes from ${shown(fromM)}`
-        : toM !== null
-          ? `passes to ${shown(toM)}`
-          : 'passes throughout'
-  const width = Math.max(3, end - start)
-  return { x: start, width, words, isTight: width < words.length * 6 }
-}
-
-function drawCost(ladder: readonly Rating[], x: (thicknessM: number) => number): DrawnCost {
-  const totals = ladder.map((rung) => rung.money?.lifeCycle ?? 0)
-  const reach = Math.max(1e-9, Math.min(Math.max(...totals), Math.min(...totals) * COST_REACH))
-  const y = (cost: number) => COST_TOP + COST_HEIGHT * (1 - Math.max(0, cost) / reach)
-  const line = (cost: (rung: Rating) => number) =>
-    ladder.map((rung) => ({ x: x(rung.thicknessM), y: y(cost(rung)) }))
-  const lagging = line((rung) => rung.money?.installed ?? 0)
-  const heat = line((rung) => (rung.money?.lifeCycle ?? 0) - (rung.money?.installed ?? 0))
-  const total = line((rung) => rung.money?.lifeCycle ?? 0)
-  const names = (['total', 'lagging', 'heat'] as const).map((name) => ({
-    name,
-    y: { total, lagging, heat }[name].at(-1)?.y ?? 0,
-  }))
-  return { total, lagging, heat, names: apart(names) }
-}
-
-/** Names keep 13 px between them, in the order of their lines. */
-function apart<N extends { readonly y: number }>(names: readonly N[]): N[] {
-  const placed: N[] = []
-  for (const name of names.toSorted((a, b) => a.y - b.y)) {
-    const above = placed.at(-1)
-    placed.push({ ...name, y: Math.max(name.y, above ? above.y + 13 : COST_TOP) })
-  }
-  return placed
-}
-
 /** Labels from left to right where there is room; the marked rung always has its own. */
-function withRoom(rungs: readonly DrawnRung[], marked: number | null): DrawnRung[] {
+function withRoom(rungs: readonly DrawnRung[], marked: number | undefined): DrawnRung[] {
   const markedX = rungs.find(({ index }) => index === marked)?.x ?? Number.NEGATIVE_INFINITY
   let lastX = Number.NEGATIVE_INFINITY
   return rungs.map((rung) => {
     const isMarked = rung.index === marked
-    const room = rung.label.length > 2 ? LABEL_ROOM + 6 : LABEL_ROOM
+    const room = LABEL_ROOM + Math.max(0, rung.label.length - 2) * 6
     const hasLabel = isMarked || (rung.x - lastX >= room && Math.abs(rung.x - markedX) >= room)
     if (hasLabel) lastX = rung.x
     return { ...rung, hasLabel }

@@ -1,8 +1,9 @@
 /** Walking the rungs with the keyboard, and what a rung says about itself. */
+import { governingWords } from '#report/run-words.ts'
 import type { Rating } from '#sizing/result.ts'
 import { formatWithUnit } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
-import { limitWords } from './words.ts'
+import { thicknessWords } from './words.ts'
 
 interface Place {
   readonly shown: number | null
@@ -40,14 +41,14 @@ export function rungWords(
   per: 'm' | 'm2',
   currency: string,
 ): string {
-  const failed = rung.limits.filter(({ pass }) => !pass).map(({ limit }) => limitWords[limit])
+  const failed = rung.limits.filter(({ pass }) => !pass).map(({ limit }) => governingWords[limit])
   const verdict = failed.length > 0 ? `fails ${[...new Set(failed)].join(', ')}` : 'passes'
   const cost =
     rung.money === null
       ? []
       : [`life-cycle cost ${moneyWords(rung.money.lifeCycle, per, units)} ${currency}`.trim()]
   return [
-    `${formatWithUnit(rung.thicknessM, 'thickness', units)}${isChosen ? ', chosen' : ''}`,
+    `${thicknessWords(rung.thicknessM, units)}${isChosen ? ', chosen' : ''}`,
     verdict,
     lossWords(rung, units),
     `surface ${formatWithUnit(rung.surfaceTempC, 'temperature', units)}`,

@@ -1,15 +1,13 @@
-/** Pixels of the section drawing: where everything goes on a canvas of fixed size, to one scale. */
+/** Pixels of the section drawing: where everything goes, to one scale. */
 import { type Core, type SectionView, shells } from './section.ts'
 
-export const SECTION_WIDTH = 176
-export const SECTION_HEIGHT = 190
-/** Largest drawn part; the rest is for the dimension line. */
-const FIELD = 160
-const CENTRE = { x: SECTION_WIDTH / 2, y: FIELD / 2 + 2 }
+/** Room around what is drawn: half the width left over, the dimension line below, a label in the corner above. */
+const MARGIN = { beside: 8, below: 28, above: 2, label: 12 }
+/** Smallest core that has room for the medium's temperature. */
+const LABEL = { width: 66, height: 36 }
 const SHELLS = 48
-/** How much of a slab is cut out, and how much of the wall behind it is shown. */
-const SLAB_SPAN = { side: 130, upOrDown: 112 }
-const SLAB_WALL = 34
+/** How much of the wall behind a slab is shown, and the room for the dimension beside a lying one. */
+const SLAB = { wall: 34, beside: 48, air: 16 }
 
 interface Outline {
   readonly x: number
@@ -19,8 +17,14 @@ interface Outline {
   /** Half the width for a circle, 0 for a rectangle. */
   readonly corner: number
 }
+interface Point {
+  readonly x: number
+  readonly y: number
+}
 
 export interface SectionDrawing {
+  readonly width: number
+  readonly height: number
   readonly core: Outline
   readonly shells: readonly { readonly outline: Outline; readonly tempC: number }[]
   readonly joints: readonly Outline[]
@@ -30,22 +34,26 @@ export interface SectionDrawing {
     readonly to: Point
     readonly isUpright: boolean
   } | null
-  readonly label: Point & { readonly isInside: boolean }
-}
-interface Point {
-  readonly x: number
-  readonly y: number
+  readonly label: Point & { readonly place: 'inside' | 'above' | 'corner' }
 }
 
-/** `fitM` is the thickness that has to fit, so that walking the rungs keeps one scale where it can. */
-export function drawSection(view: SectionView, fitM: number): SectionDrawing {
-  const scale = pixelsPerMetre(view.core, Math.max(view.thicknessM, fitM))
-  const outlineAt = (depthM: number) =>
-    outline(view.core, depthM * scale, scale, view.thicknessM * scale)
+export interface SectionFrame {
+  /** Side of the square that the section fills [px]. */
+  readonly field: number
+  /** The thickness that has to fit, so that walking thinner rungs keeps one scale [m]. */
+  readonly fitM: number
+}
+
+export function drawSection(view: SectionView, { field, fitM }: SectionFrame): SectionDrawing {
+  const scale = pixelsPerMetre(view.core, Math.max(view.thicknessM, fitM), field)
+  const above = hasRoom(view.core, scale) ? MARGIN.above : MARGIN.label
+  const outlineAt = (depthM: number) => outline(view, depthM * scale, { scale, field, above })
   const core = outlineAt(0)
   const isLagged = view.thicknessM > 0
   const around = outlineAt(view.thicknessM)
   return {
+    width: field + 2 * MARGIN.beside,
+    height: field + above + MARGIN.below,
     core,
     shells: shells(view, SHELLS).map(({ outerM, tempC }) => ({
       outline: outlineAt(outerM),
@@ -54,61 +62,54 @@ export function drawSection(view: SectionView, fitM: number): SectionDrawing {
     joints: view.jointsM.map(outlineAt),
     jacket: isLagged ? around : null,
     dimension: isLagged ? dimension(view.core, core, around) : null,
-    label: label(view.core, core),
+    label: label(view.core, core, scale),
   }
 }
 
-function pixelsPerMetre(core: Core, fitM: number): number {
-  if (core.kind === 'round') return FIELD / (2 * (core.radiusM + fitM))
-  if (core.kind === 'slab') return (FIELD - 50) / Math.max(fitM, 0.05)
-  return FIELD / (2 * (Math.max(core.halfWidthM, core.halfHeightM) + fitM))
+function pixelsPerMetre(core: Core, fitM: number, field: number): number {
+  if (core.kind === 'round') return field / (2 * (core.radiusM + fitM))
+  if (core.kind === 'slab') return (field - SLAB.wall - SLAB.air) / Math.max(fitM, 0.05)
+  return field / (2 * (Math.max(core.halfWidthM, core.halfHeightM) + fitM))
 }
 
-/** Outline of everything up to a depth of the lagging, in pixels. */
-function outline(core: Core, depth: number, scale: number, thickness: number): Outline {
-  if (core.kind === 'round') {
-    const radius = core.radiusM * scale + depth
-    return {
-      x: CENTRE.x - radius,
-      y: CENTRE.y - radius,
-      width: 2 * radius,
-      height: 2 * radius,
-      corner: radius,
-    }
-  }
-  if (core.kind === 'box') {
-    const halfWidth = core.halfWidthM * scale + depth
-    const halfHeight = core.halfHeightM * scale + depth
-    return {
-      x: CENTRE.x - halfWidth,
-      y: CENTRE.y - halfHeight,
-      width: 2 * halfWidth,
-      height: 2 * halfHeight,
-      corner: 0,
-    }
-  }
-  return slabOutline(core.facing, depth, thickness)
+interface Sheet {
+  readonly scale: number
+  readonly field: number
+  readonly above: number
 }
+
+/** Outline of everything up to a depth of the lagging. */
+function outline(view: SectionView, depth: number, { scale, field, above }: Sheet): Outline {
+  const { core } = view
+  if (core.kind === 'slab') return slabOutline(core.facing, depth, view.thicknessM * scale, field)
+  const middle = { x: field / 2 + MARGIN.beside, y: field / 2 + above }
+  const [halfWidth, halfHeight] =
+    core.kind === 'round'
+      ? [core.radiusM * scale + depth, core.radiusM * scale + depth]
+      : [core.halfWidthM * scale + depth, core.halfHeightM * scale + depth]
+  return {
+    x: middle.x - halfWidth,
+    y: middle.y - halfHeight,
+    width: 2 * halfWidth,
+    height: 2 * halfHeight,
+    corner: core.kind === 'round' ? halfWidth : 0,
+  }
+}
+
+type Facing = Extract<Core, { kind: 'slab' }>['facing']
 
 /** A slab starts at its wall and grows towards the side it faces; wall and lagging together sit in the middle. */
-function slabOutline(facing: 'side' | 'up' | 'down', depth: number, thickness: number): Outline {
-  const start = (FIELD - SLAB_WALL - thickness) / 2
-  const length = SLAB_WALL + depth
-  // Left of the middle: the dimension stands to the right.
-  const across = { x: 6, width: SLAB_SPAN.upOrDown, height: length, corner: 0 }
+function slabOutline(facing: Facing, depth: number, thickness: number, field: number): Outline {
+  const start = (field - SLAB.wall - thickness) / 2
+  const length = SLAB.wall + depth
+  const lying = { x: MARGIN.beside, width: field - SLAB.beside, height: length, corner: 0 }
   switch (facing) {
     case 'side':
-      return {
-        x: 8 + start,
-        y: CENTRE.y - SLAB_SPAN.side / 2,
-        width: length,
-        height: SLAB_SPAN.side,
-        corner: 0,
-      }
+      return { x: MARGIN.beside + start, y: 20, width: length, height: field - 24, corner: 0 }
     case 'down':
-      return { ...across, y: start }
+      return { ...lying, y: start }
     case 'up':
-      return { ...across, y: FIELD - start - length }
+      return { ...lying, y: field - start - length }
   }
 }
 
@@ -127,10 +128,25 @@ function dimension(core: Core, inner: Outline, outer: Outline): SectionDrawing['
   }
 }
 
+function hasRoom(core: Core, scale: number): boolean {
+  switch (core.kind) {
+    case 'slab':
+      return true
+    case 'round':
+      return 2 * core.radiusM * scale >= LABEL.width
+    case 'box':
+      return (
+        2 * core.halfWidthM * scale >= LABEL.width && 2 * core.halfHeightM * scale >= LABEL.height
+      )
+  }
+}
+
 /** The medium's temperature stands inside where there is room, else in the corner with a leader. */
-function label(core: Core, inner: Outline): SectionDrawing['label'] {
-  const hasRoom = inner.width >= 62 && inner.height >= 40
-  const middle = { x: inner.x + inner.width / 2, y: inner.y + inner.height / 2 }
-  if (core.kind === 'slab') return { ...middle, isInside: core.facing !== 'side' }
-  return hasRoom ? { ...middle, isInside: true } : { x: 2, y: 12, isInside: false }
+function label(core: Core, inner: Outline, scale: number): SectionDrawing['label'] {
+  if (core.kind === 'slab' && core.facing === 'side') {
+    return { x: inner.x, y: inner.y - 6, place: 'above' }
+  }
+  return hasRoom(core, scale)
+    ? { x: inner.x + inner.width / 2, y: inner.y + inner.height / 2, place: 'inside' }
+    : { x: 0, y: 10, place: 'corner' }
 }

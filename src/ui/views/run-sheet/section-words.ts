@@ -4,6 +4,7 @@ import type { Rating } from '#sizing/result.ts'
 import { formatWithUnit } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import type { SectionView } from './section.ts'
+import { thicknessWords } from './words.ts'
 
 interface Drawn {
   readonly values: RunValues
@@ -26,7 +27,7 @@ export function sectionWords({ values, bare, view, shown, airC, units, buildUp }
   const lagging =
     shown.thicknessM === 0
       ? 'bare'
-      : `${formatWithUnit(shown.thicknessM, 'thickness', units)} of ${buildUp}${shown.piecesM.length > 1 ? ` in ${shown.piecesM.length} layers` : ''}`
+      : `${thicknessWords(shown.thicknessM, units)} of ${buildUp}${shown.piecesM.length > 1 ? ` in ${shown.piecesM.length} layers` : ''}`
   const across =
     shown.outerDiameterM === null || shown.thicknessM === 0
       ? []

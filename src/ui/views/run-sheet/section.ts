@@ -30,11 +30,12 @@ export interface SectionView {
 export function sectionView(values: RunValues, bare: Rating, shown: Rating): SectionView | null {
   const core = coreOf(values, bare)
   if (!core) return null
-  const mediumC = values.mediumC ?? bare.interfaceTempsC[0] ?? bare.surfaceTempC
+  // Steam may be given by its pressure: then the inside of the lagging is as hot as the steam.
+  const mediumC = values.mediumC ?? shown.interfaceTempsC[0] ?? bare.surfaceTempC
   return {
     core,
-    stretches: stretches(shown),
-    jointsM: joints(shown.piecesM).slice(0, -1),
+    stretches: stretches(values, shown),
+    jointsM: ends(shown.piecesM).slice(0, -1),
     thicknessM: shown.thicknessM,
     mediumC,
     surfaceC: shown.surfaceTempC,
@@ -83,24 +84,35 @@ function rectangle(values: RunValues): readonly [number | undefined, number | un
   return [values.widthM ?? fromSize(1), values.heightM ?? fromSize(2)]
 }
 
-/** Interfaces belong to pieces where their numbers match; pieces of one material are one stretch. */
-function stretches({ piecesM, interfaceTempsC, thicknessM, surfaceTempC }: Rating): Stretch[] {
+/** Between two interfaces lies one layer, made of one piece or more. */
+function stretches(values: RunValues, shown: Rating): Stretch[] {
+  const { thicknessM, interfaceTempsC, surfaceTempC } = shown
   if (thicknessM === 0) return []
-  const isPerPiece = interfaceTempsC.length === piecesM.length + 1
-  const endsM = isPerPiece ? [0, ...joints(piecesM)] : [0, thicknessM]
-  const tempsC = isPerPiece ? interfaceTempsC : [interfaceTempsC[0] ?? surfaceTempC, surfaceTempC]
-  return endsM.slice(1).map((toM, at) => ({
-    fromM: endsM[at] ?? 0,
+  const endsM = layerEndsM(values, shown)
+  const isMatched = interfaceTempsC.length === endsM.length + 1
+  const edgesM = isMatched ? [0, ...endsM] : [0, thicknessM]
+  const tempsC = isMatched ? interfaceTempsC : [interfaceTempsC[0] ?? surfaceTempC, surfaceTempC]
+  return edgesM.slice(1).map((toM, at) => ({
+    fromM: edgesM[at] ?? 0,
     toM,
     innerC: tempsC[at] ?? surfaceTempC,
     outerC: tempsC[at + 1] ?? surfaceTempC,
   }))
 }
 
-function joints(piecesM: readonly number[]): number[] {
+/** Where each layer ends [m]: the one written `?` takes what the others leave of the whole. */
+function layerEndsM({ layers }: RunValues, { thicknessM }: Rating): number[] {
+  if (layers === undefined) return [thicknessM]
+  const givenM = layers.split(';').map((layer) => Number(layer.split(':')[1]) / 1000)
+  const fixedM = givenM.reduce((sum, layerM) => sum + (Number.isFinite(layerM) ? layerM : 0), 0)
+  return ends(givenM.map((layerM) => (Number.isFinite(layerM) ? layerM : thicknessM - fixedM)))
+}
+
+/** Running sums: where each part ends. */
+function ends(partsM: readonly number[]): number[] {
   let depthM = 0
-  return piecesM.map((pieceM) => {
-    depthM += pieceM
+  return partsM.map((partM) => {
+    depthM += partM
     return depthM
   })
 }

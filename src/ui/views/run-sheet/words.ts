@@ -1,29 +1,15 @@
-/** The words of the run sheet: limits, bounds, build-up, and what the drawings say to who cannot see them. */
+/** The words of the run sheet: bounds, build-up, medium, payback. */
 import type { Catalogue } from '#catalogue/types.ts'
 import type { RunValues } from '#model/fields.ts'
-import type { Governing, LimitName, LimitResult, Rating } from '#sizing/result.ts'
-import { formatNumber, formatWithUnit } from '#units/format.ts'
+import type { LimitResult, Rating } from '#sizing/result.ts'
+import {
+  formatNumber,
+  formatWithUnit,
+  shownValue,
+  thicknessDecimals,
+  unitLabel,
+} from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
-
-export const limitWords: Readonly<Record<LimitName, string>> = {
-  touch: 'Touch',
-  loss: 'Loss',
-  damp: 'Damp',
-  frost: 'Frost',
-  arrival: 'Arrival',
-  code: 'Code',
-  space: 'Space',
-  service: 'Service',
-}
-
-export const governingWords: Readonly<Record<Governing, string>> = {
-  ...limitWords,
-  money: 'Cost',
-  smallest: 'Thinnest',
-  fixed: 'Fixed',
-  bare: 'Bare',
-  unmet: 'Unmet',
-}
 
 /** Quantities of the units in which limits are judged. */
 const quantityOfUnit: Readonly<Record<string, QuantityName>> = {
@@ -38,11 +24,16 @@ const quantityOfUnit: Readonly<Record<string, QuantityName>> = {
 }
 
 /** Value or bound of a limit with its unit. */
-export function limitNumber(value: number, unit: string, system: UnitSystem): string {
+export function limitNumber(
+  value: number,
+  unit: string,
+  system: UnitSystem,
+  decimals?: number,
+): string {
   const quantity = quantityOfUnit[unit]
   return quantity
-    ? formatWithUnit(value, quantity, system)
-    : `${formatNumber(value, 2)} ${unit}`.trim()
+    ? formatWithUnit(value, quantity, system, decimals)
+    : `${formatNumber(value, decimals ?? 2)} ${unit}`.trim()
 }
 
 /** `at most 58.0 °C`. */
@@ -72,16 +63,34 @@ export function buildUpWords(values: RunValues, catalogue: Catalogue | null): st
   return [lagging, ...finish].join('; ')
 }
 
-/** `in 2 layers, 40 + 40 mm`; empty for a single piece. */
-export function piecesWords({ piecesM }: Rating, system: UnitSystem): string {
-  if (piecesM.length < 2) return ''
-  const each = piecesM.map((pieceM) => formatWithUnit(pieceM, 'thickness', system))
-  return `${piecesM.length} layers: ${each.join(' + ')}`
+/** A thickness with its unit, to the tenth of a millimetre where it has one. */
+export function thicknessWords(thicknessM: number, system: UnitSystem): string {
+  return formatWithUnit(thicknessM, 'thickness', system, thicknessDecimals([thicknessM], system))
 }
 
-/** What flows: `steam`, else nothing. */
-export function mediumWord({ medium }: RunValues): string {
-  return medium === undefined || medium === 'other' ? '' : medium
+/** How the thickness is made up, where that is not one plain piece: layers, or the name an inch series sells it by. */
+export function piecesWords({ piecesM, nominalThicknessM }: Rating, system: UnitSystem): string {
+  const each = piecesM.map((pieceM) => thicknessWords(pieceM, system))
+  const layers = piecesM.length < 2 ? [] : [`${piecesM.length} layers: ${each.join(' + ')}`]
+  const name = formatWithUnit(nominalThicknessM, 'thickness', 'us').replace(/\.?0+(?=\D)/, '')
+  return [...layers, ...(nominalThicknessM === null ? [] : [`sold as ${name}`])].join('; ')
+}
+
+/** Decimals for a temperature that somebody chose: none where it is a whole number. */
+export function wholeDegrees(tempC: number, system: UnitSystem): number {
+  const shown = shownValue(tempC, 'temperature', system) ?? 0
+  return Math.abs(shown - Math.round(shown)) < 0.05 ? 0 : 1
+}
+
+/** Without noughts behind the point: sizes are names rather than results. */
+const trimmed = (text: string) => text.replace(/\.0+$/, '')
+
+/** What flows: `steam 7 bar g`, `water`; nothing where it is not said. */
+export function mediumWord({ medium, pressureGaugePa }: RunValues, system: UnitSystem): string {
+  const name = medium === undefined || medium === 'other' ? '' : medium
+  if (pressureGaugePa === undefined) return name
+  const shown = shownValue(pressureGaugePa, 'gaugePressure', system) ?? 0
+  return `${name} ${trimmed(formatNumber(shown, 1))} ${unitLabel('gaugePressure', system)}`.trim()
 }
 
 const years = (count: number) => {

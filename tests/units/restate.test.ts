@@ -1,0 +1,27 @@
+import { expect, test } from 'vitest'
+import { restated } from '#units/restate.ts'
+
+const nbsp = '\u00a0'
+
+test('in SI the words stay and numbers keep their units on one line', () => {
+  expect(restated('Touch: 40 mm gives 52.1 °C against 55 °C.', 'si')).toBe(
+    `Touch: 40${nbsp}mm gives 52.1${nbsp}°C against 55${nbsp}°C.`,
+  )
+})
+
+// 1150 W/m x 3.412 142 Btu/h per W x 0.3048 m per ft = 1196.02 Btu/h·ft (NIST SP 811: 1 Btu/h = 0.293 071 1 W).
+// 40 mm = 1.5748 in and 60 mm = 2.3622 in (1 in = 25.4 mm exactly); 55 °C = 131 °F; 1 K = 1.8 °F.
+test.each([
+  ['40 mm gives 55 °C', `1.57${nbsp}in gives 131.0${nbsp}°F`],
+  ['40 and 60 mm cost about the same', `1.57${nbsp}in and 2.36${nbsp}in cost about the same`],
+  ['the air is −40 °C', `the air is −40.0${nbsp}°F`],
+  ['3.2 K above the dew point', `5.8${nbsp}°F diff. above the dew point`],
+  ['1 150 W/m', `1${'\u202f'}196.0${nbsp}Btu/h·ft`],
+])('in US units %s is %s', (written, read) => {
+  expect(restated(written.replace('1 150', '1\u202f150'), 'us')).toBe(read)
+})
+
+test('numbers without a unit of ours stay as they are', () => {
+  const text = 'DN 80 over 15 years at 5 s costs within 2 % of it, 143.20 per m'
+  expect(restated(text, 'us')).toBe(text)
+})
