@@ -26,7 +26,7 @@ export function pasteBlock(job: Job, block: Block, newId: NewId, reader: CellRea
   const above = named ? undefined : job.runs.find((run) => run.id === block.runIds.at(-1))
   const added = Array.from({ length: missing }, () => {
     const run = runLike(above, newId())
-    return named ? { ...run, values: {} } : run
+    return named?.includes('shape') ? { ...run, values: {} } : run
   })
   const at = job.runs.findIndex((run) => run.id === block.runIds.at(-1))
   const grown =

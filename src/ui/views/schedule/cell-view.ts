@@ -1,14 +1,15 @@
 /** What one cell of the schedule says. */
 import { type FieldKey, fieldOf, type RunValues } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
-import type { RunBrief, RunState } from '#model/run-brief.ts'
+import type { RunBrief } from '#model/run-brief.ts'
+import { governingWords } from '#report/run-words.ts'
 import type { Issue } from '#sizing/result.ts'
 import type { CatalogueWords } from '#ui/state/catalogue-words.ts'
 import { editText, readText } from '#ui/state/cell-text.ts'
-import { governingWords } from '#ui/views/run-sheet/words.ts'
 import { ABSENT, formatQuantity } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import type { Column } from './columns.ts'
+import { issueSentence } from './issue-words.ts'
 
 export interface CellView {
   readonly text: string
@@ -77,12 +78,13 @@ export function mediumOf(run: Run, brief: RunBrief | undefined): number | undefi
 function composedSize(run: Run, key: string, units: UnitSystem): string {
   if (key !== 'size') return ''
   const { shape, widthM, heightM, outerDiameterM } = run.values
+  const decimals = units === 'us' ? 1 : undefined
   if (
     (shape === 'rect-duct' || shape === 'flat') &&
     widthM !== undefined &&
     heightM !== undefined
   ) {
-    return `${readText('widthM', widthM, units)} × ${readText('heightM', heightM, units)}`
+    return `${readText('widthM', widthM, units, decimals)} × ${readText('heightM', heightM, units, decimals)}`
   }
   return outerDiameterM === undefined
     ? ''
@@ -113,7 +115,7 @@ function resultText(
 
 function unsizedWord(run: Run, issues: readonly Issue[]): string {
   const isMissing = issues.length > 0 && issues.every(({ column }) => isEmpty(run, column))
-  return isMissing ? 'To fill in' : 'Check input'
+  return isMissing ? 'To fill in' : 'Check'
 }
 
 function isEmpty({ values, drafts }: Run, column: string): boolean {
@@ -126,15 +128,6 @@ function problemOf(key: NonNullable<Column['key']>, brief: RunBrief | undefined)
   const { column } = fieldOf(key)
   const issue = brief.issues.find((one) => one.column === column)
   return issue ? issueSentence(issue) : null
-}
-
-/** Found and allowed, as one line beside the cell. */
-export function issueSentence({ found, allowed }: Issue): string {
-  return found === '' ? `Give ${allowed}.` : `${found}: give ${allowed}.`
-}
-
-export function stateOf(brief: RunBrief | undefined): RunState | null {
-  return brief?.state ?? null
 }
 
 /** Text for the clipboard: what can be pasted back, and results as plain numbers. */

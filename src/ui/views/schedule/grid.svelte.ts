@@ -133,6 +133,12 @@ export class Grid {
     this.markLines()
   }
 
+  /** Shows only runs that need a look, or all again; what is active stays in sight. */
+  toggleNeedy(): void {
+    this.onlyNeedy = !this.onlyNeedy
+    if (this.activeRow < 0) this.goTo(0, this.activeColumn)
+  }
+
   toggleGroup(name: string): void {
     const next = new Set(this.collapsed)
     if (!next.delete(name)) next.add(name)

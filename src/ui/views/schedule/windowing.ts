@@ -30,5 +30,5 @@ export function scrollToSee(
   const top = line * linePx
   if (top < scrollPx) return top
   const lowest = top + linePx + headPx - viewPx
-  return lowest > scrollPx ? lowest : scrollPx
+  return Math.max(lowest, scrollPx)
 }
