@@ -40,12 +40,12 @@ export function judgeHeader(path: string, knownVersion: number): number {
   return version
 }
 
-/** Bytes that the header promises and the file does not have; 0 for a whole file. */
+/** Bytes that the header promises and the file does not have, below 0 where it has too many; 0 for a whole file. */
 export function missingBytes(path: string): number {
   const { header, size } = firstBytes(path)
   const stored = header.readUInt16BE(offsets.pageSize)
   const pageSize = stored === 1 ? 65_536 : stored
-  return Math.max(0, pageSize * header.readUInt32BE(offsets.pageCount) - size)
+  return pageSize * header.readUInt32BE(offsets.pageCount) - size
 }
 
 function firstBytes(path: string): { header: Buffer; size: number } {

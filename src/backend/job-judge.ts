@@ -60,6 +60,8 @@ function judgeReadOnly(
     const schema = schemaOf(db)
     const missing = missingBytes(file)
     if (missing > 0) throw damaged(`${missing} bytes at its end are missing`)
+    // SQLite would cut them off when it opens the file for writing.
+    if (missing < 0) throw damaged(`it is ${-missing} bytes longer than its header says`)
     const check = db.pragma('quick_check(1)', { simple: true })
     if (check !== 'ok') throw damaged(String(check).replaceAll(/\s+/g, ' '))
     if (schema !== expectedSchema(migrations, version))

@@ -203,6 +203,16 @@ describe('damage', () => {
     expect(codes.filter((code) => code !== 'opened').length).toBeGreaterThan(10)
   })
 
+  test('a page count that does not fit the file is refused', () => {
+    const whole = wholeJob()
+    for (const off of [-2, -1, 1, 2]) {
+      const bytes = Buffer.from(whole)
+      bytes.writeUInt32BE(whole.length / 4096 + off, 28)
+      expect(judged(written(bytes))?.code).toBe('job/damaged')
+    }
+    expect(judged(written(Buffer.concat([whole, Buffer.alloc(4096)])))?.code).toBe('job/damaged')
+  })
+
   test('a page of zeros or noise is refused or the job is whole', () => {
     const whole = wholeJob()
     const random = seeded(3)
