@@ -23,19 +23,19 @@ export function detailRun(
   return resolved.ok ? { ends: limitEnds(resolved.problem) } : null
 }
 
-/** The values a run is sized with: its own, else the job's; a build-up of its own replaces the job's as a whole. */
+/** The values a run is sized with: its own, else the job's. A lagging of its own replaces the job's as a whole. */
 export function withDefaults(values: RunValues, defaults: RunValues): RunValues {
   const merged = { ...defaults, ...values }
-  const given = buildUpKeys.filter((key) => values[key] !== undefined)
-  if (given.length === 0) return merged
-  for (const key of buildUpKeys) {
-    if (values[key] === undefined && clashes(key, values)) delete merged[key]
-  }
+  for (const key of replacedBy(values)) if (values[key] === undefined) delete merged[key]
   return merged
 }
 
-const buildUpKeys = ['material', 'conductivityWPerMK', 'thicknessM', 'layers'] as const
+type BuildUpKey = 'material' | 'conductivityWPerMK' | 'thicknessM' | 'layers'
 
-/** Layers stand alone; the other three may come together. */
-const clashes = (key: (typeof buildUpKeys)[number], own: RunValues): boolean =>
-  own.layers !== undefined ? key !== 'layers' : key === 'layers'
+/** What of the job's build-up no longer holds beside a run's own; a fixed thickness of the job stays with a material. */
+function replacedBy(own: RunValues): readonly BuildUpKey[] {
+  if (own.layers !== undefined) return ['material', 'conductivityWPerMK', 'thicknessM']
+  if (own.material !== undefined) return ['conductivityWPerMK', 'layers']
+  if (own.conductivityWPerMK !== undefined || own.thicknessM !== undefined) return ['layers']
+  return []
+}

@@ -11,40 +11,50 @@ const THINNEST_M = 1e-4
 const THICKEST_M = 0.6
 const EXACT_M = 1e-7
 
-/** How far one limit is from its bound, in its own unit: negative passes. */
-function shortfall({ limit, value, bound }: LimitResult): number {
-  return limit === 'damp' ? bound - value : value - bound
-}
+/** How far one limit is from its bound, in its own unit: negative passes, on whichever side of it that is. */
+const shortfall = ({ pass, value, bound }: LimitResult): number =>
+  (pass ? -1 : 1) * Math.abs(value - bound)
 
 function settledAt(problem: Problem, thicknessM: number): Settled {
   return settle(problem.layers, { thicknessM, nominalThicknessM: null, piecesM: [thicknessM] })
 }
 
-/** The worst shortfall of the limits of one name; null where that limit is not set. */
-function shortfallAt(problem: Problem, limit: LimitName, thicknessM: number): number | null {
+/** The worst shortfall of the limits of one name; negative where that limit is not judged. */
+function shortfallAt(problem: Problem, limit: LimitName, thicknessM: number): number {
   const settled = settledAt(problem, thicknessM)
   const judged = judge(problem, settled, solveStates(problem, settled)).filter(
     (result) => result.limit === limit,
   )
-  return judged.length === 0 ? null : Math.max(...judged.map(shortfall))
+  return Math.max(Number.NEGATIVE_INFINITY, ...judged.map(shortfall))
+}
+
+/** Where a limit begins to pass, between a thickness of the sized layer that fails it and one that passes [m]. */
+export function passesFromM(
+  problem: Problem,
+  limit: LimitName,
+  between: { readonly failsM: number; readonly passesM: number },
+): number {
+  return bracketedRoot(
+    (thicknessM) => -shortfallAt(problem, limit, thicknessM),
+    { low: between.failsM, high: between.passesM },
+    { width: EXACT_M, value: 0 },
+  ).at
 }
 
 /**
  * Thickness of the sized layer from which a limit passes [m]; 0 where the thinnest passes, null where none up to
  * 600 mm does. Searched from the thick end, since a thin layer on a small pipe may lose more than none.
  */
-export function continuousThicknessM(problem: Problem, limit: LimitName): number | null {
-  const at = (thicknessM: number): number => shortfallAt(problem, limit, thicknessM) ?? 0
-  if (at(THINNEST_M) <= 0) return 0
-  if (at(THICKEST_M) > 0) return null
-  return bracketedRoot(
-    (thicknessM) => -at(thicknessM),
-    { low: THINNEST_M, high: THICKEST_M },
-    { width: EXACT_M, value: 0 },
-  ).at
+function continuousThicknessM(problem: Problem, limit: LimitName): number | null {
+  if (shortfallAt(problem, limit, THINNEST_M) <= 0) return 0
+  if (shortfallAt(problem, limit, THICKEST_M) > 0) return null
+  return passesFromM(problem, limit, { failsM: THINNEST_M, passesM: THICKEST_M })
 }
 
-/** The exact ends of the limits a problem sets, for the ladder picture. Service has no thickness end. */
+/**
+ * The exact ends of the limits a problem sets, for the ladder picture, as thicknesses of the whole build-up like its
+ * rungs. Service has no thickness end.
+ */
 export function limitEnds(problem: Problem): LimitEnd[] {
   if (!problem.layers.some((layer) => layer.thicknessM === null)) return []
   const { maxSurfaceC, burn, maxLossWPerM, maxLossWPerM2, damp } = problem.limits
@@ -52,5 +62,9 @@ export function limitEnds(problem: Problem): LimitEnd[] {
   if (maxSurfaceC !== null || burn !== null) set.push('touch')
   if (maxLossWPerM !== null || maxLossWPerM2 !== null) set.push('loss')
   if (damp !== null) set.push('damp')
-  return set.map((limit) => ({ limit, fromM: continuousThicknessM(problem, limit) }))
+  const fixedM = problem.layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
+  return set.map((limit) => {
+    const sizedM = continuousThicknessM(problem, limit)
+    return { limit, fromM: sizedM === null || sizedM === 0 ? sizedM : sizedM + fixedM }
+  })
 }

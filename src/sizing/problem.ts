@@ -46,15 +46,20 @@ export interface Step {
   readonly piecesM: readonly number[]
 }
 
+/** A surface passes only below it. */
+export interface BurnLimit {
+  readonly thresholdC: number
+  readonly contactS: number
+  readonly surface: string
+}
+
 export interface Limits {
   /** Stated surface limit [°C], passes at or below. */
   readonly maxSurfaceC: number | null
-  /** Burn threshold [°C], passes only below. */
-  readonly burn: {
-    readonly thresholdC: number
-    readonly contactS: number
-    readonly surface: string
-  } | null
+  /** Burn threshold of the jacket; null where touch is not judged by the burn curve. */
+  readonly burn: BurnLimit | null
+  /** Burn threshold of the bare surface. */
+  readonly bareBurn: BurnLimit | null
   readonly maxLossWPerM: number | null
   readonly maxLossWPerM2: number | null
   /** Dew point of the damp air and the margin; null where damp is not judged. */

@@ -1,16 +1,16 @@
 import { yearlyKWh } from '#money/energy-cost.ts'
-import type { Note as SolverNote } from '#solver/types.ts'
 import type { Settled } from './build-up.ts'
 import { flowPerUnit, rungMoney } from './cost.ts'
-import { hottestFace, judge } from './limits.ts'
+import { judge } from './limits.ts'
 import type { Problem } from './problem.ts'
-import type { Rating } from './result.ts'
-import { solveStates } from './states.ts'
+import type { Note, Rating } from './result.ts'
+import { serviceHeeds } from './service.ts'
+import { hottestFace, solveStates } from './states.ts'
 
 export interface Rated {
   readonly rating: Rating
-  /** What the solver had to say at the loss, touch and damp conditions. */
-  readonly notes: readonly SolverNote[]
+  /** What the solver had to say at the loss, touch and damp conditions, and what is near its maximum. */
+  readonly notes: () => readonly Note[]
 }
 
 /** One build-up rated: solved at each condition, judged by every limit, priced. */
@@ -41,6 +41,11 @@ export function rate(problem: Problem, settled: Settled): Rated {
       pass: limits.every((limit) => limit.pass),
       money: problem.money ? rungMoney(problem, settled, problem.money, flowPerUnit(loss)) : null,
     },
-    notes: [...loss.notes, ...touch.notes, ...(damp?.notes ?? [])],
+    notes: () => [
+      ...loss.notes,
+      ...touch.notes,
+      ...(damp?.notes ?? []),
+      ...serviceHeeds(problem, settled, states),
+    ],
   }
 }

@@ -1,13 +1,12 @@
 import { yearlyFuelKWh } from '#money/energy-cost.ts'
 import { presentValueFactor } from '#money/present-value.ts'
 import { bare, rungsOf } from './build-up.ts'
-import { continuousThicknessM } from './continuous.ts'
+import { passesFromM } from './continuous.ts'
 import { energyCost, flowPerUnit } from './cost.ts'
-import { SERVICE_HEED_SHARE } from './limits.ts'
 import type { MoneyTerms, Problem } from './problem.ts'
 import { type Rated, rate } from './rating.ts'
 import { writeReason } from './reason.ts'
-import type { Governing, LimitName, Note, Rating, RunMoney, RunResult } from './result.ts'
+import type { Governing, Note, Rating, RunMoney, RunResult } from './result.ts'
 
 /** Sizes one run: rates the bare run and every rung, chooses, and says why. */
 export function size(problem: Problem): RunResult {
@@ -48,11 +47,7 @@ function choose(problem: Problem, bareRated: Rated, rungs: readonly Rated[]): Ch
   if (!rated) return { rated: null, governing: 'unmet' }
   return {
     rated,
-    governing: governingLimit(
-      problem,
-      rungs[index - 1]?.rating ?? null,
-      rated.rating.money !== null,
-    ),
+    governing: governingLimit(problem, rungs[index - 1]?.rating ?? null, rated.rating),
   }
 }
 
@@ -69,16 +64,17 @@ function chosenIndex(ladder: readonly Rating[]): number {
 }
 
 /** A limit governs only if the next thinner rung fails it; of several, the one with the largest exact thickness. */
-function governingLimit(problem: Problem, thinner: Rating | null, weighed: boolean): Governing {
+function governingLimit(problem: Problem, thinner: Rating | null, chosen: Rating): Governing {
   const failed = thinner
     ? [...new Set(thinner.limits.filter((limit) => !limit.pass).map(({ limit }) => limit))]
     : []
   const [only] = failed
-  if (only === undefined) return weighed ? 'money' : 'smallest'
+  if (thinner === null || only === undefined) return chosen.money ? 'money' : 'smallest'
   if (failed.length === 1) return only
-  const needed = (limit: LimitName): number =>
-    continuousThicknessM(problem, limit) ?? Number.POSITIVE_INFINITY
-  return failed.reduce((a, b) => (needed(b) > needed(a) ? b : a))
+  const fixedM = problem.layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
+  const between = { failsM: thinner.thicknessM - fixedM, passesM: chosen.thicknessM - fixedM }
+  const needed = failed.map((limit) => ({ limit, fromM: passesFromM(problem, limit, between) }))
+  return needed.reduce((a, b) => (b.fromM > a.fromM ? b : a)).limit
 }
 
 /** A jacket at or below this emissivity counts as bright: on cold work it costs thickness. */
@@ -134,12 +130,19 @@ function runMoney(
     bareEnergyPerYear,
     installedTotal: installed === null || extent === null ? null : installed * extent,
     savingPerYearTotal: saving === null || extent === null ? null : saving * extent,
-    paybackYears: installed !== null && saving !== null && saving > 0 ? installed / saving : null,
+    paybackYears: paybackYears(installed, saving),
     co2KgPerYear: chosenFlow === null ? null : co2(fuelKWh(chosenFlow)),
     co2SavedKgPerYear: chosenFlow === null ? null : co2(fuelKWh(bareFlow) - fuelKWh(chosenFlow)),
     cheapestThicknessM: cheapest?.thicknessM ?? null,
     withinTwoPercentM: chosen ? flatRange(ladder, chosen) : null,
   }
+}
+
+/** Null where nothing is saved, or next to nothing. */
+function paybackYears(installed: number | null, saving: number | null): number | null {
+  if (installed === null || saving === null || saving <= 0) return null
+  const years = installed / saving
+  return Number.isFinite(years) ? years : null
 }
 
 /** Smallest and largest passing thickness that cost at most 2 % more than the chosen one. */
@@ -155,7 +158,7 @@ function flatRange(ladder: readonly Rating[], chosen: Rating): readonly [number,
 }
 
 function notesOf(problem: Problem, shown: Rated): Note[] {
-  const notes: Note[] = [...problem.notes, ...shown.notes, ...heedNotes(shown.rating)]
+  const notes: Note[] = [...problem.notes, ...shown.notes()]
   if (problem.money && !shown.rating.money && shown.rating.thicknessM > 0) {
     notes.push({
       code: 'price-missing',
@@ -163,20 +166,4 @@ function notesOf(problem: Problem, shown: Rated): Note[] {
     })
   }
   return notes.filter((note, index) => notes.findIndex(({ text }) => text === note.text) === index)
-}
-
-function heedNotes({ limits }: Rating): Note[] {
-  return limits
-    .filter(
-      ({ limit, pass, value, bound, condition }) =>
-        limit === 'service' &&
-        pass &&
-        condition === 'touch' &&
-        bound > 0 &&
-        value > SERVICE_HEED_SHARE * bound,
-    )
-    .map(({ what, value, bound }) => ({
-      code: 'service-heed',
-      text: `${what}: ${value.toFixed(0)} °C is above 90 % of the ${bound.toFixed(0)} °C it stands.`,
-    }))
 }

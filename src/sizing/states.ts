@@ -1,7 +1,7 @@
 /** The solved states of one build-up: one solution for each design condition that a question needs. */
 
 import { solve } from '#solver/index.ts'
-import type { Solution, System } from '#solver/types.ts'
+import type { Face, Solution, System } from '#solver/types.ts'
 import { type Settled, solverLayers } from './build-up.ts'
 import type { Condition, Problem } from './problem.ts'
 
@@ -32,11 +32,18 @@ export function getsCold(problem: Problem): boolean {
   return damp.mediumC < damp.around.airC
 }
 
+/** The surface may also be colder than the air because it faces colder surroundings: damp asks for either. */
+const asksDamp = (problem: Problem): boolean => getsCold(problem) || problem.limits.damp !== null
+
 export function solveStates(problem: Problem, settled: Settled): States {
   const { loss, touch, damp } = problem.conditions
   return {
     loss: solve(systemOf(problem, settled, loss)),
     touch: solve(systemOf(problem, settled, touch)),
-    damp: getsCold(problem) ? solve(systemOf(problem, settled, damp)) : null,
+    damp: asksDamp(problem) ? solve(systemOf(problem, settled, damp)) : null,
   }
 }
+
+const isHotter = (a: Face, b: Face): Face => (b.surfaceTempC > a.surfaceTempC ? b : a)
+
+export const hottestFace = ({ faces }: Solution): Face => faces.reduce(isHotter)

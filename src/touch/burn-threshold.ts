@@ -70,10 +70,8 @@ function rowName(
   const coatingUm = Math.round(coatingThicknessM * 1e6)
   const rows = new Set(table.map((cell) => cell.surface))
   const fitting = [...rows]
-    .map((name) => ({
-      name,
-      um: Number(new RegExp(`^${coating}-(\\d+)$`).exec(name)?.[1] ?? Number.NaN),
-    }))
+    .filter((name) => name.startsWith(`${coating}-`))
+    .map((name) => ({ name, um: Number(name.slice(coating.length + 1)) }))
     .filter(({ um }) => um <= coatingUm)
     .sort((a, b) => b.um - a.um)[0]
   return fitting

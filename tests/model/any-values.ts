@@ -142,7 +142,7 @@ export const usualValues: fc.Arbitrary<RunValues> = fc
       tag: fc.constant('A'),
       mediumC: evenly(-200, 1000),
       airC: evenly(-70, 200),
-      material: fc.constantFrom(...(names['material'] ?? [])),
+      material: fc.constantFrom(...(names.material ?? [])),
     }),
     fc.tuple(evenly(0, 200), evenly(0, 200)),
   )

@@ -26,9 +26,10 @@ export function resolveFinish(
   return null
 }
 
+/** Without a thing (its own faults are already found) only the names are checked. */
 export function resolveBuildUp(
   values: RunValues,
-  thing: Thing,
+  thing: Thing | null,
   index: CatalogueIndex,
   findings: Findings,
 ): ResolvedBuildUp | null {
@@ -59,7 +60,7 @@ interface Single {
 
 function singleMaterial(
   values: RunValues,
-  thing: Thing,
+  thing: Thing | null,
   index: CatalogueIndex,
   findings: Findings,
 ): Single | null {
@@ -122,7 +123,9 @@ function layerMaterial(material: Material, index: CatalogueIndex): LayerMaterial
 }
 
 /** A form that does not go on this shape is said, not refused: site practice differs. */
-function noteFit(material: Material, { shape }: Thing, findings: Findings): void {
+function noteFit(material: Material, thing: Thing | null, findings: Findings): void {
+  if (!thing) return
+  const { shape } = thing
   const upToM = material.notOnDiametersUpToM
   if (shape.kind === 'pipe' && upToM !== null && shape.outerDiameterM <= upToM) {
     findings.note(
@@ -141,7 +144,7 @@ function noteFit(material: Material, { shape }: Thing, findings: Findings): void
 function layered(
   values: RunValues,
   text: string,
-  thing: Thing,
+  thing: Thing | null,
   index: CatalogueIndex,
   findings: Findings,
 ): ResolvedBuildUp | null {
@@ -161,9 +164,13 @@ function layered(
   }
   const layers: BuildUpLayer[] = []
   let steps: readonly Step[] = []
+  let isComplete = true
   for (const { name, thicknessM } of parsed.layers) {
     const material = materialOf('layers', name, index, findings)
-    if (!material) return null
+    if (!material) {
+      isComplete = false
+      continue
+    }
     noteFit(material, thing, findings)
     const layer = layerMaterial(material, index)
     const ladder = ladderOf(material, values, thing, index)
@@ -172,13 +179,12 @@ function layered(
       layers.push({ material: layer, thicknessM: null, piecesM: [] })
       if (ladder.length === 0) {
         findings.fault('layers', text, `a thickness in place of ?: ${noSteps(material, values)}`)
-        return null
       }
     } else {
       layers.push(fixedLayer(layer, thicknessM, ladder))
     }
   }
-  return { layers, steps }
+  return isComplete ? { layers, steps } : null
 }
 
 /** A fixed thickness, made of the pieces that a rung of that thickness would have, else in one piece. */
@@ -194,11 +200,11 @@ function fixedLayer(
 function ladderOf(
   material: Material,
   values: RunValues,
-  { shape }: Thing,
+  thing: Thing | null,
   index: CatalogueIndex,
 ): readonly Step[] {
   const series = values.steps ?? 'metric'
-  const diameterM = shape.kind === 'pipe' ? shape.outerDiameterM : null
+  const diameterM = thing?.shape.kind === 'pipe' ? thing.shape.outerDiameterM : null
   const key = `${material.id}|${series}|${series === 'metric' ? '' : diameterM}`
   const known = index.ladders.get(key)
   if (known) return known

@@ -125,7 +125,6 @@ export function resolveConditions(
     touch: Math.max(given ?? touchAirC, touchAirC),
     damp: Math.min(given ?? dampAirC, dampAirC),
   }
-  noteSurroundings(given, surroundings, findings)
   const at = (
     question: 'loss' | 'touch' | 'damp',
     conditionAirC: number,
@@ -146,26 +145,6 @@ export function resolveConditions(
     loss: at('loss', airC, medium.mediumC, jacket.agedEmissivity),
     touch: at('touch', touchAirC, medium.hottestC, jacket.newEmissivity),
     damp: at('damp', dampAirC, medium.coldestC, jacket.newEmissivity),
-  }
-}
-
-function noteSurroundings(
-  given: number | undefined,
-  taken: { readonly touch: number; readonly damp: number },
-  findings: Findings,
-): void {
-  if (given === undefined) return
-  if (taken.touch > given) {
-    findings.note(
-      'touch-surroundings',
-      `Touch is judged with surroundings at the air of the hottest day, ${plain(taken.touch)} °C, since those given are cooler.`,
-    )
-  }
-  if (taken.damp < given) {
-    findings.note(
-      'damp-surroundings',
-      `Damp is judged with surroundings at the most humid air, ${plain(taken.damp)} °C, since those given are warmer.`,
-    )
   }
 }
 
@@ -194,9 +173,11 @@ function bareEmissivityOf(values: RunValues, { wall }: Thing, findings: Findings
 export function noteConditions(
   values: RunValues,
   finish: Finish | null,
+  conditions: Conditions,
   judged: { readonly touch: boolean; readonly damp: boolean },
   findings: Findings,
 ): void {
+  noteSurroundings(values.surroundingsC, conditions, judged, findings)
   if (
     values.thicknessM !== 0 &&
     values.finish === undefined &&
@@ -218,6 +199,27 @@ export function noteConditions(
     findings.note(
       'damp-air-assumed',
       `Damp is judged at the air of the run, ${plain(values.airC ?? 0)} °C: no most-humid air is given.`,
+    )
+  }
+}
+
+function noteSurroundings(
+  given: number | undefined,
+  { touch, damp }: Conditions,
+  judged: { readonly touch: boolean; readonly damp: boolean },
+  findings: Findings,
+): void {
+  if (given === undefined) return
+  if (judged.touch && touch.around.surroundingsC > given) {
+    findings.note(
+      'touch-surroundings',
+      `Touch is judged with surroundings at the air of the hottest day, ${plain(touch.around.surroundingsC)} °C, since those given are cooler.`,
+    )
+  }
+  if (judged.damp && damp.around.surroundingsC < given) {
+    findings.note(
+      'damp-surroundings',
+      `Damp is judged with surroundings at the most humid air, ${plain(damp.around.surroundingsC)} °C, since those given are warmer.`,
     )
   }
 }

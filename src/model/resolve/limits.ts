@@ -1,6 +1,6 @@
 /** The limits of a run: touch, loss and damp, with the assumptions behind them. */
 import type { Finish, TouchClass } from '#catalogue/types.ts'
-import type { Limits } from '#sizing/problem.ts'
+import type { BurnLimit, Limits } from '#sizing/problem.ts'
 import { dewPointC } from '#solver/index.ts'
 import { burnThreshold, type TouchedSurface } from '#touch/burn-threshold.ts'
 import type { RunValues } from '../fields.ts'
@@ -14,37 +14,40 @@ const USUAL_CONTACT_S = 5
 /** Margin above the dew point [K]. Source: common practice, 0.5 to 1 K. */
 const USUAL_DEW_MARGIN_K = 1
 
+/** Without a thing or conditions (their own faults are already found) the rest is checked all the same. */
 export function resolveLimits(
   values: RunValues,
-  thing: Thing,
+  thing: Thing | null,
   finish: Finish | null,
-  conditions: Conditions,
+  conditions: Conditions | null,
   index: CatalogueIndex,
   findings: Findings,
 ): Limits {
-  if (thing.shape.kind === 'flat' && values.maxLossWPerM !== undefined) {
+  if (values.shape === 'flat' && values.maxLossWPerM !== undefined) {
     findings.fault(
       'maxLossWPerM',
       `${plain(values.maxLossWPerM)} W/m`,
       'nothing for a flat surface: give max_loss_w_m2',
     )
   }
+  const { burn, bareBurn } = resolveBurn(values, thing, finish, index, findings)
   return {
     maxSurfaceC: values.maxSurfaceC ?? null,
-    burn: resolveBurn(values, thing, finish, index, findings),
+    burn,
+    bareBurn,
     maxLossWPerM: values.maxLossWPerM ?? null,
     maxLossWPerM2: values.maxLossWPerM2 ?? null,
-    damp: resolveDamp(values, conditions, findings),
+    damp: conditions && resolveDamp(values, conditions, findings),
   }
 }
 
 function resolveBurn(
   values: RunValues,
-  thing: Thing,
+  thing: Thing | null,
   finish: Finish | null,
   index: CatalogueIndex,
   findings: Findings,
-): Limits['burn'] {
+): Pick<Limits, 'burn' | 'bareBurn'> {
   if (values.reach === false) {
     if (values.reachReason === undefined) {
       findings.fault(
@@ -55,7 +58,7 @@ function resolveBurn(
     } else {
       findings.note('out-of-reach', `Touch is not judged: out of reach (${values.reachReason}).`)
     }
-    return null
+    return { burn: null, bareBurn: null }
   }
   const contactS = values.contactS ?? USUAL_CONTACT_S
   if (values.contactS === undefined && values.reach === undefined) {
@@ -76,7 +79,7 @@ function resolveBurn(
       'threshold-missing',
       'The catalogue holds no burn thresholds: touch was not judged.',
     )
-    return null
+    return { burn: null, bareBurn: null }
   }
   if (threshold.because !== null) {
     findings.note(
@@ -84,17 +87,30 @@ function resolveBurn(
       `Touch is judged as ${threshold.surface}: ${threshold.because}.`,
     )
   }
-  return { thresholdC: threshold.thresholdC, contactS, surface: threshold.surface }
+  const burn: BurnLimit = { thresholdC: threshold.thresholdC, contactS, surface: threshold.surface }
+  if (values.thicknessM === 0) return { burn, bareBurn: burn }
+  // The bare run beside a lagged one is judged as what it is, not as the jacket it does not wear.
+  const wallClass = thing?.wall?.touchClass ?? 'smooth-metal'
+  const bareSurface = { touchClass: wallClass, coating: null, coatingThicknessM: null }
+  const bareThreshold = burnThreshold(index.catalogue.burnThresholds, bareSurface, contactS)
+  return {
+    burn,
+    bareBurn: bareThreshold && {
+      thresholdC: bareThreshold.thresholdC,
+      contactS,
+      surface: bareThreshold.surface,
+    },
+  }
 }
 
 function touchedSurface(
   values: RunValues,
-  { wall }: Thing,
+  thing: Thing | null,
   finish: Finish | null,
   findings: Findings,
 ): TouchedSurface {
   const bareRun = values.thicknessM === 0
-  const own = bareRun ? (wall?.touchClass ?? null) : (finish?.touchClass ?? null)
+  const own = bareRun ? (thing?.wall?.touchClass ?? null) : (finish?.touchClass ?? null)
   let touchClass: TouchClass | null = values.touchClass ?? own
   if (touchClass === null) {
     touchClass = 'smooth-metal'
@@ -113,7 +129,8 @@ function touchedSurface(
 
 function resolveDamp(values: RunValues, { damp }: Conditions, findings: Findings): Limits['damp'] {
   if (values.humidity === undefined) return null
-  if (damp.mediumC >= damp.around.airC) return null
+  // No surface gets colder than the coldest of medium, air and surroundings.
+  if (Math.min(damp.mediumC, damp.around.surroundingsC) >= damp.around.airC) return null
   if (values.dewMarginK === undefined) {
     findings.note(
       'dew-margin-assumed',

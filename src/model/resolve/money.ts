@@ -13,6 +13,8 @@ export function resolveMoney(
   index: CatalogueIndex,
   findings: Findings,
 ): MoneyTerms | null {
+  const fuel = values.fuel === undefined ? null : index.fuel(values.fuel)
+  if (fuel && !fuel.ok) findings.fault('fuel', values.fuel ?? '', fuel.message)
   const canWeigh = values.fuel !== undefined && values.hoursPerYear !== undefined
   if (!(values.money ?? canWeigh)) return null
   if (values.hoursPerYear === undefined) {
@@ -22,8 +24,6 @@ export function resolveMoney(
       'the running hours a year, since the cost is to be weighed',
     )
   }
-  const fuel = values.fuel === undefined ? null : index.fuel(values.fuel)
-  if (fuel && !fuel.ok) findings.fault('fuel', values.fuel ?? '', fuel.message)
   if (!fuel && values.fuelPricePerKWh === undefined) {
     findings.fault(
       'fuel',

@@ -30,24 +30,29 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   if (!conditions && values.airC === undefined && !(thing && medium)) {
     findings.fault('airC', 'nothing', 'the temperature of the air around the run in °C')
   }
-  const buildUp = thing ? resolveBuildUp(values, thing, index, findings) : null
+  const buildUp = resolveBuildUp(values, thing, index, findings)
   const gainsHeat = conditions !== null && conditions.loss.mediumC < conditions.loss.around.airC
   const money = resolveMoney(values, gainsHeat, index, findings)
-  const limits =
-    thing && conditions ? resolveLimits(values, thing, finish, conditions, index, findings) : null
-  if (limits && buildUp && buildUp.steps.length > 0 && money === null && !setsAny(limits)) {
+  const limits = resolveLimits(values, thing, finish, conditions, index, findings)
+  const finishPrice = finish && index.finishPrice(finish.id)
+  const isWeighed =
+    money !== null &&
+    (finish === null || finishPrice !== null) &&
+    buildUp?.layers.every(({ material }) => material.price !== null)
+  if (conditions && buildUp && buildUp.steps.length > 0 && !isWeighed && !setsAny(limits)) {
     findings.fault(
       'reach',
-      'no limit and no money',
+      money === null ? 'no limit and no money' : 'no limit, and no price to weigh the cost with',
       'something to size by: reach yes, a limit such as max_loss_w_m, or fuel and hours_per_year; or a thickness_mm to rate',
     )
   }
-  if (findings.issues.length > 0 || !tag || !thing || !conditions || !buildUp || !limits) {
+  if (findings.issues.length > 0 || !tag || !thing || !conditions || !buildUp) {
     return { ok: false, issues: findings.issues }
   }
   noteConditions(
     values,
     finish,
+    conditions,
     { touch: limits.burn !== null || limits.maxSurfaceC !== null, damp: limits.damp !== null },
     findings,
   )
@@ -62,7 +67,7 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
       finish: finish && {
         name: finish.name,
         surfaceMaxC: finish.surfaceMaxC,
-        price: index.finishPrice(finish.id),
+        price: finishPrice,
       },
       steps: buildUp.steps,
       conditions,

@@ -18,6 +18,9 @@ export interface Thing {
 const DUCT_FILM_W_PER_M2_K = 15.5
 /** Diameters this near are the same [m]: a size and an od_mm may both be given if they agree. */
 const SAME_DIAMETER_M = 0.0002
+/** Heights of a vertical run for which a film is worked out, as of the field `rise_m` [m]. */
+const LEAST_RISE_M = 0.05
+const MOST_RISE_M = 500
 
 export function resolveThing(
   values: RunValues,
@@ -239,8 +242,16 @@ function lying(values: RunValues, findings: Findings): 'horizontal' | 'vertical'
 
 function riseOf(values: RunValues, findings: Findings): number | null {
   const riseM = values.riseM ?? values.lengthM
-  if (riseM === undefined || riseM <= 0) {
+  if (riseM === undefined) {
     findings.fault('riseM', 'nothing', 'the height of the vertical run in m, or its length_m')
+    return null
+  }
+  if (riseM < LEAST_RISE_M || riseM > MOST_RISE_M) {
+    findings.fault(
+      'riseM',
+      `nothing, and a length of ${plain(riseM, 3)} m`,
+      `the height of the vertical run, from ${LEAST_RISE_M} to ${MOST_RISE_M} m`,
+    )
     return null
   }
   if (values.riseM === undefined) {

@@ -1,0 +1,180 @@
+/** The design conditions and emissivities, sentence by sentence of the contract. */
+import { describe, expect, test } from 'vitest'
+import { coldRun, noteCodes, refused, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
+import { problemOf } from './problem.ts'
+
+describe('defaults', () => {
+  test('wind and altitude are 0, the medium is as hot and as cold as itself', () => {
+    const { loss, touch, damp } = problemOf(steamRun).conditions
+    expect(loss.around).toEqual({ airC: 20, surroundingsC: 20, windMPerS: 0, altitudeM: 0 })
+    expect([loss.mediumC, touch.mediumC, damp.mediumC]).toEqual([150, 150, 150])
+  })
+
+  test('the air of touch and damp is that of the run, said in a note', () => {
+    const problem = problemOf({ ...coldRun, reach: true })
+    expect(problem.conditions.touch.around.airC).toBe(27)
+    expect(problem.conditions.damp.around.airC).toBe(27)
+    expect(noteCodes(problem)).toEqual(
+      expect.arrayContaining(['touch-air-assumed', 'damp-air-assumed']),
+    )
+  })
+
+  test('air given for a question is not an assumption', () => {
+    const problem = problemOf({ ...coldRun, touchAirC: 35, dampAirC: 30 })
+    expect(problem.conditions.touch.around.airC).toBe(35)
+    expect(problem.conditions.damp.around.airC).toBe(30)
+    expect(noteCodes(problem)).not.toContain('touch-air-assumed')
+    expect(noteCodes(problem)).not.toContain('damp-air-assumed')
+  })
+
+  test('no note about the air of a question that is not asked', () => {
+    const problem = problemOf({
+      ...steamRun,
+      reach: false,
+      reachReason: 'in a locked duct',
+      maxLossWPerM: 40,
+    })
+    expect(noteCodes(problem)).not.toContain('touch-air-assumed')
+    expect(noteCodes(problem)).not.toContain('damp-air-assumed')
+  })
+
+  test('surroundings are the air of each condition', () => {
+    const { loss, touch, damp } = problemOf({
+      ...coldRun,
+      airC: 18,
+      touchAirC: 35,
+      dampAirC: 30,
+    }).conditions
+    expect(loss.around.surroundingsC).toBe(18)
+    expect(touch.around.surroundingsC).toBe(35)
+    expect(damp.around.surroundingsC).toBe(30)
+  })
+
+  test('surroundings that are given hold for loss', () => {
+    expect(problemOf({ ...steamRun, surroundingsC: 12 }).conditions.loss.around.surroundingsC).toBe(
+      12,
+    )
+  })
+
+  test('wind is of the yearly mean only: touch and damp are judged in still air', () => {
+    const { loss, touch, damp } = problemOf({ ...coldRun, windMPerS: 4 }).conditions
+    expect([loss, touch, damp].map(({ around }) => around.windMPerS)).toEqual([4, 0, 0])
+  })
+
+  test('altitude is of the place, whatever the question', () => {
+    const { loss, touch, damp } = problemOf({ ...coldRun, altitudeM: 1500 }).conditions
+    expect([loss, touch, damp].map(({ around }) => around.altitudeM)).toEqual([1500, 1500, 1500])
+  })
+})
+
+describe('the medium at its worst', () => {
+  test('touch has the hottest, damp the coldest, loss the usual', () => {
+    const { loss, touch, damp } = problemOf({
+      ...steamRun,
+      mediumMaxC: 180,
+      mediumMinC: 5,
+    }).conditions
+    expect([loss.mediumC, touch.mediumC, damp.mediumC]).toEqual([150, 180, 5])
+  })
+
+  test('a hottest below the medium, a coldest above it: each an issue with its column', () => {
+    expect(refusedColumns({ ...steamRun, mediumMaxC: 140 })).toEqual(['medium_max_c'])
+    expect(refusedColumns({ ...steamRun, mediumMinC: 160 })).toEqual(['medium_min_c'])
+  })
+})
+
+describe('emissivity', () => {
+  // The shipped row: aluminium sheet, mill finish, 0.1 new and 0.2 aged (ASHRAE Fundamentals 2021, ch. 23, table 12).
+  test('loss takes the aged finish; touch and damp the new one', () => {
+    const { loss, touch, damp } = problemOf(steamRun).conditions
+    expect([loss, touch, damp].map(({ emissivity }) => emissivity)).toEqual([0.2, 0.1, 0.1])
+  })
+
+  test('an emissivity that is given overrides both', () => {
+    const { loss, touch, damp } = problemOf({ ...steamRun, emissivity: 0.35 }).conditions
+    expect([loss, touch, damp].map(({ emissivity }) => emissivity)).toEqual([0.35, 0.35, 0.35])
+  })
+
+  test('without a finish 0.9, with a note', () => {
+    const problem = problemOf({ ...steamRun, finish: undefined } as typeof steamRun)
+    expect(problem.conditions.loss.emissivity).toBe(0.9)
+    expect(problem.conditions.touch.emissivity).toBe(0.9)
+    expect(noteCodes(problem)).toContain('finish-assumed')
+  })
+
+  test('no such note beside a finish or an emissivity, nor on a bare run', () => {
+    const { finish: _, ...plain } = steamRun
+    for (const values of [steamRun, { ...plain, emissivity: 0.3 }, { ...plain, thicknessM: 0 }])
+      expect(noteCodes(problemOf(values))).not.toContain('finish-assumed')
+  })
+
+  test('bare steel 0.80, said in a note', () => {
+    const problem = problemOf(steamRun)
+    expect(problem.conditions.loss.bareEmissivity).toBe(0.8)
+    expect(noteCodes(problem)).toContain('bare-emissivity-assumed')
+  })
+
+  // The shipped rows: copper as found in service 0.6, galvanised steel 0.28, austenitic stainless 0.3.
+  test.each([
+    [{ pipeMaterial: 'copper' }, 0.6],
+    [{ size: 'CU 28' }, 0.6],
+    [{ pipeMaterial: 'stainless_304' }, 0.3],
+    [{ size: 'CU 28', pipeMaterial: 'carbon_steel' }, 0.8],
+    [{ bareEmissivity: 0.55 }, 0.55],
+    [{ bareEmissivity: 0.55, emissivity: 0.3 }, 0.55],
+  ])('the bare surface of %o has %d', (own, emissivity) => {
+    const { loss, touch } = problemOf({ ...steamRun, ...own }).conditions
+    expect(loss.bareEmissivity).toBe(emissivity)
+    expect(touch.bareEmissivity).toBe(emissivity)
+  })
+
+  test('with a thickness of 0 the emissivity given means the bare surface', () => {
+    const { loss } = problemOf({ ...steamRun, thicknessM: 0, emissivity: 0.45 }).conditions
+    expect(loss.bareEmissivity).toBe(0.45)
+  })
+
+  test('a duct is of galvanised steel', () => {
+    const { loss } = problemOf({
+      ...steamRun,
+      size: 'D 250',
+      shape: 'round-duct',
+      mediumC: 50,
+    }).conditions
+    expect(loss.bareEmissivity).toBe(0.28)
+  })
+})
+
+describe('saturated steam by its pressure', () => {
+  const { mediumC: _, ...noMedium } = steamRun
+  // IAPWS-IF97, region 4: 10 bar absolute saturates at 179.89 °C, 1.01325 bar at 99.97 °C.
+  test.each([
+    [8.98675, 179.89],
+    [0, 99.97],
+  ])('%d bar g is %d °C', (bar, tempC) => {
+    const problem = problemOf({ ...noMedium, pressureGaugePa: bar * 1e5 })
+    expect(problem.conditions.loss.mediumC).toBeCloseTo(tempC, 1)
+    expect(noteCodes(problem)).toContain('steam-saturated')
+  })
+
+  test('beside a temperature that is not its own, an issue; beside its own, none', () => {
+    expect(refusedColumns({ ...steamRun, pressureGaugePa: 9e5 })).toEqual(['medium_c'])
+    expect(problemOf({ ...steamRun, mediumC: 179.9, pressureGaugePa: 8.98675e5 })).toBeTruthy()
+  })
+
+  test('only steam is given by its pressure', () => {
+    expect(refusedColumns({ ...noMedium, medium: 'water', pressureGaugePa: 5e5 })).toEqual([
+      'pressure_bar_g',
+    ])
+  })
+
+  test('neither temperature nor pressure', () => {
+    const [issue] = refused(noMedium)
+    expect(issue).toMatchObject({ column: 'medium_c', found: 'nothing' })
+    expect(issue?.allowed).toContain('pressure_bar_g')
+  })
+})
+
+test('air is required', () => {
+  const { airC: _, ...noAir } = steamRun
+  expect(refusedColumns(noAir)).toEqual(['air_c'])
+})

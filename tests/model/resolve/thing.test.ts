@@ -1,0 +1,162 @@
+/** Shape, size and extent of a run. */
+import { describe, expect, test } from 'vitest'
+import { noteCodes, refused, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
+import { problemOf } from './problem.ts'
+
+const { size: _size, ...unsized } = steamRun
+
+describe('pipe', () => {
+  // EN 10220: DN 50 is 60.3 mm. ASME B36.10M: NPS 2 is 2.375 in, NPS 12 is 323.8 mm (12.75 in). EN 1057: CU 28 is 28 mm.
+  test.each([
+    ['DN 50', 0.0603],
+    ['NPS 2', 0.0603],
+    ['NPS 2 sch 80', 0.0603],
+    ['NPS 12', 0.3238],
+    ['CU 28', 0.028],
+  ])('%s', (size, outerDiameterM) => {
+    const { shape } = problemOf({ ...steamRun, size })
+    expect(shape).toMatchObject({ kind: 'pipe', orientation: 'horizontal' })
+    expect(shape.kind === 'pipe' && shape.outerDiameterM).toBeCloseTo(outerDiameterM, 4)
+  })
+
+  test('NPS above 10 is standard wall, CU with several walls the thinner: each with a note', () => {
+    expect(noteCodes(problemOf({ ...steamRun, size: 'NPS 12' }))).toContain('size')
+    expect(noteCodes(problemOf({ ...steamRun, size: 'CU 28' }))).toContain('size')
+    expect(noteCodes(problemOf({ ...steamRun, size: 'NPS 2' }))).not.toContain('size')
+  })
+
+  test('a conflicting od_mm is an error that says both', () => {
+    const [issue] = refused({ ...steamRun, outerDiameterM: 0.0889 })
+    expect(issue?.column).toBe('od_mm')
+    expect(issue?.found).toContain('88.9')
+    expect(issue?.allowed).toContain('60.3')
+  })
+
+  test('an od_mm that agrees is none, and od_mm alone will do', () => {
+    expect(problemOf({ ...steamRun, outerDiameterM: 0.0603 }).shape).toEqual(
+      problemOf({ ...unsized, outerDiameterM: 0.0603 }).shape,
+    )
+  })
+
+  test('neither is an error', () => {
+    const [issue] = refused(unsized)
+    expect(issue?.column).toBe('size')
+    expect(issue?.allowed).toContain('od_mm')
+  })
+
+  test('vertical: the rise, else the length with a note', () => {
+    const tall = problemOf({ ...steamRun, orientation: 'vertical', lengthM: 12 })
+    expect(tall.shape).toMatchObject({ orientation: 'vertical', riseM: 12 })
+    expect(noteCodes(tall)).toContain('rise-assumed')
+    const given = problemOf({ ...steamRun, orientation: 'vertical', lengthM: 12, riseM: 3 })
+    expect(given.shape).toMatchObject({ riseM: 3 })
+    expect(given.extent).toBe(12)
+    expect(noteCodes(given)).not.toContain('rise-assumed')
+  })
+
+  test.each([undefined, 0, 1e-9, 4000])(
+    'vertical without a rise, length %s: an issue',
+    (lengthM) => {
+      const values = { ...steamRun, orientation: 'vertical' as const }
+      expect(refusedColumns(lengthM === undefined ? values : { ...values, lengthM })).toEqual([
+        'rise_m',
+      ])
+    },
+  )
+
+  test('wall and inside film are neglected, shown as such', () => {
+    const problem = problemOf(steamRun)
+    expect(problem.insideFilmWPerM2K).toBeNull()
+    expect(noteCodes(problem)).toContain('inside-neglected')
+  })
+})
+
+describe('only flat takes up and down', () => {
+  test.each(['pipe', 'round-duct', 'rect-duct'] as const)('%s refuses them', (shape) => {
+    const size = { pipe: 'DN 50', 'round-duct': 'D 250', 'rect-duct': '600 x 400' }[shape]
+    for (const orientation of ['up', 'down'] as const)
+      expect(refusedColumns({ ...steamRun, shape, size, orientation })).toContain('orientation')
+  })
+
+  test('flat refuses to lie without a side', () => {
+    expect(
+      refusedColumns({
+        ...unsized,
+        shape: 'flat',
+        widthM: 1,
+        heightM: 2,
+        orientation: 'horizontal',
+      }),
+    ).toEqual(['orientation'])
+  })
+})
+
+describe('flat', () => {
+  const wall = { ...unsized, shape: 'flat' as const, widthM: 3, heightM: 2 }
+
+  test('vertical: the film length is the height', () => {
+    expect(problemOf({ ...wall, orientation: 'vertical' })).toMatchObject({
+      shape: { kind: 'flat', facing: 'vertical', characteristicLengthM: 2 },
+      extent: 6,
+    })
+  })
+
+  test('up and down: area over perimeter', () => {
+    // 3 x 2 m: 6 m² over 10 m.
+    for (const orientation of ['up', 'down'] as const)
+      expect(problemOf({ ...wall, orientation }).shape).toEqual({
+        kind: 'flat',
+        facing: orientation,
+        characteristicLengthM: 0.6,
+      })
+  })
+
+  test('else 1 m, with a note', () => {
+    const { widthM: _w, heightM: _h, ...bare } = wall
+    for (const orientation of ['vertical', 'up', 'down'] as const) {
+      const problem = problemOf({ ...bare, areaM2: 8, orientation })
+      expect(problem.shape).toMatchObject({ characteristicLengthM: 1 })
+      expect(problem.extent).toBe(8)
+      expect(noteCodes(problem)).toContain('length-assumed')
+    }
+  })
+
+  test('a size or a loss per metre has no meaning for it', () => {
+    expect(refusedColumns({ ...wall, size: 'DN 50' })).toEqual(['size'])
+    expect(refusedColumns({ ...wall, maxLossWPerM: 40 })).toEqual(['max_loss_w_m'])
+  })
+})
+
+describe('ducts', () => {
+  test('rectangular: outer metal width x height, as size or as two columns', () => {
+    const bySize = problemOf({ ...unsized, shape: 'rect-duct', size: '600 x 400', mediumC: 50 })
+    expect(bySize.shape).toEqual({ kind: 'rect-duct', widthM: 0.6, heightM: 0.4, riseM: null })
+    const bySides = { ...unsized, shape: 'rect-duct' as const, widthM: 0.6, heightM: 0.4 }
+    expect(problemOf({ ...bySides, mediumC: 50 }).shape).toEqual(bySize.shape)
+  })
+
+  test('round: od_mm or a size, and a conflict is an error', () => {
+    const duct = { ...unsized, shape: 'round-duct' as const, mediumC: 50 }
+    expect(problemOf({ ...duct, size: 'D 250' }).shape).toEqual(
+      problemOf({ ...duct, outerDiameterM: 0.25 }).shape,
+    )
+    expect(refusedColumns({ ...duct, size: 'D 250', outerDiameterM: 0.3 })).toEqual(['od_mm'])
+    expect(refusedColumns(duct)).toEqual(['size'])
+  })
+
+  test('sides that are missing are each named', () => {
+    expect(refusedColumns({ ...unsized, shape: 'rect-duct' })).toEqual(['width_mm', 'height_mm'])
+  })
+
+  // CIBSE Guide C, table 3.25, as quoted publicly: 15.5 W/m²K at about 3 m/s; bare and lagged alike.
+  test('the film inside is 15.5 W/m²K, shown as an assumption', () => {
+    const problem = problemOf({ ...unsized, shape: 'round-duct', size: 'D 250', mediumC: 50 })
+    expect(problem.insideFilmWPerM2K).toBe(15.5)
+    expect(noteCodes(problem)).toContain('inside-film-assumed')
+  })
+})
+
+test('a shape is required', () => {
+  const { shape: _, ...shapeless } = steamRun
+  expect(refusedColumns(shapeless)).toEqual(['shape'])
+})
