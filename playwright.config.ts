@@ -5,6 +5,7 @@ import { chromiumLaunch } from './tests/chromium.ts'
 // What both must do alike is written once, in *.both.spec.ts.
 export default defineConfig({
   testDir: 'tests/e2e',
+  globalSetup: './tests/e2e/global-setup.ts',
   outputDir: 'test-results',
   fullyParallel: true,
   workers: 2,

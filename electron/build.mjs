@@ -9,6 +9,7 @@ const sources = ['src', 'electron', 'vite.config.ts', 'package.json']
 /** @param {string} program */
 export async function buildIfStale(program) {
   if (!isStale(program)) return
+  console.log('Building Lagwright, which takes a few seconds and is done after a change only …')
   const { createBuilder } = await import('vite')
   const configFile = join(program, 'vite.config.ts')
   const builder = await createBuilder({ configFile, logLevel: 'warn' }, null)

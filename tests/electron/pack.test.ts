@@ -3,12 +3,14 @@ import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { listPackage } from '@electron/asar'
 import { afterAll, beforeAll, expect, test } from 'vitest'
+import { buildIfStale } from '../../electron/build.mjs'
 import { packInto } from './pack.ts'
 
 let folder: string
 let files: readonly string[]
 beforeAll(async () => {
   folder = await mkdtemp(join(tmpdir(), 'lagwright-pack-'))
+  await buildIfStale(join(import.meta.dirname, '..', '..'))
   const asar = await packInto(folder)
   files = listPackage(asar, { isPack: false }).filter((file) => /\.\w+$/.test(file))
 }, 60_000)

@@ -1,13 +1,19 @@
-import { chmod, mkdtemp, rm, utimes, writeFile } from 'node:fs/promises'
-import { createServer, type Server } from 'node:http'
+import { chmod, mkdir, mkdtemp, rm, utimes, writeFile } from 'node:fs/promises'
+import { createServer, type RequestListener, type Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
-import { afterEach, beforeEach, describe, expect, test } from 'vitest'
+import { afterEach, beforeAll, beforeEach, describe, expect, test, vi } from 'vitest'
+import { fetchElectron } from '../../electron/binary.mjs'
+import { buildIfStale, isStale } from '../../electron/build.mjs'
 import { type Started, start } from './starting.ts'
+
+// Each test starts whole programs, on a machine that may be busy with other tests.
+vi.setConfig({ testTimeout: 30_000, hookTimeout: 60_000 })
 
 let folder: string
 let server: Server | undefined
+beforeAll(() => buildIfStale(join(import.meta.dirname, '..', '..')))
 beforeEach(async () => {
   folder = await mkdtemp(join(tmpdir(), 'lagwright-start-'))
 })
@@ -34,8 +40,8 @@ const fallback = (why: string): string =>
   `The desktop shell cannot run here (${why}), so Lagwright runs in the browser.\n`
 
 /** A server in place of the one that Electron comes from; its address. */
-async function mirror(answer: Parameters<typeof createServer>[1]): Promise<string> {
-  server = createServer(answer as never)
+async function mirror(answer: RequestListener): Promise<string> {
+  server = createServer(answer)
   await new Promise<void>((resolve) => server?.listen(0, '127.0.0.1', resolve))
   return `http://127.0.0.1:${(server.address() as AddressInfo).port}/`
 }
@@ -77,13 +83,10 @@ describe('start', () => {
     const complaints = await useAndStop(start(folder, withDisplay(address)))
     expect(complaints).toBe(fallback('its download failed: nothing arrived for 5 s'))
     expect(Date.now() - began).toBeLessThan(9000)
-  }, 15_000)
+  })
 
   test('falls back where the server has no Electron', async () => {
-    const address = await mirror(
-      (_request: unknown, response: { writeHead(s: number): { end(): void } }) =>
-        response.writeHead(404).end(),
-    )
+    const address = await mirror((_request, response) => response.writeHead(404).end())
     const complaints = await useAndStop(start(folder, withDisplay(address)))
     expect(complaints).toMatch(
       /^The desktop shell cannot run here \(its download failed: .*404.*\n$/,
@@ -125,14 +128,11 @@ describe('start', () => {
 
 describe('fetchElectron', () => {
   test('gives up on a server that drips without end', async () => {
-    const { fetchElectron } = await import('../../electron/binary.mjs')
-    const address = await mirror(
-      (_request: unknown, response: import('node:http').ServerResponse) => {
-        response.writeHead(200, { 'content-length': '100000000' })
-        const drip = setInterval(() => response.write('x'), 50)
-        response.once('close', () => clearInterval(drip))
-      },
-    )
+    const address = await mirror((_request, response) => {
+      response.writeHead(200, { 'content-length': '100000000' })
+      const drip = setInterval(() => response.write('x'), 50)
+      response.once('close', () => clearInterval(drip))
+    })
     const before = { ...process.env }
     Object.assign(process.env, withDisplay(address))
     const work = fetchElectron({ silenceMs: 400, wholeMs: 1200 })
@@ -143,8 +143,6 @@ describe('fetchElectron', () => {
 
 describe('isStale', () => {
   test('tells a build older than its sources', async () => {
-    const { isStale } = await import('../../electron/build.mjs')
-    const { mkdir } = await import('node:fs/promises')
     const files = [
       'src/ui/App.svelte',
       'electron/main.ts',

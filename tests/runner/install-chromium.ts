@@ -7,10 +7,10 @@ export async function installChromium(): Promise<string | null> {
   if (process.env.CHROMIUM) return `there is no Chromium at CHROMIUM=${process.env.CHROMIUM}`
   if (!isDebian() || process.getuid?.() !== 0) return 'no Chromium on PATH or in CHROMIUM'
   console.log('\nNo Chromium here; installing it: apt-get update && apt-get install -y chromium')
-  const env = { DEBIAN_FRONTEND: 'noninteractive' }
+  const options = { env: { DEBIAN_FRONTEND: 'noninteractive' } }
   const isInstalled =
-    (await runCommand('apt-get', ['-qq', 'update'], env)) === 0 &&
-    (await runCommand('apt-get', ['-qq', 'install', '-y', 'chromium'], env)) === 0
+    (await runCommand('apt-get', ['-qq', 'update'], options)) === 0 &&
+    (await runCommand('apt-get', ['-qq', 'install', '-y', 'chromium'], options)) === 0
   return isInstalled && findChromium() ? null : 'no Chromium, and apt-get could not install it'
 }
 

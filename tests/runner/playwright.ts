@@ -36,7 +36,7 @@ async function runOrCount(
   console.log(`\n== ${name}`)
   const { exitCode, report } = await withReport((file) =>
     runTool(tool, ['test', ...chosen, '--reporter=list,json'], {
-      PLAYWRIGHT_JSON_OUTPUT_FILE: file,
+      env: { PLAYWRIGHT_JSON_OUTPUT_FILE: file },
     }),
   )
   const stats = reportSchema.safeParse(report).data?.stats
@@ -54,7 +54,8 @@ async function runOrCount(
 async function count(chosen: readonly string[]): Promise<number> {
   const { report } = await withReport((file) =>
     runTool(tool, ['test', ...chosen, '--list', '--reporter=json'], {
-      PLAYWRIGHT_JSON_OUTPUT_FILE: file,
+      env: { PLAYWRIGHT_JSON_OUTPUT_FILE: file },
+      isShown: false,
     }),
   )
   const suites = z.object({ suites: z.array(z.unknown()) }).safeParse(report).data?.suites ?? []

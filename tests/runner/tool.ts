@@ -8,13 +8,20 @@ import { dirname, join } from 'node:path'
 export const program: string = join(import.meta.dirname, '..', '..')
 const require = createRequire(import.meta.url)
 
-/** Runs a program with its output on ours; its exit code. */
+interface Options {
+  readonly env?: Readonly<Record<string, string>>
+  /** Whether its output is ours; the default. */
+  readonly isShown?: boolean
+}
+
+/** Runs a program; its exit code. */
 export async function runCommand(
   command: string,
   args: readonly string[],
-  env: Readonly<Record<string, string>> = {},
+  { env = {}, isShown = true }: Options = {},
 ): Promise<number> {
-  const options = { cwd: program, stdio: 'inherit', env: { ...process.env, ...env } } as const
+  const stdio = isShown ? 'inherit' : 'ignore'
+  const options = { cwd: program, stdio, env: { ...process.env, ...env } } as const
   const child = spawn(command, args, options)
   const failure = once(child, 'error').then(([error]) => {
     console.error(`${command} cannot be started: ${error}`)
@@ -28,9 +35,9 @@ export async function runCommand(
 export async function runTool(
   tool: Tool,
   args: readonly string[],
-  env: Readonly<Record<string, string>> = {},
+  options: Options = {},
 ): Promise<number> {
-  return runCommand(process.execPath, [scriptOf(tool), ...args], env)
+  return runCommand(process.execPath, [scriptOf(tool), ...args], options)
 }
 
 /** Gives a tool a file to write its JSON report to; what it wrote, or null. */
