@@ -4,7 +4,7 @@ import type { UnitSystem } from '#units/quantities.ts'
 import type { PassStretch } from './limit-bars.ts'
 
 /** Mean width of a letter at the size of the words [px]. */
-const LETTER = 5.7
+const LETTER = 6
 const PADDING = 6
 
 export interface BarPiece {
