@@ -1,8 +1,8 @@
 import { describe, expect, test } from 'vitest'
 import type { LimitResult } from '#sizing/result.ts'
+import { walkedTo } from '#ui/views/run-sheet/ladder-walk.ts'
 import { needsLook } from '#ui/views/run-sheet/notes.ts'
 import { thicknessOverride } from '#ui/views/run-sheet/override.ts'
-import { walkedTo } from '#ui/views/run-sheet/ladder-walk.ts'
 import {
   boundWords,
   buildUpWords,
