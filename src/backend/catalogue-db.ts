@@ -23,15 +23,20 @@ import type {
 import { AppError } from '#contract/failures.ts'
 import { migrate } from './migrate.ts'
 import { seed } from './seed.ts'
+import { noPlaceWords } from './storage-failure.ts'
 
-/** `dataFolder` is where the catalogue lives; ':memory:' keeps it for this process only. */
+/**
+ * `dataFolder` is where the catalogue lives; ':memory:' keeps it for this process only. So does a folder that takes no
+ * files, as on a locked-down machine: what ships is there all the same.
+ */
 export function openCatalogue(dataFolder: string, dbFolder: string): Database.Database {
   if (dataFolder === ':memory:') return prepared(':memory:', dbFolder)
-  mkdirSync(dataFolder, { recursive: true })
   const path = join(dataFolder, 'catalogue.db')
   try {
+    mkdirSync(dataFolder, { recursive: true })
     return prepared(path, dbFolder)
   } catch (error) {
+    if (noPlaceWords(error) !== null) return prepared(':memory:', dbFolder)
     if (!isDamage(error)) throw error
     // Shipped rows can be rebuilt; what the user added may still be read from the file set aside.
     renameSync(path, freeName(path))

@@ -1,5 +1,5 @@
 /** What a host answers, be it the desktop shell or the loopback host. */
-import { existsSync, mkdirSync } from 'node:fs'
+import { existsSync } from 'node:fs'
 import { homedir } from 'node:os'
 import { dirname, extname, join, resolve } from 'node:path'
 import { z } from 'zod'
@@ -36,7 +36,6 @@ export interface Backend {
 
 export function makeHandlers(options: BackendOptions): Backend {
   const { dataFolder, dbFolder, dialogs, kind } = options
-  mkdirSync(dataFolder, { recursive: true })
   const jobs = new OpenJobs({ dataFolder, dbFolder })
   const catalogue = once(() => catalogueIn(dataFolder, dbFolder))
   const version = once(() => versionOf(dbFolder))

@@ -12,6 +12,7 @@ import type { Job } from '#model/job.ts'
 import { type Committed, JobFile } from './job-file.ts'
 import { readJson } from './preferences.ts'
 import { replaceFile } from './replace-file.ts'
+import { noPlaceWords, writeFailure } from './storage-failure.ts'
 
 const emptyJob: Job = { name: 'New job', site: '', defaults: {}, runs: [] }
 const sessionSchema = z.object({ lastJob: z.string().min(1) })
@@ -49,11 +50,13 @@ export class OpenJobs {
 
   /** A draft with this job in it. */
   start(job: Job): OpenJob {
-    mkdirSync(this.#drafts, { recursive: true })
-    const path = join(
-      this.#drafts,
-      `${new Date().toISOString().slice(0, 10)}-${randomUUID()}.lagjob`,
-    )
+    const name = `${new Date().toISOString().slice(0, 10)}-${randomUUID()}.lagjob`
+    const path = join(this.#drafts, name)
+    try {
+      mkdirSync(this.#drafts, { recursive: true })
+    } catch (error) {
+      throw writeFailure(path, error)
+    }
     return this.#take(JobFile.create(path, job, this.#place.dbFolder))
   }
 
@@ -119,10 +122,15 @@ export class OpenJobs {
     return resolve(dirname(file.path)) === resolve(this.#drafts)
   }
 
+  /** Which job to open next time. Not being able to note that down must not cost anyone the job. */
   #remember(path: string): void {
-    replaceFile(this.#sessionFile, (temporary) =>
-      writeFileSync(temporary, `${JSON.stringify({ lastJob: resolve(path) })}\n`),
-    )
+    try {
+      replaceFile(this.#sessionFile, (temporary) =>
+        writeFileSync(temporary, `${JSON.stringify({ lastJob: resolve(path) })}\n`),
+      )
+    } catch (error) {
+      if (noPlaceWords(error) === null) throw error
+    }
   }
 
   get #drafts(): string {

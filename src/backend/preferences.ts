@@ -1,7 +1,9 @@
-import { readFileSync, writeFileSync } from 'node:fs'
+import { mkdirSync, readFileSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { AppError } from '#contract/failures.ts'
 import { type Preferences, preferencesSchema } from '#contract/host.ts'
 import { replaceFile } from './replace-file.ts'
+import { noPlaceWords } from './storage-failure.ts'
 
 const defaults: Preferences = { theme: 'system', units: 'si', density: 'comfortable' }
 
@@ -20,9 +22,16 @@ export function readPreferences(dataFolder: string): Preferences {
 }
 
 export function writePreferences(dataFolder: string, preferences: Preferences): void {
-  replaceFile(fileIn(dataFolder), (temporary) =>
-    writeFileSync(temporary, `${JSON.stringify(preferences, null, 2)}\n`),
-  )
+  const path = fileIn(dataFolder)
+  try {
+    mkdirSync(dataFolder, { recursive: true })
+    replaceFile(path, (temporary) =>
+      writeFileSync(temporary, `${JSON.stringify(preferences, null, 2)}\n`),
+    )
+  } catch (error) {
+    const why = noPlaceWords(error)
+    throw why === null ? error : new AppError({ code: 'preferences/not-kept', path, why })
+  }
 }
 
 /** Null where the file is missing or no JSON. */

@@ -12,6 +12,7 @@ const systemWords: Readonly<Record<string, string>> = {
   ENAMETOOLONG: 'the name is too long',
   EINVAL: 'the name is not allowed here',
   EISDIR: 'there is a folder of that name',
+  EEXIST: 'there is a file where a folder should be',
   EBUSY: 'another program holds the file',
   EIO: 'the drive reports an error',
 }
@@ -50,6 +51,14 @@ export function writeFailure(path: string, error: unknown): unknown {
     { code: 'job/not-writable', path, why: systemWords[code] ?? code },
     { cause: error },
   )
+}
+
+/** Why a place takes no files, in words; null where the error is about something else. */
+export function noPlaceWords(error: unknown): string | null {
+  const failure = writeFailure('', error)
+  return failure instanceof AppError && failure.failure.code === 'job/not-writable'
+    ? failure.failure.why
+    : null
 }
 
 /** SQLite's code or the system's; null for anything that is not about storage. */

@@ -22,6 +22,7 @@ export type Failure =
       readonly found: number
       readonly known: number
     }
+  | { readonly code: 'preferences/not-kept'; readonly path: string; readonly why: string }
   | { readonly code: 'request/unknown'; readonly name: string }
   | { readonly code: 'request/invalid'; readonly issues: string }
   | { readonly code: 'request/too-large'; readonly maxBytes: number }
@@ -51,6 +52,8 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
     `${path} does not end in .lagjob. Give the file a name that does.`,
   'catalogue/too-new': ({ path, found, known }) =>
     `The catalogue ${path} was written by a newer Lagwright (version ${found}, this program knows ${known}). It was not changed. Update Lagwright, or start it with another data folder.`,
+  'preferences/not-kept': ({ path, why }) =>
+    `Your settings could not be written to ${path} (${why}). They hold until the window is closed.`,
   'request/unknown': ({ name }) => `The program does not know the request ${name}.`,
   'request/invalid': ({ issues }) => `The request was not understood: ${issues}`,
   'request/too-large': ({ maxBytes }) =>

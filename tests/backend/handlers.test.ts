@@ -228,6 +228,38 @@ describe('dialogs', () => {
   })
 })
 
+describe('a data folder that takes no files', () => {
+  /** A folder below a file: no system makes it. */
+  const nowhere = () => {
+    const file = join(temporaryFolder(), 'file')
+    writeFileSync(file, '')
+    return join(file, 'data')
+  }
+
+  test('still gives the catalogue, and jobs that have a place of their own', async () => {
+    const path = join(temporaryFolder(), 'mine.lagjob')
+    const elsewhere = started(temporaryFolder())
+    await elsewhere.handlers['job.new']({})
+    await elsewhere.handlers['job.saveAs']({ path, overwrite: false })
+    elsewhere.close()
+
+    const { handlers } = started(nowhere())
+    expect((await handlers['catalogue.read']({})).materials).toHaveLength(30)
+    expect(await handlers['job.open']({ path })).toMatchObject({ path, revision: 0 })
+    expect(await handlers['job.commit'](edit(0))).toMatchObject({ revision: 1 })
+  })
+
+  test('says so where something has to be kept there', async () => {
+    const { handlers } = started(nowhere())
+    expect(await codeOf(() => handlers['job.new']({}))).toBe('job/not-writable')
+    const preferences = { theme: 'dark', units: 'si', density: 'compact' } as const
+    expect(await codeOf(() => handlers['preferences.write'](preferences))).toBe(
+      'preferences/not-kept',
+    )
+    expect(await handlers['preferences.read']({})).toMatchObject({ theme: 'system' })
+  })
+})
+
 describe('everything else', () => {
   test('preferences are kept, and a spoilt file falls back to the defaults', async () => {
     const folder = temporaryFolder()

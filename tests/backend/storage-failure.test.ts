@@ -1,6 +1,6 @@
 import Database from 'better-sqlite3'
 import { describe, expect, test } from 'vitest'
-import { readFailure, writeFailure } from '#backend/storage-failure.ts'
+import { noPlaceWords, readFailure, writeFailure } from '#backend/storage-failure.ts'
 import { AppError } from '#contract/failures.ts'
 
 const system = (code: string) => Object.assign(new Error(code), { code })
@@ -44,6 +44,13 @@ describe('on the way to write', () => {
       ...expected,
     })
   })
+})
+
+test('why a place takes no files', () => {
+  expect(noPlaceWords(system('EROFS'))).toBe('the drive is read-only')
+  expect(noPlaceWords(sqlite('SQLITE_CANTOPEN'))).toBe('the folder does not take new files')
+  for (const other of [sqlite('SQLITE_CORRUPT'), sqlite('SQLITE_BUSY'), new TypeError('x')])
+    expect(noPlaceWords(other)).toBeNull()
 })
 
 test('what is not about storage stays the bug it is', () => {
