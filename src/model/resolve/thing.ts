@@ -27,6 +27,14 @@ export function resolveThing(
   index: CatalogueIndex,
   findings: Findings,
 ): Thing | null {
+  const thing = shaped(values, index, findings)
+  // The wall of a thing is looked up last: where it came to nothing before that, its name is checked all the same.
+  if (!thing && values.pipeMaterial !== undefined)
+    wallOf(values, values.pipeMaterial, index, findings)
+  return thing
+}
+
+function shaped(values: RunValues, index: CatalogueIndex, findings: Findings): Thing | null {
   const { shape } = values
   if (shape === undefined) {
     findings.fault('shape', 'nothing', 'pipe, round-duct, rect-duct or flat')
