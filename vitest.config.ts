@@ -21,6 +21,18 @@ export default defineConfig({
       },
       {
         plugins: [svelte({ configFile: false })],
+        // Found while tests run, these would be bundled anew, and with a second copy of Svelte.
+        optimizeDeps: {
+          include: [
+            'bits-ui',
+            'chart.js',
+            'devalue',
+            'fast-check',
+            'svelte',
+            'vitest-browser-svelte',
+            'zod',
+          ],
+        },
         test: {
           name: 'browser',
           include: ['tests/ui/**/*.browser.test.ts'],

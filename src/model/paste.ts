@@ -1,5 +1,6 @@
 /** A block of cells from a spreadsheet, put into the schedule. */
-import { type CellReader, type CellText, type NewId, runLike, setCells } from './edits.ts'
+import type { CellReader } from './cell-edit.ts'
+import { type CellText, type NewId, runLike, setCells } from './edits.ts'
 import { type FieldKey, fields } from './fields.ts'
 import type { Job } from './job.ts'
 

@@ -1,6 +1,6 @@
 /** Names for ids of the catalogue, both ways: cells show names and keep ids. */
 import type { Catalogue } from '#catalogue/types.ts'
-import type { CellReader } from '#model/edits.ts'
+import type { CellReader } from '#model/cell-edit.ts'
 import type { FieldKey, RunValues } from '#model/fields.ts'
 
 interface Named {

@@ -1,8 +1,8 @@
 /** What a cell shows and how typed text is read, in the units the window shows. */
 import { type CellResult, formatCell, parseCell, quote } from '#model/cell.ts'
+import type { CellReader } from '#model/cell-edit.ts'
+import { columnReader } from '#model/cell-edit.ts'
 import { readDecimal, writeDecimal } from '#model/decimal.ts'
-import type { CellReader } from '#model/edits.ts'
-import { columnReader } from '#model/edits.ts'
 import {
   type Field,
   type FieldKey,

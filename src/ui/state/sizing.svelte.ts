@@ -1,15 +1,17 @@
 /** The answers as they arrive from the worker: a brief for every run, all about the active one. */
 import type { Catalogue } from '#catalogue/types.ts'
-import { issuesOfDrafts } from '#model/draft-issues.ts'
 import type { RunValues } from '#model/fields.ts'
 import type { Job, Run } from '#model/job.ts'
+import { doubledTags, localIssues } from '#model/local-issues.ts'
 import type { RunBrief } from '#model/run-brief.ts'
 import { SizingClient, type WorkerLike } from '#worker/client.ts'
 import type { RunToSize, Sheet } from '#worker/protocol.ts'
 
 export class Sizing {
   readonly #briefs = new Map<string, RunBrief>()
-  readonly #drafted = new Map<string, Run>()
+  /** Runs that cannot be computed, as their briefs were made for. */
+  readonly #unsound = new Map<string, { readonly run: Run; readonly isDoubled: boolean }>()
+  #doubled: ReadonlySet<string> = new Set()
   readonly #client: SizingClient
   #version = $state(0)
   #sheet: (Sheet & { readonly values: RunValues }) | null = $state.raw(null)
@@ -23,7 +25,8 @@ export class Sizing {
     this.#client = new SizingClient(start, catalogue, {
       briefs: (briefs) => this.#take(briefs),
       sheet: (values, sheet) => {
-        this.#sheet = { values, ...sheet }
+        // What was asked for meanwhile follows.
+        if (values === this.#asked?.values) this.#sheet = { values, ...sheet }
       },
       restarted: () => {
         this.trouble =
@@ -45,11 +48,12 @@ export class Sizing {
 
   /** Tells what the job and the active run are now. */
   update(job: Job, active: Run | null): void {
+    this.#doubled = doubledTags(job.runs)
     const present = new Set(job.runs.map((run) => run.id))
     for (const id of this.#briefs.keys()) {
       if (present.has(id)) continue
       this.#briefs.delete(id)
-      this.#drafted.delete(id)
+      this.#unsound.delete(id)
     }
     this.#client.size(this.#soundRuns(job.runs), job.defaults)
     this.#askSheet(job, active)
@@ -61,15 +65,19 @@ export class Sizing {
     this.#client.stop()
   }
 
-  /** Runs with a cell that is not valid are not computed: leaving the cell out would give a wrong answer. */
+  /** Runs with something wrong are not computed: leaving a cell out would give a wrong answer. */
   *#soundRuns(runs: readonly Run[]): Generator<RunToSize> {
     for (const run of runs) {
-      if (Object.keys(run.drafts).length === 0) {
+      const issues = localIssues(run, this.#doubled)
+      if (issues.length === 0) {
         yield run
-      } else if (this.#drafted.get(run.id) !== run) {
-        this.#drafted.set(run.id, run)
-        this.#briefs.set(run.id, { ok: false, state: 'fails', issues: issuesOfDrafts(run) })
+        continue
       }
+      const isDoubled = this.#doubled.has(run.values.tag ?? '')
+      const known = this.#unsound.get(run.id)
+      if (known?.run === run && known.isDoubled === isDoubled) continue
+      this.#unsound.set(run.id, { run, isDoubled })
+      this.#briefs.set(run.id, { ok: false, state: 'fails', issues })
     }
   }
 
@@ -80,8 +88,9 @@ export class Sizing {
       return
     }
     const { values } = active
-    if (Object.keys(active.drafts).length > 0) {
-      this.#sheet = { values, outcome: { ok: false, issues: issuesOfDrafts(active) }, detail: null }
+    const issues = localIssues(active, this.#doubled)
+    if (issues.length > 0) {
+      this.#sheet = { values, outcome: { ok: false, issues }, detail: null }
       this.#asked = null
       return
     }
@@ -92,7 +101,7 @@ export class Sizing {
 
   #take(briefs: readonly (readonly [string, RunBrief])[]): void {
     for (const [id, brief] of briefs) {
-      this.#drafted.delete(id)
+      this.#unsound.delete(id)
       this.#briefs.set(id, brief)
     }
     this.waiting = this.#client.waiting
