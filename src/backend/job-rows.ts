@@ -138,7 +138,7 @@ export function writeChange(
     remove.run(id)
     next.delete(id)
   }
-  let last = Math.max(-1, ...lastOf(next))
+  let last = [...next.values()].reduce((highest, position) => Math.max(highest, position), -1)
   const put = putRun(db)
   for (const run of change.putRuns) {
     const position = next.get(run.id) ?? ++last
@@ -167,13 +167,6 @@ function reorder(db: Database.Database, order: readonly string[], positions: Map
     move.run({ position: index, id })
     positions.set(id, index)
   })
-}
-
-/** The highest position, as a list that may be empty; a spread of 10 000 arguments is near the limit. */
-function lastOf(positions: ReadonlyMap<string, number>): number[] {
-  let last: number | null = null
-  for (const position of positions.values()) if (last === null || position > last) last = position
-  return last === null ? [] : [last]
 }
 
 function putRun(db: Database.Database): (run: Run, position: number) => void {
