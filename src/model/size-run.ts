@@ -13,14 +13,21 @@ export function sizeRun(values: RunValues, defaults: RunValues, index: Catalogue
   return resolved.ok ? { ok: true, result: size(resolved.problem) } : resolved
 }
 
-/** Exact ends of the limits of one run; null where the run cannot be sized. */
+/** What the run sheet shows besides; null where the run cannot be sized. */
 export function detailRun(
   values: RunValues,
   defaults: RunValues,
   index: CatalogueIndex,
 ): RunDetail | null {
-  const resolved = resolve(withDefaults(values, defaults), index)
-  return resolved.ok ? { ends: limitEnds(resolved.problem) } : null
+  const merged = withDefaults(values, defaults)
+  const resolved = resolve(merged, index)
+  if (!resolved.ok) return null
+  const { thicknessM, ...free } = merged
+  // A run with neither limit nor cost is sized by nothing: it has no ladder to choose from.
+  const unfixed = thicknessM ? resolve(free, index) : null
+  return unfixed?.ok
+    ? { ends: limitEnds(unfixed.problem), otherRungs: size(unfixed.problem).ladder }
+    : { ends: limitEnds(resolved.problem), otherRungs: [] }
 }
 
 /** The values a run is sized with: its own, else the job's. A lagging of its own replaces the job's as a whole. */

@@ -132,7 +132,9 @@ export type RunOutcome =
   | { readonly ok: true; readonly result: RunResult }
   | { readonly ok: false; readonly issues: readonly Issue[] }
 
-/** What the run sheet asks for the selected run only: exact ends of the limits. */
+/** What the run sheet asks for the selected run only. */
 export interface RunDetail {
   readonly ends: readonly LimitEnd[]
+  /** Where one thickness is fixed by hand: the rungs it could be instead. Empty elsewhere. */
+  readonly otherRungs: readonly Rating[]
 }

@@ -204,6 +204,17 @@ describe('special cases', () => {
     expect(onrelease).toHaveBeenCalledOnce()
   })
 
+  test('a fixed thickness keeps the ladder of what it could be instead', async () => {
+    const values = { ...demoRun('ST-104'), thicknessM: 0.033 }
+    await render(RunSheet, sheetOf(values))
+    await expect.element(page.getByText('Fixed at 33\u00a0mm.')).toBeVisible()
+    await expect
+      .element(ladder)
+      .toHaveAttribute('aria-valuetext', expect.stringMatching(/^33\u00a0mm, chosen/))
+    const others = resultOf(demoRun('ST-104')).ladder.length
+    await expect.element(ladder).toHaveAttribute('aria-valuemax', String(others + 1))
+  })
+
   test('an answer on its way is said to be so', async () => {
     await render(RunSheet, { ...sheetOf(demoRun('ST-104')), outcome: null })
     await expect.element(page.getByRole('status')).toBeVisible()

@@ -1,6 +1,6 @@
 /** Walking the rungs with the keyboard, and what a rung says about itself. */
 import { governingWords } from '#report/run-words.ts'
-import type { Rating } from '#sizing/result.ts'
+import type { Rating, RunDetail, RunResult } from '#sizing/result.ts'
 import { formatWithUnit } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import { thicknessWords } from './words.ts'
@@ -65,6 +65,13 @@ export function lossWords(rung: Rating, units: UnitSystem): string {
 
 export function moneyWords(value: number, per: 'm' | 'm2', units: UnitSystem): string {
   return formatWithUnit(value, per === 'm' ? 'moneyPerLength' : 'moneyPerArea', units)
+}
+
+/** The rungs of a result; where its thickness is fixed by hand, among those it could be instead. */
+export function wholeLadder(result: RunResult, detail: RunDetail | null): readonly Rating[] {
+  const others = detail?.otherRungs ?? []
+  const fixed = result.ladder.filter((rung) => rungIndex(others, rung.thicknessM) === null)
+  return [...others, ...fixed].toSorted((a, b) => a.thicknessM - b.thicknessM)
 }
 
 /** Index of a thickness on the ladder; null where it is not a rung. */
