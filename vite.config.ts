@@ -6,6 +6,8 @@ import { svelte } from '@sveltejs/vite-plugin-svelte'
 import { defineConfig, type EnvironmentOptions } from 'vite'
 
 const at = (path: string): string => fileURLToPath(new URL(path, import.meta.url))
+/** The licences of what is bundled, to travel with it. */
+const license = { fileName: 'licenses.md' }
 const browsers = ['chrome130', 'firefox128', 'safari18']
 
 const nodeBundle = (name: string, input: string, format: 'es' | 'cjs'): EnvironmentOptions => ({
@@ -18,6 +20,7 @@ const nodeBundle = (name: string, input: string, format: 'es' | 'cjs'): Environm
     copyPublicDir: false,
     minify: false,
     sourcemap: true,
+    license,
     rolldownOptions: {
       input: { [name]: at(input) },
       output: { format, entryFileNames: format === 'es' ? '[name].js' : '[name].cjs' },
@@ -54,6 +57,7 @@ export default defineConfig({
         sourcemap: true,
         // The window comes from this machine's own disk, so one large file costs nothing.
         chunkSizeWarningLimit: 2000,
+        license,
         rolldownOptions: { checks: { bundlerTimings: false } },
       },
     },

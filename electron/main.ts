@@ -11,13 +11,16 @@ import { keepBounds, savedBounds } from './window-bounds.ts'
 
 const program = join(import.meta.dirname, '..', '..')
 
+const folder = dataFolder()
+
+// Chromium's own profile goes where the rest is, and with it the lock that keeps a second start out.
+app.setPath('userData', join(folder, 'shell'))
 declareScheme()
 // Never awaited at the top level: Electron sends `ready` only once this module has run.
 if (app.requestSingleInstanceLock()) void app.whenReady().then(start)
 else app.quit()
 
 async function start(): Promise<void> {
-  const folder = dataFolder()
   mkdirSync(folder, { recursive: true })
   refusePermissions()
   servePage(join(program, 'dist', 'ui'))

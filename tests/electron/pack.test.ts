@@ -12,7 +12,7 @@ beforeAll(async () => {
   folder = await mkdtemp(join(tmpdir(), 'lagwright-pack-'))
   await buildIfStale(join(import.meta.dirname, '..', '..'))
   const asar = await packInto(folder)
-  files = listPackage(asar, { isPack: false }).filter((file) => /\.\w+$/.test(file))
+  files = listPackage(asar, { isPack: false }).filter((file) => /(\.\w+|LICENSE)$/.test(file))
 }, 60_000)
 afterAll(() => rm(folder, { recursive: true, force: true }))
 
@@ -22,6 +22,9 @@ const expected = {
   'the preload script': /^\/dist\/preload\/preload\.cjs$/,
   'the window': /^\/dist\/ui\/(index\.html|assets\/[\w.-]+\.(js|css|svg|woff2))$/,
   'migrations and seeds': /^\/db\/[\w/-]+\.(sql|csv|md)$/,
+  'its own licence': /^\/LICENSE$/,
+  'the licences of what it is made of': /^\/dist\/(main|ui)\/licenses\.md$/,
+  'the licence of its font': /^\/dist\/ui\/LICENSE$/,
   'its description': /^\/package\.json$/,
   'its icon': /^\/electron\/icons\/icon\.png$/,
   'the database module':

@@ -1,8 +1,8 @@
-import { chmod, mkdir, mkdtemp, rm, utimes, writeFile } from 'node:fs/promises'
+import { chmod, mkdir, mkdtemp, readFile, rm, utimes, writeFile } from 'node:fs/promises'
 import { createServer, type RequestListener, type Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import { tmpdir } from 'node:os'
-import { join } from 'node:path'
+import { delimiter, join } from 'node:path'
 import { afterEach, beforeAll, beforeEach, describe, expect, test, vi } from 'vitest'
 import { fetchElectron } from '../../electron/binary.mjs'
 import { buildIfStale, isStale } from '../../electron/build.mjs'
@@ -54,10 +54,15 @@ const withDisplay = (electronMirror: string) => ({
   electron_config_cache: join(folder, 'cache'),
 })
 
-async function fakeElectron(script: string): Promise<string> {
-  const file = join(folder, 'electron')
+async function writeScript(name: string, script: string): Promise<void> {
+  const file = join(folder, name)
   await writeFile(file, `#!/bin/sh\n${script}\n`)
   await chmod(file, 0o755)
+}
+
+/** An Electron that is a shell script; its folder. */
+async function fakeElectron(script: string): Promise<string> {
+  await writeScript('electron', script)
   return folder
 }
 
@@ -67,7 +72,18 @@ describe('start', () => {
   })
 
   test('asked for the browser, says nothing of the desktop shell', async () => {
-    expect(await useAndStop(start(folder, { DISPLAY: ':99' }, ['--browser']))).toBe('')
+    expect(await useAndStop(start(folder, { DISPLAY: ':99' }, ['--browser', '--no-open']))).toBe('')
+  })
+
+  test.runIf(process.platform === 'linux')('opens a browser where there is a display', async () => {
+    const opened = join(folder, 'opened')
+    await writeScript('xdg-open', `echo "$1" > ${opened}.part && mv ${opened}.part ${opened}`)
+    const env = { DISPLAY: ':99', PATH: `${folder}${delimiter}${process.env.PATH}` }
+    const started = start(folder, env, ['--browser'])
+    const url = await started.url()
+    await expect.poll(() => readFile(opened, 'utf8').catch(() => '')).toBe(`${url}\n`)
+    started.stop()
+    expect((await started.ended()).code).toBe(0)
   })
 
   test('without a network falls back at once', async () => {

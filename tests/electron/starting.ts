@@ -18,17 +18,13 @@ export interface Started {
 export function start(
   dataFolder: string,
   env: Readonly<Record<string, string>>,
-  options: readonly string[] = [],
+  options: readonly string[] = ['--no-open'],
 ): Started {
-  const { DISPLAY: _x, WAYLAND_DISPLAY: _wayland, ...own } = process.env
-  const child = spawn(
-    process.execPath,
-    [join(program, 'electron', 'start.mjs'), '--no-open', ...options],
-    {
-      env: { ...own, LAGWRIGHT_DATA: dataFolder, LAGWRIGHT_PORT: '', ...env },
-      stdio: ['ignore', 'pipe', 'pipe'],
-    },
-  )
+  const { DISPLAY: _x, WAYLAND_DISPLAY: _wayland, CI: _ci, ...own } = process.env
+  const child = spawn(process.execPath, [join(program, 'electron', 'start.mjs'), ...options], {
+    env: { ...own, LAGWRIGHT_DATA: dataFolder, LAGWRIGHT_PORT: '', ...env },
+    stdio: ['ignore', 'pipe', 'pipe'],
+  })
   const complaints = text(child.stderr)
   const end = once(child, 'exit') as Promise<[number | null]>
   return {

@@ -29,6 +29,9 @@ class App extends EventEmitter {
     closeRegistration()
   }
 
+  /** The stand-in's browser has its profile already: see settings.ts. */
+  setPath(_name: string, _path: string): void {}
+
   requestSingleInstanceLock = (): boolean => !isSecondInstance
 
   quit(): void {
