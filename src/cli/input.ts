@@ -2,9 +2,9 @@
 import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { JobFile } from '#backend/job-file.ts'
-import { issuesOfDrafts } from '#model/draft-issues.ts'
 import type { RunValues } from '#model/fields.ts'
 import type { Job } from '#model/job.ts'
+import { doubledTags, localIssues } from '#model/local-issues.ts'
 import { parseRunsCsv, sentence } from '#report/runs-csv.ts'
 import type { Issue } from '#sizing/result.ts'
 import { isJobPath } from './arguments.ts'
@@ -56,10 +56,11 @@ function jobInput(path: string): Input {
     values,
     problem: (issue: Issue) => jobSentence(index, values, issue),
   }))
-  const drafts = job.runs.flatMap((run, index) =>
-    issuesOfDrafts(run).map((issue) => jobSentence(index, run.values, issue)),
+  const doubled = doubledTags(job.runs)
+  const problems = job.runs.flatMap((run, index) =>
+    localIssues(run, doubled).map((issue) => jobSentence(index, run.values, issue)),
   )
-  return drafts.length > 0 ? refused(drafts) : { ok: true, runs, defaults: job.defaults }
+  return problems.length > 0 ? refused(problems) : { ok: true, runs, defaults: job.defaults }
 }
 
 function jobSentence(index: number, { tag }: RunValues, { column, found, allowed }: Issue): string {

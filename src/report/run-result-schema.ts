@@ -1,4 +1,5 @@
 /** The schema of what `size --json` writes; `npm run schema` prints it as JSON Schema. */
+import '#model/zod-settings.ts'
 import { z } from 'zod'
 import type { RunResult } from '#sizing/result.ts'
 import type { Caution } from './cautions.ts'

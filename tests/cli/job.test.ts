@@ -47,6 +47,21 @@ describe('lagwright size with a job', slow, () => {
     expect(code).toBe(2)
   })
 
+  it('refuses tags that two runs of a job have', async () => {
+    const { folder, lagwright } = place()
+    const values = { tag: 'J', size: 'DN 50', mediumC: 80 }
+    const runs = [
+      { id: '1', values, drafts: {} },
+      { id: '2', values, drafts: {} },
+    ]
+    const { code, err } = await lagwright('size', keep(folder, runs))
+    expect(err).toEqual([
+      'run 1 (J), column tag: found "J"; allowed: a tag that no other run has',
+      'run 2 (J), column tag: found "J"; allowed: a tag that no other run has',
+    ])
+    expect(code).toBe(2)
+  })
+
   it('refuses a job without runs', async () => {
     const { folder, lagwright } = place()
     const { code, err } = await lagwright('size', keep(folder, []))
