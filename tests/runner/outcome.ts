@@ -22,7 +22,8 @@ export function judged(
   exitCode: number,
   counts: { passed: number; failed: number; skipped: number } | null,
 ): Outcome {
-  const { passed, failed, skipped } = counts ?? { passed: 0, failed: 0, skipped: 0 }
+  if (!counts) return { name, passed: 0, failed: 1, notRun: 0 }
+  const { passed, failed, skipped } = counts
   return {
     name,
     passed,
