@@ -12,7 +12,15 @@ const ladder = rungsMm.map((mm, at) =>
   }),
 )
 const draw = (marked: readonly number[] = [4], rungs = ladder) =>
-  drawLadder({ ladder: rungs, ends: [], marked, width: 400, units: 'si' })
+  drawLadder({
+    ladder: rungs,
+    ends: [],
+    marked,
+    chosen: marked[0] ?? null,
+    isWhole: true,
+    width: 400,
+    units: 'si',
+  })
 
 describe('rungs', () => {
   test('stand at their true thickness', () => {
@@ -83,6 +91,8 @@ describe('bars', () => {
       ladder,
       ends: fromM === null ? [] : [{ limit: 'touch', fromM }],
       marked: [4],
+      chosen: 4,
+      isWhole: true,
       width: 400,
       units,
     }).bars[0]?.pieces[0]
@@ -99,5 +109,32 @@ describe('bars', () => {
     const piece = words(0.03121)
     const start = piece?.wordsX ?? 0
     expect(start > upright || start + (piece?.words.length ?? 0) * 6 < upright).toBe(true)
+  })
+})
+
+describe('reach', () => {
+  const long = [20, 30, 40, 50, 60, 70, 80, 90, 100, 120, 140, 160, 200, 240].map((mm) =>
+    madeRung(mm / 1000, { passes: { touch: mm >= 40 }, lifeCycle: 100 + Math.abs(mm - 50) }),
+  )
+  const drawn = (chosen: number | null, isWhole = false, rungs = long) =>
+    drawLadder({ ladder: rungs, ends: [], marked: [], chosen, isWhole, width: 400, units: 'si' })
+      .rungs.length
+
+  test('goes a little beyond what decides: 2.2 times the chosen or the cheapest rung', () => {
+    expect(drawn(2)).toBe(9)
+    expect(drawn(5)).toBe(11)
+  })
+
+  test('goes to the end where asked, or where nothing is chosen', () => {
+    expect(drawn(2, true)).toBe(long.length)
+    expect(drawn(null)).toBe(long.length)
+  })
+
+  test('goes as far as any limit begins', () => {
+    const late = long.map((rung) => ({
+      ...rung,
+      limits: madeRung(0, { passes: { loss: rung.thicknessM >= 0.1 } }).limits,
+    }))
+    expect(drawn(2, false, late)).toBe(long.length - 1)
   })
 })

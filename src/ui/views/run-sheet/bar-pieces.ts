@@ -27,7 +27,7 @@ interface Field {
 
 export function barPiece({ fromM, toM }: PassStretch, field: Field): BarPiece {
   const start = fromM === null ? field.left : Math.max(field.left, field.x(fromM))
-  const end = toM === null ? field.right : field.x(toM)
+  const end = toM === null ? field.right : Math.min(field.right, field.x(toM))
   const words = stretchWords(fromM, toM, field.units)
   const width = Math.max(3, end - start)
   const wordsX = clearOf(field.uprights, start + PADDING, words.length * LETTER)

@@ -4,6 +4,7 @@ import { formatQuantity, thicknessDecimals } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import { type BarPiece, barPiece } from './bar-pieces.ts'
 import { type DrawnCost, drawCost } from './ladder-cost.ts'
+import { rungsInReach } from './ladder-reach.ts'
 import { limitBars } from './limit-bars.ts'
 
 const LABELS = 62
@@ -19,6 +20,7 @@ const BAR_STEP = 25
 const DENSE = 14
 /** Room one thickness label needs beside the next. */
 const LABEL_ROOM = 21
+
 export interface DrawnRung {
   readonly index: number
   readonly x: number
@@ -46,6 +48,8 @@ export interface LadderDrawing {
   readonly rungs: readonly DrawnRung[]
   /** Rungs stand so close that full marks would touch. */
   readonly isDense: boolean
+  /** How many rungs are shown unless all are asked for. */
+  readonly reach: number
   readonly bars: readonly DrawnBar[]
   readonly cost: DrawnCost | null
 }
@@ -55,11 +59,19 @@ export interface LadderInput {
   readonly ends: readonly LimitEnd[]
   /** Rungs with an upright of their own: the shown one and the chosen one. The first keeps its label. */
   readonly marked: readonly number[]
+  readonly chosen: number | null
+  /** Also the rungs far beyond what decides. */
+  readonly isWhole: boolean
   readonly width: number
   readonly units: UnitSystem
 }
 
-export function drawLadder({ ladder, ends, marked, width, units }: LadderInput): LadderDrawing {
+export function drawLadder(input: LadderInput): LadderDrawing {
+  const { marked, chosen, width, units } = input
+  const limits = limitBars(input.ladder, input.ends)
+  const chosenM = (chosen === null ? undefined : input.ladder[chosen]?.thicknessM) ?? null
+  const reach = rungsInReach(input.ladder, limits, chosenM)
+  const ladder = input.isWhole ? input.ladder : input.ladder.slice(0, reach)
   const hasMoney = ladder.length > 0 && ladder.every((rung) => rung.money !== null)
   // With costs the names of their lines stand to the right.
   const right = width - (hasMoney ? NAMES : 2)
@@ -67,33 +79,26 @@ export function drawLadder({ ladder, ends, marked, width, units }: LadderInput):
   const top = hasMoney ? COST_TOP : 4
   const costBottom = hasMoney ? COST_TOP + COST_HEIGHT : top
   const barsTop = costBottom + (hasMoney ? 20 : 6)
-  const uprights = marked.map((index) => x(ladder[index]?.thicknessM ?? 0))
-  const bars = limitBars(ladder, ends).map(({ limit, stretches }, at) => ({
+  const uprights = marked.flatMap((index) => ladder[index] ?? []).map((rung) => x(rung.thicknessM))
+  const field = { x, left: LABELS, right, uprights, units }
+  const bars = limits.map(({ limit, stretches }, at) => ({
     limit,
     y: barsTop + at * BAR_STEP,
-    pieces: stretches.map((stretch) =>
-      barPiece(stretch, { x, left: LABELS, right, uprights, units }),
-    ),
+    pieces: stretches.map((stretch) => barPiece(stretch, field)),
   }))
   const bottom = barsTop + bars.length * BAR_STEP + 2
-  const labels = rungLabels(ladder, units)
-  const rungs = ladder.map((rung, index) => ({
-    index,
-    label: labels[index] ?? '',
-    hasLabel: true,
-    x: x(rung.thicknessM),
-  }))
   return {
-    height: bottom + 22,
     width,
+    height: bottom + 22,
     left: LABELS,
     right,
     top,
     bottom,
     costBottom,
     barHeight: BAR_HEIGHT,
-    rungs: withRoom(rungs, marked[0]),
+    rungs: withRoom(drawRungs(ladder, x, units), marked[0]),
     isDense: ladder.length > DENSE,
+    reach,
     bars,
     cost: hasMoney ? drawCost(ladder, { x, top: COST_TOP, height: COST_HEIGHT }) : null,
   }
@@ -108,10 +113,19 @@ export function nearestRung({ rungs }: LadderDrawing, x: number): number | null 
   return nearest?.index ?? null
 }
 
-function rungLabels(ladder: readonly Rating[], units: UnitSystem): string[] {
+function drawRungs(
+  ladder: readonly Rating[],
+  x: (thicknessM: number) => number,
+  units: UnitSystem,
+): DrawnRung[] {
   const thicknessesM = ladder.map(({ thicknessM }) => thicknessM)
   const decimals = units === 'us' ? 1 : thicknessDecimals(thicknessesM, units)
-  return thicknessesM.map((thicknessM) => formatQuantity(thicknessM, 'thickness', units, decimals))
+  return thicknessesM.map((thicknessM, index) => ({
+    index,
+    x: x(thicknessM),
+    label: formatQuantity(thicknessM, 'thickness', units, decimals),
+    hasLabel: true,
+  }))
 }
 
 /** From a little below the thinnest rung, or nought where that is near, to the thickest. */
