@@ -11,7 +11,7 @@ import type { RunOutcome } from '#sizing/result.ts'
 declare module 'vitest' {
   interface ProvidedContext {
     demoCatalogue: Catalogue
-    demoRuns: RunValues[]
+    demoRuns: readonly RunValues[]
     demoOutcomes: RunOutcome[]
   }
 }
