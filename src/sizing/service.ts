@@ -104,7 +104,7 @@ export function serviceHeeds(problem: Problem, settled: Settled, states: States)
   return allStands(problem, settled, states)
     .filter(
       ({ ofMaximum, marginK, value, bound }) =>
-        ofMaximum && marginK >= -SOLVED_K && bound > 0 && value > HEED_SHARE * bound,
+        ofMaximum && marginK >= -SOLVED_K && bound > 0 && value > HEED_SHARE * bound + SOLVED_K,
     )
     .map(({ what, value, bound }) => ({
       code: 'service-heed',
