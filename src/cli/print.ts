@@ -1,7 +1,6 @@
 /** Standard output and standard error. A reader that went away, as `| head` does, is no failure. */
 
-/** Enough for one write to be worth its while. */
-const chunkLength = 1 << 18
+import { inChunks } from './chunks.ts'
 
 for (const stream of [process.stdout, process.stderr]) {
   stream.on('error', (error: NodeJS.ErrnoException) => {
@@ -22,14 +21,9 @@ export async function printProblems(problems: readonly string[]): Promise<void> 
 }
 
 async function writeAll(stream: NodeJS.WriteStream, texts: Iterable<string>): Promise<void> {
-  let waiting = ''
-  for (const text of texts) {
-    waiting += text
-    if (waiting.length < chunkLength) continue
-    if (!(await write(stream, waiting))) return
-    waiting = ''
+  for (const chunk of inChunks(texts)) {
+    if (!(await write(stream, chunk))) return
   }
-  if (waiting !== '') await write(stream, waiting)
 }
 
 /** Whether somebody still reads. */

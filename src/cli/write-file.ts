@@ -11,6 +11,7 @@ import {
   writeFileSync,
 } from 'node:fs'
 import { basename, dirname, join } from 'node:path'
+import { inChunks } from './chunks.ts'
 
 /** Why the file may not be written, as a sentence; null where nothing stands against it. */
 export function whyNotWrite(
@@ -28,13 +29,13 @@ export function whyNotWrite(
 }
 
 /** Writes beside the target first, so that a stop halfway leaves the old file or none. */
-export function writeWhole(path: string, chunks: Iterable<string>): void {
+export function writeWhole(path: string, texts: Iterable<string>): void {
   const target = existsSync(path) ? realpathSync(path) : path
   const beside = join(dirname(target), `.${basename(target)}.${process.pid}.part`)
   const file = openSync(beside, 'wx')
   try {
     try {
-      for (const chunk of chunks) writeFileSync(file, chunk)
+      for (const chunk of inChunks(texts)) writeFileSync(file, chunk)
       fsyncSync(file)
     } finally {
       closeSync(file)

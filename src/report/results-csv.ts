@@ -41,9 +41,14 @@ const columns: readonly (readonly [header: string, cell: (run: SizedRun) => Cell
   ['notes', ({ result }) => result.notes.map(({ text }) => text).join(' ')],
 ]
 
-export function writeResultsCsv(runs: readonly SizedRun[]): string {
-  const rows = runs.map((run) => columns.map(([, cell]) => cellText(cell(run))))
-  return `${Papa.unparse([columns.map(([header]) => header), ...rows], { newline: '\n' })}\n`
+/** Header and rows, a text each, since a long list does not fit into one string. */
+export function* writeResultsCsv(runs: Iterable<SizedRun>): Iterable<string> {
+  yield rowText(columns.map(([header]) => header))
+  for (const run of runs) yield rowText(columns.map(([, cell]) => cellText(cell(run))))
+}
+
+function rowText(cells: readonly string[]): string {
+  return `${Papa.unparse([[...cells]])}\n`
 }
 
 function millimetres(metres: number | null | undefined): number | null {

@@ -1,6 +1,7 @@
 /** The answer for people at a terminal: one line per run, what was assumed, and the cautions. */
+import type { Rating } from '#sizing/result.ts'
 import { formatQuantity, formatWithUnit, thicknessDecimals, unitLabel } from '#units/format.ts'
-import type { QuantityName, UnitSystem } from '#units/quantities.ts'
+import type { UnitSystem } from '#units/quantities.ts'
 import { cautions } from './cautions.ts'
 import { governedBy, meetsLimits, reasonWords, type SizedRun, sizeWords } from './run-words.ts'
 import { type TextColumn, textTable } from './text-table.ts'
@@ -11,98 +12,117 @@ export interface TableOptions {
   readonly width: number | null
 }
 
+/** What a run contributes: small, since the results of a long list do not fit into memory. */
+interface Line {
+  readonly tag: string
+  readonly meetsLimits: boolean
+  readonly size: string
+  readonly thicknessM: number | null
+  readonly loss: string
+  readonly bare: string
+  readonly surface: string
+  readonly governedBy: string
+  readonly reason: string
+  readonly notes: readonly string[]
+}
+
 /** Table, count, notes and cautions as one text. */
-export function writeRunTable(runs: readonly SizedRun[], options: TableOptions): string {
+export function writeRunTable(runs: Iterable<SizedRun>, options: TableOptions): string {
+  const lines = Array.from(runs, (run) => lineOf(run, options.units))
+  const failing = lines.filter((line) => !line.meetsLimits).map(({ tag }) => tag)
   const parts = [
-    textTable(columnsOf(runs, options.units), options.width),
-    [countWords(runs)],
-    noteLines(runs),
+    textTable(columnsOf(lines, options.units), options.width),
+    [countWords(lines.length, failing)],
+    noteLines(lines),
     ['Cautions', ...cautions.map(({ text, deferTo }) => `- ${text} In doubt: ${deferTo}.`)],
   ]
   return `${parts
-    .filter((lines) => lines.length > 0)
-    .map((lines) => lines.join('\n'))
+    .filter((part) => part.length > 0)
+    .map((part) => part.join('\n'))
     .join('\n\n')}\n`
 }
 
-function columnsOf(runs: readonly SizedRun[], units: UnitSystem): readonly TextColumn[] {
-  const number = (
-    header: string,
-    quantity: QuantityName,
-    pick: (run: SizedRun) => number | null,
-  ) => ({
-    header: `${header} ${unitLabel(quantity, units)}`,
-    align: 'right' as const,
-    cells: runs.map((run) => formatQuantity(pick(run), quantity, units)),
-  })
-  const words = (header: string, maxWidth: number, wordsOf: (run: SizedRun) => string) => ({
-    header,
-    align: 'left' as const,
-    maxWidth,
-    cells: runs.map(wordsOf),
-  })
-  return [
-    words('Tag', 24, ({ result }) => result.tag),
-    words('Size', 18, ({ values }) => sizeWords(values, units)),
-    lagging(runs, units),
-    loss('Loss', runs, units, ({ result }) => result.chosen),
-    loss('Bare', runs, units, ({ result }) => result.bare),
-    number('Surface', 'temperature', ({ result }) => result.chosen?.surfaceTempC ?? null),
-    words('Governed by', 14, ({ result }) => governedBy(result)),
-    words('Reason', Number.POSITIVE_INFINITY, ({ result }) => reasonWords(result, units)),
-  ]
-}
-
-function lagging(runs: readonly SizedRun[], units: UnitSystem): TextColumn {
-  const thicknesses = runs.map(({ result }) => result.chosen?.thicknessM)
-  const decimals = thicknessDecimals(thicknesses, units)
+function lineOf({ values, result }: SizedRun, units: UnitSystem): Line {
+  const { chosen, bare } = result
   return {
-    header: `Lagging ${unitLabel('thickness', units)}`,
-    align: 'right',
-    cells: thicknesses.map((thicknessM) =>
-      formatQuantity(thicknessM, 'thickness', units, decimals),
-    ),
+    tag: result.tag,
+    meetsLimits: meetsLimits(result),
+    size: sizeWords(values, units),
+    thicknessM: chosen?.thicknessM ?? null,
+    loss: lossWords(chosen, units),
+    bare: lossWords(bare, units),
+    surface: formatQuantity(chosen?.surfaceTempC, 'temperature', units),
+    governedBy: governedBy(result),
+    reason: reasonWords(result, units),
+    notes: result.notes.map(({ text }) => text),
   }
 }
 
 /** Loss per metre; a flat surface has none and carries its loss per area with the unit. */
-function loss(
-  header: string,
-  runs: readonly SizedRun[],
-  units: UnitSystem,
-  ratingOf: (run: SizedRun) => SizedRun['result']['chosen'],
-): TextColumn {
-  const cells = runs.map((run) => {
-    const rating = ratingOf(run)
-    return rating && rating.heatLossWPerM === null
-      ? formatWithUnit(rating.heatFluxWPerM2, 'heatFlux', units)
-      : formatQuantity(rating?.heatLossWPerM, 'heatLossPerLength', units)
+function lossWords(rating: Rating | null, units: UnitSystem): string {
+  return rating && rating.heatLossWPerM === null
+    ? formatWithUnit(rating.heatFluxWPerM2, 'heatFlux', units)
+    : formatQuantity(rating?.heatLossWPerM, 'heatLossPerLength', units)
+}
+
+function columnsOf(lines: readonly Line[], units: UnitSystem): readonly TextColumn[] {
+  const lossUnit = unitLabel('heatLossPerLength', units)
+  const thicknesses = lines.map(({ thicknessM }) => thicknessM)
+  const decimals = thicknessDecimals(thicknesses, units)
+  const lagging = thicknesses.map((thicknessM) =>
+    formatQuantity(thicknessM, 'thickness', units, decimals),
+  )
+  const words = (header: string, key: 'tag' | 'size' | 'governedBy' | 'reason'): TextColumn => ({
+    header,
+    align: 'left',
+    cells: lines.map((line) => line[key]),
   })
-  return { header: `${header} ${unitLabel('heatLossPerLength', units)}`, align: 'right', cells }
+  const numbers = (header: string, cells: readonly string[]): TextColumn => ({
+    header,
+    align: 'right',
+    cells,
+  })
+  return [
+    { ...words('Tag', 'tag'), maxWidth: 24 },
+    { ...words('Size', 'size'), maxWidth: 18 },
+    numbers(`Lagging ${unitLabel('thickness', units)}`, lagging),
+    numbers(
+      `Loss ${lossUnit}`,
+      lines.map(({ loss }) => loss),
+    ),
+    numbers(
+      `Bare ${lossUnit}`,
+      lines.map(({ bare }) => bare),
+    ),
+    numbers(
+      `Surface ${unitLabel('temperature', units)}`,
+      lines.map(({ surface }) => surface),
+    ),
+    words('Governed by', 'governedBy'),
+    words('Reason', 'reason'),
+  ]
 }
 
 /** "42 runs. 41 meet their limits; not so: GL-322." */
-export function countWords(runs: readonly SizedRun[]): string {
-  const failing = runs.filter(({ result }) => !meetsLimits(result)).map(({ result }) => result.tag)
-  const total = `${runs.length} ${runs.length === 1 ? 'run' : 'runs'}`
+export function countWords(runs: number, failing: readonly string[]): string {
+  const total = `${runs} ${runs === 1 ? 'run' : 'runs'}`
   if (failing.length === 0) return `${total}. All limits are met.`
-  return `${total}. ${runs.length - failing.length} meet their limits; not so: ${tagList(failing)}.`
+  return `${total}. ${runs - failing.length} meet their limits; not so: ${tagList(failing)}.`
 }
 
-function noteLines(runs: readonly SizedRun[]): readonly string[] {
+function noteLines(lines: readonly Line[]): readonly string[] {
   const tagsOf = new Map<string, string[]>()
-  for (const { result } of runs) {
-    for (const { text } of result.notes) {
+  for (const { tag, notes } of lines) {
+    for (const text of notes) {
       const tags = tagsOf.get(text)
-      if (tags) tags.push(result.tag)
-      else tagsOf.set(text, [result.tag])
+      if (tags) tags.push(tag)
+      else tagsOf.set(text, [tag])
     }
   }
   if (tagsOf.size === 0) return []
-  const lines = [...tagsOf].map(
-    ([text, tags]) => `- ${text} (${tags.length === runs.length ? 'all runs' : tagList(tags)})`,
-  )
-  return ['Notes', ...lines]
+  const who = (tags: readonly string[]) =>
+    tags.length === lines.length ? 'all runs' : tagList(tags)
+  return ['Notes', ...Array.from(tagsOf, ([text, tags]) => `- ${text} (${who(tags)})`)]
 }
 
 function tagList(tags: readonly string[]): string {

@@ -1,0 +1,41 @@
+/** Runs that are sized as they are asked for: the results of a long list do not fit into memory at once. */
+import type { RunValues } from '#model/fields.ts'
+import { resolve } from '#model/resolve/resolve.ts'
+import { indexCatalogue, sizeRun, withDefaults } from '#model/size-run.ts'
+import { meetsLimits, type SizedRun } from '#report/run-words.ts'
+import { openedCatalogue } from './catalogue.ts'
+import type { InputRun } from './input.ts'
+
+export class SizedList implements Iterable<SizedRun> {
+  /** Tags of the runs that do not meet their limits, as far as they were sized. */
+  readonly failing = new Set<string>()
+  readonly #runs: readonly InputRun[]
+  readonly #defaults: RunValues
+  readonly #index = indexCatalogue(openedCatalogue())
+
+  constructor(runs: readonly InputRun[], defaults: RunValues) {
+    this.#runs = runs
+    this.#defaults = defaults
+  }
+
+  get size(): number {
+    return this.#runs.length
+  }
+
+  /** Everything that keeps a run from being sized; found without sizing any. */
+  problems(): readonly string[] {
+    return this.#runs.flatMap(({ values, problem }) => {
+      const resolved = resolve(withDefaults(values, this.#defaults), this.#index)
+      return resolved.ok ? [] : resolved.issues.map(problem)
+    })
+  }
+
+  *[Symbol.iterator](): Iterator<SizedRun> {
+    for (const { values } of this.#runs) {
+      const outcome = sizeRun(values, this.#defaults, this.#index)
+      if (!outcome.ok) throw new Error(`${values.tag} was found fit to be sized, and is not`)
+      if (!meetsLimits(outcome.result)) this.failing.add(outcome.result.tag)
+      yield { values: withDefaults(values, this.#defaults), result: outcome.result }
+    }
+  }
+}
