@@ -48,7 +48,22 @@ test('ink is dark on pale grounds and light on deep ones', () => {
   ])
 })
 
-// Ottosson (2020) prints OKLab of XYZ test pairs; white is (1, 0, 0) to three decimals.
+// WCAG 2.2, 1.4.3 and its definitions of contrast ratio and relative luminance.
+test('black or white ink reads at 4.5:1 on every colour of the scale', () => {
+  for (let aboveAirK = -40; aboveAirK <= 180; aboveAirK += 1) {
+    const colour = rgbAt(aboveAirK)
+    const [red = 0, green = 0, blue = 0] = colour.map((channel) => {
+      const value = channel / 255
+      return value <= 0.04045 ? value / 12.92 : ((value + 0.055) / 1.055) ** 2.4
+    })
+    const luminance = 0.2126 * red + 0.7152 * green + 0.0722 * blue
+    const contrast =
+      inkOn(colour) === 'light' ? 1.05 / (luminance + 0.05) : (luminance + 0.05) / 0.05
+    expect(contrast).toBeGreaterThanOrEqual(4.5)
+  }
+})
+
+// Ottosson (2020), table of test pairs: white is (1.000, 0.000, 0.000).
 test('white is lightness 1 without hue', () => {
   const [lightness, a, b] = oklab([255, 255, 255])
   expect(lightness).toBeCloseTo(1, 3)
