@@ -5,7 +5,7 @@ import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 
 /** Terms taken where none are given; each is said in a note. Source: a judgement, for the user to replace. */
-const usual = { discount: 0.08, growth: 0.02, lifeYears: 15, cop: 3 }
+export const usualMoney = { discount: 0.08, growth: 0.02, lifeYears: 15, cop: 3 }
 
 export function resolveMoney(
   values: RunValues,
@@ -46,15 +46,15 @@ export function resolveMoney(
     energy: {
       fuelPricePerKWh,
       efficiency: values.efficiency ?? row?.efficiency ?? 1,
-      cop: values.cop ?? usual.cop,
+      cop: values.cop ?? usualMoney.cop,
       hoursPerYear: values.hoursPerYear,
     },
     fuelName: row?.name ?? 'fuel',
     co2KgPerKWh: row?.co2KgPerKWh ?? null,
     currency: values.currency ?? index.catalogue.labour.currency,
-    discount: values.discount ?? usual.discount,
-    growth: values.growth ?? usual.growth,
-    lifeYears: values.lifeYears ?? usual.lifeYears,
+    discount: values.discount ?? usualMoney.discount,
+    growth: values.growth ?? usualMoney.growth,
+    lifeYears: values.lifeYears ?? usualMoney.lifeYears,
     labour: index.catalogue.labour,
   }
 }
@@ -76,15 +76,15 @@ function noteTerms(
     assumed.push(`${fuelName ?? 'fuel'} at ${plain(fuelPricePerKWh, 4)} per kWh (illustrative)`)
   }
   if (gainsHeat) {
-    if (values.cop === undefined) assumed.push(`a cooling COP of ${usual.cop}`)
+    if (values.cop === undefined) assumed.push(`a cooling COP of ${usualMoney.cop}`)
   } else if (values.efficiency === undefined) {
     assumed.push(`an efficiency of ${plain(efficiency, 2)}`)
   }
   if (values.discount === undefined)
-    assumed.push(`a discount rate of ${plain(usual.discount * 100)} %`)
+    assumed.push(`a discount rate of ${plain(usualMoney.discount * 100)} %`)
   if (values.growth === undefined)
-    assumed.push(`a price growth of ${plain(usual.growth * 100)} % a year`)
-  if (values.lifeYears === undefined) assumed.push(`a life of ${usual.lifeYears} years`)
+    assumed.push(`a price growth of ${plain(usualMoney.growth * 100)} % a year`)
+  if (values.lifeYears === undefined) assumed.push(`a life of ${usualMoney.lifeYears} years`)
   if (assumed.length > 0)
     findings.note('money-assumed', `Cost is weighed with ${assumed.join(', ')}.`)
 }

@@ -1,5 +1,6 @@
 /** The fields of a run as a form: in groups, the usual ones first, the rest behind "More". */
 import type { FieldKey, RunValues } from '#model/fields.ts'
+import { usualMoney } from '#model/resolve/money.ts'
 
 export interface FieldGroup {
   readonly title: string
@@ -105,4 +106,11 @@ export const standIns: Readonly<Partial<Record<FieldKey, string>>> = {
   contactS: '5',
   dewMarginK: '1',
   money: 'if fuel and hours are given',
+  fuelPricePerKWh: 'of the fuel',
+  efficiency: 'of the fuel',
+  cop: String(usualMoney.cop),
+  discount: String(usualMoney.discount),
+  growth: String(usualMoney.growth),
+  lifeYears: String(usualMoney.lifeYears),
+  currency: 'of the prices',
 }

@@ -18,6 +18,8 @@ export function addRunBelow(grid: Grid): void {
   // A filter would hide the new run at once.
   grid.filterText = ''
   grid.onlyNeedy = false
+  // The first run is told by a form; later ones are like the one above.
+  if (session.job.runs.length === 0) grid.panel = 'inputs'
   session.edit(addRun, id, session.activeRunId)
   grid.goToRun(id, 'tag')
 }

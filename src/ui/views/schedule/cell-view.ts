@@ -1,4 +1,5 @@
 /** What one cell of the schedule says. */
+import type { CellReader } from '#model/cell-edit.ts'
 import { type FieldKey, fieldOf, type RunValues } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
 import type { RunBrief } from '#model/run-brief.ts'
@@ -9,7 +10,7 @@ import { editText, readText } from '#ui/state/cell-text.ts'
 import { ABSENT, formatQuantity } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import type { Column } from './columns.ts'
-import { issueSentence } from './issue-words.ts'
+import { issueSentence, shownIssues } from './issue-words.ts'
 
 export interface CellView {
   readonly text: string
@@ -23,6 +24,7 @@ export interface Showing {
   readonly units: UnitSystem
   readonly words: CatalogueWords
   readonly defaults: RunValues
+  readonly reader: CellReader
   /** Decimals of number columns, the same all the way down. */
   readonly decimals: ReadonlyMap<string, number>
 }
@@ -35,7 +37,7 @@ export function cellView(
 ): CellView {
   const { key } = column
   const draft = key ? run.drafts[key] : undefined
-  const problem = key ? problemOf(key, brief) : null
+  const problem = key ? problemOf(run, key, brief, showing.reader) : null
   if (draft !== undefined)
     return { text: draft, problem: problem ?? 'not a value of this column', isInherited: false }
   if (column.result)
@@ -123,10 +125,15 @@ function isEmpty({ values, drafts }: Run, column: string): boolean {
   return !written.some((key) => fieldOf(key as keyof RunValues).column === column)
 }
 
-function problemOf(key: NonNullable<Column['key']>, brief: RunBrief | undefined): string | null {
+function problemOf(
+  run: Run,
+  key: FieldKey,
+  brief: RunBrief | undefined,
+  reader: CellReader,
+): string | null {
   if (!brief || brief.ok) return null
   const { column } = fieldOf(key)
-  const issue = brief.issues.find((one) => one.column === column)
+  const issue = shownIssues(run, brief.issues, reader).find((one) => one.column === column)
   return issue ? issueSentence(issue) : null
 }
 

@@ -1,5 +1,7 @@
 /** What is wrong with a value, as a sentence for the window: fields by their names there, not by their CSV columns. */
-import { fields } from '#model/fields.ts'
+import type { CellReader } from '#model/cell-edit.ts'
+import { type FieldKey, fieldOf, fields } from '#model/fields.ts'
+import type { Run } from '#model/job.ts'
 import type { Issue } from '#sizing/result.ts'
 
 export function issueSentence({ found, allowed }: Issue): string {
@@ -8,6 +10,21 @@ export function issueSentence({ found, allowed }: Issue): string {
   if (/^(?:"|[A-Z][a-z]+ )/.test(cure)) return stopped(cure)
   if (found === '' || found === 'nothing') return stopped(`Give ${cure}`)
   return stopped(`${found} does not fit. Allowed: ${cure}`)
+}
+
+/** The issues of a run in the window's words; of what was typed and is no value, in the units it is typed in. */
+export function shownIssues(
+  run: Run,
+  issues: readonly Issue[],
+  reader: CellReader,
+): readonly Issue[] {
+  const drafts = Object.entries(run.drafts) as [FieldKey, string][]
+  const typed = new Map(drafts.map(([key, text]) => [fieldOf(key).column, reader.read(key, text)]))
+  return issues.map((issue) => {
+    const read = typed.get(issue.column)
+    const { found, allowed } = read && !read.ok ? read : issue
+    return { ...issue, found, allowed: labelled(allowed) }
+  })
 }
 
 /** The name of a column as the window shows it. */
