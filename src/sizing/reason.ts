@@ -103,11 +103,15 @@ function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
   const own = chosen.limits.filter((result) => result.limit === limit)
   const here = own.find((result) => result.bound === failed?.bound) ?? own[0]
   const first = here ? `${said(chosen, words)} gives ${against(here, words)}` : ''
-  const second =
-    thinner && failed
-      ? `${said(thinner, words)} would give ${words.quantity(failed.value, failed.unit, tellingDigits(failed))}`
-      : ''
+  const second = thinner && failed ? `${said(thinner, words)} would ${missed(failed, words)}` : ''
   return `${[first, second].filter((part) => part !== '').join('; ')}.`
+}
+
+/** What a failed rung gives; where one decimal does not tell it from its bound, that it just misses. */
+function missed({ value, bound, unit }: LimitResult, words: Words): string {
+  return value.toFixed(1) === bound.toFixed(1)
+    ? 'just miss it'
+    : `give ${words.quantity(value, unit, 1)}`
 }
 
 function matt(facts: ReasonFacts, words: Words): string {
