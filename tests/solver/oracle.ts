@@ -62,7 +62,7 @@ function solveSurface(system: System, geometry: Geometry, surface: Surface): Ora
   const { airC, surroundingsC } = system.around
   let cold = Math.min(airC, surroundingsC, system.mediumC)
   let hot = Math.max(airC, surroundingsC, system.mediumC)
-  for (let i = 0; i < 100; i += 1) {
+  for (let i = 0; i < 64; i += 1) {
     const trial = (cold + hot) / 2
     const arrived = march(system, geometry, released(system, surface, trial)).at(-1) ?? Number.NaN
     if (arrived > trial) cold = trial
@@ -94,7 +94,7 @@ function farSideC(conductivity: Conductivity, nearC: number, flow: number): numb
       ? conductivity.conductivityWPerMK
       : Math.min(...conductivity.valuesWPerMK)
   let [low, high] = flow > 0 ? [nearC - flow / least, nearC] : [nearC, nearC - flow / least]
-  for (let i = 0; i < 70; i += 1) {
+  for (let i = 0; i < 64; i += 1) {
     const trial = (low + high) / 2
     if (meanConductivity(conductivity, nearC, trial) * (nearC - trial) > flow) low = trial
     else high = trial
