@@ -317,6 +317,16 @@ describe('damp under a bright jacket', () => {
     expect(matt.mattThicknessM).toBeNull()
   })
 
+  // Where bright ends is a rule of the product: half of black.
+  test.each([
+    [0.5, true],
+    [0.51, false],
+  ])('an emissivity of %d is bright: %s', (emissivity, isBright) => {
+    const result = sized({ ...coldRun, emissivity })
+    expect(result.governing).toBe('damp')
+    expect(result.mattThicknessM !== null).toBe(isBright)
+  })
+
   test('not where something else governs', () => {
     expect(sized({ ...steamRun, mediumC: 350 }).mattThicknessM).toBeNull()
   })

@@ -1,5 +1,6 @@
 /** Touch, loss and damp as they are asked for, with the assumptions behind them. */
 import { describe, expect, test } from 'vitest'
+import { runValuesSchema } from '#model/job.ts'
 import { coldRun, noteCodes, refused, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
 import { problemOf } from './problem.ts'
 
@@ -57,6 +58,11 @@ describe('touch', () => {
       maxSurfaceC: 45,
       burn: null,
     })
+  })
+
+  test('below 0.5 s is no value of a run', () => {
+    expect(runValuesSchema.safeParse({ contactS: 0.5 }).success).toBe(true)
+    expect(runValuesSchema.safeParse({ contactS: 0.49 }).success).toBe(false)
   })
 
   test('above 8 h the 8 h value', () => {
