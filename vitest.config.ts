@@ -5,6 +5,7 @@ import { chromiumLaunch } from './tests/chromium.ts'
 
 export default defineConfig({
   test: {
+    allowOnly: false,
     coverage: {
       provider: 'v8',
       include: ['src/**/*.{ts,svelte}'],
