@@ -6,6 +6,8 @@ import type { FieldKey, RunValues } from '#model/fields.ts'
 interface Named {
   readonly id: string
   readonly name: string
+  /** What the row is one of; empty where a list needs no parts. */
+  readonly family: string
 }
 
 export class CatalogueWords {
@@ -18,9 +20,9 @@ export class CatalogueWords {
     this.#catalogue = catalogue
     this.#lists = new Map<FieldKey, readonly Named[]>([
       ['material', catalogue.materials],
-      ['finish', catalogue.finishes],
-      ['fuel', catalogue.fuels],
-      ['pipeMaterial', catalogue.wallMaterials],
+      ['finish', catalogue.finishes.map((row) => ({ ...row, family: row.category }))],
+      ['fuel', catalogue.fuels.map((row) => ({ ...row, family: '' }))],
+      ['pipeMaterial', catalogue.wallMaterials.map((row) => ({ ...row, family: '' }))],
     ])
     for (const [key, list] of this.#lists) {
       this.#nameById.set(key, new Map(list.map(({ id, name }) => [id, name])))

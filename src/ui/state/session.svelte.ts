@@ -3,6 +3,9 @@ import type { OpenJob } from '#contract/host.ts'
 import type { Job, Run } from '#model/job.ts'
 import { History } from './history.svelte.ts'
 
+/** What changed: the job, or only which of its runs is the active one. */
+export type Changed = 'job' | 'active run'
+
 type Change<A extends readonly unknown[]> = (job: Job, ...args: A) => Job
 
 export class Session {
@@ -12,13 +15,13 @@ export class Session {
   fileName: string | null = $state(null)
   /** Counts the jobs opened, so that views can start afresh with each. */
   opened = $state(0)
-  readonly #changed: () => void
+  readonly #changed: (what: Changed) => void
   readonly activeRun: Run | null = $derived.by(
     () => this.job.runs.find((run) => run.id === this.#activeRunId) ?? null,
   )
 
-  /** `changed` is told after every change of the job or of the active run. */
-  constructor(open: OpenJob, changed: () => void) {
+  /** `changed` is told after every change. */
+  constructor(open: OpenJob, changed: (what: Changed) => void) {
     this.#changed = changed
     this.#take(open)
   }
@@ -38,19 +41,19 @@ export class Session {
   set activeRunId(id: string | null) {
     if (id === this.#activeRunId) return
     this.#activeRunId = id
-    this.#changed()
+    this.#changed('active run')
   }
 
   /** Applies one edit as one step that undo takes back. */
   edit<A extends readonly unknown[]>(change: Change<A>, ...args: A): void {
     this.#history.push(change(this.job, ...args))
-    this.#changed()
+    this.#changed('job')
   }
 
   /** Applies an edit that carries on the step of the same name, as while a field is typed in. */
   amend<A extends readonly unknown[]>(step: string, change: Change<A>, ...args: A): void {
     this.#history.push(change(this.job, ...args), step)
-    this.#changed()
+    this.#changed('job')
   }
   closeStep(): void {
     this.#history.closeStep()
@@ -58,17 +61,17 @@ export class Session {
 
   undo(): void {
     this.#history.undo()
-    this.#changed()
+    this.#changed('job')
   }
   redo(): void {
     this.#history.redo()
-    this.#changed()
+    this.#changed('job')
   }
 
   /** Another job takes the place of this one; its history begins anew. */
   replace(open: OpenJob): void {
     this.#take(open)
-    this.#changed()
+    this.#changed('job')
   }
 
   /** The same job, in another file. */

@@ -56,9 +56,28 @@ export class Sizing {
       this.#unsound.delete(id)
     }
     this.#client.size(this.#soundRuns(job.runs), job.defaults)
-    this.#askSheet(job, active)
+    this.look(job, active)
     this.waiting = this.#client.waiting
     this.#version++
+  }
+
+  /** Tells which run is the active one. */
+  look(job: Job, active: Run | null): void {
+    if (!active) {
+      this.#sheet = null
+      this.#asked = null
+      return
+    }
+    const { values } = active
+    const issues = localIssues(active, this.#doubled)
+    if (issues.length > 0) {
+      this.#sheet = { values, outcome: { ok: false, issues }, detail: null }
+      this.#asked = null
+      return
+    }
+    if (this.#asked?.values === values && this.#asked.defaults === job.defaults) return
+    this.#asked = { values, defaults: job.defaults }
+    this.#client.askSheet(values, job.defaults)
   }
 
   stop(): void {
@@ -79,24 +98,6 @@ export class Sizing {
       this.#unsound.set(run.id, { run, isDoubled })
       this.#briefs.set(run.id, { ok: false, state: 'fails', issues })
     }
-  }
-
-  #askSheet(job: Job, active: Run | null): void {
-    if (!active) {
-      this.#sheet = null
-      this.#asked = null
-      return
-    }
-    const { values } = active
-    const issues = localIssues(active, this.#doubled)
-    if (issues.length > 0) {
-      this.#sheet = { values, outcome: { ok: false, issues }, detail: null }
-      this.#asked = null
-      return
-    }
-    if (this.#asked?.values === values && this.#asked.defaults === job.defaults) return
-    this.#asked = { values, defaults: job.defaults }
-    this.#client.askSheet(values, job.defaults)
   }
 
   #take(briefs: readonly (readonly [string, RunBrief])[]): void {

@@ -9,7 +9,7 @@ import { CatalogueWords } from './catalogue-words.ts'
 import { readerFor } from './cell-text.ts'
 import { Preferences } from './preferences.svelte.ts'
 import { Saving } from './saving.svelte.ts'
-import { Session } from './session.svelte.ts'
+import { type Changed, Session } from './session.svelte.ts'
 import { Sizing } from './sizing.svelte.ts'
 
 type About = Output<'host.about'>
@@ -49,9 +49,9 @@ export class Workspace {
     this.words = new CatalogueWords(read.catalogue)
     this.preferences = new Preferences(read.preferences, host['preferences.write'])
     this.sizing = new Sizing(start, read.catalogue)
-    this.session = new Session(read.open, () => this.#changed())
+    this.session = new Session(read.open, (what) => this.#changed(what))
     this.saving = new Saving(host['job.commit'], read.open, () => this.session.job)
-    this.#changed()
+    this.#changed('job')
   }
 
   static async start(host: Host, start: () => WorkerLike): Promise<Workspace> {
@@ -124,8 +124,13 @@ export class Workspace {
     if (go && question?.kind === 'unsaved') this.#run(question.goOn)
   }
 
-  #changed(): void {
-    this.sizing.update(this.session.job, this.session.activeRun)
+  #changed(what: Changed): void {
+    const { job, activeRun } = this.session
+    if (what === 'active run') {
+      this.sizing.look(job, activeRun)
+      return
+    }
+    this.sizing.update(job, activeRun)
     this.saving.kick()
   }
 

@@ -1,5 +1,5 @@
 /** What can be done in the schedule, whichever way it is asked for. */
-import { addRun, clearCells, duplicateRuns, removeRuns, setCell } from '#model/edits.ts'
+import { addRun, clearCells, duplicateRuns, moveRuns, removeRuns, setCell } from '#model/edits.ts'
 import type { FieldKey } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
 import { type Block, headerKeys, pasteBlock } from '#model/paste.ts'
@@ -38,6 +38,18 @@ export function removeMarked(grid: Grid): void {
   session.edit(removeRuns, ids)
   if (next) grid.goToRun(next.id, 'tag')
   else session.activeRunId = null
+}
+
+/** Moves the marked runs one line up or down among the runs of their service. */
+export function moveMarked(grid: Grid, step: 1 | -1): void {
+  const { session } = grid.workspace
+  const { top, bottom } = grid.extent
+  const last = grid.rows[bottom]
+  const passed = grid.rows[step < 0 ? top - 1 : bottom + 1]
+  if (!last || !passed || passed.values.service !== last.values.service) return
+  const { runs } = session.job
+  const before = step < 0 ? passed : runs[runs.indexOf(passed) + 1]
+  session.edit(moveRuns, markedIds(grid), before?.id ?? null)
 }
 
 /** Empties what can be typed in the marked cells. */

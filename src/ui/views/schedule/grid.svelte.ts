@@ -63,6 +63,10 @@ export class Grid {
     ),
   )
   readonly activeRow: number = $derived.by(() => this.rowOf(this.workspace.session.activeRunId))
+  /** Index among the lines, group heads included, of the active run; -1 where it is not visible. */
+  readonly activeItem: number = $derived.by(() =>
+    this.items.findIndex(({ id }) => id === this.workspace.session.activeRunId),
+  )
   readonly extent: Extent = $derived.by(() => {
     const anchorRow = this.#anchor ? this.rowOf(this.#anchor.runId) : -1
     const anchorColumn = this.columns.findIndex(({ id }) => id === this.#anchor?.columnId)
@@ -83,12 +87,6 @@ export class Grid {
   get isBlock(): boolean {
     const { top, bottom, left, right } = this.extent
     return top !== bottom || left !== right
-  }
-
-  /** Index among the lines, group heads included, of the active run; -1 where it is not visible. */
-  get activeItem(): number {
-    const id = this.workspace.session.activeRunId
-    return this.items.findIndex((item) => item.id === id)
   }
 
   markedRuns(): readonly Run[] {

@@ -1,5 +1,12 @@
 /** The keys of the schedule while no cell is open. Returns whether the key was for it. */
-import { addRunBelow, clearMarked, duplicateMarked, removeMarked, startEditing } from './actions.ts'
+import {
+  addRunBelow,
+  clearMarked,
+  duplicateMarked,
+  moveMarked,
+  removeMarked,
+  startEditing,
+} from './actions.ts'
 import type { Grid } from './grid.svelte.ts'
 
 /** Lines that Page Up and Page Down go. */
@@ -7,14 +14,20 @@ const pageLines = 15
 
 export function gridKey(grid: Grid, event: KeyboardEvent): boolean {
   if (event.isComposing) return false
+  if (event.altKey) return altKey(grid, event)
   const hasControl = event.ctrlKey || event.metaKey
   return (
     (hasControl ? controlKey(grid, event) : move(grid, event) || plainKey(grid, event)) === true
   )
 }
 
-function move(grid: Grid, { key, shiftKey, altKey }: KeyboardEvent): boolean {
-  if (altKey) return false
+function altKey(grid: Grid, { key }: KeyboardEvent): boolean {
+  if (key !== 'ArrowUp' && key !== 'ArrowDown') return false
+  moveMarked(grid, key === 'ArrowUp' ? -1 : 1)
+  return true
+}
+
+function move(grid: Grid, { key, shiftKey }: KeyboardEvent): boolean {
   const { activeRow: row, activeColumn: column } = grid
   const steps: Readonly<Record<string, readonly [number, number]>> = {
     ArrowUp: [row - 1, column],
@@ -31,8 +44,7 @@ function move(grid: Grid, { key, shiftKey, altKey }: KeyboardEvent): boolean {
   return to !== undefined
 }
 
-function plainKey(grid: Grid, { key, shiftKey, altKey }: KeyboardEvent): boolean {
-  if (altKey) return false
+function plainKey(grid: Grid, { key, shiftKey }: KeyboardEvent): boolean {
   switch (key) {
     case 'Tab':
       return moveAlong(grid, shiftKey ? -1 : 1)

@@ -133,6 +133,28 @@ describe('the schedule', () => {
     expect(workspace.session.job.runs.map(({ values }) => values.tag)).toEqual(['ST-1', 'ST-3'])
   })
 
+  test('Alt with arrows moves the marked runs', async () => {
+    const { workspace } = await open(threeRuns)
+    const order = () => workspace.session.job.runs.map(({ values }) => values.tag)
+    await userEvent.click(cell('ST-1', 'tag'))
+    await userEvent.keyboard('{Alt>}{ArrowDown}{/Alt}')
+    expect(order()).toEqual(['ST-2', 'ST-1', 'ST-3'])
+    await userEvent.keyboard('{Shift>}{ArrowDown}{/Shift}{Alt>}{ArrowUp}{/Alt}')
+    expect(order()).toEqual(['ST-1', 'ST-3', 'ST-2'])
+    await userEvent.keyboard('{Alt>}{ArrowUp}{/Alt}')
+    expect(order()).toEqual(['ST-1', 'ST-3', 'ST-2'])
+  })
+
+  test('heads of services fold their runs away', async () => {
+    await open([
+      { ...steam, tag: 'A', service: 'Steam' },
+      { ...steam, tag: 'B', service: 'Hot water' },
+    ])
+    await page.getByRole('button', { name: /^Steam/ }).click()
+    expect(() => cell('A', 'tag')).toThrow()
+    expect(shown('B', 'tag')).toBe('B')
+  })
+
   test('two runs with one tag are told of until one has another', async () => {
     await open([...threeRuns.slice(0, 2), { ...steam, tag: 'ST-1' }])
     await expect.poll(() => shown('ST-1', 'governed')).toBe('Check')

@@ -1,0 +1,85 @@
+import { describe, expect, test } from 'vitest'
+import { page, userEvent } from 'vitest/browser'
+import { render } from 'vitest-browser-svelte'
+import type { RunValues } from '#model/fields.ts'
+import '#ui/theme.css'
+import App from '#ui/App.svelte'
+import { jobOf, startWorkspace, TestFile } from '../workspace.ts'
+
+const run: RunValues = {
+  tag: 'ST-1',
+  shape: 'pipe',
+  size: 'DN 50',
+  mediumC: 150,
+  material: 'stone_wool_pipe_section',
+  finish: 'al_plain',
+}
+
+async function openForm() {
+  await page.viewport(1440, 900)
+  const workspace = await startWorkspace(new TestFile(jobOf([run])))
+  await render(App, { workspace })
+  await page.getByText('Inputs', { exact: true }).click()
+  return { ...workspace, session: workspace.session, form: page.getByRole('form') }
+}
+
+describe('the form of a run', () => {
+  test('sizes while one types, and takes back all that was typed in one step', async () => {
+    const { session, form } = await openForm()
+    const before = session.job
+    await form.getByLabelText('Size').fill('DN 100')
+    await expect.poll(() => session.job.runs[0]?.values.size).toBe('DN 100')
+    await form.getByLabelText('Size').fill('DN 150')
+    await userEvent.tab()
+    expect(session.job.runs[0]?.values.size).toBe('DN 150')
+    session.undo()
+    expect(session.job).toBe(before)
+  })
+
+  test('does not call half a number a mistake, but keeps and explains a whole one', async () => {
+    const { session, form } = await openForm()
+    const medium = form.getByLabelText('Medium °C')
+    await medium.fill('-')
+    await new Promise((resolve) => setTimeout(resolve, 400))
+    expect(session.job.runs[0]?.values.mediumC).toBe(150)
+    await medium.fill('1200')
+    await userEvent.tab()
+    await expect.element(medium).toHaveValue('1200')
+    await expect.element(medium).toHaveAttribute('aria-invalid', 'true')
+    await expect
+      .element(form.getByText('"1200" does not fit. Allowed: a number from -200 to 1000 °C.'))
+      .toBeVisible()
+  })
+
+  test('shows what holds where a field is empty', async () => {
+    const { form } = await openForm()
+    await expect
+      .element(form.getByLabelText('Air °C', { exact: true }))
+      .toHaveAttribute('placeholder', '20')
+    await expect.element(form.getByLabelText('Wind')).toHaveAttribute('placeholder', 'none')
+  })
+
+  test('reads and shows US units when the window does', async () => {
+    const { session, form } = await openForm()
+    await page.getByText('US', { exact: true }).click()
+    const medium = form.getByLabelText('Medium °F')
+    await expect.element(medium).toHaveValue('302')
+    await medium.fill('212')
+    await userEvent.tab()
+    expect(session.job.runs[0]?.values.mediumC).toBe(100)
+    await medium.fill('2000')
+    await userEvent.tab()
+    await expect
+      .element(form.getByText('"2000" does not fit. Allowed: a number from −328 to 1 832 °F.'))
+      .toBeVisible()
+  })
+
+  test('a choice from a list is one step', async () => {
+    const { session, form } = await openForm()
+    const before = session.job
+    await form.getByLabelText('Finish').selectOptions('al_painted')
+    expect(session.job.runs[0]?.values.finish).toBe('al_painted')
+    session.undo()
+    expect(session.job).toBe(before)
+  })
+})
