@@ -27,7 +27,7 @@ export function size(problem: Problem): RunResult {
     limits: shown.rating.limits,
     ladder,
     money,
-    notes: notesOf(problem, shown),
+    notes: notesOf(problem, shown, choice.governing),
   }
   return { ...result, reason: writeReason(result) }
 }
@@ -157,12 +157,15 @@ function flatRange(ladder: readonly Rating[], chosen: Rating): readonly [number,
   return first && last ? [first.thicknessM, last.thicknessM] : null
 }
 
-function notesOf(problem: Problem, shown: Rated): Note[] {
+const thinnestTaken = ' The thinnest passing thickness was taken.'
+
+function notesOf(problem: Problem, shown: Rated, governing: Governing): Note[] {
   const notes: Note[] = [...problem.notes, ...shown.notes()]
   if (problem.money && !shown.rating.money && shown.rating.thicknessM > 0) {
+    const taken = governing === 'fixed' || governing === 'unmet' ? '' : thinnestTaken
     notes.push({
       code: 'price-missing',
-      text: 'No price is held for this build-up: the cost was not weighed and the thinnest passing thickness was taken.',
+      text: `No price is held for this build-up: its cost is not weighed.${taken}`,
     })
   }
   return notes.filter((note, index) => notes.findIndex(({ text }) => text === note.text) === index)

@@ -41,6 +41,13 @@ describe('same material in two layers', () => {
     expect(ladder[0]?.interfaceTempsC).toHaveLength(2)
   })
 
+  test('one name with two curves is two materials', () => {
+    const [layer] = once.layers
+    if (!layer) throw new Error('No layer')
+    const other = { ...layer.material, conductivity: { ...layer.material.conductivity } }
+    expect(settle([layer, { ...layer, material: other }], null).layers).toHaveLength(2)
+  })
+
   test('different materials stay apart', () => {
     const [rung] = rungsOf(
       problemOf({ ...without, layers: 'calcium_silicate:40;stone_wool_pipe_section:40' }),

@@ -25,6 +25,9 @@ const limitOf = ({ limits }: Rating, name: LimitName): LimitResult => {
   return found
 }
 
+const priceNote = ({ notes }: RunResult): string | undefined =>
+  notes.find(({ code }) => code === 'price-missing')?.text
+
 describe('choice', () => {
   test('without money the thinnest passing rung', () => {
     const result = sized({ ...steamRun, mediumC: 350 })
@@ -76,7 +79,14 @@ describe('choice', () => {
     const result = sized({ ...plain, ...weighed, conductivityWPerMK: 0.04 })
     expect(result.chosen).toEqual(result.ladder.find(({ pass }) => pass))
     expect(result.chosen?.money).toBeNull()
-    expect(result.notes.map(({ code }) => code)).toContain('price-missing')
+    expect(priceNote(result)).toContain('thinnest passing thickness was taken')
+  })
+
+  test('of a fixed thickness without a price nothing was taken', () => {
+    const { material: _, ...plain } = steamRun
+    const result = sized({ ...plain, ...weighed, conductivityWPerMK: 0.04, thicknessM: 0.05 })
+    expect(priceNote(result)).toContain('No price is held')
+    expect(priceNote(result)).not.toContain('taken')
   })
 })
 
