@@ -5,7 +5,6 @@ import { chromiumLaunch } from './tests/chromium.ts'
 
 export default defineConfig({
   test: {
-    allowOnly: false,
     coverage: {
       provider: 'v8',
       include: ['src/**/*.{ts,svelte}'],
