@@ -1,6 +1,6 @@
 /** Where the program keeps what is the user's own: settings and jobs that have no name yet. */
 import { homedir } from 'node:os'
-import { join } from 'node:path'
+import { join, resolve } from 'node:path'
 
 type Environment = Readonly<Record<string, string | undefined>>
 
@@ -9,7 +9,7 @@ export function dataFolder(
   env: Environment = process.env,
   platform: NodeJS.Platform = process.platform,
 ): string {
-  if (env.LAGWRIGHT_DATA) return env.LAGWRIGHT_DATA
+  if (env.LAGWRIGHT_DATA) return resolve(env.LAGWRIGHT_DATA)
   const home = homedir()
   if (platform === 'win32')
     return join(env.LOCALAPPDATA || join(home, 'AppData', 'Local'), 'Lagwright')

@@ -1,5 +1,5 @@
 import { homedir } from 'node:os'
-import { join } from 'node:path'
+import { join, resolve } from 'node:path'
 import { expect, test } from 'vitest'
 import { dataFolder } from '#backend/data-folder.ts'
 
@@ -14,6 +14,7 @@ test.each([
   ['win32', { LOCALAPPDATA: '/local' }, join('/local', 'Lagwright')],
   ['win32', {}, join(home, 'AppData/Local/Lagwright')],
   ['linux', { LAGWRIGHT_DATA: '/mine', XDG_DATA_HOME: '/data' }, '/mine'],
+  ['linux', { LAGWRIGHT_DATA: 'here' }, resolve('here')],
 ] as const)('on %s with %o it is %s', (platform, env, folder) => {
   expect(dataFolder(env, platform)).toBe(folder)
 })
