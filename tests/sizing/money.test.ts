@@ -5,6 +5,7 @@ import type { Catalogue } from '#catalogue/types.ts'
 import type { RunValues } from '#model/fields.ts'
 import { indexCatalogue, sizeRun } from '#model/size-run.ts'
 import type { RunMoney, RunResult } from '#sizing/result.ts'
+import { evenly } from '../model/any-values.ts'
 import { catalogue, coldRun, index, sized, steamRun } from './catalogue.ts'
 
 const weighed: RunValues = { ...steamRun, fuel: 'natural_gas', hoursPerYear: 8000, lengthM: 20 }
@@ -27,9 +28,6 @@ function dearer(factor: number): Catalogue {
     labour: { ...catalogue.labour, ratePerHour: catalogue.labour.ratePerHour * factor },
   }
 }
-
-const evenly = (min: number, max: number): fc.Arbitrary<number> =>
-  fc.integer({ min: 0, max: 10_000 }).map((part) => min + ((max - min) * part) / 10_000)
 
 const run: fc.Arbitrary<RunValues> = fc.record({
   tag: fc.constant('A'),

@@ -3,11 +3,10 @@ import { describe, expect, test } from 'vitest'
 import type { Material } from '#catalogue/types.ts'
 import type { RunValues } from '#model/fields.ts'
 import type { Shape } from '#solver/types.ts'
+import { evenly } from '../model/any-values.ts'
 import { catalogue, sized } from './catalogue.ts'
 import { type Plain, verdict } from './oracle.ts'
 
-const evenly = (min: number, max: number): fc.Arbitrary<number> =>
-  fc.integer({ min: 0, max: 10_000 }).map((part) => min + ((max - min) * part) / 10_000)
 const maybe = <T>(arbitrary: fc.Arbitrary<T>): fc.Arbitrary<T | null> =>
   fc.option(arbitrary, { freq: 2 })
 

@@ -39,7 +39,7 @@ export interface Plain {
 
 type Limit = 'touch' | 'loss' | 'damp' | 'service'
 
-export interface Verdict {
+interface Verdict {
   readonly thicknessesM: readonly number[]
   readonly chosenM: number | null
   readonly governing: string
@@ -47,7 +47,7 @@ export interface Verdict {
 }
 
 /** Totals in millimetres with the number of pieces each is made of. */
-export function rungs(material: Material): ReadonlyMap<number, number> {
+function rungs(material: Material): ReadonlyMap<number, number> {
   const own = catalogue.steps.filter(
     (step) => step.materialId === material.id && step.series === 'metric',
   )
