@@ -82,6 +82,12 @@ describe('choice', () => {
     expect(priceNote(result)).toContain('thinnest passing thickness was taken')
   })
 
+  test('a finish without a price is not for nothing', () => {
+    const result = sized({ ...steamRun, ...weighed, finish: 'timber_board' })
+    expect(result.ladder.every(({ money }) => money === null)).toBe(true)
+    expect(priceNote(result)).toContain('No price is held')
+  })
+
   test('of a fixed thickness without a price nothing was taken', () => {
     const { material: _, ...plain } = steamRun
     const result = sized({ ...plain, ...weighed, conductivityWPerMK: 0.04, thicknessM: 0.05 })
