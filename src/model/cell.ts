@@ -1,6 +1,8 @@
 /** One cell: from what a person wrote to the value of a field and back, for the CSV and the window alike. */
 import { couldBeThousands, readDecimal, writeDecimal } from './decimal.ts'
-import { type Field, laterChoices, type NumberField, quantities } from './fields.ts'
+import type { Field, NumberField } from './fields.ts'
+import { laterChoices } from './later.ts'
+import { quantities } from './quantities.ts'
 
 export interface CellOptions {
   /** Whether a comma may part the decimals (a point always may). */

@@ -1,6 +1,8 @@
 /** What the columns of a list of runs are called, and which known name is meant by an unknown one. */
 import { twinOf } from '#model/cell.ts'
-import { type Field, fields, laterColumns, quantities } from '#model/fields.ts'
+import { type Field, fields } from '#model/fields.ts'
+import { laterColumns } from '#model/later.ts'
+import { quantities } from '#model/quantities.ts'
 
 export interface Column {
   readonly header: string

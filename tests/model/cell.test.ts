@@ -2,7 +2,8 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { allowedIn, formatCell, parseCell, quote } from '#model/cell.ts'
 import { readDecimal, writeDecimal } from '#model/decimal.ts'
-import { type Field, type FieldKey, fieldOf, fields, quantities } from '#model/fields.ts'
+import { type Field, type FieldKey, fieldOf, fields } from '#model/fields.ts'
+import { quantities } from '#model/quantities.ts'
 
 const point = { decimalComma: false }
 const comma = { decimalComma: true }

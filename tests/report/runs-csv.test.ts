@@ -2,7 +2,8 @@ import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { type Field, fields, laterColumns, type RunValues } from '#model/fields.ts'
+import { type Field, fields, type RunValues } from '#model/fields.ts'
+import { laterColumns } from '#model/later.ts'
 import { parseRunsCsv, sentence, writeRunsCsv } from '#report/runs-csv.ts'
 
 function runs(source: string | Uint8Array): readonly RunValues[] {

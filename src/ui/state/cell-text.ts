@@ -8,9 +8,9 @@ import {
   type FieldKey,
   fieldOf,
   type NumberField,
-  quantities,
   type RunValues,
 } from '#model/fields.ts'
+import { quantities } from '#model/quantities.ts'
 import { formatNumber } from '#units/format.ts'
 import { displayUnit, type UnitSystem } from '#units/quantities.ts'
 
