@@ -356,6 +356,10 @@ describe('what a rung says', () => {
     expect(at50.heatLossW).toBeCloseTo(12 * (at50.heatLossWPerM ?? 0), 9)
     expect(at50.yearlyKWh).toBeCloseTo(8 * (at50.heatLossW ?? 0), 9)
     expect(rung(sized(steamRun), 50)).toMatchObject({ heatLossW: null, yearlyKWh: null })
+    expect(rung(sized({ ...steamRun, lengthM: 12 }), 50)).toMatchObject({
+      heatLossW: at50.heatLossW,
+      yearlyKWh: null,
+    })
   })
 
   test('flux on the outer area, made of convection and radiation', () => {
