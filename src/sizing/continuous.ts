@@ -42,13 +42,19 @@ export function passesFromM(
 }
 
 /**
- * Thickness of the sized layer from which a limit passes [m]; 0 where the thinnest passes, null where none up to
- * 600 mm does. Searched from the thick end, since a thin layer on a small pipe may lose more than none.
+ * Thickness of the sized layer from which a limit passes for good [m]; 0 where every thickness does, null where none up
+ * to 600 mm does. Looked for from the thick end over the rungs, since a thin layer on a small pipe may lose more than
+ * none: the limit may pass, fail and pass again.
  */
 function continuousThicknessM(problem: Problem, limit: LimitName): number | null {
-  if (shortfallAt(problem, limit, THINNEST_M) <= 0) return 0
-  if (shortfallAt(problem, limit, THICKEST_M) > 0) return null
-  return passesFromM(problem, limit, { failsM: THINNEST_M, passesM: THICKEST_M })
+  const thicknessesM = [THINNEST_M, ...problem.steps.map((step) => step.thicknessM), THICKEST_M]
+  const last = thicknessesM.findLastIndex(
+    (thicknessM) => shortfallAt(problem, limit, thicknessM) > 0,
+  )
+  const failsM = thicknessesM[last]
+  if (failsM === undefined) return 0
+  const passesM = thicknessesM[last + 1]
+  return passesM === undefined ? null : passesFromM(problem, limit, { failsM, passesM })
 }
 
 /**

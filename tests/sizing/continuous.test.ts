@@ -45,6 +45,28 @@ describe('the exact end of a limit', () => {
     expect(fromM).toBeLessThanOrEqual(chosen?.thicknessM ?? 0)
   })
 
+  test('is where the limit passes for good, where it passes, fails and passes again', () => {
+    // Below the critical radius λ/h a thicker layer loses more: 8 mm pipe, λ 0.4.
+    const thin: RunValues = {
+      tag: 'A',
+      shape: 'pipe',
+      outerDiameterM: 0.008,
+      mediumC: 80,
+      airC: 20,
+      conductivityWPerMK: 0.4,
+      finish: 'asj',
+    }
+    const [first, second] = sized({ ...thin, maxLossWPerM: 1000 }).ladder
+    const maxLossWPerM = ((first?.heatLossWPerM ?? 0) + (second?.heatLossWPerM ?? 0)) / 2
+    const { ladder } = sized({ ...thin, maxLossWPerM })
+    expect(ladder[0]?.pass).toBe(true)
+    const lastFailing = ladder.findLastIndex(({ pass }) => !pass)
+    expect(lastFailing).toBeGreaterThan(0)
+    const fromM = endM({ ...thin, maxLossWPerM }, 'loss') ?? Number.NaN
+    expect(fromM).toBeGreaterThan(ladder[lastFailing]?.thicknessM ?? 0)
+    expect(fromM).toBeLessThanOrEqual(ladder[lastFailing + 1]?.thicknessM ?? 0)
+  })
+
   test('0 where the thinnest passes, null where 600 mm does not', () => {
     expect(endM({ ...steamRun, mediumC: 50 }, 'touch')).toBe(0)
     expect(endM({ ...steamRun, maxLossWPerM: 0.5 }, 'loss')).toBeNull()
