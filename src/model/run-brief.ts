@@ -26,15 +26,23 @@ export interface SizedBrief {
 }
 export interface UnsizedBrief {
   readonly ok: false
-  readonly state: 'fails'
+  /** A run that is only not finished is no mistake yet. */
+  readonly state: 'heed' | 'fails'
   readonly issues: readonly Issue[]
 }
 export type RunBrief = SizedBrief | UnsizedBrief
 
 export function briefOf(outcome: RunOutcome): RunBrief {
-  return outcome.ok
-    ? sizedBrief(outcome.result)
-    : { ok: false, state: 'fails', issues: outcome.issues }
+  return outcome.ok ? sizedBrief(outcome.result) : unsizedBrief(outcome.issues)
+}
+
+export function unsizedBrief(issues: readonly Issue[]): UnsizedBrief {
+  return { ok: false, state: issues.every(isMissing) ? 'heed' : 'fails', issues }
+}
+
+/** Whether a value was not given, rather than given wrong. */
+export function isMissing({ found }: Issue): boolean {
+  return found === '' || found === 'nothing'
 }
 
 function sizedBrief(result: RunResult): SizedBrief {

@@ -2,7 +2,7 @@
 import type { CellReader } from '#model/cell-edit.ts'
 import { type FieldKey, fieldOf, type RunValues } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
-import type { RunBrief } from '#model/run-brief.ts'
+import { isMissing, type RunBrief } from '#model/run-brief.ts'
 import { governingWords } from '#report/run-words.ts'
 import type { Issue } from '#sizing/result.ts'
 import type { CatalogueWords } from '#ui/state/catalogue-words.ts'
@@ -16,6 +16,8 @@ export interface CellView {
   readonly text: string
   /** What is wrong with what stands here. */
   readonly problem: string | null
+  /** Nothing stands here where something should. */
+  readonly isMissing: boolean
   /** Given by the job's defaults, not by the run. */
   readonly isInherited: boolean
 }
@@ -37,19 +39,22 @@ export function cellView(
 ): CellView {
   const { key } = column
   const draft = key ? run.drafts[key] : undefined
-  const problem = key ? problemOf(run, key, brief, showing.reader) : null
-  if (draft !== undefined)
-    return { text: draft, problem: problem ?? 'not a value of this column', isInherited: false }
-  if (column.result)
-    return { text: resultText(run, brief, column, showing), problem, isInherited: false }
-  if (!key) return { text: '', problem, isInherited: false }
+  const issue = key ? issueOf(run, key, brief, showing.reader) : undefined
+  const view = {
+    problem: issue ? issueSentence(issue) : null,
+    isMissing: issue !== undefined && isMissing(issue),
+    isInherited: false,
+  }
+  if (draft !== undefined) return { ...view, text: draft }
+  if (column.result) return { ...view, text: resultText(brief, column, showing) }
+  if (!key) return { ...view, text: '' }
   const own = run.values[key]
   const value = own ?? showing.defaults[key]
   const text =
     value === undefined
       ? composed(run, brief, key, showing)
       : shownText(key, value, column, showing)
-  return { text, problem, isInherited: own === undefined && value !== undefined }
+  return { ...view, text, isInherited: own === undefined && value !== undefined }
 }
 
 function shownText(
@@ -93,14 +98,9 @@ function composedSize(run: Run, key: string, units: UnitSystem): string {
     : `Ø ${readText('outerDiameterM', outerDiameterM, units)}`
 }
 
-function resultText(
-  run: Run,
-  brief: RunBrief | undefined,
-  column: Column,
-  { units }: Showing,
-): string {
+function resultText(brief: RunBrief | undefined, column: Column, { units }: Showing): string {
   if (!brief) return column.result === 'governed' ? '…' : ''
-  if (!brief.ok) return column.result === 'governed' ? unsizedWord(run, brief.issues) : ''
+  if (!brief.ok) return column.result === 'governed' ? unsizedWord(brief.issues) : ''
   switch (column.result) {
     case 'lagging':
       return brief.thicknessM === 0
@@ -115,26 +115,20 @@ function resultText(
   }
 }
 
-function unsizedWord(run: Run, issues: readonly Issue[]): string {
-  const isMissing = issues.length > 0 && issues.every(({ column }) => isEmpty(run, column))
-  return isMissing ? 'To fill in' : 'Check'
+/** A run that is only not finished is no mistake yet. */
+function unsizedWord(issues: readonly Issue[]): string {
+  return issues.every(isMissing) ? 'To fill in' : 'Check'
 }
 
-function isEmpty({ values, drafts }: Run, column: string): boolean {
-  const written = [...Object.keys(values), ...Object.keys(drafts)]
-  return !written.some((key) => fieldOf(key as keyof RunValues).column === column)
-}
-
-function problemOf(
+function issueOf(
   run: Run,
   key: FieldKey,
   brief: RunBrief | undefined,
   reader: CellReader,
-): string | null {
-  if (!brief || brief.ok) return null
+): Issue | undefined {
+  if (!brief || brief.ok) return undefined
   const { column } = fieldOf(key)
-  const issue = shownIssues(run, brief.issues, reader).find((one) => one.column === column)
-  return issue ? issueSentence(issue) : null
+  return shownIssues(run, brief.issues, reader).find((one) => one.column === column)
 }
 
 /** Text for the clipboard: what can be pasted back, and results as plain numbers. */
@@ -145,7 +139,7 @@ export function copyText(
   showing: Showing,
 ): string {
   const { key, result } = column
-  if (result) return plain(resultText(run, brief, column, showing))
+  if (result) return plain(resultText(brief, column, showing))
   if (!key) return ''
   const draft = run.drafts[key]
   if (draft !== undefined) return draft

@@ -20,3 +20,15 @@ export function numberColumns(
     }),
   )
 }
+
+/** The same function, but its last map again as long as the next one equals it. */
+export function stable(make: () => ReadonlyMap<string, number>): () => ReadonlyMap<string, number> {
+  let last: ReadonlyMap<string, number> = new Map()
+  return () => {
+    const next = make()
+    const isSame =
+      next.size === last.size && [...next].every(([id, value]) => last.get(id) === value)
+    if (!isSame) last = next
+    return last
+  }
+}

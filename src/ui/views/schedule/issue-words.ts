@@ -2,13 +2,15 @@
 import type { CellReader } from '#model/cell-edit.ts'
 import { type FieldKey, fieldOf, fields } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
+import { isMissing } from '#model/run-brief.ts'
 import type { Issue } from '#sizing/result.ts'
 
-export function issueSentence({ found, allowed }: Issue): string {
+export function issueSentence(issue: Issue): string {
+  const { found, allowed } = issue
   const cure = labelled(allowed)
   // Some cures are whole sentences that name what was found.
   if (/^(?:"|[A-Z][a-z]+ )/.test(cure)) return stopped(cure)
-  if (found === '' || found === 'nothing') return stopped(`Give ${cure}`)
+  if (isMissing(issue)) return stopped(`Give ${cure}`)
   return stopped(`${found} does not fit. Allowed: ${cure}`)
 }
 
