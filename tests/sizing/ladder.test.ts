@@ -183,6 +183,15 @@ describe('inch ladder', () => {
     }
   })
 
+  test('a nominal thickness takes no row but its own', () => {
+    const [odd] = inchLadder(
+      steps([2.1 * IN], { largestMm: 127, series: 'inch', single: true }),
+      sections,
+      0.0603,
+    )
+    expect(mm(odd?.thicknessM)).toBe(53.34)
+  })
+
   test('pieces of a rung add up to its true thickness', () => {
     for (const { thicknessM, piecesM } of onPipe)
       expect(piecesM.reduce((sum, pieceM) => sum + pieceM, 0)).toBeCloseTo(thicknessM, 9)

@@ -96,6 +96,8 @@ describe('numbers that tie at one decimal are told apart', () => {
     const { reason } = sized({ ...steamRun, mediumC: 350, maxSurfaceC: chosenC + gapK })
     const [, value, bound] = /gives (\S+) °C against (\S+) °C/.exec(reason) ?? []
     expect(Number(value)).toBeLessThan(Number(bound))
+    // No more digits than it takes.
+    expect(value).toMatch(gapK > 0.01 ? /\.\d\d$/ : /\.\d\d\d$/)
   })
 
   test('a thinner rung that fails by as little just misses it', () => {

@@ -56,6 +56,22 @@ describe('defaults', () => {
     )
   })
 
+  test.each([
+    [{ surroundingsC: 15, touchAirC: 35 }, 'touch', 35],
+    [{ surroundingsC: 60, touchAirC: 35 }, 'touch', 60],
+    [{ surroundingsC: 40, dampAirC: 30 }, 'damp', 30],
+    [{ surroundingsC: 5, dampAirC: 30 }, 'damp', 5],
+  ] as const)(
+    'given as %o, those of %s are %d: never milder than its own air',
+    (own, question, tempC) => {
+      const problem = problemOf({ ...coldRun, ...own })
+      expect(problem.conditions[question].around.surroundingsC).toBe(tempC)
+      expect(noteCodes(problem).includes(`${question}-surroundings`)).toBe(
+        tempC !== own.surroundingsC,
+      )
+    },
+  )
+
   test('wind is of the yearly mean only: touch and damp are judged in still air', () => {
     const { loss, touch, damp } = problemOf({ ...coldRun, windMPerS: 4 }).conditions
     expect([loss, touch, damp].map(({ around }) => around.windMPerS)).toEqual([4, 0, 0])

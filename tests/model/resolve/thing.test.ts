@@ -32,6 +32,10 @@ describe('pipe', () => {
     expect(issue?.allowed).toContain('60.3')
   })
 
+  test.each([0.0598, 0.061])('%d m is not DN 50 either', (outerDiameterM) => {
+    expect(refusedColumns({ ...steamRun, outerDiameterM })).toEqual(['od_mm'])
+  })
+
   test('an od_mm that agrees is none, and od_mm alone will do', () => {
     expect(problemOf({ ...steamRun, outerDiameterM: 0.0603 }).shape).toEqual(
       problemOf({ ...unsized, outerDiameterM: 0.0603 }).shape,
