@@ -1,6 +1,6 @@
 // npm run bench: what one solve and a list of 10 000 runs cost on this machine, one thread.
 import { readFileSync } from 'node:fs'
-import { cpus, totalmem } from 'node:os'
+import { cpus, loadavg, totalmem } from 'node:os'
 import { openCatalogue, readCatalogue } from '../../src/backend/catalogue-db.ts'
 import { resolve } from '../../src/model/resolve/resolve.ts'
 import { indexCatalogue, sizeRun } from '../../src/model/size-run.ts'
@@ -61,7 +61,9 @@ console.log(`${cpu?.model ?? 'unknown processor'}, ${cpus().length} cores`)
 console.log(
   `${(totalmem() / 2 ** 30).toFixed(1)} GiB, Node ${process.version}, ${process.platform} ${process.arch}`,
 )
-console.log(`Median of ${ROUNDS} rounds, one thread.\n`)
+console.log(
+  `Load ${loadavg()[0]?.toFixed(1)} before the start; median of ${ROUNDS} rounds, one thread.\n`,
+)
 
 /** @type {import('../../src/solver/types.ts').System} */
 const lagged = {
