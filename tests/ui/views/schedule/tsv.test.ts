@@ -24,14 +24,12 @@ describe('cells on the clipboard', () => {
 
   test('what is copied is pasted back as it was', () => {
     const cell = fc.string().map((text) => text.replaceAll('\r', ''))
-    const rows = fc
-      .integer({ min: 1, max: 4 })
-      .chain((width) =>
-        fc.array(fc.array(cell, { minLength: width, maxLength: width }), {
-          minLength: 1,
-          maxLength: 5,
-        }),
-      )
+    const rows = fc.integer({ min: 1, max: 4 }).chain((width) =>
+      fc.array(fc.array(cell, { minLength: width, maxLength: width }), {
+        minLength: 1,
+        maxLength: 5,
+      }),
+    )
     // A block of nothing but one empty column is a block of line breaks, of which the last ends it.
     const isTold = (block: string[][]) => block.some((row) => row.length > 1 || row[0] !== '')
     fc.assert(
