@@ -3,6 +3,9 @@ import { playwright } from '@vitest/browser-playwright'
 import { defineConfig } from 'vitest/config'
 import { chromiumLaunch } from './tests/chromium.ts'
 
+// Timing is for the benchmarks: a busy machine must not fail a test.
+const patient = { testTimeout: 120_000, hookTimeout: 120_000 }
+
 export default defineConfig({
   test: {
     coverage: {
@@ -14,6 +17,7 @@ export default defineConfig({
       {
         test: {
           name: 'node',
+          ...patient,
           environment: 'node',
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/**/*.browser.test.ts'],
@@ -35,6 +39,7 @@ export default defineConfig({
         },
         test: {
           name: 'browser',
+          ...patient,
           include: ['tests/ui/**/*.browser.test.ts'],
           globalSetup: ['tests/ui/node-results.ts'],
           browser: {

@@ -103,11 +103,11 @@ function columnsOf(lines: readonly Line[], units: UnitSystem): readonly TextColu
   ]
 }
 
-/** "42 runs. 41 meet their limits; not so: GL-322." */
+/** "43 runs, 42 within their limits. Not within: GL-322." */
 export function countWords(runs: number, failing: readonly string[]): string {
   const total = `${runs} ${runs === 1 ? 'run' : 'runs'}`
-  if (failing.length === 0) return `${total}. All limits are met.`
-  return `${total}. ${runs - failing.length} meet their limits; not so: ${tagList(failing)}.`
+  if (failing.length === 0) return `${total}, all limits met.`
+  return `${total}, ${runs - failing.length} within their limits. Not within: ${tagList(failing)}.`
 }
 
 function noteLines(lines: readonly Line[]): readonly string[] {

@@ -10,7 +10,7 @@ describe('lagwright size', slow, () => {
     const { code, out, err } = await lagwright('size', put('runs.csv', goodList))
     expect(err).toEqual([])
     expect(out).toMatch(/^Tag +Size +Lagging mm/)
-    expect(out).toContain('2 runs. All limits are met.')
+    expect(out).toContain('2 runs, all limits met.')
     expect(out).toContain('asbestos')
     expect(code).toBe(0)
   })
@@ -18,7 +18,7 @@ describe('lagwright size', slow, () => {
   it('ends with 1 where a run cannot meet its limits, and still gives the results', async () => {
     const { code, out, err } = await place().lagwright('size', demoFile)
     expect(err).toEqual([])
-    expect(out).toContain('not so: GL-322.')
+    expect(out).toContain('Not within: ST-110, GL-322.')
     expect(code).toBe(1)
   })
 
@@ -27,7 +27,7 @@ describe('lagwright size', slow, () => {
     const list =
       'tag,shape,size,medium_c,air_c,material,thickness_mm,max_loss_w_m\nF-1,pipe,DN 50,180,20,stone_wool_pipe_section,20,10\n'
     const { code, out } = await lagwright('size', put('runs.csv', list), '--out', 'result.json')
-    expect(out).toBe('result.json: 1 run. 0 meet their limits; not so: F-1.\n')
+    expect(out).toBe('result.json: 1 run, 0 within their limits. Not within: F-1.\n')
     expect(code).toBe(1)
     const { runs } = sizedSchema.parse(
       JSON.parse(readFileSync(join(folder, 'result.json'), 'utf8')),

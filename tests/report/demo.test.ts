@@ -13,11 +13,12 @@ describe('the demo job', () => {
     }
   })
 
-  it('has exactly one run that cannot meet its limit, and a few that need a look', () => {
+  it('has one bare run that burns, one that cannot meet its limit, and a few that need a look', () => {
     const states = runs.map(({ result }) => briefOf({ ok: true, result }).state)
-    expect(states.filter((state) => state === 'fails')).toHaveLength(1)
+    expect(states.filter((state) => state === 'fails')).toHaveLength(2)
     expect(states.filter((state) => state === 'heed').length).toBeLessThanOrEqual(4)
     expect(of('GL-322')).toMatchObject({ chosen: null, governing: 'unmet' })
+    expect(of('ST-110')).toMatchObject({ governing: 'bare', chosen: { pass: false } })
   })
 
   it('has groups, places and services for every run', () => {

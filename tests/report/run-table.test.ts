@@ -20,7 +20,7 @@ describe('the table of results', () => {
       /^Tag +Size +Lagging mm +Loss W\/m +Bare W\/m +Surface °C +Governed by +Reason$/,
     )
     for (const { result } of runs) expect(line(lines, result.tag)).toContain(result.reason)
-    expect(lines).toContain(countWords(runs.length, ['GL-322']))
+    expect(lines).toContain(countWords(runs.length, ['ST-110', 'GL-322']))
     for (const { text } of cautions) expect(lines.join('\n')).toContain(text)
   })
 
@@ -52,10 +52,10 @@ describe('the table of results', () => {
   })
 
   it('counts what is met, and names the first that are not', () => {
-    expect(countWords(1, [])).toBe('1 run. All limits are met.')
-    expect(countWords(3, ['A', 'B'])).toBe('3 runs. 1 meet their limits; not so: A, B.')
+    expect(countWords(1, [])).toBe('1 run, all limits met.')
+    expect(countWords(3, ['A', 'B'])).toBe('3 runs, 1 within their limits. Not within: A, B.')
     const many = Array.from({ length: 10 }, (_, index) => `T-${index}`)
-    expect(countWords(10, many)).toMatch(/not so: T-0, .*, T-7 and 2 more\.$/)
+    expect(countWords(10, many)).toMatch(/Not within: T-0, .*, T-7 and 2 more\.$/)
   })
 })
 
