@@ -5,15 +5,16 @@ import { startWorker } from '#worker/start.ts'
 import App from './App.svelte'
 import { connectToHost } from './state/transport.ts'
 import { Workspace } from './state/workspace.svelte.ts'
+import StartFailure from './views/frame/StartFailure.svelte'
 
 async function start(target: HTMLElement): Promise<void> {
   try {
     const workspace = await Workspace.start(connectToHost(), startWorker)
-    target.textContent = ''
     mount(App, { target, props: { workspace } })
   } catch (error) {
     // Without a host there is no job to show; the sentence says what to do.
-    target.textContent = error instanceof Error ? error.message : String(error)
+    const sentence = error instanceof Error ? error.message : String(error)
+    mount(StartFailure, { target, props: { sentence } })
   }
 }
 

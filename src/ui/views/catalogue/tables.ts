@@ -1,57 +1,9 @@
 /** The catalogue as tables of words: one line per row, with where it comes from. */
-import type { Catalogue, Confidence, Provenance } from '#catalogue/types.ts'
+import type { Catalogue } from '#catalogue/types.ts'
 import { wordsFor } from '#ui/state/cell-text.ts'
 import { formatNumber, formatQuantity, unitLabel } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
-
-export interface CatalogueRow {
-  readonly id: string
-  readonly cells: readonly string[]
-  readonly note: string
-  readonly source: string
-  readonly confidence: Confidence
-  /** All of it in lower case, to search in. */
-  readonly text: string
-}
-export interface CatalogueTable {
-  readonly title: string
-  readonly about: string
-  readonly heads: readonly { readonly label: string; readonly isNumber: boolean }[]
-  readonly rows: readonly CatalogueRow[]
-}
-
-type Head = readonly [label: string, isNumber?: boolean]
-
-function table<T extends Provenance>(
-  title: string,
-  about: string,
-  heads: readonly Head[],
-  list: readonly T[],
-  describe: (row: T) => {
-    readonly id: string
-    readonly cells: readonly string[]
-    readonly note?: string
-  },
-): CatalogueTable {
-  const rows = list.map((row) => {
-    const { id, cells, note = '' } = describe(row)
-    const { source, confidence } = row
-    return {
-      id,
-      cells,
-      note,
-      source,
-      confidence,
-      text: [...cells, note, source].join(' ').toLowerCase(),
-    }
-  })
-  return {
-    title,
-    about,
-    heads: heads.map(([label, isNumber = false]) => ({ label, isNumber })),
-    rows,
-  }
-}
+import { type CatalogueTable, table } from './catalogue-table.ts'
 
 export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly CatalogueTable[] {
   const shown = (value: number | null, quantity: QuantityName, decimals?: number) =>
@@ -103,7 +55,7 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
         ['Finish'],
         ['Kind'],
         ['Emissivity, new', true],
-        ['aged', true],
+        ['Emissivity, aged', true],
         ['Touch class'],
         [`At most ${temperature}`, true],
         ['Outdoors'],
@@ -178,14 +130,14 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
         ['Surface'],
         ['Contact s', true],
         [`Burns from ${temperature}`, true],
-        [`surely above ${temperature}`, true],
+        [`Surely from ${temperature}`, true],
         ['Grade'],
       ],
       catalogue.burnThresholds,
       (row) => ({
         id: `${row.surface} ${row.contactS}`,
         cells: [
-          wordsFor(row.surface),
+          surfaceWords(row.surface),
           formatNumber(row.contactS, row.contactS < 10 ? 1 : 0),
           shown(row.lowerC, 'temperature'),
           shown(row.upperC, 'temperature'),
@@ -195,7 +147,7 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
     ),
     table(
       'Prices',
-      `Installed, without tax, in ${catalogue.labour.currency}. All of them illustrate until your own are in.`,
+      'Installed, without tax. All of them illustrate until your own are in.',
       [
         ['For'],
         ['per m³', true],
@@ -233,16 +185,15 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
   ]
 }
 
+/** `lacquer-50` is a lacquer of 50 µm on metal. */
+function surfaceWords(surface: string): string {
+  const [, coating, micrometres] = /^(.+)-(\d+)$/.exec(surface) ?? []
+  return coating ? `metal with ${coating}, ${micrometres} µm` : wordsFor(surface)
+}
+
 function nameIn(
   list: readonly { readonly id: string; readonly name: string }[],
   id: string,
 ): string {
   return list.find((row) => row.id === id)?.name ?? id
-}
-
-/** How far a row can be trusted, in words. */
-export const confidenceWords: Readonly<Record<Confidence, string>> = {
-  found: 'read in the source',
-  memory: 'verify against your own copy',
-  estimate: 'illustrative',
 }

@@ -27,6 +27,8 @@ const controlKeys: Readonly<Record<string, (workspace: Workspace) => void>> = {
   'shift s': (workspace) => workspace.saveAs(),
   o: (workspace) => workspace.openJob(),
   n: (workspace) => workspace.newJob(),
+  // The browser's own search sees only the lines that are drawn.
+  f: () => document.querySelector<HTMLInputElement>('main input[type="search"]')?.select(),
 }
 
 function altKeyFor(workspace: Workspace, go: (place: PlaceName) => void, key: string): boolean {
