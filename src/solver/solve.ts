@@ -84,8 +84,10 @@ function solveFace(
       share: face.share,
     }
   }
-  const finishOnFilm = (excessK: number): Face =>
-    finish(excessK, released(excessK), convectionWPerM2K(face, weather, excessK))
+  const finishOnFilm = (excessK: number): Face => {
+    const convection = convectionWPerM2K(face, weather, excessK)
+    return finish(excessK, convection * excessK + radiated(excessK), convection)
+  }
 
   if (system.layers.length === 0 && insideKPerWPerM2 === 0) {
     return finishOnFilm(mediumExcessK)

@@ -741,6 +741,65 @@ describe('shapes beside each other', () => {
   })
 })
 
+describe('a note on a conductivity curve', () => {
+  const codes = ({ notes }: Solution) =>
+    notes.filter(({ code }) => code === 'conductivity-extrapolated').map(({ text }) => text)
+
+  test('stands exactly for the layers whose mean temperature lies beyond their curve', () => {
+    fc.assert(
+      fc.property(systemOf(layersOf(fc.oneof(pointCurve, meanCurve), 1)), (system) => {
+        const solution = solve(system)
+        const beyond = system.layers.flatMap(({ conductivity }, index) => {
+          if (conductivity.kind !== 'curve') return []
+          const [first = 0, last = 0] = [conductivity.pointsC[0], conductivity.pointsC.at(-1)]
+          const isBeyond = solution.faces.some(({ interfaceTempsC }) => {
+            const meanC = ((interfaceTempsC[index] ?? 0) + (interfaceTempsC[index + 1] ?? 0)) / 2
+            return meanC < first || meanC > last
+          })
+          return isBeyond ? [`Layer ${index + 1}: `] : []
+        })
+        const texts = codes(solution)
+        expect(texts).toHaveLength(beyond.length)
+        texts.forEach((text, index) => {
+          expect(text.startsWith(beyond[index] ?? '-')).toBe(true)
+        })
+      }),
+      { numRuns: 300 },
+    )
+  })
+
+  test.each([
+    // A flat wall of one constant-valued curve, 20 °C outside: its mean lies halfway to the medium, less the film's part.
+    [600, 'above', [0, 200]],
+    [-150, 'below', [0, 200]],
+  ] as const)('at %d °C says how far %s the curve', (mediumC, side, [first, last]) => {
+    const solution = solve({
+      shape: { kind: 'flat', facing: 'vertical', characteristicLengthM: 1 },
+      layers: [
+        {
+          thicknessM: 0.1,
+          conductivity: {
+            kind: 'curve',
+            basis: 'point',
+            pointsC: [first, last],
+            valuesWPerMK: [0.04, 0.04],
+          },
+        },
+      ],
+      emissivity: 0.9,
+      mediumC,
+      insideFilmWPerM2K: null,
+      around: still(20),
+    })
+    const meanC = (mediumC + solution.surfaceTempC) / 2
+    const beyondK = side === 'above' ? meanC - last : first - meanC
+    expect(codes(solution)).toEqual([
+      expect.stringContaining(`${beyondK.toFixed(0)} K ${side} the conductivity curve`),
+    ])
+    expect(codes(solution)[0]).toContain(`${first} to ${last} °C`)
+  })
+})
+
 describe('beyondCurveK', () => {
   const curve = {
     kind: 'curve',

@@ -35,6 +35,12 @@ describe('saturationPressurePa', () => {
     { from: table2017, given: 150, printed: '476101.4', within: ppm },
   ])
 
+  // Both equations describe the same ice and water in equilibrium at 0 °C, each to its own 100 ppm or so.
+  test('has the same value over ice and over water at 0 °C', () => {
+    expect(saturationPressurePa(-1e-9) / saturationPressurePa(0)).toBeGreaterThan(1 - 1.2e-4)
+    expect(saturationPressurePa(-1e-9) / saturationPressurePa(0)).toBeLessThan(1 + 1.2e-4)
+  })
+
   test('rises with temperature, ice and water alike', () => {
     fc.assert(
       fc.property(within(-100, 199), (tempC) => {
