@@ -1,7 +1,7 @@
 /** A run in the words of tables and documents, in either system of units. */
 import type { RunValues } from '#model/fields.ts'
 import { type Words, writeReason } from '#sizing/reason.ts'
-import type { Governing, RunResult } from '#sizing/result.ts'
+import { type Governing, limitWords, type RunResult } from '#sizing/result.ts'
 import { formatNumber, formatQuantity, formatWithUnit } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
 
@@ -12,14 +12,7 @@ export interface SizedRun {
 }
 
 export const governingWords: Readonly<Record<Governing, string>> = {
-  touch: 'Touch',
-  loss: 'Loss',
-  damp: 'Damp',
-  frost: 'Frost',
-  arrival: 'Arrival',
-  code: 'Code',
-  space: 'Space',
-  service: 'Service',
+  ...limitWords,
   money: 'Cost',
   smallest: 'Thinnest',
   fixed: 'Fixed',

@@ -1,5 +1,11 @@
 /** Why the chosen rung is as thick as it is: a few plain sentences with the numbers that decided. */
-import type { LimitName, LimitResult, Rating, RunResult } from './result.ts'
+import {
+  type LimitName,
+  type LimitResult,
+  limitWords,
+  type Rating,
+  type RunResult,
+} from './result.ts'
 
 /** How numbers are said; the window and the documents pass their own units. */
 export interface Words {
@@ -48,23 +54,12 @@ export function writeReason(facts: ReasonFacts, words: Words = siWords): string 
       return unmet(facts, words)
     default:
       return sentences(
-        `${names[governing]} decides.`,
+        `${limitWords[governing]} decides.`,
         decided(facts, governing, words),
         matt(facts, words),
         dearer(facts, words),
       )
   }
-}
-
-const names: Readonly<Record<LimitName, string>> = {
-  touch: 'Touch',
-  loss: 'Loss',
-  damp: 'Damp',
-  frost: 'Frost',
-  arrival: 'Arrival',
-  code: 'Code',
-  space: 'Space',
-  service: 'Service',
 }
 
 const sentences = (...parts: readonly string[]): string =>

@@ -12,6 +12,18 @@ export type LimitName =
   | 'code'
   | 'space'
   | 'service'
+/** A limit as people read it. */
+export const limitWords: Readonly<Record<LimitName, string>> = {
+  touch: 'Touch',
+  loss: 'Loss',
+  damp: 'Damp',
+  frost: 'Frost',
+  arrival: 'Arrival',
+  code: 'Code',
+  space: 'Space',
+  service: 'Service',
+}
+
 export type Governing = LimitName | 'money' | 'smallest' | 'fixed' | 'bare' | 'unmet'
 export type ConditionName = 'loss' | 'touch' | 'damp' | 'frost' | 'survey'
 

@@ -6,7 +6,7 @@ import type { RunValues } from '../fields.ts'
 import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import { parseLayers } from './layers-text.ts'
-import type { Thing } from './thing.ts'
+import type { Thing } from './standing.ts'
 
 export interface ResolvedBuildUp {
   /** Inside to outside; empty for a bare run. */

@@ -7,7 +7,7 @@ import type { RunValues } from '../fields.ts'
 import type { Conditions } from './conditions.ts'
 import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
-import type { Thing } from './thing.ts'
+import type { Thing } from './standing.ts'
 
 /** Contact time where adults work [s]. Source: ASTM C1055 industrial design time, as quoted publicly. */
 const USUAL_CONTACT_S = 5
