@@ -30,7 +30,7 @@ async function start(): Promise<void> {
   const boundsFile = join(folder, 'window.json')
   const window = new BrowserWindow({
     ...savedBounds(boundsFile),
-    minWidth: 720,
+    minWidth: 900,
     minHeight: 480,
     title: 'Lagwright',
     icon: join(program, 'electron', 'icons', 'icon.png'),

@@ -76,7 +76,7 @@ function saidThickness(thicknessM: number, { ladder }: ReasonFacts, words: Words
 
 /** As many digits as tell a value from its bound, at least one. */
 const tellingDigits = ({ value, bound }: LimitResult): number =>
-  [1, 2, 3].find((digits) => value.toFixed(digits) !== bound.toFixed(digits)) ?? 3
+  [1, 2, 3, 4, 5, 6].find((digits) => value.toFixed(digits) !== bound.toFixed(digits)) ?? 6
 
 function against(limit: LimitResult, words: Words): string {
   const { value, bound, unit } = limit
@@ -93,8 +93,11 @@ function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
   if (!chosen) return ''
   const thinner = ladder[ladder.findIndex((rung) => isSame(rung, chosen)) - 1]
   const failed = thinner?.limits.find((result) => result.limit === limit && !result.pass)
-  // Touch may be judged twice: the chosen rung is shown against the bound that the thinner one failed. Service may
-  // meet another bound on the next rung; there the narrowest is shown.
+  // Service is judged at many places, and the narrowest differs from rung to rung: the place that failed is named.
+  if (limit === 'service' && thinner && failed) {
+    return `${said(chosen, words)} serves; at ${said(thinner, words)} ${failed.what} would stand at ${against(failed, words)}.`
+  }
+  // Touch may be judged twice: the chosen rung is shown against the bound that the thinner one failed.
   const own = chosen.limits.filter((result) => result.limit === limit)
   const here = own.find((result) => result.bound === failed?.bound) ?? own[0]
   const first = here ? `${said(chosen, words)} gives ${against(here, words)}` : ''
@@ -111,7 +114,7 @@ function missed({ value, bound, unit }: LimitResult, words: Words): string {
 
 function matt(facts: ReasonFacts, words: Words): string {
   const { mattThicknessM, chosen } = facts
-  if (mattThicknessM === null || !chosen || mattThicknessM >= chosen.thicknessM) return ''
+  if (mattThicknessM === null || (chosen && mattThicknessM >= chosen.thicknessM)) return ''
   return `Under a matt finish ${saidThickness(mattThicknessM, facts, words)} would do.`
 }
 
@@ -151,8 +154,16 @@ function cheapest({ chosen, ladder, money }: ReasonFacts, words: Words): string 
   const last = near[near.length - 1]
   if (!first || !last) return `${own}; every other thickness that passes costs over 2 % more.`
   if (first === last) return `${own}; ${said(first, words)} costs within 2 % of it.`
-  const joint = near.length === 2 ? 'and' : 'to'
-  return `${own}; ${said(first, words)} ${joint} ${said(last, words)} cost within 2 % of it.`
+  if (near.length === 2)
+    return `${own}; ${said(first, words)} and ${said(last, words)} cost within 2 % of it.`
+  const between = ladder.filter(
+    ({ thicknessM }) => thicknessM >= first.thicknessM && thicknessM <= last.thicknessM,
+  )
+  const hasGap = between.some((rung) => !isSame(rung, chosen) && !near.includes(rung))
+  const range = `${said(first, words)} to ${said(last, words)}`
+  return hasGap
+    ? `${own}; ${near.length} others from ${range} cost within 2 % of it.`
+    : `${own}; ${range} cost within 2 % of it.`
 }
 
 /** How the narrowest limit stands. */
@@ -182,12 +193,15 @@ function bareWords({ bare, limits }: ReasonFacts, words: Words): string {
     : `${surface}; no limit is set for it.`
 }
 
-function unmet({ ladder, limits }: ReasonFacts, words: Words): string {
-  const thickest = ladder[ladder.length - 1]
+function unmet(facts: ReasonFacts, words: Words): string {
+  const thickest = facts.ladder[facts.ladder.length - 1]
   if (!thickest) return 'No thickness of this material can be bought for this size.'
-  const detail = limits
+  const detail = facts.limits
     .filter(({ pass }) => !pass)
     .map((limit) => `${limit.limit} stands at ${against(limit, words)} (${limit.what})`)
     .join('; ')
-  return `No thickness passes every limit. At the thickest, ${said(thickest, words)}, ${detail}.`
+  return sentences(
+    `No thickness passes every limit. At the thickest, ${said(thickest, words)}, ${detail}.`,
+    matt(facts, words),
+  )
 }

@@ -120,7 +120,7 @@ export interface RunResult {
   readonly bare: Rating
   readonly chosen: Rating | null
   readonly governing: Governing
-  /** Where damp governs under a bright jacket: the thickness a matt finish would need [m]; else null. */
+  /** Where damp governs or cannot be met under a bright jacket: the thickness a matt finish would need [m]; else null. */
   readonly mattThicknessM: number | null
   /** One plain sentence or two, with the numbers that decided. */
   readonly reason: string

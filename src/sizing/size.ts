@@ -23,7 +23,7 @@ export function size(problem: Problem): RunResult {
     bare: bareRated.rating,
     chosen: choice.rated?.rating ?? null,
     governing: choice.governing,
-    mattThicknessM: mattThicknessM(problem, choice.governing),
+    mattThicknessM: mattThicknessM(problem, choice.governing, shown.rating),
     limits: shown.rating.limits,
     ladder,
     money,
@@ -81,10 +81,12 @@ function governingLimit(problem: Problem, thinner: Rating | null, chosen: Rating
 const BRIGHT_EMISSIVITY = 0.5
 const MATT_EMISSIVITY = 0.9
 
-/** Where damp governs under a bright jacket: the rung a matt finish would need [m]. */
-function mattThicknessM(problem: Problem, governing: Governing): number | null {
+/** Where damp decides, or cannot be met, under a bright jacket: the rung a matt finish would need [m]. */
+function mattThicknessM(problem: Problem, governing: Governing, shown: Rating): number | null {
   const { damp } = problem.conditions
-  if (governing !== 'damp' || damp.emissivity > BRIGHT_EMISSIVITY) return null
+  const isDampUnmet =
+    governing === 'unmet' && shown.limits.some(({ limit, pass }) => limit === 'damp' && !pass)
+  if (!(governing === 'damp' || isDampUnmet) || damp.emissivity > BRIGHT_EMISSIVITY) return null
   const matt: Problem = {
     ...problem,
     conditions: { ...problem.conditions, damp: { ...damp, emissivity: MATT_EMISSIVITY } },
