@@ -68,7 +68,7 @@ describe('the energy balance', () => {
 
 /**
  * The flux through each layer, from the temperatures on its sides by Fourier's law and Simpson's rule, and the one that
- * the film inside brings; layers whose temperatures cannot show a flux (less than a microkelvin across) are left out.
+ * the film inside brings; layers whose temperatures cannot show a flux (less than a thousandth of them across) are left out.
  */
 function carried(system: System, solution: Solution, face: Solution['faces'][number]): number[] {
   const fluxes: number[] = []
