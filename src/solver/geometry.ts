@@ -79,7 +79,8 @@ function cylinderWall(shape: Extract<Shape, { kind: 'pipe' }>, layers: readonly 
  * Rectangular duct with the mean-perimeter form R_l = 2d/(λ(P_i + P_e)), P_e = P_i + 8d, layer by layer.
  *
  * Side faces are vertical plates of the outer height; top and bottom are taken as long strips, area over perimeter =
- * half the outer width. A riser is a vertical plate of its height all round. Source: ISO 12241:2022 as quoted in a public building-energy model; Incropera, example 9.3.
+ * half the outer width; the wind runs across the duct, over height and width. A riser is a vertical plate of its height
+ * all round, and the wind runs over its mean side. Source: ISO 12241:2022 as quoted in a public building-energy model; Incropera, example 9.3.
  */
 function rectangularWall(
   shape: Extract<Shape, { kind: 'rect-duct' }>,
@@ -98,14 +99,17 @@ function rectangularWall(
   }
   const outerWidthM = widthM + 2 * totalM
   const outerHeightM = heightM + 2 * totalM
-  const acrossM = outerWidthM / 2
-  const face = (side: SideName, flow: FlowKind, lengthM: number, widthOfFaceM: number) => ({
-    side,
-    flow,
-    freeLengthM: lengthM,
-    windLengthM: lengthM,
-    share: widthOfFaceM / outerPerimeterM,
-  })
+  const lying: FaceShape[] = [
+    face(
+      'side',
+      'vertical-plate',
+      outerHeightM,
+      outerHeightM,
+      (2 * outerHeightM) / outerPerimeterM,
+    ),
+    face('top', 'up', outerWidthM / 2, outerWidthM, outerWidthM / outerPerimeterM),
+    face('bottom', 'down', outerWidthM / 2, outerWidthM, outerWidthM / outerPerimeterM),
+  ]
   return {
     formsM,
     outerOverInner: outerPerimeterM / innerPerimeterM,
@@ -113,16 +117,20 @@ function rectangularWall(
     outerDiameterM: null,
     faces:
       shape.riseM === null
-        ? [
-            face('side', 'vertical-plate', outerHeightM, 2 * outerHeightM),
-            face('top', 'up', acrossM, outerWidthM),
-            face('bottom', 'down', acrossM, outerWidthM),
-          ]
-        : [face('all round', 'vertical-plate', shape.riseM, outerPerimeterM)],
+        ? lying
+        : [face('all round', 'vertical-plate', shape.riseM, outerPerimeterM / 4, 1)],
   }
 }
 
-/** Flat surface: form = thickness. */
+const face = (
+  side: SideName,
+  flow: FlowKind,
+  freeLengthM: number,
+  windLengthM: number,
+  share: number,
+): FaceShape => ({ side, flow, freeLengthM, windLengthM, share })
+
+/** Flat surface: form = thickness. The wind is taken over the same length as free convection: short, so never too little loss. */
 function flatWall(shape: Extract<Shape, { kind: 'flat' }>, layers: readonly Layer[]): Wall {
   return {
     formsM: layers.map((layer) => layer.thicknessM),

@@ -12,7 +12,8 @@ import type { Conductivity, Face, Layer, Note, Solution, System } from './types.
  * The unknown of each face is the excess of its surface over the air. A trial excess gives the flux of film and
  * radiation; that flux, carried inwards layer by layer, gives the medium temperature that would drive it; the excess is
  * right when that is the medium's own. So λ(T) is integrated exactly, any number of layers needs no inner iteration, and
- * the balance is monotonic in the unknown. Temperatures between −200 and 1000 °C; layers inside to outside.
+ * the balance is one search in one unknown. It rises with the unknown save where a correlation
+ * steps; there the search ends on one of the answers that close it, or on the step itself, and says so. Temperatures between −200 and 1000 °C; layers inside to outside.
  * Never throws and never gives NaN for finite input in the ranges of `model/fields.ts`.
  */
 export function solve(system: System): Solution {
@@ -109,6 +110,13 @@ function solveFace(
   // the fluxes of the two sides, and that flux closes the balance.
   const fluxHere = released(excessK)
   const fluxBeyond = released(root.otherEnd)
+  if (Math.abs(fluxHere - fluxBeyond) <= JUMP * Math.abs(fluxHere)) {
+    notes.push({
+      code: 'conductivity-steep',
+      text: 'The conductivity falls so steeply with temperature that more than one state would fit: do not rely on this result.',
+    })
+    return finishOnFilm(excessK)
+  }
   const flux = bracketedRoot(
     (trial) => excessK + drivenK(excessK, trial) - mediumExcessK,
     { low: Math.min(fluxHere, fluxBeyond), high: Math.max(fluxHere, fluxBeyond) },
@@ -170,7 +178,7 @@ function conductivityNotes(layers: readonly Layer[], faces: readonly Face[]): No
       const [first, last] = curveEndsC(conductivity)
       notes.push({
         code: 'conductivity-extrapolated',
-        text: `Layer ${index + 1}: its mean temperature is ${Math.abs(beyondK).toFixed(0)} K ${beyondK > 0 ? 'above' : 'below'} the conductivity curve, which holds from ${first} to ${last} °C.`,
+        text: `Layer ${index + 1}: its mean temperature is ${Math.max(1, Math.abs(beyondK)).toFixed(0)} K ${beyondK > 0 ? 'above' : 'below'} the conductivity curve, which holds from ${first} to ${last} °C.`,
       })
       return
     }

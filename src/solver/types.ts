@@ -63,7 +63,7 @@ export interface System {
   readonly around: Surroundings
 }
 
-/** A finding of the solver that a reader should know; never an exception. `code` is film-range, film-jump or conductivity-extrapolated. */
+/** A finding of the solver that a reader should know; never an exception. `code` is film-range, film-jump, conductivity-extrapolated or conductivity-steep. */
 export interface Note {
   readonly code: string
   readonly text: string

@@ -48,13 +48,34 @@ export function burnThreshold(
     const found =
       cells.length > 0 ? interpolate(cells, Math.min(contactS, LONGEST_CONTACT_S)) : null
     if (found?.confirmed) return { thresholdC: found.thresholdC, surface: name, because }
-    const next = stricter[name] ?? (name === 'smooth-metal' ? null : 'smooth-metal')
+    const next = stricterThan(table, name)
     if (next === null) {
       return found ? { thresholdC: found.thresholdC, surface: name, because } : null
     }
     because ??= `the threshold for ${name} at this contact time is not confirmed`
     name = next
   }
+}
+
+/** Of a coated metal the next thinner coat, then bare metal; of the rest the next class; of bare metal none. */
+function stricterThan(table: readonly BurnThreshold[], name: string): string | null {
+  if (name === 'smooth-metal') return null
+  const coat = /^(.+)-(\d+)$/.exec(name)
+  if (!coat) return stricter[name] ?? 'smooth-metal'
+  return thickestCoat(table, coat[1] ?? '', Number(coat[2]) - 1) ?? 'smooth-metal'
+}
+
+/** The thickest row of a coating that is not thicker than this [µm]. */
+function thickestCoat(
+  table: readonly BurnThreshold[],
+  coating: string,
+  upToUm: number,
+): string | null {
+  const rows = [...new Set(table.map((cell) => cell.surface))]
+    .filter((name) => name.startsWith(`${coating}-`))
+    .map((name) => ({ name, um: Number(name.slice(coating.length + 1)) }))
+    .filter(({ um }) => um <= upToUm)
+  return rows.sort((a, b) => b.um - a.um)[0]?.name ?? null
 }
 
 /** Which row of the table is the surface's own. */
@@ -66,17 +87,11 @@ function rowName(
   if (coating === null || coatingThicknessM === null) {
     return { name: 'smooth-metal', because: 'a coating of unknown thickness gives no relief' }
   }
-  // The thickest row of that coating that is not thicker than the coating itself.
   const coatingUm = Math.round(coatingThicknessM * 1e6)
-  const rows = new Set(table.map((cell) => cell.surface))
-  const fitting = [...rows]
-    .filter((name) => name.startsWith(`${coating}-`))
-    .map((name) => ({ name, um: Number(name.slice(coating.length + 1)) }))
-    .filter(({ um }) => um <= coatingUm)
-    .sort((a, b) => b.um - a.um)[0]
-  return fitting
-    ? { name: fitting.name, because: null }
-    : { name: 'smooth-metal', because: `a coating of ${coatingUm} µm is too thin to give relief` }
+  const name = thickestCoat(table, coating, coatingUm)
+  return name === null
+    ? { name: 'smooth-metal', because: `a coating of ${coatingUm} µm is too thin to give relief` }
+    : { name, because: null }
 }
 
 function interpolate(

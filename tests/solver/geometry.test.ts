@@ -56,23 +56,24 @@ describe('wallOf', () => {
     expect(wall.outerOverInner).toBeCloseTo(1.2, 12)
     expect(wall.faces.map(({ side }) => side)).toEqual(['side', 'top', 'bottom'])
     expect(wall.faces.map(({ flow }) => flow)).toEqual(['vertical-plate', 'up', 'down'])
-    // Sides 2 × 0.5 m of 2.4 m; top and bottom 0.7 m each. Lengths: outer height, half the outer width.
+    // Sides 2 × 0.5 m of 2.4 m; top and bottom 0.7 m each. Free lengths: outer height, half the outer width. The
+    // wind runs across: over height and whole width.
     const expected = [
-      [1 / 2.4, 0.5],
-      [0.7 / 2.4, 0.35],
-      [0.7 / 2.4, 0.35],
+      [1 / 2.4, 0.5, 0.5],
+      [0.7 / 2.4, 0.35, 0.7],
+      [0.7 / 2.4, 0.35, 0.7],
     ]
     wall.faces.forEach(({ share, freeLengthM, windLengthM }, index) => {
       expect(share).toBeCloseTo(expected[index]?.[0] ?? Number.NaN, 12)
       expect(freeLengthM).toBeCloseTo(expected[index]?.[1] ?? Number.NaN, 12)
-      expect(windLengthM).toBe(freeLengthM)
+      expect(windLengthM).toBeCloseTo(expected[index]?.[2] ?? Number.NaN, 12)
     })
   })
 
   test('a rising duct is one vertical face as high as it rises', () => {
     const wall = wallOf({ kind: 'rect-duct', widthM: 0.6, heightM: 0.4, riseM: 7 }, [])
     expect(wall.faces).toEqual([
-      { side: 'all round', flow: 'vertical-plate', freeLengthM: 7, windLengthM: 7, share: 1 },
+      { side: 'all round', flow: 'vertical-plate', freeLengthM: 7, windLengthM: 0.5, share: 1 },
     ])
   })
 

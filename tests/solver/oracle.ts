@@ -189,13 +189,13 @@ function geometryOf({ shape, layers }: { shape: Shape; layers: System['layers'] 
   })
   const w = shape.widthM + 2 * total
   const h = shape.heightM + 2 * total
-  const face = (side: string, kind: Surface['kind'], length: number, area: number): Surface => ({
-    side,
-    kind,
-    length,
-    across: length,
-    area,
-  })
+  const face = (
+    side: string,
+    kind: Surface['kind'],
+    length: number,
+    across: number,
+    area: number,
+  ): Surface => ({ side, kind, length, across, area })
   return {
     innerArea,
     outerArea: perimeter,
@@ -203,11 +203,11 @@ function geometryOf({ shape, layers }: { shape: Shape; layers: System['layers'] 
     surfaces:
       shape.riseM === null
         ? [
-            face('side', 'wall', h, 2 * h),
-            face('top', 'up', w / 2, w),
-            face('bottom', 'down', w / 2, w),
+            face('side', 'wall', h, h, 2 * h),
+            face('top', 'up', w / 2, w, w),
+            face('bottom', 'down', w / 2, w, w),
           ]
-        : [face('all round', 'wall', shape.riseM, perimeter)],
+        : [face('all round', 'wall', shape.riseM, perimeter / 4, perimeter)],
   }
 }
 

@@ -167,6 +167,17 @@ describe('a cell of low confidence', () => {
 })
 
 describe('a coating', () => {
+  test.each([100, 150])(
+    'of a doubtful coat of %d µm the next thinner confirmed one decides',
+    (um) => {
+      // At 1 s the cells of 100 and 150 µm are of low confidence; that of 50 µm, 73 °C (EN 563 as quoted: 75), is not.
+      expect(judged(coated('lacquer', um), 1)).toMatchObject({
+        surface: 'lacquer-50',
+        thresholdC: 73,
+      })
+    },
+  )
+
   // DIN EN 563 as quoted: at 0.5 s lacquer of 50 and 100 µm adds 13 and 22 K to metal's 67 °C; powder of 60 µm and
   // enamel of 160 µm add 6 K, powder of 90 µm 11 K. 150 µm lacquer and 400 µm polyamide stop at plastic's 91 °C.
   published(
