@@ -31,6 +31,15 @@ export const checks: readonly Step[] = [
   { name: 'unused code', tool: { package: 'knip' }, args: ['--no-progress'] },
 ]
 
+/** A Vitest test, so the full run has it already; the quick check runs it by itself. */
+export const names: readonly Step[] = [
+  {
+    name: 'units in names',
+    tool: { package: 'vitest' },
+    args: ['run', '--project', 'node', 'tests/names.test.ts'],
+  },
+]
+
 export const builds: readonly Step[] = [
   { name: 'build', tool: { package: 'vite' }, args: ['build', '--logLevel', 'warn'] },
 ]

@@ -1,5 +1,5 @@
 import { findChromium } from '../chromium.ts'
-import { builds, checks, runSteps } from './checks.ts'
+import { builds, checks, names, runSteps } from './checks.ts'
 import { installChromium } from './install-chromium.ts'
 import { type Outcome, total } from './outcome.ts'
 import { runPlaywright } from './playwright.ts'
@@ -9,7 +9,8 @@ import { runVitest } from './vitest.ts'
 export async function run(what: 'checks' | 'everything'): Promise<number> {
   const outcomes: Outcome[] = []
   await runSteps(checks, outcomes)
-  if (what === 'everything') {
+  if (what === 'checks') await runSteps(names, outcomes)
+  else {
     await runSteps(builds, outcomes)
     const why = findChromium() ? null : await installChromium()
     await runVitest(why, outcomes)
