@@ -6,6 +6,13 @@ test('the first start shows the demo, sized', async ({ ui: { page } }) => {
   await expect(page.getByLabel('Name of the job')).toHaveValue('Harrowmere Creamery')
   await expect(cell(page, 'ST-101', 'lagging')).toHaveText(/^\d+$/)
   await expect(page.getByRole('article', { name: 'Run sheet' })).toContainText('ST-101')
+  // The grid and the panel scroll, the page as a whole does not.
+  expect(
+    await page.evaluate(() => {
+      const { scrollHeight, clientHeight, scrollWidth, clientWidth } = document.documentElement
+      return [scrollHeight - clientHeight, scrollWidth - clientWidth]
+    }),
+  ).toEqual([0, 0])
 })
 
 test('a run is added, sized, given another finish and undone', async ({ ui: { page } }) => {
