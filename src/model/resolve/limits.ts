@@ -53,7 +53,7 @@ function resolveBurn(
       findings.fault(
         'reachReason',
         'nothing',
-        'why nobody can touch the run: reach no needs a reason',
+        'why nobody can touch the run, e.g. under the ceiling, 4 m up',
       )
     } else {
       findings.note('out-of-reach', `Touch is not judged: out of reach (${values.reachReason}).`)

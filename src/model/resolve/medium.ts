@@ -49,7 +49,7 @@ function mediumTemperatureC(
     findings.fault(
       'mediumC',
       'nothing',
-      'the temperature of the medium in °C, or pressure_bar_g of saturated steam',
+      'the temperature of the medium in °C, or pressure_bar_g if it is saturated steam',
     )
     return null
   }
