@@ -15,9 +15,9 @@ const run: RunValues = {
   finish: 'al_plain',
 }
 
-async function openForm() {
+async function openForm(runs: readonly RunValues[] = [run]) {
   await page.viewport(1440, 900)
-  const workspace = await startWorkspace(new TestFile(jobOf([run])))
+  const workspace = await startWorkspace(new TestFile(jobOf(runs)))
   await render(App, { workspace })
   await page.getByText('Inputs', { exact: true }).click()
   return { ...workspace, session: workspace.session, form: page.getByRole('form') }
@@ -49,6 +49,19 @@ describe('the form of a run', () => {
     await expect
       .element(form.getByText('"1200" does not fit. Allowed: a number from -200 to 1000 °C.'))
       .toBeVisible()
+  })
+
+  test('what is typed stays with its run when another one is pointed at', async () => {
+    const { session, form } = await openForm([run, { ...run, tag: 'ST-2', mediumC: 90 }])
+    const medium = form.getByLabelText('Medium °C')
+    await medium.fill('200')
+    // Before it took effect by itself, and after.
+    await page.getByRole('gridcell', { name: 'ST-2' }).click()
+    expect(session.job.runs.map(({ values }) => values.mediumC)).toEqual([200, 90])
+    await medium.fill('95')
+    await expect.poll(() => session.job.runs[1]?.values.mediumC).toBe(95)
+    await page.getByRole('gridcell', { name: 'ST-1' }).click()
+    expect(session.job.runs.map(({ values }) => values.mediumC)).toEqual([200, 95])
   })
 
   test('shows what holds where a field is empty', async () => {

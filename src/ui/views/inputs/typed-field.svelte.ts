@@ -14,6 +14,8 @@ export interface FieldLink {
 export class TypedField {
   readonly #link: FieldLink
   #typed: string | null = $state(null)
+  /** What took effect last. Asked of the link it could be that of another run, which is shown next. */
+  #taken = ''
   #timer: ReturnType<typeof setTimeout> | undefined
 
   constructor(link: FieldLink) {
@@ -25,6 +27,7 @@ export class TypedField {
   }
 
   type(text: string): void {
+    if (this.#typed === null) this.#taken = this.#link.standing()
     this.#typed = text
     clearTimeout(this.#timer)
     // Half a number is no mistake yet.
@@ -45,7 +48,8 @@ export class TypedField {
   }
 
   #take(): void {
-    if (this.#typed !== null && this.#typed !== this.#link.standing())
-      this.#link.commit(this.#typed)
+    if (this.#typed === null || this.#typed === this.#taken) return
+    this.#taken = this.#typed
+    this.#link.commit(this.#typed)
   }
 }
