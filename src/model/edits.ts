@@ -7,7 +7,7 @@ import {
   without,
   withValue,
 } from './cell-edit.ts'
-import type { FieldKey, RunValues } from './fields.ts'
+import { type FieldKey, fieldOf, type RunValues } from './fields.ts'
 import type { Job, JobDefaults, Run } from './job.ts'
 
 /** Makes the id of a new run; given by the caller, so that edits stay pure. */
@@ -78,14 +78,12 @@ export function addRun(job: Job, id: string, belowId: string | null): Job {
 /** Copies runs, each below its original, with the next free tag. */
 export function duplicateRuns(job: Job, ids: ReadonlySet<string>, newId: NewId): Job {
   if (!job.runs.some((run) => ids.has(run.id))) return job
-  const tags = new Set(job.runs.map((run) => run.values.tag))
+  const nextTag = tagGiver(job.runs)
   const runs = job.runs.flatMap((run) => {
     if (!ids.has(run.id)) return [run]
     const { tag } = run.values
     if (tag === undefined) return [run, { ...run, id: newId() }]
-    const next = nextTag(tag, tags)
-    tags.add(next)
-    return [run, { ...run, id: newId(), values: { ...run.values, tag: next } }]
+    return [run, { ...run, id: newId(), values: { ...run.values, tag: nextTag(tag) } }]
   })
   return { ...job, runs }
 }
@@ -169,13 +167,26 @@ export function setDefault<K extends FieldKey>(job: Job, key: K, value: JobDefau
     : { ...job, defaults: withValue(job.defaults, key, value) }
 }
 
-/** ST-104 becomes ST-105, or the next number that is free; a tag without a number gets one. */
-function nextTag(tag: string, taken: ReadonlySet<string | undefined>): string {
-  const [, stem = tag, digits = ''] = /^(.*?)(\d*)$/.exec(tag) ?? []
-  const start = digits === '' ? 1 : Number(digits)
-  for (let number = start + 1; ; number++) {
-    const next =
-      digits === '' ? `${stem} ${number}` : `${stem}${String(number).padStart(digits.length, '0')}`
-    if (!taken.has(next)) return next.slice(0, 60)
+/** Gives tags that nobody has: ST-104 becomes ST-105 or the next number that is free; one without a number gets one. */
+function tagGiver(runs: readonly Run[]): (tag: string) => string {
+  const taken = new Set(runs.map((run) => run.values.tag))
+  // Where to look on from, so that ten thousand copies do not each count from the start.
+  const lastByStem = new Map<string, number>()
+  return (tag) => {
+    // More digits than these are no longer counted exactly.
+    const [, stem = tag, digits = ''] = /^(.*?)(\d{0,9})$/.exec(tag) ?? []
+    const start = digits === '' ? 1 : Number(digits)
+    const key = `${digits.length} ${stem}`
+    for (let number = Math.max(start, lastByStem.get(key) ?? 0) + 1; ; number++) {
+      const ending = digits === '' ? ` ${number}` : String(number).padStart(digits.length, '0')
+      const next = stem.slice(0, longestTag - ending.length) + ending
+      if (taken.has(next)) continue
+      taken.add(next)
+      lastByStem.set(key, number)
+      return next
+    }
   }
 }
+
+const tagField = fieldOf('tag')
+const longestTag = tagField.kind === 'text' ? tagField.maxLength : 0

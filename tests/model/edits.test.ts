@@ -33,6 +33,27 @@ function counter(): () => string {
   return () => `new ${++last}`
 }
 
+describe('duplicateRuns, tags', () => {
+  const copyOf = (tag: string) =>
+    tagsOf(duplicateRuns(jobOf([tag]), new Set([tag]), counter())).at(-1) ?? ''
+
+  test.each(['ST-9', 'Riser', '9007199254740993', '1'.repeat(60), 'x'.repeat(60)])(
+    'a copy of %s has a tag of its own that a tag may be',
+    (tag) => {
+      expect(copyOf(tag)).not.toBe(tag)
+      expect(copyOf(tag).length).toBeLessThanOrEqual(60)
+      const twice = duplicateRuns(jobOf([tag, copyOf(tag)]), new Set([tag]), counter())
+      expect(new Set(tagsOf(twice)).size).toBe(3)
+    },
+  )
+
+  test('all of a long list copied at once', () => {
+    const tags = Array.from({ length: 10_000 }, (_, index) => `ST-${index + 1}`)
+    const copied = duplicateRuns(jobOf(tags), new Set(tags), counter())
+    expect(new Set(tagsOf(copied)).size).toBe(20_000)
+  })
+})
+
 describe('setCell', () => {
   const job = jobOf(['A'])
 
