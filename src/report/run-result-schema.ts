@@ -22,6 +22,9 @@ const limitResult = z
     limit: limitName,
     pass: z.boolean().describe('Whether the limit is met'),
     value: finite('What was calculated, in `unit`'),
+    rule: z
+      .enum(['at most', 'below', 'at least'])
+      .describe('How the value must stand to the bound'),
     bound: finite('What it was judged against, in `unit`'),
     unit: text('Unit of `value` and `bound`'),
     condition: z

@@ -31,18 +31,29 @@ function touchLimits(limits: Limits, state: Solution, isBare: boolean): LimitRes
   const found: LimitResult[] = []
   const common = { limit: 'touch', value, unit: '°C', condition: 'touch' } as const
   if (maxSurfaceC !== null) {
-    found.push({ ...common, pass: value <= maxSurfaceC, bound: maxSurfaceC, what: onFace(face) })
+    found.push({
+      ...common,
+      pass: value <= maxSurfaceC,
+      rule: 'at most',
+      bound: maxSurfaceC,
+      what: onFace(face),
+    })
   }
   if (burn) {
-    const what = `${onFace(face)}, ${burn.surface} touched for ${burn.contactS} s`
-    found.push({ ...common, pass: value < burn.thresholdC, bound: burn.thresholdC, what })
+    found.push({
+      ...common,
+      pass: value < burn.thresholdC,
+      rule: 'below',
+      bound: burn.thresholdC,
+      what: `${onFace(face)}, ${burn.surface} touched for ${burn.contact}`,
+    })
   }
   return found
 }
 
 function lossLimits({ maxLossWPerM, maxLossWPerM2 }: Limits, state: Solution): LimitResult[] {
   const limits: LimitResult[] = []
-  const common = { limit: 'loss', condition: 'loss' } as const
+  const common = { limit: 'loss', rule: 'at most', condition: 'loss' } as const
   if (maxLossWPerM !== null && state.heatLossWPerM !== null) {
     const value = Math.abs(state.heatLossWPerM)
     limits.push({
@@ -77,6 +88,7 @@ function dampLimits({ damp }: Limits, state: Solution | null): LimitResult[] {
       limit: 'damp',
       pass: face.surfaceTempC >= bound,
       value: face.surfaceTempC,
+      rule: 'at least',
       bound,
       unit: '°C',
       condition: 'damp',

@@ -49,8 +49,9 @@ export interface Step {
 /** A surface passes only below it. */
 export interface BurnLimit {
   readonly thresholdC: number
-  readonly contactS: number
+  /** The touched surface and the contact time in words: "smooth metal", "1 min". */
   readonly surface: string
+  readonly contact: string
 }
 
 export interface Limits {

@@ -100,10 +100,14 @@ function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
   // Touch may be judged twice: the chosen rung is shown against the bound that the thinner one failed.
   const own = chosen.limits.filter((result) => result.limit === limit)
   const here = own.find((result) => result.bound === failed?.bound) ?? own[0]
-  const first = here ? `${said(chosen, words)} gives ${against(here, words)}` : ''
+  const first = here ? `${said(chosen, words)} gives ${against(here, words)}${touched(here)}` : ''
   const second = thinner && failed ? `${said(thinner, words)} would ${missed(failed, words)}` : ''
   return `${[first, second].filter((part) => part !== '').join('; ')}.`
 }
+
+/** A burn threshold belongs to a surface and a contact time: both are said with it. */
+const touched = ({ limit, rule, what }: LimitResult): string =>
+  limit === 'touch' && rule === 'below' ? ` (${what})` : ''
 
 /** What a failed rung gives; where one decimal does not tell it from its bound, that it just misses. */
 function missed({ value, bound, unit }: LimitResult, words: Words): string {

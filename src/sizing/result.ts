@@ -38,6 +38,8 @@ export interface LimitResult {
   readonly limit: LimitName
   readonly pass: boolean
   readonly value: number
+  /** How the value must stand to the bound. */
+  readonly rule: 'at most' | 'below' | 'at least'
   readonly bound: number
   readonly unit: string
   readonly condition: ConditionName

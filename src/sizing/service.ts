@@ -18,6 +18,7 @@ interface Stand {
   /** True for the stated maximum of a material or jacket. */
   readonly ofMaximum: boolean
   readonly value: number
+  readonly rule: LimitResult['rule']
   readonly bound: number
   readonly what: string
   readonly condition: ConditionName
@@ -33,6 +34,7 @@ export function serviceLimits(problem: Problem, settled: Settled, states: States
       limit: 'service',
       pass: worst.marginK >= -SOLVED_K,
       value: worst.value,
+      rule: worst.rule,
       bound: worst.bound,
       unit: '°C',
       condition: worst.condition,
@@ -62,7 +64,8 @@ function standsOf(
     what: string,
     ofMaximum = false,
   ): void => {
-    stands.push({ marginK: sign * (bound - value), ofMaximum, value, bound, what, condition })
+    const rule = sign > 0 ? 'at most' : 'at least'
+    stands.push({ marginK: sign * (bound - value), ofMaximum, value, rule, bound, what, condition })
   }
   for (const { interfaceTempsC } of state.faces) {
     layers.forEach(({ material }, index) => {
@@ -93,7 +96,17 @@ function jacketStands({ finish }: Problem, settled: Settled, state: Solution): S
   const value = hottestFace(state).surfaceTempC
   const bound = finish.surfaceMaxC
   const what = `${finish.name}, jacket`
-  return [{ marginK: bound - value, ofMaximum: true, value, bound, what, condition: 'touch' }]
+  return [
+    {
+      marginK: bound - value,
+      ofMaximum: true,
+      value,
+      rule: 'at most',
+      bound,
+      what,
+      condition: 'touch',
+    },
+  ]
 }
 
 /** Above this share of a material's maximum a note is due. Source: layering rule `limit_90_percent` of the catalogue. */

@@ -1,5 +1,5 @@
 /** Burn thresholds: the lower curve of ISO 13732-1 for a touchable surface and a contact time. */
-import type { BurnThreshold, TouchClass } from '#catalogue/types.ts'
+import type { BurnThreshold, Confidence, TouchClass } from '#catalogue/types.ts'
 
 export interface TouchedSurface {
   readonly touchClass: TouchClass
@@ -14,6 +14,8 @@ export interface Threshold {
   readonly thresholdC: number
   /** The class whose row decided, e.g. `smooth-metal`. */
   readonly surface: string
+  /** The least sure of the cells that decided. */
+  readonly confidence: Confidence
   /** Why another row than the surface's own decided; null where its own did. */
   readonly because: string | null
 }
@@ -47,12 +49,12 @@ export function burnThreshold(
     const cells = table.filter((cell) => cell.surface === name)
     const found =
       cells.length > 0 ? interpolate(cells, Math.min(contactS, LONGEST_CONTACT_S)) : null
-    if (found?.confirmed) return { thresholdC: found.thresholdC, surface: name, because }
+    if (found?.confirmed) return { ...told(found), surface: name, because }
     const next = stricterThan(table, name)
     if (next === null) {
-      return found ? { thresholdC: found.thresholdC, surface: name, because } : null
+      return found ? { ...told(found), surface: name, because } : null
     }
-    because ??= `the threshold for ${name} at this contact time is not confirmed`
+    because ??= `the threshold for ${surfaceWords(name)} at this contact time is not confirmed`
     name = next
   }
 }
@@ -94,21 +96,47 @@ function rowName(
     : { name, because: null }
 }
 
-function interpolate(
-  cells: readonly BurnThreshold[],
-  contactS: number,
-): { thresholdC: number; confirmed: boolean } | null {
+/** What the cells around a contact time give. */
+interface Reading {
+  readonly thresholdC: number
+  readonly confidence: Confidence
+  readonly confirmed: boolean
+}
+
+const told = ({ thresholdC, confidence }: Reading) => ({ thresholdC, confidence })
+
+function interpolate(cells: readonly BurnThreshold[], contactS: number): Reading | null {
   const sorted = [...cells].sort((a, b) => a.contactS - b.contactS)
   const after = sorted.findIndex((cell) => cell.contactS >= contactS)
   const high = after < 0 ? sorted[sorted.length - 1] : sorted[after]
   const low = after <= 0 ? high : sorted[after - 1]
   if (!high || !low) return null
-  if (high === low || high.contactS === contactS) {
-    return { thresholdC: high.lowerC, confirmed: high.grade !== 'L' }
-  }
+  if (high === low || high.contactS === contactS) return reading(high.lowerC, [high])
   const share = Math.log10(contactS / low.contactS) / Math.log10(high.contactS / low.contactS)
+  return reading(low.lowerC + share * (high.lowerC - low.lowerC), [low, high])
+}
+
+function reading(thresholdC: number, cells: readonly BurnThreshold[]): Reading {
+  const least = (['estimate', 'memory'] as const).find((confidence) =>
+    cells.some((cell) => cell.confidence === confidence),
+  )
   return {
-    thresholdC: low.lowerC + share * (high.lowerC - low.lowerC),
-    confirmed: low.grade !== 'L' && high.grade !== 'L',
+    thresholdC,
+    confidence: least ?? 'found',
+    confirmed: cells.every((cell) => cell.grade !== 'L'),
   }
+}
+
+/** A row of the table in words: "smooth metal", "ceramic, glass or stone", "metal with 50 µm lacquer". */
+export function surfaceWords(row: string): string {
+  const coat = /^(.+)-(\d+)$/.exec(row)
+  if (coat) return `metal with ${coat[2]} µm ${coat[1]}`
+  return row === 'ceramic-glass-stone' ? 'ceramic, glass or stone' : row.replace('-', ' ')
+}
+
+/** A contact time in words: "5 s", "1 min", "8 h". */
+export function contactWords(contactS: number): string {
+  if (contactS >= 3600 && contactS % 3600 === 0) return `${contactS / 3600} h`
+  if (contactS >= 60 && contactS % 60 === 0) return `${contactS / 60} min`
+  return `${contactS} s`
 }

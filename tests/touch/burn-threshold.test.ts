@@ -3,7 +3,12 @@ import fc from 'fast-check'
 import Papa from 'papaparse'
 import { describe, expect, test } from 'vitest'
 import type { BurnThreshold } from '#catalogue/types.ts'
-import { burnThreshold, type TouchedSurface } from '#touch/burn-threshold.ts'
+import {
+  burnThreshold,
+  contactWords,
+  surfaceWords,
+  type TouchedSurface,
+} from '#touch/burn-threshold.ts'
 import { type PublishedRow, published } from '../published.ts'
 
 /** The shipped rows themselves, as the catalogue is seeded with them. */
@@ -267,4 +272,26 @@ describe('every threshold', () => {
 
 test('a table without rows gives no threshold', () => {
   expect(burnThreshold([], plain('wood'), 5)).toBeNull()
+})
+
+describe('words', () => {
+  test.each([
+    [0.5, '0.5 s'],
+    [5, '5 s'],
+    [60, '1 min'],
+    [90, '90 s'],
+    [600, '10 min'],
+    [28_800, '8 h'],
+  ])('%d s of contact is said as %s', (contactS, words) => {
+    expect(contactWords(contactS)).toBe(words)
+  })
+
+  test.each([
+    ['smooth-metal', 'smooth metal'],
+    ['ceramic-glass-stone', 'ceramic, glass or stone'],
+    ['lacquer-50', 'metal with 50 µm lacquer'],
+    ['wood', 'wood'],
+  ])('the row %s is said as %s', (row, words) => {
+    expect(surfaceWords(row)).toBe(words)
+  })
 })

@@ -2,7 +2,13 @@
 import type { Finish, TouchClass } from '#catalogue/types.ts'
 import type { BurnLimit, Limits } from '#sizing/problem.ts'
 import { dewPointC } from '#solver/index.ts'
-import { burnThreshold, type TouchedSurface } from '#touch/burn-threshold.ts'
+import {
+  burnThreshold,
+  contactWords,
+  surfaceWords,
+  type Threshold,
+  type TouchedSurface,
+} from '#touch/burn-threshold.ts'
 import type { RunValues } from '../fields.ts'
 import type { Conditions } from './conditions.ts'
 import { type Findings, plain } from './findings.ts'
@@ -84,10 +90,16 @@ function resolveBurn(
   if (threshold.because !== null) {
     findings.note(
       'threshold-stricter',
-      `Touch is judged as ${threshold.surface}: ${threshold.because}.`,
+      `Touch is judged as ${surfaceWords(threshold.surface)}: ${threshold.because}.`,
     )
   }
-  const burn: BurnLimit = { thresholdC: threshold.thresholdC, contactS, surface: threshold.surface }
+  if (threshold.confidence !== 'found') {
+    findings.note(
+      'threshold-recalled',
+      `The burn threshold of ${plain(threshold.thresholdC)} °C (${surfaceWords(threshold.surface)}, ${contactWords(contactS)}) rests on figures recalled, not read: verify it against your own copy of ISO 13732-1.`,
+    )
+  }
+  const burn = burnLimit(threshold, contactS)
   if (values.thicknessM === 0) return { burn, bareBurn: burn }
   // The bare run beside a lagged one is judged as what it is, not as the jacket it does not wear.
   const wallClass = thing?.wall?.touchClass ?? 'smooth-metal'
@@ -95,13 +107,15 @@ function resolveBurn(
   const bareThreshold = burnThreshold(index.catalogue.burnThresholds, bareSurface, contactS)
   return {
     burn,
-    bareBurn: bareThreshold && {
-      thresholdC: bareThreshold.thresholdC,
-      contactS,
-      surface: bareThreshold.surface,
-    },
+    bareBurn: bareThreshold && burnLimit(bareThreshold, contactS),
   }
 }
+
+const burnLimit = ({ thresholdC, surface }: Threshold, contactS: number): BurnLimit => ({
+  thresholdC,
+  surface: surfaceWords(surface),
+  contact: contactWords(contactS),
+})
 
 function touchedSurface(
   values: RunValues,

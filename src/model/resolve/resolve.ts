@@ -50,6 +50,12 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   if (findings.issues.length > 0 || !tag || !thing || !conditions || !buildUp) {
     return { ok: false, issues: findings.issues }
   }
+  if (values.thicknessM === 0 && finish) {
+    findings.note(
+      'unused',
+      `The finish is not used for a bare run: give its emissivity as bare_emissivity if the surface is not ${thing.wall?.name.toLowerCase() ?? 'steel'} as found in service.`,
+    )
+  }
   noteConditions(
     values,
     finish,

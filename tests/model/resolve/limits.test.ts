@@ -7,15 +7,21 @@ import { problemOf } from './problem.ts'
 const { finish: _finish, ...unfinished } = steamRun
 
 describe('touch', () => {
+  test('a threshold that rests on recalled cells says so; one that was read does not', () => {
+    // Metal at 1 min is read in several texts; between 4 s and 10 s the cells are from memory (catalogue rows).
+    expect(noteCodes(problemOf({ ...steamRun, contactS: 5 }))).toContain('threshold-recalled')
+    expect(noteCodes(problemOf({ ...steamRun, contactS: 60 }))).not.toContain('threshold-recalled')
+  })
+
   test('reach defaults to yes: the class of the finish at 5 s, shown as an assumption', () => {
     const problem = problemOf(steamRun)
-    expect(problem.limits.burn).toMatchObject({ contactS: 5, surface: 'smooth-metal' })
+    expect(problem.limits.burn).toMatchObject({ contact: '5 s', surface: 'smooth metal' })
     expect(noteCodes(problem)).toContain('reach-assumed')
   })
 
   test('a contact time that is given is no assumption', () => {
     const problem = problemOf({ ...steamRun, contactS: 60 })
-    expect(problem.limits.burn?.contactS).toBe(60)
+    expect(problem.limits.burn?.contact).toBe('1 min')
     expect(problem.limits.burn?.thresholdC).toBe(51)
     expect(noteCodes(problem)).not.toContain('reach-assumed')
     expect(noteCodes(problem)).not.toContain('contact-assumed')
@@ -23,7 +29,7 @@ describe('touch', () => {
 
   test('reach yes without a contact time: 5 s, said', () => {
     const problem = problemOf({ ...steamRun, reach: true })
-    expect(problem.limits.burn?.contactS).toBe(5)
+    expect(problem.limits.burn?.contact).toBe('5 s')
     expect(noteCodes(problem)).toContain('contact-assumed')
     expect(noteCodes(problem)).not.toContain('reach-assumed')
   })
@@ -52,7 +58,7 @@ describe('touch', () => {
     const given = { ...steamRun, maxSurfaceC: 45 }
     expect(problemOf(given).limits).toMatchObject({
       maxSurfaceC: 45,
-      burn: { surface: 'smooth-metal' },
+      burn: { surface: 'smooth metal' },
     })
     expect(problemOf({ ...given, reach: false, reachReason: 'x' }).limits).toMatchObject({
       maxSurfaceC: 45,
@@ -75,14 +81,14 @@ describe('touch', () => {
 
   test('no finish: judged as smooth metal, the strictest, said', () => {
     const problem = problemOf(unfinished)
-    expect(problem.limits.burn?.surface).toBe('smooth-metal')
+    expect(problem.limits.burn?.surface).toBe('smooth metal')
     expect(noteCodes(problem)).toContain('touch-class-assumed')
   })
 
   test('coated metal of unknown or thin coating is judged as metal, said', () => {
     for (const finish of ['al_painted', 'prepainted_steel']) {
       const problem = problemOf({ ...steamRun, finish })
-      expect(problem.limits.burn?.surface).toBe('smooth-metal')
+      expect(problem.limits.burn?.surface).toBe('smooth metal')
       expect(noteCodes(problem)).toContain('threshold-stricter')
     }
   })
@@ -90,7 +96,7 @@ describe('touch', () => {
   test('the bare run is judged as its own wall, whatever the jacket is', () => {
     const { burn, bareBurn } = problemOf({ ...steamRun, finish: 'pvc_jacket' }).limits
     expect(burn?.surface).toBe('plastic')
-    expect(bareBurn?.surface).toBe('smooth-metal')
+    expect(bareBurn?.surface).toBe('smooth metal')
     expect(
       problemOf({ ...steamRun, pipeMaterial: 'pvc_u', mediumC: 50 }).limits.bareBurn?.surface,
     ).toBe('plastic')
@@ -98,7 +104,7 @@ describe('touch', () => {
 
   test('with a thickness of 0 the touched surface is the wall', () => {
     const { burn } = problemOf({ ...steamRun, finish: 'pvc_jacket', thicknessM: 0 }).limits
-    expect(burn?.surface).toBe('smooth-metal')
+    expect(burn?.surface).toBe('smooth metal')
   })
 })
 

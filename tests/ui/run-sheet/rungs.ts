@@ -14,6 +14,7 @@ export function madeRung(thicknessM: number, made: Made = {}): Rating {
     pass,
     value: pass ? 50 : 60,
     bound: 55,
+    rule: 'at most' as const,
     unit: '°C',
     condition: 'touch' as const,
     what: 'surface',

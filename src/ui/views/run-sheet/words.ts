@@ -37,14 +37,8 @@ export function limitNumber(
 }
 
 /** `at most 58.0 °C`. */
-export function boundWords(limit: LimitResult, system: UnitSystem): string {
-  return `${isCeiling(limit) ? 'at most' : 'at least'} ${limitNumber(limit.bound, limit.unit, system)}`
-}
-
-/** Whether the bound is an upper one; for service both exist, and the verdict tells which. */
-function isCeiling({ limit, pass, value, bound }: LimitResult): boolean {
-  if (limit === 'service' && value !== bound) return pass === value < bound
-  return limit !== 'damp' && limit !== 'frost' && limit !== 'code'
+export function boundWords({ rule, bound, unit }: LimitResult, system: UnitSystem): string {
+  return `${rule} ${limitNumber(bound, unit, system)}`
 }
 
 const lowerFirst = (text: string) => text.charAt(0).toLowerCase() + text.slice(1)
