@@ -49,7 +49,8 @@ export function makeHandlers(options: BackendOptions): Backend {
       const chosen = path === undefined ? await ask(dialogs).askOpen() : fullPath(path)
       return chosen === null ? null : jobs.open(chosen)
     },
-    'job.saveAs': async ({ path, overwrite }) => {
+    'job.saveAs': async ({ path, overwrite, opening }) => {
+      jobs.requireOpening(opening)
       if (path !== undefined) return jobs.saveAs(fullPath(path), overwrite)
       const chosen = await ask(dialogs).askSave(`${fileNameFor(jobs.name)}${jobEnding}`)
       if (chosen === null) return null

@@ -25,6 +25,7 @@ interface Place {
 export class OpenJobs {
   readonly #place: Place
   #file: JobFile | null = null
+  #opening = ''
 
   constructor(place: Place) {
     this.#place = place
@@ -77,7 +78,13 @@ export class OpenJobs {
   }
 
   commit(change: JobChange): Committed {
+    this.requireOpening(change.opening)
     return this.#opened().commit(change)
+  }
+
+  /** Revisions of two jobs may be equal, so only this keeps a page from writing its runs into another's job. */
+  requireOpening(opening: string | undefined): void {
+    if (opening !== undefined && opening !== this.#opening) throw new AppError({ code: 'job/left' })
   }
 
   /** The name of the open job. */
@@ -97,9 +104,11 @@ export class OpenJobs {
 
   /** The new one is open before the old one is let go: a failure leaves everything as it was. */
   #take(file: JobFile): OpenJob {
-    const shown = this.#shown(file)
+    const opening = randomUUID()
+    const shown = { ...this.#shown(file), opening }
     const old = this.#file
     this.#file = file
+    this.#opening = opening
     if (old) {
       const isUntouched = this.#isDraft(old) && old.revision === 0
       old.close()
@@ -115,6 +124,7 @@ export class OpenJobs {
       ...file.read(),
       path: isDraft ? null : file.path,
       fileName: isDraft ? null : basename(file.path),
+      opening: this.#opening,
     }
   }
 

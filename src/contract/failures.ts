@@ -15,6 +15,7 @@ export type Failure =
   | { readonly code: 'job/unreadable'; readonly path: string; readonly why: string }
   | { readonly code: 'job/in-use'; readonly path: string }
   | { readonly code: 'job/stale'; readonly found: number; readonly expected: number }
+  | { readonly code: 'job/left' }
   | { readonly code: 'job/wrong-ending'; readonly path: string }
   | {
       readonly code: 'catalogue/too-new'
@@ -48,6 +49,8 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
   'job/in-use': ({ path }) => `${path} is open in another Lagwright window. Close it there first.`,
   'job/stale': ({ found, expected }) =>
     `This window is behind its file (change ${found}, the file is at ${expected}): another window wrote to it. Reopen the job to go on.`,
+  'job/left': () =>
+    'Another window of this Lagwright has opened another job, so nothing is written to this one any more. Open this job again to go on.',
   'job/wrong-ending': ({ path }) =>
     `${path} does not end in .lagjob. Give the file a name that does.`,
   'catalogue/too-new': ({ path, found, known }) =>

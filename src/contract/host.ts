@@ -15,19 +15,25 @@ export interface OpenJob {
   readonly fileName: string | null
   /** Counts the commits written; a commit must name the revision it builds on. */
   readonly revision: number
+  /** Tells this opening of the job from any other: two pages of one host may each have opened a job. */
+  readonly opening: string
   /** What the user should know about how this job came to be open, in a sentence; absent where there is nothing. */
   readonly notice?: string
 }
+const openingSchema = z.string().max(64)
 const openJobSchema = z.strictObject({
   job: jobSchema,
   path: z.string().nullable(),
   fileName: z.string().nullable(),
   revision: z.int().min(0),
+  opening: openingSchema,
   notice: z.string().optional(),
 }) as z.ZodType<OpenJob>
 
 /** Only what changed: each committed edit is written at once, in one transaction. */
 export const jobChangeSchema = z.strictObject({
+  /** The opening that is meant; absent for whichever job is open. */
+  opening: openingSchema.optional(),
   revision: z.int().min(0),
   name: z.string().max(200).optional(),
   site: z.string().max(200).optional(),
@@ -60,7 +66,11 @@ export const hostCalls = {
   /** Without a path the desktop shell shows its dialog; null when the user turned back. */
   'job.open': call(z.strictObject({ path: pathSchema.optional() }), openJobSchema.nullable()),
   'job.saveAs': call(
-    z.strictObject({ path: pathSchema.optional(), overwrite: z.boolean() }),
+    z.strictObject({
+      path: pathSchema.optional(),
+      overwrite: z.boolean(),
+      opening: openingSchema.optional(),
+    }),
     openJobSchema.nullable(),
   ),
   'job.commit': call(jobChangeSchema, z.strictObject({ revision: z.int(), savedAt: z.string() })),

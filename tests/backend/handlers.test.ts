@@ -64,6 +64,7 @@ describe('the open job', () => {
       path: null,
       fileName: null,
       revision: 0,
+      opening: expect.any(String),
     })
     expect(drafts(folder)).toHaveLength(1)
   })
@@ -111,6 +112,30 @@ describe('the open job', () => {
       expect(current.job.name).toBe('Harrowmere Creamery')
     },
   )
+})
+
+describe('two pages on one host', () => {
+  test('a page whose job is no longer the open one neither writes into the other nor saves it as its own', async () => {
+    const folder = temporaryFolder()
+    const { handlers } = started(folder)
+    const { opening } = await handlers['job.new']({})
+    const other = await handlers['job.demo']({})
+    const path = join(folder, 'mine.lagjob')
+    expect(await codeOf(() => handlers['job.commit']({ ...edit(0), opening }))).toBe('job/left')
+    const saveAs = { path, overwrite: false, opening }
+    expect(await codeOf(() => handlers['job.saveAs'](saveAs))).toBe('job/left')
+    expect(existsSync(path)).toBe(false)
+    expect(await handlers['job.current']({})).toEqual(other)
+    expect(await handlers['job.commit']({ ...edit(0), opening: other.opening })).toMatchObject({
+      revision: 1,
+    })
+  })
+
+  test('both may show the same job', async () => {
+    const { handlers } = started(temporaryFolder())
+    const { opening } = await handlers['job.new']({})
+    expect((await handlers['job.current']({})).opening).toBe(opening)
+  })
 })
 
 describe('opening and saving', () => {

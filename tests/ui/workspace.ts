@@ -16,13 +16,16 @@ export class TestFile {
   revision = 0
   commits: JobChange[] = []
   isFull = false
+  notice: string | null = null
 
   constructor(job: Job) {
     this.job = job
   }
 
   get open(): OpenJob {
-    return { job: this.job, path: '/jobs/a.lagjob', fileName: 'a.lagjob', revision: this.revision }
+    const place = { path: '/jobs/a.lagjob', fileName: 'a.lagjob', opening: 'first' }
+    const notice = this.notice === null ? {} : { notice: this.notice }
+    return { job: this.job, revision: this.revision, ...place, ...notice }
   }
 
   commit(change: JobChange): { revision: number; savedAt: string } {
@@ -33,6 +36,7 @@ export class TestFile {
         why: 'the disk is full',
       })
     }
+    if (change.opening !== 'first') throw new AppError({ code: 'job/left' })
     if (change.revision !== this.revision) {
       throw new AppError({ code: 'job/stale', found: change.revision, expected: this.revision })
     }

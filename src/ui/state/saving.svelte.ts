@@ -14,6 +14,7 @@ export class Saving {
   readonly #current: () => Job
   #written: Job
   #revision: number
+  #opening: string
   /** The last of the work under way; new work waits for it. */
   #work: Promise<void> = Promise.resolve()
   #isQueued = false
@@ -23,6 +24,12 @@ export class Saving {
     this.#current = current
     this.#written = open.job
     this.#revision = open.revision
+    this.#opening = open.opening
+  }
+
+  /** Which opening of a job this writes to. */
+  get opening(): string {
+    return this.#opening
   }
 
   /** Whether anything is not in the file yet. */
@@ -53,6 +60,7 @@ export class Saving {
   startFrom(open: OpenJob, job: Job): void {
     this.#written = job
     this.#revision = open.revision
+    this.#opening = open.opening
     this.state = { kind: 'saved', at: null }
   }
 
@@ -66,7 +74,11 @@ export class Saving {
     }
     this.state = { kind: 'saving' }
     try {
-      const { revision, savedAt } = await this.#commit({ revision: this.#revision, ...difference })
+      const { revision, savedAt } = await this.#commit({
+        opening: this.#opening,
+        revision: this.#revision,
+        ...difference,
+      })
       this.#revision = revision
       this.#written = job
       this.state = { kind: 'saved', at: new Date(savedAt) }

@@ -157,7 +157,9 @@ export class Workspace {
   async #saveAs(path: string | undefined, overwrite: boolean): Promise<void> {
     await this.saving.settle()
     await this.saving.exclusively(async () => {
-      const open = await this.host['job.saveAs']({ ...(path !== undefined && { path }), overwrite })
+      const { opening } = this.saving
+      const place = path === undefined ? {} : { path }
+      const open = await this.host['job.saveAs']({ ...place, overwrite, opening })
       if (!open) return
       // What the host wrote is what was committed last; what could not be committed follows with the next write.
       this.saving.startFrom(open, this.saving.isBehind ? open.job : this.session.job)

@@ -7,7 +7,8 @@ import { Session } from '#ui/state/session.svelte.ts'
 import { jobOf } from '../workspace.ts'
 
 const first = jobOf([{ tag: 'A' }, { tag: 'B' }])
-const opened = (job: Job) => new Session({ job, path: null, fileName: null, revision: 0 }, () => {})
+const opened = (job: Job) =>
+  new Session({ job, path: null, fileName: null, revision: 0, opening: 'first' }, () => {})
 
 let lastId = 0
 const step = fc.oneof(
