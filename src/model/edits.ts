@@ -59,7 +59,7 @@ const handedDown = [
 ] as const satisfies readonly FieldKey[]
 
 /** A run like another one, but for what makes it this run: tag, name, size and length. */
-export function runLike(above: Run | undefined, id: string): Run {
+function runLike(above: Run | undefined, id: string): Run {
   const values = Object.fromEntries(
     handedDown.flatMap((key) =>
       above?.values[key] === undefined ? [] : [[key, above.values[key]]],

@@ -1,8 +1,8 @@
-/** A block of cells from a spreadsheet, put into the schedule. */
+/** A block of cells from a spreadsheet, put into the schedule where it is pasted. */
 import type { CellReader } from './cell-edit.ts'
-import { type CellText, type NewId, runLike, setCells } from './edits.ts'
-import { type FieldKey, fields } from './fields.ts'
-import type { Job } from './job.ts'
+import { type CellText, type NewId, setCells } from './edits.ts'
+import type { FieldKey } from './fields.ts'
+import type { Job, Run } from './job.ts'
 
 export interface Block {
   /** Runs as they stand on the screen from the anchor down; rows beyond them become new runs. */
@@ -12,29 +12,25 @@ export interface Block {
   readonly rows: readonly (readonly string[])[]
 }
 
-/**
- * Pastes a block at its anchor. If the first row names columns of ours, the block is read by these names instead,
- * wherever it is put; columns it does not name, and results, are left alone.
- */
+/** Pastes a block at its anchor. A run that is added for it has only what was pasted: nothing of the run above. */
 export function pasteBlock(job: Job, block: Block, newId: NewId, reader: CellReader): Job {
-  const named = headerKeys(block.rows[0] ?? [])
-  const keys = named ?? block.keys
-  const rows = (named ? block.rows.slice(1) : block.rows).filter((row) =>
-    row.some((cell) => cell.trim() !== ''),
+  const { runIds, keys } = block
+  // An empty line passes over its run; below the last run it makes none.
+  const rows = block.rows.filter(
+    (row, index) => index < runIds.length || row.some((cell) => cell.trim() !== ''),
   )
-  // A list pasted with its header into an empty place is a take-off of its own: what stands above has no say in it.
-  const missing = Math.max(0, rows.length - block.runIds.length)
-  const above = named ? undefined : job.runs.find((run) => run.id === block.runIds.at(-1))
-  const added = Array.from({ length: missing }, () => {
-    const run = runLike(above, newId())
-    return named?.includes('shape') ? { ...run, values: {} } : run
-  })
-  const at = job.runs.findIndex((run) => run.id === block.runIds.at(-1))
+  const shapeAt = keys.indexOf('shape')
+  const hasShape = shapeAt >= 0 && rows.some((row) => row.length > shapeAt)
+  const added = Array.from(
+    { length: Math.max(0, rows.length - runIds.length) },
+    (): Run => ({ id: newId(), values: hasShape ? {} : { shape: 'pipe' }, drafts: {} }),
+  )
+  const at = job.runs.findIndex((run) => run.id === runIds.at(-1))
   const grown =
     added.length === 0
       ? job
       : { ...job, runs: job.runs.toSpliced(at < 0 ? job.runs.length : at + 1, 0, ...added) }
-  const targets = [...block.runIds, ...added.map((run) => run.id)]
+  const targets = [...runIds, ...added.map((run) => run.id)]
   return setCells(grown, cellsOf(rows, targets, keys), reader)
 }
 
@@ -52,24 +48,3 @@ function cellsOf(
     })
   })
 }
-
-/** The fields that a header row names, or null where the row is not a header. */
-export function headerKeys(row: readonly string[]): (FieldKey | null)[] | null {
-  const keys = row.map((cell) => keyByHeader.get(normal(cell)) ?? null)
-  const found = keys.filter((key) => key !== null)
-  // One word alone may as well be a tag or a place; two that both name a column are a header.
-  const isHeader = found.length >= 2 && new Set(found).size === found.length
-  return isHeader ? keys : null
-}
-
-const normal = (header: string) =>
-  header
-    .trim()
-    .toLowerCase()
-    .replaceAll(/[\s_]+/g, ' ')
-
-/** CSV headers, and the words on the screen with their unit as copied from here. */
-const keyByHeader = new Map<string, FieldKey>([
-  ...fields.map((field) => [normal(field.label), field.key] as const).toReversed(),
-  ...fields.map((field) => [normal(field.column), field.key] as const),
-])

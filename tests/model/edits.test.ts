@@ -128,19 +128,27 @@ describe('pasteBlock', () => {
     expect(pasted.runs[2]).toMatchObject({ values: { size: 'DN 65' }, drafts: { lengthM: 'x' } })
   })
 
-  test('reads a block with a header by its names, whatever their order', () => {
+  test('an empty line of a block keeps its place, so that what follows does not move up', () => {
     const block = {
-      runIds: [],
-      keys: ['tag'] as FieldKey[],
-      rows: [
-        ['medium_c', 'Tag', 'remark'],
-        ['150', 'ST-1', 'by the door'],
-      ],
+      runIds: ['A', 'B', 'C'],
+      keys: ['lengthM'] as FieldKey[],
+      rows: [['1'], [''], ['3'], [''], ['5']],
     }
-    const pasted = pasteBlock(empty, block, counter(), columnReader)
-    expect(pasted.runs.map(({ values }) => values)).toEqual([
-      { shape: 'pipe', tag: 'ST-1', mediumC: 150 },
-    ])
+    const pasted = pasteBlock(jobOf(['A', 'B', 'C']), block, counter(), columnReader)
+    expect(pasted.runs.map(({ values }) => values.lengthM)).toEqual([1, undefined, 3, 5])
+  })
+
+  test('takes a list as long as a job may be', () => {
+    const rows = Array.from({ length: 100_000 }, (_, index) => [`T-${index}`, '12'])
+    const block = { runIds: [], keys: ['tag', 'lengthM'] as FieldKey[], rows }
+    expect(pasteBlock(empty, block, counter(), columnReader).runs).toHaveLength(100_000)
+  })
+
+  test('a run that is added takes nothing over from the one above', () => {
+    const sized = setCell(jobOf(['A']), 'A', 'airC', '35', columnReader)
+    const block = { runIds: ['A'], keys: ['lengthM'] as FieldKey[], rows: [['12'], ['14']] }
+    const pasted = pasteBlock(sized, block, counter(), columnReader)
+    expect(pasted.runs[1]?.values).toEqual({ shape: 'pipe', lengthM: 14 })
   })
 })
 

@@ -4,6 +4,7 @@ import type { Catalogue } from '#catalogue/types.ts'
 import { AppError } from '#contract/failures.ts'
 import type { Host, OpenJob, Output } from '#contract/host.ts'
 import type { CellReader } from '#model/cell-edit.ts'
+import type { UnitSystem } from '#units/quantities.ts'
 import type { WorkerLike } from '#worker/client.ts'
 import { CatalogueWords } from './catalogue-words.ts'
 import { readerFor } from './cell-text.ts'
@@ -62,6 +63,11 @@ export class Workspace {
       host['host.about']({}),
     ])
     return new Workspace(host, start, { catalogue, open, preferences, about })
+  }
+
+  /** Reads text in a unit that was named with it, or in the units shown where none was. */
+  readerIn(units: UnitSystem | 'shown'): CellReader {
+    return units === 'shown' ? this.reader : this.words.reading(readerFor(units))
   }
 
   newJob(): void {

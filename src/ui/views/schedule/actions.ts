@@ -2,10 +2,12 @@
 import { addRun, clearCells, duplicateRuns, moveRuns, removeRuns, setCell } from '#model/edits.ts'
 import type { FieldKey } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
-import { type Block, headerKeys, pasteBlock } from '#model/paste.ts'
+import { pasteBlock } from '#model/paste.ts'
+import { pasteTakeOff, type TakeOff, takeOffOf } from '#model/take-off.ts'
 import { editText } from '#ui/state/cell-text.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import { copyText, type Showing } from './cell-view.ts'
+import type { Column } from './columns.ts'
 import type { Grid } from './grid.svelte.ts'
 import { readTsv, writeTsv } from './tsv.ts'
 
@@ -95,36 +97,67 @@ function sidesText({ values: { widthM, heightM } }: Run, units: UnitSystem): str
 export function copyMarked(grid: Grid, showing: Showing): string {
   const columns = grid.markedColumns()
   const { briefs } = grid.workspace.sizing
-  return writeTsv(
+  grid.copied = writeTsv(
     grid
       .markedRuns()
       .map((run) => columns.map((column) => copyText(run, briefs.get(run.id), column, showing))),
   )
+  return grid.copied
+}
+
+/**
+ * Pastes a list with its own header as new runs, asking first what its columns are where some are not ours; anything
+ * else where the marked cells begin.
+ */
+export function pasteText(grid: Grid, text: string): void {
+  if (text.trim() === '') return
+  const rows = readTsv(text)
+  const takeOff = takeOffOf(rows)
+  if (!takeOff) pasteCells(grid, rows)
+  else if (takeOff.rows.length === 0)
+    grid.workspace.failure =
+      'Only the names of columns were pasted, so there is no run to add. Copy the lines below them as well.'
+  else if (takeOff.isKnown) addTakeOff(grid, takeOff)
+  else grid.asked = { takeOff, rows }
+}
+
+export function addTakeOff(grid: Grid, takeOff: TakeOff): void {
+  const { session } = grid.workspace
+  const before = session.job.runs.length
+  session.edit(pasteTakeOff, takeOff, newId, (units) => grid.workspace.readerIn(units))
+  const added = session.job.runs[before]
+  // A filter would hide what was added.
+  grid.filterText = ''
+  grid.onlyNeedy = false
+  if (added) grid.goToRun(added.id, 'tag')
 }
 
 /** Pastes at the top left of what is marked; one line or cell fills all lines and cells that are marked. */
-export function pasteText(grid: Grid, text: string): void {
-  if (text.trim() === '') return
+export function pasteCells(grid: Grid, pasted: Rows): void {
   const { session, reader } = grid.workspace
   const { top, left, bottom, right } = grid.extent
-  const rows = filling(readTsv(text), bottom - top + 1, right - left + 1)
-  const first = top < 0 ? [] : grid.rows.slice(top)
-  const isNamed = headerKeys(rows[0] ?? []) !== null
-  const block: Block = {
-    // A list with its own header is a take-off: it is added, never written over what stands here.
-    runIds: isNamed ? [] : first.map(({ id }) => id),
-    keys: grid.columns
-      .slice(Math.max(0, left))
-      .map((column) => (column.result ? null : column.key)),
-    rows,
-  }
-  const known = new Set(session.job.runs.map(({ id }) => id))
-  session.edit(pasteBlock, block, newId, reader)
-  const added = session.job.runs.find(({ id }) => !known.has(id))
-  if (added && isNamed) grid.goToRun(added.id, 'tag')
+  const rows = filling(pasted, bottom - top + 1, right - left + 1)
+  const runIds = top < 0 ? [] : grid.rows.slice(top).map(({ id }) => id)
+  const columns = grid.columns.slice(Math.max(0, left))
+  const keys = columns.map(({ result, key }) => (result ? null : key))
+  session.edit(pasteBlock, { runIds, keys, rows }, newId, reader)
+  grid.workspace.failure = leftOutOf(pasted, grid.copied, columns)
 }
 
-function filling(rows: string[][], height: number, width: number): string[][] {
+/** Says which cells had no column to go to; of what was copied here the results are known to stay behind. */
+function leftOutOf(pasted: Rows, copied: string, columns: readonly Column[]): string | null {
+  const width = pasted.reduce((widest, row) => Math.max(widest, row.length), 0)
+  const onResults = columns.slice(0, width).filter(({ result }) => result).length
+  const beyond = Math.max(0, width - columns.length)
+  const leftOut = beyond + (writeTsv(pasted) === copied ? 0 : onResults)
+  if (leftOut === 0) return null
+  const columnsOut = leftOut === 1 ? 'One column' : `${leftOut} columns`
+  return `${columnsOut} of what was pasted met no column that can be typed in, and ${leftOut === 1 ? 'was' : 'were'} left out. Pasted with a row of names on top, each column goes where it belongs.`
+}
+
+type Rows = readonly (readonly string[])[]
+
+function filling(rows: Rows, height: number, width: number): Rows {
   const [only] = rows
   if (rows.length !== 1 || !only || height <= 1) return rows
   const line = only.length === 1 ? Array.from({ length: width }, () => only[0] ?? '') : only

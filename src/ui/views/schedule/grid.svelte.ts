@@ -1,6 +1,7 @@
 /** Where one is in the schedule and what is marked; knows no element of the page. */
 import type { FieldKey } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
+import type { TakeOff } from '#model/take-off.ts'
 import type { Workspace } from '#ui/state/workspace.svelte.ts'
 import { type Column, type ColumnSet, columnsOf } from './columns.ts'
 import { type Item, itemsOf } from './items.ts'
@@ -34,6 +35,11 @@ export class Grid {
   panel: 'sheet' | 'inputs' = $state('sheet')
   /** The field that the form opens at. */
   wantedKey: FieldKey | null = $state(null)
+  /** A pasted list whose columns are asked for; its cells as they were pasted. */
+  asked: { readonly takeOff: TakeOff; readonly rows: readonly (readonly string[])[] } | null =
+    $state.raw(null)
+  /** What was last copied from here. */
+  copied = ''
   #activeColumnId = $state('tag')
   #anchor: Place | null = $state.raw(null)
 

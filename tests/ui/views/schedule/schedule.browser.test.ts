@@ -102,6 +102,77 @@ describe('the schedule', () => {
     expect(workspace.session.job.runs.length).toBe(3)
   })
 
+  const foreign = [
+    'Line No\tService\tPipe size\tLength (m)\tFluid temp °C\tRoom temp\tInsulation\tCladding\tLocation\tBy',
+    'L-1\tHeating\tDN 50\t12\t80\t18\tstone_wool_pipe_section\tal_plain\tRoof\tA. N.',
+    'L-2\tHeating\tDN 65\t8\t80\t18\tstone_wool_pipe_section\tal_plain\tRoof\tA. N.',
+  ].join('\n')
+
+  test('asks what the columns of a foreign list are, and adds it below what stands', async () => {
+    const { workspace } = await open(threeRuns)
+    const standing = workspace.session.job.runs
+    await userEvent.click(cell('ST-2', 'size'))
+    paste(foreign)
+    const dialog = page.getByRole('dialog', { name: 'Which column is what?' })
+    await expect.element(dialog.getByText('Left out: By')).toBeVisible()
+    await expect.element(dialog.getByText('DN 50 · DN 65')).toBeVisible()
+    await dialog.getByLabelText('Room temp is read as').selectOptions('Left out')
+    await dialog.getByLabelText('By is read as').selectOptions('Group')
+    await expect.element(dialog.getByText('Left out: Room temp')).toBeVisible()
+    expect(workspace.session.job.runs).toBe(standing)
+    await dialog.getByRole('button', { name: 'Paste 2 runs' }).click()
+    expect(workspace.session.job.runs.slice(0, 3)).toEqual(standing)
+    expect(workspace.session.job.runs.slice(3).map(({ values }) => values)).toEqual(
+      ['L-1', 'L-2'].map((tag, index) => ({
+        tag,
+        shape: 'pipe',
+        service: 'Heating',
+        size: ['DN 50', 'DN 65'][index],
+        lengthM: [12, 8][index],
+        mediumC: 80,
+        material: 'stone_wool_pipe_section',
+        finish: 'al_plain',
+        place: 'Roof',
+        group: 'A. N.',
+      })),
+    )
+    await userEvent.keyboard('{Control>}z{/Control}')
+    expect(workspace.session.job.runs).toBe(standing)
+  })
+
+  test('a foreign list can be turned back, or pasted as cells, by keyboard', async () => {
+    const { workspace } = await open(threeRuns)
+    const standing = workspace.session.job
+    await userEvent.click(cell('ST-3', 'tag'))
+    paste(foreign)
+    await expect.element(page.getByRole('dialog')).toBeVisible()
+    await userEvent.keyboard('{Escape}')
+    await expect.element(page.getByRole('dialog')).not.toBeInTheDocument()
+    expect(workspace.session.job).toBe(standing)
+  })
+
+  test('the header alone is no list, and says so', async () => {
+    const { workspace } = await open(threeRuns)
+    await userEvent.click(cell('ST-3', 'tag'))
+    const standing = workspace.session.job
+    paste('tag\tsize\tlength_m')
+    await expect.element(page.getByText('Only the names of columns were pasted')).toBeVisible()
+    expect(workspace.session.job).toBe(standing)
+  })
+
+  test('names what met no column to go to; results copied from here stay behind unsaid', async () => {
+    const { workspace } = await open(threeRuns)
+    await userEvent.click(cell('ST-3', 'mediumC'))
+    paste('80\tYard\t40\t12')
+    await expect.element(page.getByText('2 columns of what was pasted')).toBeVisible()
+    await userEvent.keyboard('{Shift>} {/Shift}')
+    const line = copied()
+    await userEvent.click(cell('ST-1', 'tag'))
+    paste(line)
+    await expect.element(page.getByText('of what was pasted')).not.toBeInTheDocument()
+    expect(workspace.session.job.runs[0]?.values).toMatchObject({ tag: 'ST-3', mediumC: 80 })
+  })
+
   test('one cell pasted fills all that are marked; Delete empties them', async () => {
     const { workspace } = await open(threeRuns)
     await userEvent.click(cell('ST-1', 'lengthM'))
