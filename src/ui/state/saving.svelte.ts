@@ -39,7 +39,11 @@ export class Saving {
 
   /** The job may have changed: write what is new. After a failure this is also the next try. */
   kick(): void {
-    if (this.#isQueued || !this.isBehind) return
+    if (this.#isQueued) return
+    if (!this.isBehind) {
+      this.#forgetFailure()
+      return
+    }
     this.#isQueued = true
     this.#enqueue(() => this.#write()).catch(() => {})
   }
@@ -70,6 +74,7 @@ export class Saving {
     const difference = diffJob(this.#written, job)
     if (!difference) {
       this.#written = job
+      this.#forgetFailure()
       return
     }
     this.state = { kind: 'saving' }
@@ -89,6 +94,11 @@ export class Saving {
         sentence: error instanceof Error ? error.message : String(error),
       }
     }
+  }
+
+  /** Undo may take back what could not be written: then the file holds all there is. */
+  #forgetFailure(): void {
+    if (this.state.kind === 'failed') this.state = { kind: 'saved', at: null }
   }
 
   #enqueue<T>(act: () => Promise<T>): Promise<T> {

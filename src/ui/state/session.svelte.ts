@@ -3,8 +3,8 @@ import type { OpenJob } from '#contract/host.ts'
 import type { Job, Run } from '#model/job.ts'
 import { History } from './history.svelte.ts'
 
-/** What changed: the job, or only which of its runs is the active one. */
-export type Changed = 'job' | 'active run'
+/** What changed: the job, which job it is, or only which of its runs is the active one. */
+export type Changed = 'job' | 'other job' | 'active run'
 
 type Change<A extends readonly unknown[]> = (job: Job, ...args: A) => Job
 
@@ -71,7 +71,7 @@ export class Session {
   /** Another job takes the place of this one; its history begins anew. */
   replace(open: OpenJob): void {
     this.#take(open)
-    this.#changed('job')
+    this.#changed('other job')
   }
 
   /** The same job, in another file. */

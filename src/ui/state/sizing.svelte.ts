@@ -46,6 +46,15 @@ export class Sizing {
     return this.#sheet
   }
 
+  /** Another job follows. Its runs may go by the same names, as in a copy of this one. */
+  forget(): void {
+    this.#briefs.clear()
+    this.#unsound.clear()
+    this.#sheet = null
+    this.#asked = null
+    this.#client.size([], {})
+  }
+
   /** Tells what the job and the active run are now. */
   update(job: Job, active: Run | null): void {
     this.#doubled = doubledTags(job.runs)

@@ -52,6 +52,7 @@ export class Workspace {
     this.sizing = new Sizing(start, read.catalogue)
     this.session = new Session(read.open, (what) => this.#changed(what))
     this.saving = new Saving(host['job.commit'], read.open, () => this.session.job)
+    this.failure = read.open.notice ?? null
     this.#changed('job')
   }
 
@@ -136,6 +137,7 @@ export class Workspace {
       this.sizing.look(job, activeRun)
       return
     }
+    if (what === 'other job') this.sizing.forget()
     this.sizing.update(job, activeRun)
     this.saving.kick()
   }

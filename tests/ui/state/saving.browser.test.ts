@@ -50,6 +50,17 @@ describe('Saving', () => {
     await expect.poll(() => workspace.session.job.runs.length).toBe(0)
   })
 
+  test('is saved again once undo has taken back what could not be written', async () => {
+    const file = new TestFile(jobOf([{ tag: 'A' }]))
+    const { session, saving } = await startWorkspace(file)
+    file.isFull = true
+    session.edit(setJobName, 'too much')
+    await saving.settle()
+    session.undo()
+    expect(await saving.settle()).toBe(true)
+    expect(saving.state.kind).toBe('saved')
+  })
+
   test('undo is written like any edit', async () => {
     const first = jobOf([{ tag: 'A' }])
     const file = new TestFile(first)
@@ -59,5 +70,23 @@ describe('Saving', () => {
     session.undo()
     await saving.settle()
     expect(file.job).toEqual(first)
+  })
+})
+
+describe('the workspace', () => {
+  test('says what the host has to say about how the job came to be open', async () => {
+    const file = new TestFile(jobOf([]))
+    file.notice = 'The last job is damaged. A new job was started instead.'
+    expect((await startWorkspace(file)).failure).toBe(file.notice)
+  })
+
+  test('shows no answer of the job before, though its copy has the same runs', async () => {
+    const file = new TestFile(jobOf([{ tag: 'A', shape: 'pipe' }]))
+    const workspace = await startWorkspace(file)
+    const { sizing } = workspace
+    await expect.poll(() => sizing.briefs.size).toBe(1)
+    workspace.session.replace({ ...file.open, job: jobOf([{ tag: 'B', shape: 'pipe' }]) })
+    expect(sizing.briefs.size).toBe(0)
+    await expect.poll(() => sizing.briefs.size).toBe(1)
   })
 })
