@@ -4,7 +4,7 @@ import type Database from 'better-sqlite3'
 import type { z } from 'zod'
 import { AppError } from '#contract/failures.ts'
 import type { JobChange } from '#contract/host.ts'
-import { type Job, jobSchema, type Run, runSchema } from '#model/job.ts'
+import { type Job, jobSchema, maxRuns, type Run, runSchema } from '#model/job.ts'
 
 interface JobRow {
   readonly name: string
@@ -145,6 +145,7 @@ export function writeChange(
     put(run, position)
     next.set(run.id, position)
   }
+  if (next.size > maxRuns) throw new AppError({ code: 'job/too-many-runs', max: maxRuns })
   if (change.order) reorder(db, change.order, next)
   return next
 }

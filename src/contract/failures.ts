@@ -16,6 +16,7 @@ export type Failure =
   | { readonly code: 'job/in-use'; readonly path: string }
   | { readonly code: 'job/stale'; readonly found: number; readonly expected: number }
   | { readonly code: 'job/left' }
+  | { readonly code: 'job/too-many-runs'; readonly max: number }
   | { readonly code: 'job/wrong-ending'; readonly path: string }
   | {
       readonly code: 'catalogue/too-new'
@@ -51,6 +52,8 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
     `This window is behind its file (change ${found}, the file is at ${expected}): another window wrote to it. Reopen the job to go on.`,
   'job/left': () =>
     'Another window of this Lagwright has opened another job, so nothing is written to this one any more. Open this job again to go on.',
+  'job/too-many-runs': ({ max }) =>
+    `A job holds at most ${max} runs. Take back what was added last, and put it in a job of its own.`,
   'job/wrong-ending': ({ path }) =>
     `${path} does not end in .lagjob. Give the file a name that does.`,
   'catalogue/too-new': ({ path, found, known }) =>

@@ -2,7 +2,7 @@
 import '#model/zod-settings.ts'
 import { z } from 'zod'
 import type { Catalogue } from '#catalogue/types.ts'
-import { type Job, jobSchema, runSchema, runValuesSchema } from '#model/job.ts'
+import { type Job, jobSchema, maxRuns, runSchema, runValuesSchema } from '#model/job.ts'
 
 const call = <I extends z.ZodType, O extends z.ZodType>(input: I, output: O) => ({ input, output })
 
@@ -38,10 +38,10 @@ export const jobChangeSchema = z.strictObject({
   name: z.string().max(200).optional(),
   site: z.string().max(200).optional(),
   defaults: runValuesSchema.optional(),
-  putRuns: z.array(runSchema).max(100_000),
-  removeRuns: z.array(z.string().max(64)).max(100_000),
+  putRuns: z.array(runSchema).max(maxRuns),
+  removeRuns: z.array(z.string().max(64)).max(maxRuns),
   /** Ids of all runs in their new order; absent where the order did not change. */
-  order: z.array(z.string().max(64)).max(100_000).optional(),
+  order: z.array(z.string().max(64)).max(maxRuns).optional(),
 })
 export type JobChange = z.output<typeof jobChangeSchema>
 

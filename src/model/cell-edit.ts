@@ -59,9 +59,12 @@ function withSize(run: Run, typed: string, sideM: number): Run | null {
   return {
     ...run,
     values: { ...values, shape, widthM, heightM },
-    drafts: without(run.drafts, 'size'),
+    drafts: settledBySides.reduce(without, run.drafts),
   }
 }
+
+/** What two sides typed as a size leave nothing to mend in. */
+const settledBySides: readonly FieldKey[] = ['size', 'shape', 'widthM', 'heightM']
 
 /** Twelve digits, so that 600 mm is 0.6 m and not a hair less. */
 const decimal = (text: string, unitM: number) => Number((Number(text) * unitM).toPrecision(12))

@@ -40,9 +40,16 @@ export interface Job {
   readonly runs: readonly Run[]
 }
 
+/** More than any list of runs; what a file holds must be readable in one piece. */
+export const maxRuns = 100_000
+
 const idSchema = z.string().min(1).max(64)
+const fieldKeys: ReadonlySet<string> = new Set(fields.map((field) => field.key))
 const draftsSchema = z
-  .record(z.string().max(40), z.string().max(2000))
+  .record(
+    z.string().refine((key) => keys.has(key)),
+    z.string().max(2000),
+  )
   .transform((drafts) => drafts as Run['drafts'])
 
 export const runSchema = z.strictObject({
@@ -55,5 +62,5 @@ export const jobSchema = z.strictObject({
   name: z.string().max(200),
   site: z.string().max(200),
   defaults: runValuesSchema,
-  runs: z.array(runSchema).max(100_000),
+  runs: z.array(runSchema).max(maxRuns),
 }) as z.ZodType<Job>

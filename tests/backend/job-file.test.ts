@@ -41,6 +41,16 @@ function failureOf(act: () => unknown): Failure {
 }
 const opening = (path: string) => failureOf(() => JobFile.open(path, dbFolder))
 
+test('a job takes no more runs than can be read back in one piece', () => {
+  const file = created(join(quickFolder(), 'long.lagjob'))
+  const runs = (from: number) =>
+    Array.from({ length: 60_000 }, (_, index) => sampleRun(from + index))
+  file.commit({ revision: 0, putRuns: runs(1000), removeRuns: [] })
+  const more = { revision: 1, putRuns: runs(100_000), removeRuns: [] }
+  expect(failureOf(() => file.commit(more))).toEqual({ code: 'job/too-many-runs', max: 100_000 })
+  expect(file.revision).toBe(1)
+})
+
 describe('round trip', () => {
   test('what was written is read', () => {
     const path = join(temporaryFolder(), 'a.lagjob')

@@ -84,6 +84,11 @@ describe('setCell', () => {
     const duct = setCell(job, 'A', 'size', '600 x 400', columnReader).runs[0]
     expect(duct?.values).toEqual({ tag: 'A', shape: 'rect-duct', widthM: 0.6, heightM: 0.4 })
   })
+
+  test('two sides typed as a size mend what was wrong with either', () => {
+    const spoilt = setCell(job, 'A', 'widthM', 'wide', columnReader)
+    expect(setCell(spoilt, 'A', 'size', '600 x 400', columnReader).runs[0]?.drafts).toEqual({})
+  })
 })
 
 describe('runs', () => {
@@ -99,7 +104,7 @@ describe('runs', () => {
     expect(added?.values).toEqual({ shape: 'pipe', mediumC: 150 })
   })
 
-  test('copies stand below their originals under the next free tag', () => {
+  test('copies stand below the last of their originals under the next free tag', () => {
     const job = jobOf(['ST-101', 'ST-102', 'Valve'])
     const copied = duplicateRuns(job, new Set(['ST-101', 'Valve']), counter())
     expect(tagsOf(copied)).toEqual(['ST-101', 'ST-103', 'ST-102', 'Valve', 'Valve 2'])
@@ -150,6 +155,11 @@ describe('pasteBlock', () => {
     const pasted = pasteBlock(sized, block, counter(), columnReader)
     expect(pasted.runs[1]?.values).toEqual({ shape: 'pipe', lengthM: 14 })
   })
+})
+
+test('what was typed into no cell of ours is no part of a job', () => {
+  const run = { id: 'A', values: {}, drafts: { colour: 'red' } }
+  expect(jobSchema.safeParse({ ...empty, runs: [run] }).success).toBe(false)
 })
 
 /** Any edit, on whatever job there is. */
