@@ -75,17 +75,18 @@ export function addRun(job: Job, id: string, belowId: string | null): Job {
   return { ...job, runs: job.runs.toSpliced(place, 0, runLike(job.runs[place - 1], id)) }
 }
 
-/** Copies runs, each below its original, with the next free tag. */
+/** Copies runs, in the order they have, to below the last of them, each with the next free tag. */
 export function duplicateRuns(job: Job, ids: ReadonlySet<string>, newId: NewId): Job {
-  if (!job.runs.some((run) => ids.has(run.id))) return job
+  const last = job.runs.findLastIndex((run) => ids.has(run.id))
+  if (last < 0) return job
   const nextTag = tagGiver(job.runs)
-  const runs = job.runs.flatMap((run) => {
-    if (!ids.has(run.id)) return [run]
+  const copies = job.runs.flatMap((run) => {
+    if (!ids.has(run.id)) return []
     const { tag } = run.values
-    if (tag === undefined) return [run, { ...run, id: newId() }]
-    return [run, { ...run, id: newId(), values: { ...run.values, tag: nextTag(tag) } }]
+    const values = tag === undefined ? run.values : { ...run.values, tag: nextTag(tag) }
+    return [{ ...run, id: newId(), values }]
   })
-  return { ...job, runs }
+  return { ...job, runs: [...job.runs.slice(0, last + 1), ...copies, ...job.runs.slice(last + 1)] }
 }
 
 export function removeRuns(job: Job, ids: ReadonlySet<string>): Job {

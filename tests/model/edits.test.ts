@@ -107,7 +107,7 @@ describe('runs', () => {
   test('copies stand below the last of their originals under the next free tag', () => {
     const job = jobOf(['ST-101', 'ST-102', 'Valve'])
     const copied = duplicateRuns(job, new Set(['ST-101', 'Valve']), counter())
-    expect(tagsOf(copied)).toEqual(['ST-101', 'ST-103', 'ST-102', 'Valve', 'Valve 2'])
+    expect(tagsOf(copied)).toEqual(['ST-101', 'ST-102', 'Valve', 'ST-103', 'Valve 2'])
   })
 
   test('moved runs keep their order', () => {

@@ -51,6 +51,29 @@ describe('the form of a run', () => {
       .toBeVisible()
   })
 
+  test('a change is made in all runs that are marked, and the form says so', async () => {
+    const { session, form } = await openForm([
+      run,
+      { ...run, tag: 'ST-2' },
+      { ...run, tag: 'ST-3' },
+    ])
+    await page.getByRole('gridcell', { name: 'ST-1' }).click()
+    await userEvent.keyboard('{Shift>}{ArrowDown}{/Shift}')
+    await expect.element(page.getByText('2 runs are marked.')).toBeVisible()
+    await expect.element(page.getByRole('button', { name: 'Duplicate 2 runs' })).toBeVisible()
+    const before = session.job
+    await form.getByLabelText('Medium °C').fill('90')
+    // Leaving the field by a click that unmarks them does not change what was meant.
+    await page.getByRole('gridcell', { name: 'ST-2' }).click()
+    expect(session.job.runs.map(({ values }) => values.mediumC)).toEqual([90, 90, 150])
+    session.undo()
+    expect(session.job).toBe(before)
+    await userEvent.keyboard('{Shift>}{ArrowDown}{/Shift}')
+    await form.getByLabelText('Tag').fill('ST-9')
+    await userEvent.tab()
+    expect(session.job.runs.map(({ values }) => values.tag)).toEqual(['ST-1', 'ST-2', 'ST-9'])
+  })
+
   test('what is typed stays with its run when another one is pointed at', async () => {
     const { session, form } = await openForm([run, { ...run, tag: 'ST-2', mediumC: 90 }])
     const medium = form.getByLabelText('Medium °C')

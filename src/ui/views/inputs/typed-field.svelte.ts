@@ -5,6 +5,8 @@ const restMs = 200
 export interface FieldLink {
   /** The text that belongs to the value held. */
   readonly standing: () => string
+  /** The first character is typed: what it belongs to is settled now. */
+  readonly open: () => void
   readonly isValid: (text: string) => boolean
   readonly commit: (text: string) => void
   /** The field was left: what was typed is one step. */
@@ -27,7 +29,10 @@ export class TypedField {
   }
 
   type(text: string): void {
-    if (this.#typed === null) this.#taken = this.#link.standing()
+    if (this.#typed === null) {
+      this.#link.open()
+      this.#taken = this.#link.standing()
+    }
     this.#typed = text
     clearTimeout(this.#timer)
     // Half a number is no mistake yet.
