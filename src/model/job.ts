@@ -47,7 +47,7 @@ const idSchema = z.string().min(1).max(64)
 const fieldKeys: ReadonlySet<string> = new Set(fields.map((field) => field.key))
 const draftsSchema = z
   .record(
-    z.string().refine((key) => keys.has(key)),
+    z.string().refine((key) => fieldKeys.has(key)),
     z.string().max(2000),
   )
   .transform((drafts) => drafts as Run['drafts'])
