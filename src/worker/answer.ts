@@ -2,7 +2,7 @@
 import type { RunValues } from '#model/fields.ts'
 import { briefOf } from '#model/run-brief.ts'
 import { type CatalogueIndex, detailRun, indexCatalogue, sizeRun } from '#model/size-run.ts'
-import type { RunOutcome } from '#sizing/result.ts'
+import type { RunDetail, RunOutcome } from '#sizing/result.ts'
 import type { Answer, Request, Sheet } from './protocol.ts'
 
 /** An answering machine with its own memory of the catalogue. */
@@ -36,7 +36,16 @@ export function answer(
 
 function sheetOf(values: RunValues, defaults: RunValues, index: CatalogueIndex): Sheet {
   const outcome = safely(values, defaults, index)
-  return { outcome, detail: outcome.ok ? detailRun(values, defaults, index) : null }
+  return { outcome, detail: outcome.ok ? detailOf(values, defaults, index) : null }
+}
+
+/** A bug in what is shown besides must not cost the answer, nor the worker. */
+function detailOf(values: RunValues, defaults: RunValues, index: CatalogueIndex): RunDetail | null {
+  try {
+    return detailRun(values, defaults, index)
+  } catch {
+    return null
+  }
 }
 
 /** One run that trips a bug must not take the other ten thousand with it. */

@@ -39,3 +39,16 @@ test('one run that trips a bug does not take the others with it', () => {
   expect(briefs.get('spoilt')).toMatchObject({ ok: false })
   expect(briefs.get('good')).toMatchObject({ ok: true })
 })
+
+test('a run sheet is given though its details trip a bug', () => {
+  // The first reading is that of the answer itself, the second that of the details.
+  let reads = 0
+  const spoilt = new Proxy(steamRun, {
+    ownKeys(values) {
+      if (++reads > 1) throw new Error('bug')
+      return Reflect.ownKeys(values)
+    },
+  })
+  const reply = answer({ kind: 'sheet', ticket: 4, values: spoilt, defaults: {} }, index)
+  expect(reply).toMatchObject({ kind: 'sheet', sheet: { outcome: { ok: true }, detail: null } })
+})
