@@ -73,7 +73,8 @@ export function startEditing(grid: Grid, typed?: string): void {
 export function commitEditing(grid: Grid, text: string): void {
   const { editing } = grid
   grid.editing = null
-  const run = grid.rows.find(({ id }) => id === editing?.runId)
+  // Among all runs: a filter may have hidden this one while it was typed in.
+  const run = grid.workspace.session.job.runs.find(({ id }) => id === editing?.runId)
   if (!editing || !run || text === standingText(grid, run, editing.key)) return
   grid.workspace.session.edit(setCell, run.id, editing.key, text, grid.workspace.reader)
 }

@@ -75,6 +75,18 @@ describe('the schedule', () => {
     expect(workspace.session.job).toBe(before)
   })
 
+  test('an open cell that is scrolled out of sight keeps what was typed', async () => {
+    const { workspace } = await open(
+      Array.from({ length: 300 }, (_, index) => ({ ...steam, tag: `ST-${index}` })),
+    )
+    await userEvent.click(cell('ST-0', 'lengthM'))
+    await userEvent.keyboard('99')
+    const view = document.querySelector('.view.grid')
+    view?.scrollTo(0, 6000)
+    await expect.poll(() => document.body.textContent.includes('ST-200')).toBe(true)
+    expect(workspace.session.job.runs[0]?.values.lengthM).toBe(99)
+  })
+
   test('keeps what was typed into a cell that cannot be that, and says what can', async () => {
     const { workspace } = await open(threeRuns)
     await userEvent.click(cell('ST-2', 'mediumC'))
