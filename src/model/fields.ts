@@ -98,7 +98,7 @@ export const fields = [
   choice('orientation', 'orientation', 'Lies', orientations),
   number('riseM', 'rise_m', 'Rise', 'length', 0.05, 500),
 
-  choice('medium', 'medium', 'Medium', media),
+  choice('medium', 'medium', 'What flows', media),
   number('mediumC', 'medium_c', 'Medium', 'temperature', -200, 1000),
   number('mediumMaxC', 'medium_max_c', 'Medium, hottest', 'temperature', -200, 1000),
   number('mediumMinC', 'medium_min_c', 'Medium, coldest', 'temperature', -200, 1000),

@@ -7,8 +7,9 @@ export interface Summary {
   /** Runs that have an answer already. */
   readonly sized: number
   readonly lengthM: number
-  readonly bareLossW: number
-  readonly laggedLossW: number
+  /** Null where nothing is sized yet. */
+  readonly bareLossW: number | null
+  readonly laggedLossW: number | null
   /** One sum per currency, since they do not add up. */
   readonly installed: ReadonlyMap<string, number>
   /** Of the runs with a price, in one currency; null where nothing is saved, or currencies are mixed. */
@@ -19,9 +20,8 @@ export interface Summary {
 
 export function summarise(runs: readonly Run[], briefs: ReadonlyMap<string, RunBrief>): Summary {
   const installed = new Map<string, number>()
-  let [sized, lengthM, bareLossW, laggedLossW, savingPerYear, failing, heeding] = [
-    0, 0, 0, 0, 0, 0, 0,
-  ]
+  let [sized, lengthM, savingPerYear, failing, heeding] = [0, 0, 0, 0, 0]
+  let [bareLossW, laggedLossW]: [number | null, number | null] = [null, null]
   for (const run of runs) {
     lengthM += run.values.lengthM ?? 0
     const brief = briefs.get(run.id)
@@ -31,8 +31,8 @@ export function summarise(runs: readonly Run[], briefs: ReadonlyMap<string, RunB
     if (brief.state === 'heed') heeding++
     if (!brief.ok || brief.bareLossW === null || brief.laggedLossW === null) continue
     // Heat lost and heat gained both cost money: cold runs count with their size, not their sign.
-    bareLossW += Math.abs(brief.bareLossW)
-    laggedLossW += Math.abs(brief.laggedLossW)
+    bareLossW = (bareLossW ?? 0) + Math.abs(brief.bareLossW)
+    laggedLossW = (laggedLossW ?? 0) + Math.abs(brief.laggedLossW)
     if (brief.currency === null || brief.installedTotal === null) continue
     installed.set(brief.currency, (installed.get(brief.currency) ?? 0) + brief.installedTotal)
     savingPerYear += brief.savingPerYearTotal ?? 0

@@ -1,4 +1,5 @@
 /** Names for ids of the catalogue, both ways: cells show names and keep ids. */
+import { bareName } from '#catalogue/nearest.ts'
 import type { Catalogue } from '#catalogue/types.ts'
 import type { CellReader } from '#model/cell-edit.ts'
 import type { FieldKey, RunValues } from '#model/fields.ts'
@@ -13,8 +14,7 @@ interface Named {
 export class CatalogueWords {
   readonly #catalogue: Catalogue
   readonly #lists: ReadonlyMap<FieldKey, readonly Named[]>
-  readonly #nameById = new Map<FieldKey, ReadonlyMap<string, string>>()
-  readonly #idByName = new Map<FieldKey, ReadonlyMap<string, string>>()
+  readonly #meant = new Map<FieldKey, ReadonlyMap<string, Named>>()
 
   constructor(catalogue: Catalogue) {
     this.#catalogue = catalogue
@@ -25,8 +25,14 @@ export class CatalogueWords {
       ['pipeMaterial', catalogue.wallMaterials.map((row) => ({ ...row, family: '' }))],
     ])
     for (const [key, list] of this.#lists) {
-      this.#nameById.set(key, new Map(list.map(({ id, name }) => [id, name])))
-      this.#idByName.set(key, new Map(list.map(({ id, name }) => [name.toLowerCase(), id])))
+      // As the catalogue is searched: without regard to case, spaces and joining marks.
+      this.#meant.set(
+        key,
+        new Map([
+          ...list.map((row) => [bareName(row.name), row] as const),
+          ...list.map((row) => [bareName(row.id), row] as const),
+        ]),
+      )
     }
   }
 
@@ -40,12 +46,12 @@ export class CatalogueWords {
   }
 
   nameOf(key: FieldKey, value: string): string {
-    return this.#nameById.get(key)?.get(value) ?? value
+    return this.#meant.get(key)?.get(bareName(value))?.name ?? value
   }
 
-  /** The id of a name, or the text itself where no name is like it. */
+  /** The id of what is named, or the text itself where no row is called so. */
   idOf(key: FieldKey, text: string): string {
-    return this.#idByName.get(key)?.get(text.trim().toLowerCase()) ?? text
+    return this.#meant.get(key)?.get(bareName(text))?.id ?? text
   }
 
   /** Sizes that can be bought for the shape of a run. */

@@ -74,6 +74,14 @@ describe('cost', () => {
     expect(ys.indexOf(Math.max(...ys))).toBe(4)
   })
 
+  test('stays in its frame, however dear the thickest rung is', () => {
+    const dear = [...ladder.slice(0, -1), madeRung(0.1, { lifeCycle: 2000 })]
+    const { cost, top, costBottom } = draw([4], dear)
+    const points = cost ? [...cost.total, ...cost.lagging, ...cost.heat] : []
+    expect(points.length).toBeGreaterThan(0)
+    expect(points.every(({ y }) => y >= top && y <= costBottom)).toBe(true)
+  })
+
   test('is left out unless every rung has one', () => {
     expect(draw([4], [...ladder.slice(1), madeRung(0.12)]).cost).toBeNull()
   })

@@ -28,10 +28,11 @@ const limit = (change: Partial<LimitResult>): LimitResult => ({
 
 describe('bounds', () => {
   test.each<[Partial<LimitResult>, string]>([
-    [{}, 'at most 58.0\u00a0°C'],
+    [{}, 'at most 58\u00a0°C'],
     [{ rule: 'below', bound: 57.3 }, 'below 57.3\u00a0°C'],
-    [{ limit: 'damp', rule: 'at least', bound: 20 }, 'at least 20.0\u00a0°C'],
-    [{ limit: 'service', rule: 'at least', bound: -50 }, 'at least \u221250.0\u00a0°C'],
+    [{ limit: 'damp', rule: 'at least', bound: 20 }, 'at least 20\u00a0°C'],
+    [{ limit: 'service', rule: 'at least', bound: -50 }, 'at least \u221250\u00a0°C'],
+    [{ bound: 57.6 }, 'at most 57.6\u00a0°C'],
     [{ limit: 'loss', unit: 'W/m', bound: 22 }, 'at most 22.0\u00a0W/m'],
   ])('%o reads %s', (change, words) => {
     expect(boundWords(limit(change), 'si')).toBe(words)

@@ -42,8 +42,8 @@ export const groups: readonly FieldGroup[] = [
   },
   {
     title: 'Limits',
-    usual: ['reach', 'reachReason', 'maxSurfaceC', 'maxLossWPerM', 'maxLossWPerM2'],
-    more: ['contactS', 'touchClass', 'dewMarginK'],
+    usual: ['reach', 'reachReason', 'contactS', 'maxSurfaceC', 'maxLossWPerM', 'maxLossWPerM2'],
+    more: ['touchClass', 'dewMarginK'],
   },
   {
     title: 'Money',

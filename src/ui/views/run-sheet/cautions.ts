@@ -8,7 +8,7 @@ export function limitCautions(values: RunValues, result: RunResult): string[] {
   return [
     ...(judged.has('touch')
       ? [
-          'Burn thresholds are for a brief touch of a small area of healthy skin. Where children, the public or older people can reach it, ask for a longer contact time.',
+          'Burn thresholds are for a brief touch of a small area of healthy skin. Where children, the public or older people can reach it, take a contact time of 60 s or more in the inputs. In doubt the safety officer and the labour inspectorate decide.',
         ]
       : []),
     ...(judged.has('damp')

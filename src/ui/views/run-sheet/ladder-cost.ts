@@ -1,8 +1,6 @@
 /** Pixels of the cost above the ladder: what it costs to own each rung, and its two parts. */
 import type { Rating } from '#sizing/result.ts'
 
-/** The dearest rung shown: beyond this many times the cheapest the curve leaves through the top. */
-const COST_REACH = 2.2
 /** Room one name needs below the next. */
 const NAME_STEP = 13
 
@@ -25,10 +23,10 @@ interface Field {
   readonly height: number
 }
 
-/** From nought upwards, so that a flat curve looks flat. */
+/** From nought upwards, so that a flat curve looks flat, to the dearest rung, so that none leaves the drawing. */
 export function drawCost(ladder: readonly Rating[], { x, top, height }: Field): DrawnCost {
   const totals = ladder.map((rung) => rung.money?.lifeCycle ?? 0)
-  const reach = Math.max(1e-9, Math.min(Math.max(...totals), Math.min(...totals) * COST_REACH))
+  const reach = Math.max(1e-9, ...totals)
   const line = (cost: (rung: Rating) => number) =>
     ladder.map((rung) => ({
       x: x(rung.thicknessM),

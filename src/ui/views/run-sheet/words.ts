@@ -36,9 +36,10 @@ export function limitNumber(
     : `${formatNumber(value, decimals ?? 2)} ${unit}`.trim()
 }
 
-/** `at most 58.0 °C`. */
+/** `at most 57.6 °C`, and `at most 650 °C`: a bound that somebody wrote down as a whole number is said as one. */
 export function boundWords({ rule, bound, unit }: LimitResult, system: UnitSystem): string {
-  return `${rule} ${limitNumber(bound, unit, system)}`
+  const decimals = unit === '°C' && wholeDegrees(bound, system) === 0 ? 0 : undefined
+  return `${rule} ${limitNumber(bound, unit, system, decimals)}`
 }
 
 const lowerFirst = (text: string) => text.charAt(0).toLowerCase() + text.slice(1)
@@ -73,11 +74,16 @@ export function piecesWords({ piecesM, nominalThicknessM }: Rating, system: Unit
 /** Decimals for a temperature that somebody chose: none where it is a whole number. */
 export function wholeDegrees(tempC: number, system: UnitSystem): number {
   const shown = shownValue(tempC, 'temperature', system) ?? 0
-  return Math.abs(shown - Math.round(shown)) < 0.05 ? 0 : 1
+  return Math.abs(shown - Math.round(shown)) < 1e-6 ? 0 : 1
 }
 
 /** Without noughts behind the point: sizes are names rather than results. */
 const trimmed = (text: string) => text.replace(/\.0+$/, '')
+
+/** The currency that was said; the shipped prices are in none, which the catalogue calls "units". */
+export function currencyWord(currency: string | undefined): string {
+  return currency === undefined || currency === 'units' ? '' : currency
+}
 
 /** What flows: `steam 7 bar g`, `water`; nothing where it is not said. */
 export function mediumWord({ medium, pressureGaugePa }: RunValues, system: UnitSystem): string {

@@ -7,7 +7,7 @@ import { governingWords } from '#report/run-words.ts'
 import type { Issue } from '#sizing/result.ts'
 import type { CatalogueWords } from '#ui/state/catalogue-words.ts'
 import { editText, readText } from '#ui/state/cell-text.ts'
-import { ABSENT, formatQuantity } from '#units/format.ts'
+import { ABSENT, formatQuantity, thicknessDecimals } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import type { Column } from './columns.ts'
 import { issueSentence, shownIssues } from './issue-words.ts'
@@ -105,7 +105,12 @@ function resultText(brief: RunBrief | undefined, column: Column, { units }: Show
     case 'lagging':
       return brief.thicknessM === 0
         ? ABSENT
-        : formatQuantity(brief.nominalThicknessM ?? brief.thicknessM, 'thickness', units)
+        : formatQuantity(
+            brief.thicknessM,
+            'thickness',
+            units,
+            thicknessDecimals([brief.thicknessM], units),
+          )
     case 'loss':
       return formatQuantity(brief.heatLossWPerM, 'heatLossPerLength', units)
     case 'surface':

@@ -30,13 +30,13 @@ interface Placed {
 const sets: { readonly [S in ColumnSet]: readonly Placed[] } = {
   sized: [
     { key: 'tag', widthPx: 86 },
-    { key: 'description', widthPx: 150 },
+    { key: 'description', widthPx: 110 },
     { key: 'size', widthPx: 106 },
     { key: 'lengthM', widthPx: 64, fromPx: 700 },
-    { key: 'mediumC', widthPx: 80 },
+    { key: 'mediumC', widthPx: 80, fromPx: 540 },
     { key: 'place', widthPx: 104, fromPx: 830 },
     { key: 'lagging', widthPx: 70 },
-    { key: 'loss', widthPx: 68 },
+    { key: 'loss', widthPx: 68, fromPx: 620 },
     { key: 'surface', widthPx: 68, fromPx: 690 },
     { key: 'governed', widthPx: 104 },
   ],
@@ -77,7 +77,7 @@ function column(key: FieldKey | ResultName, widthPx: number, system: UnitSystem)
   switch (key) {
     // Typing a thickness fixes it.
     case 'lagging':
-      return result(key, 'Lagging', unitLabel('thickness', system), widthPx, 'thicknessM')
+      return result(key, 'Thickness', unitLabel('thickness', system), widthPx, 'thicknessM')
     case 'loss':
       return result(key, 'Loss', unitLabel('heatLossPerLength', system), widthPx)
     case 'surface':

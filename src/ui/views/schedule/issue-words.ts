@@ -14,6 +14,21 @@ export function issueSentence(issue: Issue): string {
   return stopped(`${found} does not fit. Allowed: ${cure}`)
 }
 
+/** How much is to be done: "1 value to mend, 3 to give". */
+export function toDoWords(issues: readonly Issue[]): string {
+  const give = issues.filter(isMissing).length
+  const mend = issues.length - give
+  const parts = [
+    ...(mend > 0 ? [{ count: mend, act: 'to mend' }] : []),
+    ...(give > 0 ? [{ count: give, act: 'to give' }] : []),
+  ]
+  return parts
+    .map(({ count, act }, at) =>
+      at > 0 ? `${count} ${act}` : `${count} ${count === 1 ? 'value' : 'values'} ${act}`,
+    )
+    .join(', ')
+}
+
 /** The issues of a run in the window's words; of what was typed and is no value, in the units it is typed in. */
 export function shownIssues(
   run: Run,

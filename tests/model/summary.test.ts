@@ -1,0 +1,13 @@
+import { expect, test } from 'vitest'
+import { summarise } from '#model/summary.ts'
+
+test('a job in which nothing is sized has no loss, rather than a loss of nought', () => {
+  const runs = [{ id: 'A', values: { lengthM: 12 }, drafts: {} }]
+  expect(summarise(runs, new Map())).toMatchObject({
+    runs: 1,
+    sized: 0,
+    lengthM: 12,
+    bareLossW: null,
+    laggedLossW: null,
+  })
+})
