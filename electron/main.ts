@@ -17,8 +17,14 @@ const folder = dataFolder()
 app.setPath('userData', join(folder, 'shell'))
 declareScheme()
 // Never awaited at the top level: Electron sends `ready` only once this module has run.
-if (app.requestSingleInstanceLock()) void app.whenReady().then(start)
+if (app.requestSingleInstanceLock()) void app.whenReady().then(start).catch(giveUp)
 else app.quit()
+
+/** A shell that cannot start ends with an error, so that `npm start` goes on to the browser. */
+function giveUp(error: unknown): void {
+  console.error(`Lagwright cannot start its window: ${String(error)}`)
+  app.exit(1)
+}
 
 async function start(): Promise<void> {
   mkdirSync(folder, { recursive: true })

@@ -102,8 +102,8 @@ function isNumberColumn(rows: TakeOff['rows'], index: number): boolean {
 }
 
 /** Two columns cannot be the same value: one of ours comes before a guess, the first before the next. */
-function oneOfEach(header: readonly string[], width: number): readonly (ReadAs | null)[] {
-  const cells = Array.from({ length: width }, (_, index) => header[index] ?? '')
+function oneOfEach(header: readonly string[], columns: number): readonly (ReadAs | null)[] {
+  const cells = Array.from({ length: columns }, (_, index) => header[index] ?? '')
   const claims = cells.map((cell) => ({
     isOurs: knownColumn(cell) !== null,
     as: guessColumn(cell),
