@@ -19,7 +19,7 @@ import type {
   WallMaterial,
 } from './types.ts'
 
-/** Either the thing, with what a reader should know about the choice, or a sentence of what is allowed. */
+/** Either the thing, with what a reader should know about the choice, or what is allowed, to be read after "allowed:". */
 export type Lookup<T> =
   | { readonly ok: true; readonly item: T; readonly notes: readonly string[] }
   | { readonly ok: false; readonly message: string }
@@ -37,9 +37,7 @@ const missed = (message: string): { readonly ok: false; readonly message: string
 export function findPipeSize(catalogue: Catalogue, text: string): Lookup<PipeSize> {
   const asked = readPipeText(text)
   if (!asked)
-    return missed(
-      `"${shown(text)}" is not a pipe size. Write DN 50, NPS 2, NPS 1-1/2 sch 80 or CU 28, or leave the size empty and give od_mm.`,
-    )
+    return missed('a size such as DN 50, NPS 2, NPS 1-1/2 sch 80 or CU 28, or no size and an od_mm')
   switch (asked.kind) {
     case 'dn':
       return findDn(catalogue, asked)
@@ -86,7 +84,7 @@ function findNps({ pipeSizes }: Catalogue, asked: Asked<'nps'>): Lookup<PipeSize
   const size = ofSize.find((pipe) => pipe.series === series)
   if (!size)
     return missed(
-      `NPS ${npsText(npsIn)} has no ${series} in ${standard}. It has ${ofSize.map((pipe) => pipe.series).join(', ')}.`,
+      `a schedule that ${standard} has for NPS ${npsText(npsIn)}: ${listed(ofSize.map((pipe) => pipe.series))}`,
     )
   return schedule === null && series === 'STD'
     ? found(size, `${size.label} without a schedule: standard wall (STD), ${mm(size.wallM)} mm.`)
@@ -113,7 +111,7 @@ function findCopper({ pipeSizes }: Catalogue, asked: Asked<'cu'>): Lookup<PipeSi
     return size
       ? found(size)
       : missed(
-          `CU ${asked.outerDiameterMm} comes with a wall of ${ofSize.map((pipe) => mm(pipe.wallM)).join(' or ')} mm, not ${asked.wallMm} mm.`,
+          `CU ${asked.outerDiameterMm} with a wall of ${listed(ofSize.map((pipe) => String(mm(pipe.wallM))))} mm`,
         )
   }
   if (thicker.length === 0) return found(thinnest)
@@ -136,7 +134,7 @@ export function findDuctSize(catalogue: Catalogue, text: string): Lookup<DuctDim
   const asked = readDuctText(text)
   if (!asked)
     return missed(
-      `"${shown(text)}" is not a duct size. Write D 250 for a round duct, 600 x 400 (width x height in mm) for a rectangular one.`,
+      'a size such as D 250 for a round duct, or 600 x 400 (width x height in mm) for a rectangular one',
     )
   if (asked.kind === 'round') {
     const { diameterMm } = asked
@@ -150,14 +148,12 @@ export function findDuctSize(catalogue: Catalogue, text: string): Lookup<DuctDim
             diameterMm,
             numbers(sizes, (duct) => (duct.diameterM === null ? null : mm(duct.diameterM))),
             String,
-          )} For another diameter leave the size empty and give od_mm.`,
+          )}; for another diameter no size and an od_mm`,
         )
   }
   const { widthMm, heightMm } = asked
   if (Math.min(widthMm, heightMm) < 10 || Math.max(widthMm, heightMm) > 50_000)
-    return missed(
-      `A duct of ${widthMm} x ${heightMm} mm is outside what is calculated: sides from 10 to 50000 mm.`,
-    )
+    return missed('sides from 10 to 50000 mm')
   const dimensions = {
     label: `${widthMm}x${heightMm}`,
     diameterM: null,
@@ -196,22 +192,20 @@ function findNamed<T extends Named>(rows: readonly T[], what: string, text: stri
   const ids = rows.filter((row) => close.includes(row.id) || close.includes(row.name))
   const hint =
     ids.length > 0
-      ? `Did you mean ${listed(ids.slice(0, 3).map((row) => row.id))}?`
-      : `Known are ${rows.map((row) => row.id).join(', ')}.`
-  return missed(`"${shown(text)}" is not ${what}. ${hint}`)
+      ? `did you mean ${listed(ids.slice(0, 3).map((row) => row.id))}?`
+      : `known are ${rows.map((row) => row.id).join(', ')}`
+  return missed(`${what}; ${hint}`)
 }
 
 const listed = (names: readonly string[]): string =>
   names.length > 1 ? `${names.slice(0, -1).join(', ')} or ${names.at(-1)}` : (names[0] ?? '')
-
-const shown = (text: string): string => (text.length > 60 ? `${text.slice(0, 60)}…` : text)
 
 const atmospherePa = 101_325
 const zeroCelsiusK = 273.15
 
 export type Saturation =
   | { readonly ok: true; readonly temperatureC: number }
-  /** A sentence of what is allowed. */
+  /** What is allowed. */
   | { readonly ok: false; readonly message: string }
 
 /**
@@ -232,7 +226,7 @@ export function saturationTemperatureC(
   // The gauge form of a tabulated pressure may miss the end of the table by a rounding.
   if (upper && upper.pressureAbsolutePa - pressurePa < 1e-6 * pressurePa)
     return { ok: true, temperatureC: upper.temperatureC }
-  if (!upper || !lower) return { ok: false, message: outOfRange(steam, gaugePressurePa) }
+  if (!upper || !lower) return { ok: false, message: outOfRange(steam) }
   const share =
     Math.log(pressurePa / lower.pressureAbsolutePa) /
     Math.log(upper.pressureAbsolutePa / lower.pressureAbsolutePa)
@@ -241,11 +235,8 @@ export function saturationTemperatureC(
   return { ok: true, temperatureC: 1 / inverseK - zeroCelsiusK }
 }
 
-function outOfRange(steam: readonly SteamState[], gaugePressurePa: number): string {
+function outOfRange(steam: readonly SteamState[]): string {
   const gaugeBar = (state: SteamState | undefined) =>
     state ? ((state.pressureAbsolutePa - atmospherePa) / 1e5).toFixed(2) : 'nothing'
-  const found = Number.isFinite(gaugePressurePa)
-    ? `${(gaugePressurePa / 1e5).toFixed(2)} bar gauge`
-    : 'this pressure'
-  return `There is no saturated steam at ${found} in the catalogue: its steam table goes from ${gaugeBar(steam[0])} to ${gaugeBar(steam.at(-1))} bar gauge. Give medium_c instead.`
+  return `a pressure from ${gaugeBar(steam[0])} to ${gaugeBar(steam.at(-1))} bar gauge, which is what the steam table of the catalogue covers, or medium_c instead`
 }

@@ -86,7 +86,7 @@ function scheduleName(text: string): string {
   return /^\d/.test(text) ? `Sch ${text.toUpperCase()}` : text.toUpperCase()
 }
 
-/** What to say where a system lacks a size: the nearest ones and all of them. */
+/** What a system allows where it lacks a size: the nearest ones and all of them. */
 export function noSize(
   system: string,
   value: number,
@@ -94,7 +94,7 @@ export function noSize(
   text: (size: number) => string,
 ): string {
   const near = neighbours(value, sizes).map((size) => `${system} ${text(size)}`)
-  return `There is no ${system} ${text(value)}. The nearest ${near.length > 1 ? 'are' : 'is'} ${near.join(' and ')}; the sizes are ${system} ${sizes.map(text).join(', ')}.`
+  return `${system === 'NPS' ? 'an' : 'a'} ${system} of the table; the nearest ${near.length > 1 ? 'are' : 'is'} ${near.join(' and ')}, all of them ${sizes.map(text).join(', ')}`
 }
 
 /** Rising, each once. */

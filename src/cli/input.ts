@@ -2,23 +2,41 @@
 import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { JobFile } from '#backend/job-file.ts'
-import type { RunValues } from '#model/fields.ts'
+import type { FieldKey, RunValues } from '#model/fields.ts'
 import type { Job } from '#model/job.ts'
 import { doubledTags, localIssues } from '#model/local-issues.ts'
-import { parseRunsCsv, sentence } from '#report/runs-csv.ts'
+import { parseRunsCsv, type ReadList, sentence } from '#report/runs-csv.ts'
 import type { Issue } from '#sizing/result.ts'
 import { isJobPath } from './arguments.ts'
 import { fullPath, programFolder } from './place.ts'
 
 export interface InputRun {
+  /** Its row in a list; its place in a job. */
+  readonly at: number
   readonly values: RunValues
+  /** Fields whose problem is known already. */
+  readonly faulty: ReadonlySet<FieldKey>
   /** A problem of this run as a line of text. */
   readonly problem: (issue: Issue) => string
 }
 
-export type Input =
-  | { readonly ok: true; readonly runs: readonly InputRun[]; readonly defaults: RunValues }
-  | Refused
+/** A problem as a line of text, and where it belongs among the others. */
+export interface Problem {
+  readonly at: number
+  readonly text: string
+}
+
+export interface ReadInput {
+  readonly ok: true
+  readonly runs: readonly InputRun[]
+  readonly defaults: RunValues
+  /** Of a list; a job has none. */
+  readonly header: ReadList['header'] | null
+  /** What could not be read; the runs are read as far as they could be. */
+  readonly problems: readonly Problem[]
+}
+
+export type Input = ReadInput | Refused
 export interface Refused {
   readonly ok: false
   readonly problems: readonly string[]
@@ -40,27 +58,34 @@ export function readJobDefaults(
 
 function listInput(source: Uint8Array): Input {
   const read = parseRunsCsv(source)
-  if (!read.ok) return refused(read.issues.map(sentence))
-  const runs = read.runs.map((values, index) => ({
+  const runs = read.list.rows.map(({ row, values, faulty }) => ({
+    at: row,
     values,
-    problem: (issue: Issue) => sentence({ row: read.lines[index] ?? 0, ...issue }),
+    faulty,
+    problem: (issue: Issue) => sentence({ row, ...issue }),
   }))
-  return { ok: true, runs, defaults: {} }
+  const issues = read.ok ? [] : read.issues
+  const problems = issues.map((issue) => ({ at: issue.row, text: sentence(issue) }))
+  return { ok: true, runs, defaults: {}, header: read.list.header, problems }
 }
 
 function jobInput(path: string): Input {
   const job = readJob(path)
   if (typeof job === 'string') return refused([job])
   if (job.runs.length === 0) return refused([`${path}: found no runs; allowed: a job with runs`])
-  const runs = job.runs.map(({ values }, index) => ({
-    values,
-    problem: (issue: Issue) => jobSentence(index, values, issue),
-  }))
   const doubled = doubledTags(job.runs)
-  const problems = job.runs.flatMap((run, index) =>
-    localIssues(run, doubled).map((issue) => jobSentence(index, run.values, issue)),
-  )
-  return problems.length > 0 ? refused(problems) : { ok: true, runs, defaults: job.defaults }
+  const problems: Problem[] = []
+  const runs = job.runs.map((run, at) => {
+    const problem = (issue: Issue) => jobSentence(at, run.values, issue)
+    for (const issue of localIssues(run, doubled)) problems.push({ at, text: problem(issue) })
+    return {
+      at,
+      values: run.values,
+      faulty: new Set(Object.keys(run.drafts) as FieldKey[]),
+      problem,
+    }
+  })
+  return { ok: true, runs, defaults: job.defaults, header: null, problems }
 }
 
 function jobSentence(index: number, { tag }: RunValues, { column, found, allowed }: Issue): string {

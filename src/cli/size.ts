@@ -1,12 +1,15 @@
 /** The command `size`: a list of runs in, sized runs out. Nothing is written unless every run can be read. */
+import { indexCatalogue } from '#model/size-run.ts'
 import { cautions } from '#report/cautions.ts'
 import { writeResultsCsv } from '#report/results-csv.ts'
 import { countWords, writeRunTable } from '#report/run-table.ts'
 import type { SizedRun } from '#report/run-words.ts'
 import type { OutFormat, SizeRequest } from './arguments.ts'
+import { openedCatalogue } from './catalogue.ts'
 import { readInput, readJobDefaults } from './input.ts'
 import { fullPath } from './place.ts'
 import { print } from './print.ts'
+import { allProblems } from './run-problems.ts'
 import { SizedList } from './sized-list.ts'
 import { whyNotWrite, writeWhole } from './write-file.ts'
 
@@ -20,15 +23,16 @@ export async function size(request: SizeRequest): Promise<SizeOutcome> {
   const input = await readInput(request.input)
   const job =
     request.job === null ? { ok: true as const, defaults: {} } : readJobDefaults(request.job)
-  const problems = [
-    ...outProblems(request),
-    ...(input.ok ? [] : input.problems),
-    ...(job.ok ? [] : job.problems),
-  ]
-  if (!input.ok || !job.ok) return { end: 'badInput', problems }
-  const list = new SizedList(input.runs, { ...job.defaults, ...input.defaults })
-  const all = problems.concat(list.problems())
-  if (all.length > 0) return { end: 'badInput', problems: all }
+  const out = outProblems(request)
+  if (!input.ok || !job.ok) {
+    const ofInput = input.ok ? input.problems.map(({ text }) => text) : input.problems
+    return { end: 'badInput', problems: [...out, ...ofInput, ...(job.ok ? [] : job.problems)] }
+  }
+  const index = indexCatalogue(openedCatalogue())
+  const defaults = { ...job.defaults, ...input.defaults }
+  const problems = [...out, ...allProblems(input, defaults, index)]
+  if (problems.length > 0) return { end: 'badInput', problems }
+  const list = new SizedList(input.runs, defaults, index)
   const notWritten = await deliver(list, request)
   if (notWritten) return { end: 'badInput', problems: [notWritten] }
   return { end: list.failing.size === 0 ? 'done' : 'unmet', problems: [] }

@@ -1,9 +1,7 @@
 /** Runs that are sized as they are asked for: the results of a long list do not fit into memory at once. */
 import type { RunValues } from '#model/fields.ts'
-import { resolve } from '#model/resolve/resolve.ts'
-import { indexCatalogue, sizeRun, withDefaults } from '#model/size-run.ts'
+import { type CatalogueIndex, sizeRun, withDefaults } from '#model/size-run.ts'
 import { meetsLimits, type SizedRun } from '#report/run-words.ts'
-import { openedCatalogue } from './catalogue.ts'
 import type { InputRun } from './input.ts'
 
 export class SizedList implements Iterable<SizedRun> {
@@ -11,23 +9,16 @@ export class SizedList implements Iterable<SizedRun> {
   readonly failing = new Set<string>()
   readonly #runs: readonly InputRun[]
   readonly #defaults: RunValues
-  readonly #index = indexCatalogue(openedCatalogue())
+  readonly #index: CatalogueIndex
 
-  constructor(runs: readonly InputRun[], defaults: RunValues) {
+  constructor(runs: readonly InputRun[], defaults: RunValues, index: CatalogueIndex) {
     this.#runs = runs
     this.#defaults = defaults
+    this.#index = index
   }
 
   get size(): number {
     return this.#runs.length
-  }
-
-  /** Everything that keeps a run from being sized; found without sizing any. */
-  problems(): readonly string[] {
-    return this.#runs.flatMap(({ values, problem }) => {
-      const resolved = resolve(withDefaults(values, this.#defaults), this.#index)
-      return resolved.ok ? [] : resolved.issues.map(problem)
-    })
   }
 
   *[Symbol.iterator](): Iterator<SizedRun> {

@@ -1,29 +1,56 @@
 /** A list of runs as CSV, in and out. Reading finds everything that is wrong at once and never throws. */
 import Papa from 'papaparse'
 import { type CellOptions, formatCell, parseCell, quote } from '#model/cell.ts'
-import { couldBeThousands, readDecimal } from '#model/decimal.ts'
-import { fields, type RunValues } from '#model/fields.ts'
+import { type FieldKey, fields, type RunValues } from '#model/fields.ts'
 import { type Column, columns, columnsToCome, nearestColumn } from './csv-columns.ts'
 import type { CsvIssue } from './csv-issue.ts'
+import { cellOptions } from './csv-numbers.ts'
 import { type CsvRow, type CsvTable, readCsvTable } from './csv-table.ts'
 import { guardFormula, unguardFormula } from './csv-text.ts'
 
 export { type CsvIssue, sentence } from './csv-issue.ts'
 
 export type RunsCsv =
-  /** `lines`: the row of each run, the header being row 1. */
-  | { readonly ok: true; readonly runs: readonly RunValues[]; readonly lines: readonly number[] }
-  | { readonly ok: false; readonly issues: readonly CsvIssue[] }
+  | { readonly ok: true; readonly runs: readonly RunValues[]; readonly list: ReadList }
+  /** `list`: what could be read all the same, so that its own faults are found too. */
+  | { readonly ok: false; readonly issues: readonly CsvIssue[]; readonly list: ReadList }
+
+/** The rows of a list as far as they could be read. */
+export interface ReadList {
+  readonly header: {
+    readonly row: number
+    readonly keys: ReadonlySet<FieldKey>
+    /** Whether every column is read; one that is not may hold what a run seems to lack. */
+    readonly isWhole: boolean
+  }
+  readonly rows: readonly ReadRow[]
+}
+export interface ReadRow {
+  /** As a spreadsheet counts, the first row being 1. */
+  readonly row: number
+  readonly values: RunValues
+  /** Fields that have their issue already. */
+  readonly faulty: ReadonlySet<FieldKey>
+}
 
 export function parseRunsCsv(source: string | Uint8Array): RunsCsv {
   const table = readCsvTable(source)
-  if (!table.ok) return table
+  if (!table.ok) return { ...table, list: emptyList }
   const header = readHeader(table.header, table.rows)
   const body = readRows(table, header.columns)
+  const keys = header.columns.flatMap((column) => (column ? [column.field.key as FieldKey] : []))
+  const isWhole = header.issues.length === 0
+  const list: ReadList = {
+    header: { row: table.header.row, keys: new Set(keys), isWhole },
+    // Where quotes do not pair up, what stands in the cells is anybody's guess.
+    rows: table.issues.length === 0 ? body.rows : [],
+  }
   const issues = [...table.issues, ...header.issues, ...body.issues]
-  if (issues.length > 0) return { ok: false, issues: issues.sort((a, b) => a.row - b.row) }
-  return { ok: true, runs: body.runs, lines: table.rows.map(({ row }) => row) }
+  if (issues.length > 0) return { ok: false, issues: issues.sort((a, b) => a.row - b.row), list }
+  return { ok: true, runs: body.rows.map(({ values }) => values), list }
 }
+
+const emptyList: ReadList = { header: { row: 1, keys: new Set(), isWhole: false }, rows: [] }
 
 /** The runs as CSV with the columns in use; `parseRunsCsv` gives the same runs back. */
 export function writeRunsCsv(runs: readonly RunValues[]): string {
@@ -93,27 +120,30 @@ function readRows(table: Table, header: Header['columns']) {
   const issues: CsvIssue[] = []
   const options = cellOptions(table, header)
   const tags = new Map<string, number>()
-  const runs = table.rows.map(({ row, cells }) => {
+  const rows = table.rows.flatMap(({ row, cells }): ReadRow[] => {
     const width = widthIssue(cells, header)
     if (width) {
       issues.push({ row, column: '', ...width })
-      return {}
+      return []
     }
     const run = readRun(cells, header, options)
     for (const issue of run.issues) issues.push({ row, ...issue })
-    const tag = tagIssue(run.values, run.issues, header, tags, row)
+    const tag = tagIssue(run.values, run.faulty, header, tags, row)
     if (tag) issues.push({ row, column: 'tag', ...tag })
-    return run.values
+    // Where there is no tag, the reader has said so: of the row, or of the header.
+    if (run.values.tag === undefined) run.faulty.add('tag')
+    return [{ row, values: run.values, faulty: run.faulty }]
   })
-  if (runs.length === 0) {
+  if (table.rows.length === 0) {
     const allowed = 'a row for every run below the header'
     issues.push({ row: 0, column: '', found: 'no runs', allowed })
   }
-  return { runs, issues }
+  return { rows, issues }
 }
 
 function readRun(cells: readonly string[], header: Header['columns'], options: CellOptions) {
   const issues: Omit<CsvIssue, 'row'>[] = []
+  const faulty = new Set<FieldKey>()
   const values: Record<string, unknown> = {}
   header.forEach((column, index) => {
     if (!column) return
@@ -121,10 +151,12 @@ function readRun(cells: readonly string[], header: Header['columns'], options: C
     const { field, twin } = column
     const plain = field.kind === 'text' ? unguardFormula(text.trim()) : text
     const cell = parseCell(field, plain, { ...options, twin })
-    if (!cell.ok) issues.push({ column: column.header, found: cell.found, allowed: cell.allowed })
-    else if (cell.value !== undefined) values[field.key] = cell.value
+    if (!cell.ok) {
+      issues.push({ column: column.header, found: cell.found, allowed: cell.allowed })
+      faulty.add(field.key as FieldKey)
+    } else if (cell.value !== undefined) values[field.key] = cell.value
   })
-  return { values: values as RunValues, issues }
+  return { values: values as RunValues, issues, faulty }
 }
 
 /** More cells than the header is fine while they are empty, as some spreadsheets write them; fewer is a torn row. */
@@ -138,13 +170,13 @@ const count = (number: number, noun: string) => `${number} ${noun}${number === 1
 
 function tagIssue(
   values: RunValues,
-  issues: readonly Omit<CsvIssue, 'row'>[],
+  faulty: ReadonlySet<FieldKey>,
   header: Header['columns'],
   tags: Map<string, number>,
   row: number,
 ) {
   const hasColumn = header.some((column) => column?.field.key === 'tag')
-  if (!hasColumn || issues.some(({ column }) => column === 'tag')) return null
+  if (!hasColumn || faulty.has('tag')) return null
   if (values.tag === undefined)
     return { found: 'nothing', allowed: 'a tag of its own for every run' }
   const before = tags.get(values.tag)
@@ -156,32 +188,4 @@ function tagIssue(
     found: `${quote(values.tag)}, as in row ${before}`,
     allowed: 'a tag of its own for every run',
   }
-}
-
-/** How numbers are written in this file. A mark is in doubt where the file shows the other one parting decimals. */
-function cellOptions({ separator, rows }: Table, header: Header['columns']): CellOptions {
-  if (separator === ',') return { decimalComma: false }
-  const seen = decimalMarks(rows, header)
-  const doubtfulMarks = [
-    ...(seen.comma ? (['.'] as const) : []),
-    ...(seen.point ? ([','] as const) : []),
-  ]
-  return { decimalComma: true, doubtfulMarks }
-}
-
-function decimalMarks(rows: readonly CsvRow[], header: Header['columns']) {
-  const seen = { comma: false, point: false }
-  for (const { cells } of rows) {
-    header.forEach((column, index) => {
-      const text = cells[index] ?? ''
-      if (column?.field.kind !== 'number') return
-      if (text.includes(',') && isDecimal(text, ',')) seen.comma = true
-      if (text.includes('.') && isDecimal(text, '.')) seen.point = true
-    })
-  }
-  return seen
-}
-
-function isDecimal(text: string, mark: '.' | ','): boolean {
-  return !couldBeThousands(text, mark) && readDecimal(text, { decimalComma: mark === ',' }) !== null
 }

@@ -73,15 +73,15 @@ describe('pipe sizes', () => {
   })
 
   test.each([
-    ['DN 55', 'There is no DN 55. The nearest are DN 50 and DN 65; the sizes are DN 6, 8, '],
-    ['DN 700', 'There is no DN 700. The nearest is DN 600;'],
-    ['NPS 1.75', 'There is no NPS 1-3/4. The nearest are NPS 1-1/2 and NPS 2;'],
-    ['NPS 2 sch 81', 'NPS 2 has no Sch 81 in ASME B36.10M. It has Sch 5, Sch 10, '],
-    ['CU 29', 'There is no CU 29. The nearest are CU 28 and CU 35;'],
-    ['CU 28 x 2', 'CU 28 comes with a wall of 0.9 or 1.5 mm, not 2 mm.'],
-    ['two inch', '"two inch" is not a pipe size. Write DN 50, NPS 2, '],
-    ['NPS 2 thick', '"NPS 2 thick" is not a pipe size.'],
-    ['', '"" is not a pipe size.'],
+    ['DN 55', 'a DN of the table; the nearest are DN 50 and DN 65, all of them 6, 8, '],
+    ['DN 700', 'a DN of the table; the nearest is DN 600,'],
+    ['NPS 1.75', 'an NPS of the table; the nearest are NPS 1-1/2 and NPS 2,'],
+    ['NPS 2 sch 81', 'a schedule that ASME B36.10M has for NPS 2: Sch 5, Sch 10, '],
+    ['CU 29', 'a CU of the table; the nearest are CU 28 and CU 35,'],
+    ['CU 28 x 2', 'CU 28 with a wall of 0.9 or 1.5 mm'],
+    ['two inch', 'a size such as DN 50, NPS 2, '],
+    ['NPS 2 thick', 'a size such as DN 50, '],
+    ['', 'a size such as DN 50, '],
   ])('%s is refused with what is allowed', (text, start) => {
     const said = message(findPipeSize(catalogue, text))
     expect(said.slice(0, start.length)).toBe(start)
@@ -132,7 +132,7 @@ describe('duct sizes', () => {
       '610 x 400 mm is not a size of EN 1505; taken as given.',
     ])
     expect(message(findDuctSize(catalogue, 'D 260'))).toMatch(
-      /^There is no D 260\. The nearest are D 250 and D 300;.*give od_mm\.$/,
+      /^a D of the table; the nearest are D 250 and D 300, .* no size and an od_mm$/,
     )
     expect(message(findDuctSize(catalogue, '2 x 400'))).toContain('sides from 10 to 50000 mm')
   })
@@ -160,20 +160,18 @@ describe('names', () => {
     ['mineral wool', ['stone_wool']],
   ])('%s suggests what is meant', (text, parts) => {
     const said = message(findMaterial(catalogue, text))
-    expect(said.startsWith(`"${text}" is not a material of the catalogue. Did you mean `)).toBe(
-      true,
-    )
+    expect(said).toMatch(/^a material of the catalogue; did you mean .*\?$/)
     for (const part of parts) expect(said).toContain(part)
   })
 
   test('where nothing comes close, all that is known is listed', () => {
     const said = message(findFuel(catalogue, 'qqqqqqq'))
     expect(said).toBe(
-      `"qqqqqqq" is not a fuel of the catalogue. Known are ${catalogue.fuels.map(({ id }) => id).join(', ')}.`,
+      `a fuel of the catalogue; known are ${catalogue.fuels.map(({ id }) => id).join(', ')}`,
     )
   })
 
-  test('a pasted page is answered in one short sentence', () => {
+  test('a pasted page is answered in a few words', () => {
     const said = message(findMaterial(catalogue, 'wool '.repeat(2000)))
     expect(said.length).toBeLessThan(2000)
   })
@@ -238,7 +236,7 @@ describe('saturated steam', () => {
     (gaugePa) => {
       const saturation = saturationTemperatureC(steam, gaugePa)
       expect(saturation.ok ? '' : saturation.message).toMatch(
-        /goes from -0\.96 to 218\.99 bar gauge\. Give medium_c instead\.$/,
+        /^a pressure from -0\.96 to 218\.99 bar gauge, .* or medium_c instead$/,
       )
     },
   )

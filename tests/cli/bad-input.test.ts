@@ -9,7 +9,7 @@ const run = (tag: string, ...cells: readonly string[]) => [tag, 'pipe', ...cells
 const badLists: readonly (readonly [
   name: string,
   list: string | Uint8Array,
-  problems: readonly string[],
+  problems: readonly unknown[],
 ])[] = [
   [
     'an empty file',
@@ -27,8 +27,47 @@ const badLists: readonly (readonly [
     [
       'row 2, column medium_c: found "hot"; allowed: a number from -200 to 1000 °C',
       'row 2, column max_loss_w_m: found "1e999"; allowed: a number from 0.01 to 1000000 W/m',
+      expect.stringMatching(/^row 2, column material: found x; allowed: a material of/),
       'row 3, column air_c: found "NaN"; allowed: a number from -70 to 200 °C',
       'row 3, column tag: found "A", as in row 2; allowed: a tag of its own for every run',
+      expect.stringMatching(/^row 3, column material: found x; allowed: a material of/),
+    ],
+  ],
+  [
+    'cells, names and values that do not go together, each in another row',
+    `${sized}\n${run('A', 'DN 50', '80', '20', 'eps', '1e999')}\n${run('B', 'DN 81', '80', '20', 'nope', '5')}\n${run('C', 'DN 80', '', '20', 'eps', '5')}\n${run('D', 'DN 80', '80', 'x', 'eps', '5')}\n`,
+    [
+      'row 2, column max_loss_w_m: found "1e999"; allowed: a number from 0.01 to 1000000 W/m',
+      expect.stringMatching(/^row 3, column size: found DN 81; allowed: a DN of the table; /),
+      expect.stringMatching(/^row 3, column material: found nope; allowed: a material of /),
+      'row 4, column medium_c: found nothing; allowed: the temperature of the medium in °C, or pressure_bar_g if it is saturated steam',
+      'row 5, column air_c: found "x"; allowed: a number from -70 to 200 °C',
+    ],
+  ],
+  [
+    'columns that every run lacks',
+    'tag,length_m\nA,3\nB,4\n',
+    [
+      'row 1, column shape: found no such column; allowed: pipe, round-duct, rect-duct or flat',
+      'row 1, column medium_c: found no such column; allowed: the temperature of the medium in °C, or pressure_bar_g if it is saturated steam',
+      'row 1, column air_c: found no such column; allowed: the temperature of the air around the run in °C',
+      'row 1, column material: found no such column; allowed: a material of the catalogue, conductivity_w_mk, layers, or thickness_mm 0 for a bare run',
+    ],
+  ],
+  [
+    'a column that one run lacks',
+    'tag,shape,size,pressure_bar_g,air_c,material,max_loss_w_m\nA,pipe,DN 50,5,20,eps,20\nB,pipe,DN 50,,20,eps,20\n',
+    [
+      'row 3, column medium_c: found nothing; allowed: the temperature of the medium in °C, or pressure_bar_g if it is saturated steam',
+    ],
+  ],
+  [
+    'what a cell that cannot be read may have been meant for',
+    'tag,shape,od_mm,air_c,pressure_bar_g,thickness_mm\nA,pipe,wide,20,high,none\n',
+    [
+      'row 2, column od_mm: found "wide"; allowed: a number from 1 to 20000 mm',
+      'row 2, column pressure_bar_g: found "high"; allowed: a number from -0.95 to 217 bar g',
+      expect.stringMatching(/^row 2, column thickness_mm: found "none"; allowed: a number/),
     ],
   ],
   [
@@ -42,7 +81,7 @@ const badLists: readonly (readonly [
   ],
   [
     'choices to come',
-    'tag,shape,orientation\nA,sphere,inclined\n',
+    'tag,shape,orientation,medium_c,air_c,material\nA,sphere,inclined,80,20,eps\n',
     [
       'row 2, column shape: found "sphere"; allowed: one of pipe, round-duct, rect-duct, flat (sphere is not yet supported)',
       'row 2, column orientation: found "inclined"; allowed: one of horizontal, vertical, up, down (inclined is not yet supported)',

@@ -37,11 +37,15 @@ describe('lagwright size with a job', slow, () => {
     const runs = [
       { id: '1', values: { tag: 'J-1', size: 'DN 50', mediumC: 80 }, drafts: { lengthM: 'long' } },
       { id: '2', values: { tag: 'J-2', size: 'DN 50' }, drafts: { mediumC: 'hot' } },
+      { id: '3', values: { tag: 'J-3', size: 'DN 81', mediumC: 80 }, drafts: {} },
     ]
     const { code, out, err } = await lagwright('size', keep(folder, runs))
     expect(err).toEqual([
       'run 1 (J-1), column length_m: found "long"; allowed: a number from 0 to 1000000 m',
       'run 2 (J-2), column medium_c: found "hot"; allowed: a number from -200 to 1000 °C',
+      expect.stringMatching(
+        /^run 3 \(J-3\), column size: found DN 81; allowed: a DN of the table; /,
+      ),
     ])
     expect(out).toBe('')
     expect(code).toBe(2)

@@ -56,7 +56,21 @@ describe('reading a list of runs', () => {
     const read = parseRunsCsv(
       lines('tag,note', '').replace(',note', ',place') + lines('A,x', '', '', 'B,y'),
     )
-    expect(read).toMatchObject({ ok: true, lines: [3, 6] })
+    expect(read.list.rows.map(({ row }) => row)).toEqual([3, 6])
+  })
+
+  it('keeps what could be read of a list with faults, and which fields have theirs said', () => {
+    const read = parseRunsCsv('tag,air_f,size\nA,cold,DN 50\nA,68,\ntorn\n')
+    expect(read.ok).toBe(false)
+    expect(read.list).toEqual({
+      header: { row: 1, keys: new Set(['tag', 'airC', 'size']), isWhole: true },
+      rows: [
+        { row: 2, values: { tag: 'A', size: 'DN 50' }, faulty: new Set(['airC']) },
+        { row: 3, values: { tag: 'A', airC: 20 }, faulty: new Set() },
+      ],
+    })
+    expect(parseRunsCsv('tag,meduim_c\nA,1\n').list.header.isWhole).toBe(false)
+    expect(parseRunsCsv('tag,place\nA,"hall\nB,roof\n').list.rows).toEqual([])
   })
 
   it('takes separators and line ends inside quotes', () => {
@@ -298,7 +312,7 @@ describe('any bytes', () => {
     fc.assert(
       fc.property(fc.oneof(soup, soup.map(bytes), fc.uint8Array({ maxLength: 300 })), (source) => {
         const read = parseRunsCsv(source)
-        if (read.ok) expect(read.runs.length).toBe(read.lines.length)
+        if (read.ok) expect(read.runs.length).toBe(read.list.rows.length)
         else expect(read.issues.length).toBeGreaterThan(0)
       }),
       { numRuns: 5000 },
