@@ -8,8 +8,6 @@ import type { Issue } from '#sizing/result.ts'
 export function issueSentence(issue: Issue): string {
   const { found, allowed } = issue
   const cure = labelled(allowed)
-  // Some cures are whole sentences that name what was found.
-  if (/^(?:"|[A-Z][a-z]+ )/.test(cure)) return stopped(cure)
   if (isMissing(issue)) return stopped(`Give ${cure}`)
   return stopped(`${found} does not fit. Allowed: ${cure}`)
 }
