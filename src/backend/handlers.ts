@@ -59,6 +59,7 @@ export function makeHandlers(options: BackendOptions): Backend {
         ? jobs.saveAs(`${chosen}${jobEnding}`, overwrite)
         : jobs.saveAs(chosen, true)
     },
+    'job.drafts': () => [...jobs.drafts()],
     'job.commit': (change) => jobs.commit(change),
     'preferences.read': () => readPreferences(dataFolder),
     'preferences.write': (preferences) => {

@@ -7,8 +7,9 @@ import { mkdirSync, rmSync, writeFileSync } from 'node:fs'
 import { basename, dirname, join, resolve } from 'node:path'
 import { z } from 'zod'
 import { AppError } from '#contract/failures.ts'
-import type { JobChange, OpenJob } from '#contract/host.ts'
+import type { Draft, JobChange, OpenJob } from '#contract/host.ts'
 import type { Job } from '#model/job.ts'
+import { listDrafts } from './drafts.ts'
 import { type Committed, JobFile } from './job-file.ts'
 import { readJson } from './preferences.ts'
 import { replaceFile } from './replace-file.ts'
@@ -41,7 +42,10 @@ export class OpenJobs {
       return this.#take(JobFile.open(lastJob, this.#place.dbFolder))
     } catch (error) {
       if (!(error instanceof AppError)) throw error
-      return { ...this.start(emptyJob), notice: `${error.message} A new job was started instead.` }
+      // Another window works on it just now: it is still the one to open next time.
+      const isRemembered = error.failure.code !== 'job/in-use'
+      const notice = `${error.message} A new job was started instead.`
+      return { ...this.start(emptyJob, isRemembered), notice }
     }
   }
 
@@ -50,7 +54,7 @@ export class OpenJobs {
   }
 
   /** A draft with this job in it. */
-  start(job: Job): OpenJob {
+  start(job: Job, isRemembered = true): OpenJob {
     const name = `${new Date().toISOString().slice(0, 10)}-${randomUUID()}.lagjob`
     const path = join(this.#drafts, name)
     try {
@@ -58,7 +62,7 @@ export class OpenJobs {
     } catch (error) {
       throw writeFailure(path, error)
     }
-    return this.#take(JobFile.create(path, job, this.#place.dbFolder))
+    return this.#take(JobFile.create(path, job, this.#place.dbFolder), isRemembered)
   }
 
   open(path: string): OpenJob {
@@ -75,6 +79,11 @@ export class OpenJobs {
     const shown = this.#take(copy)
     if (isDraft) removeJob(file.path)
     return shown
+  }
+
+  /** The drafts that were left for another job. */
+  drafts(): readonly Draft[] {
+    return listDrafts(this.#drafts, this.#file?.path ?? null)
   }
 
   commit(change: JobChange): Committed {
@@ -103,7 +112,7 @@ export class OpenJobs {
   }
 
   /** The new one is open before the old one is let go: a failure leaves everything as it was. */
-  #take(file: JobFile): OpenJob {
+  #take(file: JobFile, isRemembered = true): OpenJob {
     const opening = randomUUID()
     const shown = { ...this.#shown(file), opening }
     const old = this.#file
@@ -114,7 +123,7 @@ export class OpenJobs {
       old.close()
       if (isUntouched) removeJob(old.path)
     }
-    this.#remember(file.path)
+    if (isRemembered) this.#remember(file.path)
     return shown
   }
 

@@ -30,6 +30,18 @@ const openJobSchema = z.strictObject({
   notice: z.string().optional(),
 }) as z.ZodType<OpenJob>
 
+/** A job without a file of its own that was left for another one. */
+export interface Draft {
+  readonly path: string
+  readonly name: string
+  readonly runs: number
+  /** ISO 8601, UTC. */
+  readonly savedAt: string
+}
+const draftsSchema = z.array(
+  z.strictObject({ path: z.string(), name: z.string(), runs: z.int().min(0), savedAt: z.string() }),
+) as z.ZodType<readonly Draft[]>
+
 /** Only what changed: each committed edit is written at once, in one transaction. */
 export const jobChangeSchema = z.strictObject({
   /** The opening that is meant; absent for whichever job is open. */
@@ -65,6 +77,8 @@ export const hostCalls = {
   'job.demo': call(z.strictObject({}), openJobSchema),
   /** Without a path the desktop shell shows its dialog; null when the user turned back. */
   'job.open': call(z.strictObject({ path: pathSchema.optional() }), openJobSchema.nullable()),
+  /** Jobs without a file of their own, but for the open one. */
+  'job.drafts': call(z.strictObject({}), draftsSchema),
   'job.saveAs': call(
     z.strictObject({
       path: pathSchema.optional(),

@@ -80,6 +80,24 @@ describe('the open job', () => {
     expect(drafts(folder)).toHaveLength(2)
   })
 
+  test('drafts that were left are listed, the last saved first, and can be opened again', async () => {
+    const folder = temporaryFolder()
+    const { handlers } = started(folder)
+    expect(await handlers['job.drafts']({})).toEqual([])
+    await handlers['job.new']({})
+    await handlers['job.commit']({ ...edit(0), name: 'First' })
+    await handlers['job.new']({})
+    await handlers['job.commit']({ revision: 0, putRuns: [], removeRuns: [], name: 'Second' })
+    await handlers['job.new']({})
+    writeFileSync(join(folder, 'drafts', 'torn.lagjob'), 'no job')
+    const [second, first] = await handlers['job.drafts']({})
+    expect(second).toMatchObject({ name: 'Second', runs: 0, savedAt: expect.any(String) })
+    expect(first).toMatchObject({ name: 'First', runs: 1 })
+    const again = await handlers['job.open']({ path: first?.path ?? '' })
+    expect(again).toMatchObject({ path: null, revision: 1, job: { runs: [sampleRun(1)] } })
+    expect((await handlers['job.drafts']({})).map(({ name }) => name)).toEqual(['Second'])
+  })
+
   test('a last job that is gone, damaged or open elsewhere gives way to a new one, and says so', async () => {
     const folder = temporaryFolder()
     const path = join(folder, 'mine.lagjob')
@@ -93,8 +111,11 @@ describe('the open job', () => {
     )
     expect(second).toMatchObject({ path: null, revision: 0 })
     first.close()
+    // It is still the one that the next start opens.
+    const after = started(folder)
+    expect(await after.handlers['job.current']({})).toMatchObject({ path })
+    after.close()
 
-    writeFileSync(join(folder, 'session.json'), JSON.stringify({ lastJob: path }))
     const bytes = readFileSync(path)
     writeFileSync(path, bytes.subarray(0, 5000))
     const third = await started(folder).handlers['job.current']({})
@@ -317,6 +338,7 @@ describe('everything else', () => {
       ['job.commit', edit(0)],
       ['job.saveAs', { path: join(folder, 'a.lagjob'), overwrite: false }],
       ['job.demo', {}],
+      ['job.drafts', {}],
       ['job.open', { path: join(folder, 'a.lagjob') }],
       ['preferences.read', {}],
       ['preferences.write', { theme: 'dark', units: 'us', density: 'compact' }],

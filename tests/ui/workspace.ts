@@ -1,7 +1,7 @@
 /** A workspace on a host and a worker that live in the test itself. */
 import { inject } from 'vitest'
 import { AppError } from '#contract/failures.ts'
-import type { Host, JobChange, OpenJob } from '#contract/host.ts'
+import type { Draft, Host, JobChange, OpenJob } from '#contract/host.ts'
 import { applyDifference } from '#model/difference.ts'
 import type { RunValues } from '#model/fields.ts'
 import type { Job } from '#model/job.ts'
@@ -17,6 +17,7 @@ export class TestFile {
   commits: JobChange[] = []
   isFull = false
   notice: string | null = null
+  drafts: Draft[] = []
 
   constructor(job: Job) {
     this.job = job
@@ -65,6 +66,7 @@ export async function startWorkspace(file: TestFile): Promise<Workspace> {
     'job.current': () => later(() => file.open),
     'job.new': () => later(() => ({ ...file.open, job: jobOf([]) })),
     'job.demo': () => later(() => file.open),
+    'job.drafts': () => later(() => file.drafts),
     'job.open': () => later(() => file.open),
     'job.saveAs': () => later(() => file.open),
     // Through the clone, as every call goes.

@@ -1,12 +1,18 @@
 /** Writes every committed edit at once: one commit on the way, what changes meanwhile merged into the next. */
+import { AppError, type Failure } from '#contract/failures.ts'
 import type { Host, OpenJob } from '#contract/host.ts'
 import { diffJob } from '#model/difference.ts'
-import type { Job } from '#model/job.ts'
+import type { Job, Run } from '#model/job.ts'
 
 export type SaveState =
   | { readonly kind: 'saved'; readonly at: Date | null }
   | { readonly kind: 'saving' }
-  | { readonly kind: 'failed'; readonly sentence: string }
+  | {
+      readonly kind: 'failed'
+      readonly sentence: string
+      /** Null where it is no failure that was foreseen. */
+      readonly code: Failure['code'] | null
+    }
 
 export class Saving {
   state: SaveState = $state.raw({ kind: 'saved', at: null })
@@ -35,6 +41,11 @@ export class Saving {
   /** Whether anything is not in the file yet. */
   get isBehind(): boolean {
     return this.#written !== this.#current()
+  }
+
+  /** The runs that are new or changed since the last write. */
+  unsavedRuns(): readonly Run[] {
+    return diffJob(this.#written, this.#current())?.putRuns ?? []
   }
 
   /** The job may have changed: write what is new. After a failure this is also the next try. */
@@ -92,6 +103,7 @@ export class Saving {
       this.state = {
         kind: 'failed',
         sentence: error instanceof Error ? error.message : String(error),
+        code: error instanceof AppError ? error.failure.code : null,
       }
     }
   }

@@ -2,7 +2,7 @@
 import { createContext } from 'svelte'
 import type { Catalogue } from '#catalogue/types.ts'
 import { AppError } from '#contract/failures.ts'
-import type { Host, OpenJob, Output } from '#contract/host.ts'
+import type { Draft, Host, OpenJob, Output } from '#contract/host.ts'
 import type { CellReader } from '#model/cell-edit.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import type { WorkerLike } from '#worker/client.ts'
@@ -40,6 +40,8 @@ export class Workspace {
     this.words.reading(readerFor(this.preferences.units)),
   )
   question: Question | null = $state.raw(null)
+  /** Jobs that were left without a file of their own. */
+  drafts: readonly Draft[] = $state.raw([])
   /** What went wrong last, in a sentence; null when read. */
   failure: string | null = $state(null)
 
@@ -82,6 +84,28 @@ export class Workspace {
       if (this.about.dialogs) await this.#take(() => this.host['job.open']({}))
       else this.question = { kind: 'open', sentence: null }
     })
+  }
+  openDraft({ path }: Draft): void {
+    this.#leave(() => this.#take(() => this.host['job.open']({ path })))
+  }
+  /** Looks which drafts there are. */
+  readDrafts(): void {
+    this.host['job.drafts']({}).then(
+      (drafts) => {
+        this.drafts = drafts
+      },
+      // The list is a help to find something again, and what keeps it away is told where it matters.
+      () => {},
+    )
+  }
+  /** Takes the open job as its file holds it; what is not written is lost. */
+  reopen(): void {
+    const { path } = this.session
+    this.#run(() =>
+      this.#take(() =>
+        path === null ? this.host['job.current']({}) : this.host['job.open']({ path }),
+      ),
+    )
   }
   openPath(path: string): void {
     this.#run(async () => {

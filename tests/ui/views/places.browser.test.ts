@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest'
 import { page, userEvent } from 'vitest/browser'
 import { render } from 'vitest-browser-svelte'
+import { setJobName } from '#model/edits.ts'
 import '#ui/theme.css'
 import App from '#ui/App.svelte'
 import { jobOf, startWorkspace, TestFile } from '../workspace.ts'
@@ -52,4 +53,31 @@ describe('the job', () => {
     expect(session.job.name).toBe('Boiler house')
     await expect.element(page.getByLabelText('Name of the job')).toHaveValue('Boiler house')
   })
+
+  test('leads back to drafts that were left', async () => {
+    const file = new TestFile(jobOf([{ tag: 'A' }]))
+    const savedAt = '2026-03-01T12:04:00.000Z'
+    file.drafts = [{ path: '/data/drafts/1.lagjob', name: 'Pump house', runs: 12, savedAt }]
+    const workspace = await startWorkspace(file)
+    await render(App, { workspace })
+    await page.getByRole('navigation', { name: 'Places' }).getByText('Job', { exact: true }).click()
+    await expect.element(page.getByText(/12 runs, saved 1 Mar 2026/)).toBeVisible()
+    const before = workspace.session.opened
+    await page.getByRole('button', { name: 'Open the draft Pump house' }).click()
+    await expect.poll(() => workspace.session.opened).toBe(before + 1)
+  })
+})
+
+test('a window that is behind its file is offered what helps: to copy what changed, and to reopen', async () => {
+  const file = new TestFile(jobOf([{ tag: 'A' }]))
+  const workspace = await startWorkspace(file)
+  await render(App, { workspace })
+  file.revision = 4
+  workspace.session.edit(setJobName, 'Behind')
+  const alert = page.getByRole('alert').filter({ hasText: 'This window is behind its file' })
+  await expect.element(alert).toBeVisible()
+  await expect.element(alert.getByText('Try again')).not.toBeInTheDocument()
+  await alert.getByRole('button', { name: 'Reopen the job' }).click()
+  await expect.element(page.getByText('This window is behind')).not.toBeInTheDocument()
+  expect(workspace.session.job.name).toBe('Test job')
 })

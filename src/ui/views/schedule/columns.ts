@@ -35,7 +35,7 @@ const sets: { readonly [S in ColumnSet]: readonly Placed[] } = {
     { key: 'lengthM', widthPx: 64, fromPx: 700 },
     { key: 'mediumC', widthPx: 80, fromPx: 540 },
     { key: 'place', widthPx: 104, fromPx: 830 },
-    { key: 'lagging', widthPx: 70 },
+    { key: 'lagging', widthPx: 78 },
     { key: 'loss', widthPx: 68, fromPx: 620 },
     { key: 'surface', widthPx: 68, fromPx: 690 },
     { key: 'governed', widthPx: 104 },
@@ -62,7 +62,7 @@ const sets: { readonly [S in ColumnSet]: readonly Placed[] } = {
     { key: 'maxLossWPerM', widthPx: 104 },
     { key: 'fuel', widthPx: 150 },
     { key: 'hoursPerYear', widthPx: 98 },
-    { key: 'lagging', widthPx: 76 },
+    { key: 'lagging', widthPx: 82 },
     { key: 'governed', widthPx: 112 },
   ],
 }
