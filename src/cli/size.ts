@@ -57,8 +57,10 @@ async function deliver(runs: SizedList, { out, json, units }: SizeRequest): Prom
     }
   }
   if (json) await print(jsonTexts(runs))
-  else if (out) await print([`${out.path}: ${countWords(runs.size, [...runs.failing])}\n`])
-  else await print([writeRunTable(runs, { units, width: process.stdout.columns ?? null })])
+  else if (out) {
+    const { size, failing, unjudged } = runs
+    await print([`${out.path}: ${countWords(size, [...failing], unjudged.size)}\n`])
+  } else await print([writeRunTable(runs, { units, width: process.stdout.columns ?? null })])
   return null
 }
 

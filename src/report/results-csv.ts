@@ -1,8 +1,9 @@
 /** The answer as CSV for a spreadsheet: mm and kWh, one row per run, empty where a value does not apply. */
 import Papa from 'papaparse'
 import { writeDecimal } from '#model/decimal.ts'
+import type { RunResult } from '#sizing/result.ts'
 import { guardFormula } from './csv-text.ts'
-import { meetsLimits, type SizedRun, sizeWords } from './run-words.ts'
+import { isJudged, meetsLimits, type SizedRun, sizeWords } from './run-words.ts'
 
 type Cell = string | number | null | undefined
 
@@ -16,7 +17,7 @@ const columns: readonly (readonly [header: string, cell: (run: SizedRun) => Cell
   ['length_m', ({ values }) => values.lengthM],
   ['area_m2', ({ values }) => values.areaM2],
   ['governing', ({ result }) => result.governing],
-  ['meets_limits', ({ result }) => (meetsLimits(result) ? 'yes' : 'no')],
+  ['meets_limits', ({ result }) => meetsWord(result)],
   ['thickness_mm', ({ result }) => millimetres(result.chosen?.thicknessM)],
   ['nominal_thickness_mm', ({ result }) => millimetres(result.chosen?.nominalThicknessM)],
   ['outer_diameter_mm', ({ result }) => millimetres(result.chosen?.outerDiameterM)],
@@ -40,6 +41,11 @@ const columns: readonly (readonly [header: string, cell: (run: SizedRun) => Cell
   ['reason', ({ result }) => result.reason],
   ['notes', ({ result }) => result.notes.map(({ text }) => text).join(' ')],
 ]
+
+function meetsWord(result: RunResult): string {
+  if (!meetsLimits(result)) return 'no'
+  return isJudged(result) ? 'yes' : 'none judged'
+}
 
 /** Header and rows, a text each, since a long list does not fit into one string. */
 export function* writeResultsCsv(runs: Iterable<SizedRun>): Iterable<string> {

@@ -2,8 +2,17 @@
 import type { Rating } from '#sizing/result.ts'
 import { formatQuantity, formatWithUnit, thicknessDecimals, unitLabel } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
+import { restated } from '#units/restate.ts'
 import { cautions } from './cautions.ts'
-import { governedBy, meetsLimits, reasonWords, type SizedRun, sizeWords } from './run-words.ts'
+import {
+  governedBy,
+  inchName,
+  isJudged,
+  meetsLimits,
+  reasonWords,
+  type SizedRun,
+  sizeWords,
+} from './run-words.ts'
 import { type TextColumn, textTable } from './text-table.ts'
 
 export interface TableOptions {
@@ -16,8 +25,11 @@ export interface TableOptions {
 interface Line {
   readonly tag: string
   readonly meetsLimits: boolean
+  readonly isJudged: boolean
   readonly size: string
   readonly thicknessM: number | null
+  /** What an inch series calls the thickness; empty elsewhere. */
+  readonly soldAs: string
   readonly loss: string
   readonly bare: string
   readonly surface: string
@@ -30,9 +42,10 @@ interface Line {
 export function writeRunTable(runs: Iterable<SizedRun>, options: TableOptions): string {
   const lines = Array.from(runs, (run) => lineOf(run, options.units))
   const failing = lines.filter((line) => !line.meetsLimits).map(({ tag }) => tag)
+  const unjudged = lines.filter((line) => !line.isJudged).length
   const parts = [
     textTable(columnsOf(lines, options.units), options.width),
-    [countWords(lines.length, failing)],
+    [countWords(lines.length, failing, unjudged)],
     noteLines(lines),
     ['Cautions', ...cautions.map(({ text, deferTo }) => `- ${text} In doubt: ${deferTo}.`)],
   ]
@@ -47,14 +60,16 @@ function lineOf({ values, result }: SizedRun, units: UnitSystem): Line {
   return {
     tag: result.tag,
     meetsLimits: meetsLimits(result),
+    isJudged: isJudged(result),
     size: sizeWords(values, units),
     thicknessM: chosen?.thicknessM ?? null,
+    soldAs: typeof chosen?.nominalThicknessM === 'number' ? inchName(chosen.nominalThicknessM) : '',
     loss: lossWords(chosen, units),
     bare: lossWords(bare, units),
     surface: formatQuantity(chosen?.surfaceTempC, 'temperature', units),
     governedBy: governedBy(result),
     reason: reasonWords(result, units),
-    notes: result.notes.map(({ text }) => text),
+    notes: result.notes.map(({ text }) => (units === 'si' ? text : restated(text, units))),
   }
 }
 
@@ -72,6 +87,7 @@ function columnsOf(lines: readonly Line[], units: UnitSystem): readonly TextColu
   const lagging = thicknesses.map((thicknessM) =>
     formatQuantity(thicknessM, 'thickness', units, decimals),
   )
+  const soldAs = lines.map((line) => line.soldAs)
   const words = (header: string, key: 'tag' | 'size' | 'governedBy' | 'reason'): TextColumn => ({
     header,
     align: 'left',
@@ -86,6 +102,7 @@ function columnsOf(lines: readonly Line[], units: UnitSystem): readonly TextColu
     { ...words('Tag', 'tag'), maxWidth: 24 },
     { ...words('Size', 'size'), maxWidth: 18 },
     numbers(`Lagging ${unitLabel('thickness', units)}`, lagging),
+    ...(soldAs.some((name) => name !== '') ? [numbers('Sold as', soldAs)] : []),
     numbers(
       `Loss ${lossUnit}`,
       lines.map(({ loss }) => loss),
@@ -95,7 +112,7 @@ function columnsOf(lines: readonly Line[], units: UnitSystem): readonly TextColu
       lines.map(({ bare }) => bare),
     ),
     numbers(
-      `Surface ${unitLabel('temperature', units)}`,
+      `Surface, mean ${unitLabel('temperature', units)}`,
       lines.map(({ surface }) => surface),
     ),
     words('Governed by', 'governedBy'),
@@ -103,11 +120,14 @@ function columnsOf(lines: readonly Line[], units: UnitSystem): readonly TextColu
   ]
 }
 
-/** "43 runs, 42 within their limits. Not within: GL-322." */
-export function countWords(runs: number, failing: readonly string[]): string {
+/** "43 runs, 40 within their limits, 2 with no limit judged. Not within: GL-322." */
+export function countWords(runs: number, failing: readonly string[], unjudged: number): string {
   const total = `${runs} ${runs === 1 ? 'run' : 'runs'}`
-  if (failing.length === 0) return `${total}, all limits met.`
-  return `${total}, ${runs - failing.length} within their limits. Not within: ${tagList(failing)}.`
+  if (failing.length === 0 && unjudged === 0) return `${total}, all limits met.`
+  const within = runs - failing.length - unjudged
+  const open = unjudged === 0 ? '' : `, ${unjudged} with no limit judged`
+  const not = failing.length === 0 ? '' : ` Not within: ${tagList(failing)}.`
+  return `${total}, ${within} within their limits${open}.${not}`
 }
 
 function noteLines(lines: readonly Line[]): readonly string[] {

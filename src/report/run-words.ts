@@ -4,6 +4,7 @@ import { type Words, writeReason } from '#sizing/reason.ts'
 import { type Governing, limitWords, type RunResult } from '#sizing/result.ts'
 import { formatNumber, formatQuantity, formatWithUnit } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
+import { inSentence } from '#units/restate.ts'
 
 /** One run and its answer; the values are those it was sized with, the defaults of the job included. */
 export interface SizedRun {
@@ -23,6 +24,16 @@ export const governingWords: Readonly<Record<Governing, string>> = {
 /** Whether every limit of the run is met by what is chosen. */
 export function meetsLimits({ chosen }: RunResult): boolean {
   return chosen?.pass ?? false
+}
+
+/** Whether there is a limit at all that the chosen rung was judged by. */
+export function isJudged({ limits }: RunResult): boolean {
+  return limits.length > 0
+}
+
+/** What an inch series calls a thickness: "1.5 in"; the thickness itself differs by pipe. */
+export function inchName(nominalThicknessM: number): string {
+  return `${Number((nominalThicknessM / 0.0254).toFixed(3))} in`
 }
 
 /** What decided, and whether it is not enough: "Touch", "Unmet", "Fixed, fails". */
@@ -59,13 +70,16 @@ const quantityOf: Readonly<Record<string, QuantityName>> = {
 }
 
 const usWords: Words = {
-  thickness: (thicknessM) => formatWithUnit(thicknessM, 'thickness', 'us'),
+  thickness: (thicknessM, nominalThicknessM) => {
+    const actual = formatWithUnit(thicknessM, 'thickness', 'us')
+    return nominalThicknessM === null ? actual : `${inchName(nominalThicknessM)} (${actual})`
+  },
   quantity: (value, unit, digits) => {
     const quantity = quantityOf[unit]
     // A bound that is round in SI is not so here.
     const decimals = Math.max(1, digits)
     return quantity
-      ? formatWithUnit(value, quantity, 'us', decimals)
+      ? inSentence(value, quantity, 'us', decimals)
       : `${formatNumber(value, decimals)} ${unit}`
   },
 }

@@ -1,5 +1,5 @@
 /** Sentences that were written in SI, said again in the units on the screen. */
-import { formatWithUnit } from './format.ts'
+import { formatQuantity, formatWithUnit } from './format.ts'
 import type { QuantityName, UnitSystem } from './quantities.ts'
 
 /** Units as they are written after numbers in reasons and notes; the longest first, so that `W/m²K` is not `W/m`. */
@@ -9,6 +9,7 @@ const written: readonly (readonly [unit: string, quantity: QuantityName])[] = [
   ['W/m²', 'heatFlux'],
   ['W/m', 'heatLossPerLength'],
   ['m/s', 'speed'],
+  ['bar g', 'gaugePressure'],
   ['°C', 'temperature'],
   ['mm', 'thickness'],
   ['K', 'temperatureDifference'],
@@ -39,12 +40,24 @@ export function restated(text: string, system: UnitSystem): string {
           .replace('\u2212', '-'),
       )
       return Number.isFinite(value)
-        ? `${formatWithUnit(value * siSize(unit), quantity, system)}${joint}`
+        ? `${inSentence(value * siSize(unit), quantity, system)}${joint}`
         : all
     })
   })
 }
 
+/** A quantity in running text, which says by itself that a difference of temperatures is one. */
+export function inSentence(
+  value: number,
+  quantity: QuantityName,
+  system: UnitSystem,
+  decimals?: number,
+): string {
+  return system === 'us' && quantity === 'temperatureDifference'
+    ? `${formatQuantity(value, quantity, system, decimals)}\u00a0°F`
+    : formatWithUnit(value, quantity, system, decimals)
+}
+
 function siSize(unit: string): number {
-  return unit === 'mm' ? 0.001 : 1
+  return unit === 'mm' ? 0.001 : unit === 'bar g' ? 1e5 : 1
 }

@@ -41,6 +41,8 @@ describe('lagwright size', slow, () => {
     const { code, out } = await place().lagwrightReading(list, 'size', '-', '--json')
     const { runs } = sizedSchema.parse(JSON.parse(out))
     expect(runs[0]?.governing).toBe('bare')
+    const { out: table } = await place().lagwrightReading(list, 'size', '-')
+    expect(table).toContain('1 run, 0 within their limits, 1 with no limit judged.')
     expect(runs[0]?.chosen).toEqual(runs[0]?.bare)
     expect(code).toBe(0)
   })

@@ -17,10 +17,10 @@ describe('the table of results', () => {
   it('has a line per run, the units in the header, the count and the cautions', () => {
     const lines = table('si')
     expect(lines[0]).toMatch(
-      /^Tag +Size +Lagging mm +Loss W\/m +Bare W\/m +Surface °C +Governed by +Reason$/,
+      /^Tag +Size +Lagging mm +Sold as +Loss W\/m +Bare W\/m +Surface, mean °C +Governed by +Reason$/,
     )
     for (const { result } of runs) expect(line(lines, result.tag)).toContain(result.reason)
-    expect(lines).toContain(countWords(runs.length, ['ST-110', 'GL-322']))
+    expect(lines).toContain(countWords(runs.length, ['ST-110', 'GL-322'], 0))
     for (const { text } of cautions) expect(lines.join('\n')).toContain(text)
   })
 
@@ -32,8 +32,26 @@ describe('the table of results', () => {
 
   it('prints US units throughout, bounds included', () => {
     const lines = table('us')
-    expect(lines[0]).toMatch(/Lagging in +Loss Btu\/h·ft +Bare Btu\/h·ft +Surface °F/)
+    expect(lines[0]).toMatch(
+      /Lagging in +Sold as +Loss Btu\/h·ft +Bare Btu\/h·ft +Surface, mean °F/,
+    )
     for (const { result } of runs) expect(line(lines, result.tag)).not.toMatch(/°C|W\/m|\d mm/)
+    // A conductivity keeps its unit: it is the one of the sheets that the catalogue cites.
+    const notes = lines.slice(lines.indexOf('Notes'), lines.indexOf('Cautions'))
+    expect(notes.join('\n')).not.toMatch(/\d[ \u00a0](?:°C|mm|K|W\/m)(?![\w²])|diff\./)
+  })
+
+  it('gives the actual thickness, and beside it what an inch series calls it', () => {
+    // ASHRAE Handbook Fundamentals 2021 (SI), ch. 23, table 13: NPS 3, nominal 3 in, is 77.5 mm thick.
+    for (const [units, cells] of [
+      ['si', /^ST-111 .* 77\.5 +3 in /],
+      ['us', /^ST-111 .* 3\.05 +3 in /],
+    ] as const) {
+      expect(line(table(units), 'ST-111')).toMatch(cells)
+    }
+    expect(line(table('us'), 'ST-111')).toContain('3 in (3.05\u00a0in) is the cheapest')
+    const metric = runs.filter(({ result }) => result.chosen?.nominalThicknessM === null)
+    expect(writeRunTable(metric, { units: 'si', width: null })).not.toContain('Sold as')
   })
 
   it('keeps to the width of the terminal', () => {
@@ -52,10 +70,14 @@ describe('the table of results', () => {
   })
 
   it('counts what is met, and names the first that are not', () => {
-    expect(countWords(1, [])).toBe('1 run, all limits met.')
-    expect(countWords(3, ['A', 'B'])).toBe('3 runs, 1 within their limits. Not within: A, B.')
+    expect(countWords(1, [], 0)).toBe('1 run, all limits met.')
+    expect(countWords(3, ['A', 'B'], 0)).toBe('3 runs, 1 within their limits. Not within: A, B.')
+    expect(countWords(2, [], 1)).toBe('2 runs, 1 within their limits, 1 with no limit judged.')
+    expect(countWords(3, ['A'], 1)).toBe(
+      '3 runs, 1 within their limits, 1 with no limit judged. Not within: A.',
+    )
     const many = Array.from({ length: 10 }, (_, index) => `T-${index}`)
-    expect(countWords(10, many)).toMatch(/Not within: T-0, .*, T-7 and 2 more\.$/)
+    expect(countWords(10, many, 0)).toMatch(/Not within: T-0, .*, T-7 and 2 more\.$/)
   })
 })
 
