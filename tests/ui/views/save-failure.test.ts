@@ -2,8 +2,8 @@ import { describe, expect, test } from 'vitest'
 import { columnReader } from '#model/cell-edit.ts'
 import type { Run } from '#model/job.ts'
 import { pasteTakeOff, takeOffOf } from '#model/take-off.ts'
+import { cureOf } from '#ui/state/save-cure.ts'
 import { runsAsText } from '#ui/views/frame/runs-as-text.ts'
-import { cureOf } from '#ui/views/frame/save-cure.ts'
 import { readTsv } from '#ui/views/schedule/tsv.ts'
 
 describe('what is offered where changes could not be written', () => {

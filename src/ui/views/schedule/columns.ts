@@ -28,16 +28,17 @@ interface Placed {
 }
 
 const sets: { readonly [S in ColumnSet]: readonly Placed[] } = {
+  // Each from where the description still keeps some 110 px; below all of them it gets narrower.
   sized: [
     { key: 'tag', widthPx: 86 },
-    { key: 'description', widthPx: 110 },
+    { key: 'description', widthPx: 70 },
     { key: 'size', widthPx: 106 },
-    { key: 'lengthM', widthPx: 64, fromPx: 700 },
-    { key: 'mediumC', widthPx: 80, fromPx: 540 },
-    { key: 'place', widthPx: 104, fromPx: 830 },
+    { key: 'lengthM', widthPx: 64, fromPx: 764 },
+    { key: 'mediumC', widthPx: 80, fromPx: 564 },
+    { key: 'place', widthPx: 104, fromPx: 868 },
     { key: 'lagging', widthPx: 78 },
-    { key: 'loss', widthPx: 68, fromPx: 620 },
-    { key: 'surface', widthPx: 68, fromPx: 690 },
+    { key: 'loss', widthPx: 68, fromPx: 632 },
+    { key: 'surface', widthPx: 68, fromPx: 700 },
     { key: 'governed', widthPx: 104 },
   ],
   'take-off': [
