@@ -1,8 +1,10 @@
+import { execFile } from 'node:child_process'
 import { chmod, mkdir, mkdtemp, readFile, rm, utimes, writeFile } from 'node:fs/promises'
 import { createServer, type RequestListener, type Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import { tmpdir } from 'node:os'
 import { delimiter, join } from 'node:path'
+import { promisify } from 'node:util'
 import { afterEach, beforeAll, beforeEach, describe, expect, test, vi } from 'vitest'
 import { fetchElectron } from '../../electron/binary.mjs'
 import { buildIfStale, isStale } from '../../electron/build.mjs'
@@ -11,6 +13,7 @@ import { type Started, start } from './starting.ts'
 // Each test starts whole programs, on a machine that may be busy with other tests.
 vi.setConfig({ testTimeout: 30_000, hookTimeout: 60_000 })
 
+const startFile = join(import.meta.dirname, '..', '..', 'electron', 'start.mjs')
 let folder: string
 let server: Server | undefined
 beforeAll(() => buildIfStale(join(import.meta.dirname, '..', '..')))
@@ -128,6 +131,19 @@ describe('start', () => {
     ]).ended()
     expect(code).toBe(1)
     expect(complaints).toMatch(new RegExp(`^Lagwright cannot listen on port ${port} .*\\n$`))
+  })
+
+  test('asked for help, prints what can be asked and starts nothing', async () => {
+    const ended = promisify(execFile)(process.execPath, [startFile, '--help'])
+    const { stdout, stderr } = await ended
+    expect(stdout).toContain('--browser  the browser at once')
+    expect(stderr).toBe('')
+  })
+
+  test('refuses an option that it does not know', async () => {
+    const { code, complaints } = await start(folder, {}, ['--brwser', '--no-open']).ended()
+    expect(complaints).toBe('Unknown: --brwser. Known are --browser, --no-open and --help.\n')
+    expect(code).toBe(2)
   })
 
   test('asks an old Node for a newer one, in one line', async () => {
