@@ -51,13 +51,12 @@ export function makeHandlers(options: BackendOptions): Backend {
     },
     'job.saveAs': async ({ path, overwrite, opening }) => {
       jobs.requireOpening(opening)
-      if (path !== undefined) return jobs.saveAs(fullPath(path), overwrite)
+      if (path !== undefined) return jobs.saveAs(withEnding(fullPath(path)), overwrite)
       const chosen = await ask(dialogs).askSave(`${fileNameFor(jobs.name)}${jobEnding}`)
       if (chosen === null) return null
       // The dialog has asked about replacing the very name it returns, but not about one we complete.
-      return extname(chosen) === ''
-        ? jobs.saveAs(`${chosen}${jobEnding}`, overwrite)
-        : jobs.saveAs(chosen, true)
+      const named = withEnding(chosen)
+      return jobs.saveAs(named, named === chosen || overwrite)
     },
     'job.drafts': () => [...jobs.drafts()],
     'job.commit': (change) => jobs.commit(change),
@@ -103,6 +102,11 @@ function fullPath(path: string): string {
   const trimmed = path.trim()
   const fromHome = /^~(?=$|[\\/])/.test(trimmed) ? `.${trimmed.slice(1)}` : trimmed
   return resolve(homedir(), fromHome)
+}
+
+/** A name without an ending gets that of a job; what stands after the dot of "Hall 2.1" is none. */
+function withEnding(path: string): string {
+  return /^\.[a-z]+$/i.test(extname(path)) ? path : `${path}${jobEnding}`
 }
 
 /** The name of the job without what file systems refuse. */

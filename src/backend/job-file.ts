@@ -3,7 +3,7 @@
  * second window is told; every commit is on the disk when it returns.
  */
 import { copyFileSync, existsSync, rmSync, statSync } from 'node:fs'
-import { extname, join } from 'node:path'
+import { dirname, extname, join } from 'node:path'
 import Database from 'better-sqlite3'
 import { AppError } from '#contract/failures.ts'
 import type { JobChange } from '#contract/host.ts'
@@ -177,6 +177,10 @@ function placeJob(path: string, overwrite: boolean, write: (temporary: string) =
   if (existsSync(path)) {
     if (!overwrite) throw new AppError({ code: 'job/exists', path })
     requireFree(path)
+  } else if (!existsSync(dirname(path))) {
+    // SQLite would only say that it cannot open the file.
+    const why = 'there is no such folder'
+    throw new AppError({ code: 'job/not-writable', path, why })
   }
   try {
     replaceFile(path, (temporary) => {

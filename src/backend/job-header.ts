@@ -26,7 +26,11 @@ export function judgeHeader(path: string, knownVersion: number): number {
 
   if (size === 0) throw foreign('it is empty')
   if (!header.subarray(0, magic.length).equals(magic.subarray(0, header.length)))
-    throw foreign('it is not a SQLite database')
+    throw foreign(
+      isText(header)
+        ? 'it is text, as a list of runs is; its name should end in .csv then'
+        : 'it is not a SQLite database',
+    )
   if (header.length < headerLength) throw damaged(`it ends after ${size} bytes`)
   const foundId = header.readUInt32BE(offsets.applicationId)
   if (foundId !== applicationId) throw foreign('it is a database of another program')
@@ -38,6 +42,13 @@ export function judgeHeader(path: string, knownVersion: number): number {
   if (header[offsets.writeVersion] !== 1 || header[offsets.writeVersion + 1] !== 1)
     throw damaged('its header names a journal that jobs do not use')
   return version
+}
+
+/** Whether the bytes may be the beginning of a text: no control characters but tabs and line ends, and mostly letters of ASCII. */
+function isText(bytes: Buffer): boolean {
+  const ascii = bytes.filter((byte) => byte < 0x7f)
+  const isPlain = ascii.every((byte) => byte >= 0x20 || [0x09, 0x0a, 0x0d].includes(byte))
+  return isPlain && ascii.length > bytes.length / 2
 }
 
 /** Bytes that the header promises and the file does not have, below 0 where it has too many; 0 for a whole file. */

@@ -7,7 +7,7 @@ const systemWords: Readonly<Record<string, string>> = {
   EROFS: 'the drive is read-only',
   ENOSPC: 'the drive is full',
   EDQUOT: 'your share of the drive is full',
-  ENOENT: 'the folder does not exist',
+  ENOENT: 'there is no such folder',
   ENOTDIR: 'part of the path is not a folder',
   ENAMETOOLONG: 'the name is too long',
   EINVAL: 'the name is not allowed here',

@@ -36,7 +36,7 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
   'job/not-found': ({ path }) =>
     `There is no file at ${path}. Check the path, or create a new job.`,
   'job/not-a-job': ({ path, why }) =>
-    `${path} is not a Lagwright job (${why}). It was not changed. Choose a file that ends in .lagjob.`,
+    `${path} is not a Lagwright job (${why}). It was not changed. Choose a job that Lagwright has saved.`,
   'job/too-new': ({ path, found, known }) =>
     `${path} was written by a newer Lagwright (version ${found} of the file, this program knows ${known}). It was not changed. Update Lagwright to open it.`,
   'job/damaged': ({ path, why }) =>
@@ -44,7 +44,7 @@ const sentences: { [F in Failure as F['code']]: (failure: F) => string } = {
   'job/exists': ({ path }) =>
     `${path} is already there. Choose another name, or say that it may be replaced.`,
   'job/not-writable': ({ path, why }) =>
-    `${path} cannot be written (${why}). Your work is kept here; save it under another name.`,
+    `${path} cannot be written (${why}). Your work is kept here; save it under another name or in another folder.`,
   'job/unreadable': ({ path, why }) =>
     `${path} cannot be read (${why}). Check that the drive is there and that you may read the file.`,
   'job/in-use': ({ path }) => `${path} is open in another Lagwright window. Close it there first.`,

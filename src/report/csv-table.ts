@@ -62,6 +62,14 @@ function textOf(source: string | Uint8Array): string | CsvIssue {
   }
   const decoded = decodeUtf8(source)
   if (decoded.ok) return decoded.text
+  if (new TextDecoder('latin1').decode(source.subarray(0, 15)) === 'SQLite format 3') {
+    return {
+      row: 0,
+      column: '',
+      found: 'a database, as a job is',
+      allowed: 'a list of runs as text; if it is a job, a name that ends in .lagjob',
+    }
+  }
   const isUtf16 = [0xfe, 0xff].includes(source[0] ?? 0) && [0xfe, 0xff].includes(source[1] ?? 0)
   return {
     row: isUtf16 ? 0 : decoded.line,

@@ -173,6 +173,19 @@ describe('opening and saving', () => {
     expect(await handlers['job.saveAs']({ path, overwrite: false })).toMatchObject({ revision: 2 })
   })
 
+  test('a path typed without an ending gets one', async () => {
+    const folder = temporaryFolder()
+    const { handlers } = started(folder)
+    await handlers['job.new']({})
+    const save = async (name: string, overwrite = false) =>
+      (await handlers['job.saveAs']({ path: join(folder, name), overwrite }))?.fileName
+    expect(await save('mine')).toBe('mine.lagjob')
+    expect(await save('Hall 2.1')).toBe('Hall 2.1.lagjob')
+    expect(await codeOf(() => save('mine'))).toBe('job/exists')
+    expect(await save('mine', true)).toBe('mine.lagjob')
+    expect(await codeOf(() => save('mine.db'))).toBe('job/wrong-ending')
+  })
+
   test('a failure on the way leaves the open job open', async () => {
     const folder = temporaryFolder()
     const { handlers } = started(folder)

@@ -316,6 +316,9 @@ describe('saving under another name', () => {
       const failure = failureOf(() => file.saveAs(path, false))
       expect(failure.code).toBe('job/not-writable')
     }
+    expect(failureOf(() => file.saveAs(join(folder, 'none', 'b.lagjob'), false))).toMatchObject({
+      why: 'there is no such folder',
+    })
     const longName = join(folder, `${'x'.repeat(300)}.lagjob`)
     expect(failureOf(() => file.saveAs(longName, false)).code).toBe('job/not-writable')
     expect(file.commit({ revision: 0, site: 'Still open', ...nothing }).revision).toBe(1)

@@ -74,7 +74,11 @@ describe('files that are no job', () => {
 
   test.each([
     { what: 'an empty file', bytes: '', why: 'it is empty' },
-    { what: 'a text', bytes: 'tag,shape\nP-1,pipe\n', why: 'it is not a SQLite database' },
+    {
+      what: 'a text',
+      bytes: 'tag,shape\nP-1,pipe\n',
+      why: 'it is text, as a list of runs is; its name should end in .csv then',
+    },
     { what: 'one letter', bytes: 'S', why: '' },
     { what: 'noise', bytes: Buffer.alloc(5000, 0xa5), why: 'it is not a SQLite database' },
   ])('$what', ({ bytes, why }) => {

@@ -31,7 +31,7 @@ describe('on the way to write', () => {
     [system('ENOSPC'), { code: 'job/not-writable', why: 'the drive is full' }],
     [system('EROFS'), { code: 'job/not-writable', why: 'the drive is read-only' }],
     [system('EPERM'), { code: 'job/not-writable', why: 'permission denied' }],
-    [system('ENOENT'), { code: 'job/not-writable', why: 'the folder does not exist' }],
+    [system('ENOENT'), { code: 'job/not-writable', why: 'there is no such folder' }],
     [sqlite('SQLITE_FULL'), { code: 'job/not-writable', why: 'the drive is full' }],
     [sqlite('SQLITE_READONLY_DBMOVED'), { code: 'job/not-writable' }],
     [sqlite('SQLITE_CANTOPEN'), { code: 'job/not-writable' }],

@@ -201,6 +201,11 @@ describe('what is wrong with a list', () => {
     expect(problems(new Uint8Array([...bytes('tag,place\nA,caf'), 0xe9, 0x0a]))).toEqual([
       'row 2: found a byte (hexadecimal e9) that is not UTF-8 text; allowed: UTF-8 text; save the file as "CSV UTF-8"',
     ])
+    expect(problems(new Uint8Array([...bytes('SQLite format 3'), 0, 0x10, 0, 0x82, 0xff]))).toEqual(
+      [
+        'the file: found a database, as a job is; allowed: a list of runs as text; if it is a job, a name that ends in .lagjob',
+      ],
+    )
     expect(problems(new Uint8Array([0xff, 0xfe, 0x74, 0x00]))[0]).toContain('found UTF-16 text')
   })
 
