@@ -91,7 +91,7 @@ export function readCatalogue(db: Database.Database): Catalogue {
     ).map(({ whereNote, outdoor, note, ...finish }) => ({
       ...finish,
       outdoor: outdoor === 1,
-      note: [note, whereNote].filter((part) => part !== '').join('; '),
+      note: [note, whereNote].filter((part) => part !== '').join(' '),
     })),
     wallMaterials: all<WallMaterial>(
       `SELECT id, name, conductivity_w_per_m_k AS conductivityWPerMK, density_kg_per_m3 AS densityKgPerM3,
