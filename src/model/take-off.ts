@@ -89,7 +89,8 @@ function isHeader(header: readonly string[], rows: TakeOff['rows']): boolean {
   const keys = new Set(known.map((word) => knownColumn(word)?.key))
   if (known.length >= 2 && keys.size === known.length) return true
   if (words.some((word) => hasNumber(word))) return false
-  if (words.filter(isColumnName).length >= 2) return true
+  const named = words.filter(isColumnName).map((word) => guessColumn(word)?.key)
+  if (new Set(named).size >= 2) return true
   return header.some((cell, index) => cell.trim() !== '' && isNumberColumn(rows, index))
 }
 

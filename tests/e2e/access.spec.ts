@@ -2,6 +2,7 @@
 import { AxeBuilder } from '@axe-core/playwright'
 import type { Page } from '@playwright/test'
 import { expect, test } from './fixture.ts'
+import { paste } from './window.ts'
 
 async function violations(page: Page): Promise<string[]> {
   const { violations: found } = await new AxeBuilder({ page }).analyze()
@@ -29,6 +30,13 @@ const screens: readonly { readonly name: string; readonly go: (page: Page) => Pr
   { name: 'the catalogue', go: (page) => page.keyboard.press('Alt+2') },
   { name: 'the job', go: (page) => page.keyboard.press('Alt+3') },
   { name: 'an empty job', go: (page) => page.keyboard.press('Alt+n') },
+  {
+    name: 'the columns of a foreign list',
+    go: async (page) => {
+      await page.getByRole('grid').focus()
+      await paste(page, 'Line No\tPipe size\tRemark\nL-1\tDN 50\tby the door')
+    },
+  },
   { name: 'a dialog', go: (page) => page.keyboard.press('Control+o') },
 ]
 

@@ -75,6 +75,29 @@ test('a take-off pasted with its header is sized; a bad cell keeps its text and 
   await expect(cell(page, 'HW-2', 'lagging')).toHaveText(/^\d+$/)
 })
 
+test('a foreign take-off is pasted into an empty job by keyboard, once its columns are told', async ({
+  ui: { page },
+}) => {
+  await newJob(page)
+  await page.getByLabel('Paste from a spreadsheet here').focus()
+  await paste(
+    page,
+    [
+      'Line No\tPipe size\tLength (m)\tFluid temp °C\tRoom temp\tInsulation\tCladding\tBy',
+      'L-1\tDN 50\t12\t80\t18\tstone wool pipe section\tal_plain\tA. N.',
+    ].join('\n'),
+  )
+  const dialog = page.getByRole('dialog', { name: 'Which column is what?' })
+  await expect(dialog.getByText('Left out: By')).toBeVisible()
+  await expect(dialog.getByLabel('Line No is read as')).toBeFocused()
+  const go = dialog.getByRole('button', { name: 'Paste 1 run' })
+  for (let tabs = 0; tabs < 8; tabs++) await page.keyboard.press('Tab')
+  await expect(go).toBeFocused()
+  await page.keyboard.press('Enter')
+  await expect(cell(page, 'L-1', 'lagging')).toHaveText(/^\d+$/)
+  await expect(page.getByRole('grid')).toBeFocused()
+})
+
 test('units and theme can be switched at any time and stay', async ({ ui }) => {
   const { page } = ui
   await expect(cell(page, 'ST-101', 'lagging')).toHaveText(/^\d+$/)

@@ -86,6 +86,7 @@ describe('takeOffOf', () => {
     ['words in every line', 'Steam main\tBoiler house\nBranch\tYard'],
     ['materials of two runs', 'Stone wool insulation\tPlain sheet\nFoam\tBright jacket'],
     ['one word above figures', 'Length\n12\n14'],
+    ['the same word twice', 'Air\tair\nWater\twater'],
     ['one line of words', 'Steam main\tBoiler house'],
   ])('no header: %s', (_, text) => {
     expect(takeOffOf(cells(text))).toBeNull()

@@ -113,7 +113,8 @@ export function copyMarked(grid: Grid, showing: Showing): string {
 export function pasteText(grid: Grid, text: string): void {
   if (text.trim() === '') return
   const rows = readTsv(text)
-  const takeOff = takeOffOf(rows)
+  // What was copied here are cells, whatever their words.
+  const takeOff = writeTsv(rows) === grid.copied ? null : takeOffOf(rows)
   if (!takeOff) pasteCells(grid, rows)
   else if (takeOff.rows.length === 0)
     grid.workspace.failure =
