@@ -67,8 +67,12 @@ export function thicknessWords(thicknessM: number, system: UnitSystem): string {
 export function piecesWords({ piecesM, nominalThicknessM }: Rating, system: UnitSystem): string {
   const each = piecesM.map((pieceM) => thicknessWords(pieceM, system))
   const layers = piecesM.length < 2 ? [] : [`${piecesM.length} layers: ${each.join(' + ')}`]
-  const name = formatWithUnit(nominalThicknessM, 'thickness', 'us').replace(/\.?0+(?=\D)/, '')
-  return [...layers, ...(nominalThicknessM === null ? [] : [`sold as ${name}`])].join('; ')
+  return [...layers, ...(nominalThicknessM === null ? [] : [soldAs(nominalThicknessM)])].join('; ')
+}
+
+/** What an inch series calls a thickness: `sold as 3 in`. */
+export function soldAs(nominalThicknessM: number): string {
+  return `sold as ${formatWithUnit(nominalThicknessM, 'thickness', 'us').replace(/\.?0+(?=\D)/, '')}`
 }
 
 /** Decimals for a temperature that somebody chose: none where it is a whole number. */
