@@ -52,7 +52,9 @@ export function rectangularDuct(
       findings.fault(
         'size',
         values.size,
-        size.ok ? 'width x height such as 600 x 400: the run is a rectangular duct' : size.message,
+        size.ok || !/[x×*]/i.test(values.size)
+          ? 'width x height such as 600 x 400: the run is a rectangular duct'
+          : size.message,
       )
       return null
     }

@@ -44,6 +44,8 @@ export class Workspace {
   drafts: readonly Draft[] = $state.raw([])
   /** What went wrong last, in a sentence; null when read. */
   failure: string | null = $state(null)
+  /** While the host opens another job: nothing typed then could be kept, so the window takes nothing. */
+  isMoving: boolean = $state(false)
 
   private constructor(host: Host, start: () => WorkerLike, read: Read) {
     this.host = host
@@ -178,12 +180,17 @@ export class Workspace {
   }
 
   async #take(ask: () => Promise<OpenJob | null>): Promise<void> {
-    await this.saving.exclusively(async () => {
-      const open = await ask()
-      if (!open) return
-      this.saving.startFrom(open, open.job)
-      this.session.replace(open)
-    })
+    this.isMoving = true
+    try {
+      await this.saving.exclusively(async () => {
+        const open = await ask()
+        if (!open) return
+        this.saving.startFrom(open, open.job)
+        this.session.replace(open)
+      })
+    } finally {
+      this.isMoving = false
+    }
   }
 
   async #saveAs(path: string | undefined, overwrite: boolean): Promise<void> {

@@ -4,7 +4,7 @@ import { type Core, type SectionView, shells } from './section.ts'
 /** Room around what is drawn: half the width left over, the dimension line below, a label in the corner above. */
 const MARGIN = { beside: 8, below: 28, above: 2, label: 12 }
 /** Smallest core that has room for the medium's temperature. */
-const LABEL = { width: 66, height: 36 }
+const LABEL = { width: 88, height: 36 }
 const SHELLS = 48
 /** How much of the wall behind a slab is shown, and the room for the dimension beside a lying one. */
 const SLAB = { wall: 34, beside: 48, air: 16 }
