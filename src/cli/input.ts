@@ -1,7 +1,7 @@
 /** Reads the list of runs: a CSV file, standard input, or a job. */
 import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
-import { JobFile } from '#backend/job-file.ts'
+import { readJobFile } from '#backend/read-job.ts'
 import type { FieldKey, RunValues } from '#model/fields.ts'
 import type { Job } from '#model/job.ts'
 import { doubledTags, localIssues } from '#model/local-issues.ts'
@@ -96,12 +96,7 @@ function jobSentence(index: number, { tag }: RunValues, { column, found, allowed
 /** The job, or what stands against reading it. */
 function readJob(path: string): Job | string {
   try {
-    const file = JobFile.open(fullPath(path), join(programFolder, 'db'))
-    try {
-      return file.read().job
-    } finally {
-      file.close()
-    }
+    return readJobFile(fullPath(path), join(programFolder, 'db'))
   } catch (error) {
     if (error instanceof Error && error.name === 'AppError') return error.message
     throw error
