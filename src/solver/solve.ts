@@ -68,8 +68,9 @@ function solveFace(
   const radiated = (excessK: number): number =>
     radiationWPerM2K(system.emissivity, airC + excessK, surroundingsC) *
     (excessK - surroundingsExcessK)
-  const released = (excessK: number): number =>
-    convectionWPerM2K(face, weather, excessK) * excessK + radiated(excessK)
+  const convected = (excessK: number): number =>
+    excessK === 0 ? 0 : convectionWPerM2K(face, weather, excessK) * excessK
+  const released = (excessK: number): number => convected(excessK) + radiated(excessK)
   const drivenK = (excessK: number, flux: number): number =>
     acrossLayersK(system.layers, wall.formsM, airC + excessK, flux) + flux * insideKPerWPerM2
 
