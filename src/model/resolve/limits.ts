@@ -15,10 +15,13 @@ import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import type { Thing } from './standing.ts'
 
-/** Contact time where adults work [s]. Source: ASTM C1055 industrial design time, as quoted publicly. */
-const USUAL_CONTACT_S = 5
-/** Margin above the dew point [K]. Source: common practice, 0.5 to 1 K. */
-const USUAL_DEW_MARGIN_K = 1
+/** What a limit takes where nothing is given; each is said in a note, and the form shows it. */
+export const usualLimits = {
+  /** Contact time where adults work [s]. Source: ASTM C1055 industrial design time, as quoted publicly. */
+  contactS: 5,
+  /** Margin above the dew point [K]. Source: common practice, 0.5 to 1 K. */
+  dewMarginK: 1,
+}
 
 /** Without a thing or conditions (their own faults are already found) the rest is checked all the same. */
 export function resolveLimits(
@@ -66,16 +69,16 @@ function resolveBurn(
     }
     return { burn: null, bareBurn: null }
   }
-  const contactS = values.contactS ?? USUAL_CONTACT_S
+  const contactS = values.contactS ?? usualLimits.contactS
   if (values.contactS === undefined && values.reach === undefined) {
     findings.note(
       'reach-assumed',
-      `Touch is judged for a surface within reach of adults at work, ${USUAL_CONTACT_S} s of contact: nothing else is given.`,
+      `Touch is judged for a surface within reach of adults at work, ${usualLimits.contactS} s of contact: nothing else is given.`,
     )
   } else if (values.contactS === undefined) {
     findings.note(
       'contact-assumed',
-      `Touch is judged for ${USUAL_CONTACT_S} s of contact, where adults work.`,
+      `Touch is judged for ${usualLimits.contactS} s of contact, where adults work.`,
     )
   }
   const surface = touchedSurface(values, thing, finish, findings)
@@ -148,11 +151,11 @@ function resolveDamp(values: RunValues, { damp }: Conditions, findings: Findings
   if (values.dewMarginK === undefined) {
     findings.note(
       'dew-margin-assumed',
-      `The surface is kept ${USUAL_DEW_MARGIN_K} K above the dew point: no other margin is given.`,
+      `The surface is kept ${usualLimits.dewMarginK} K above the dew point: no other margin is given.`,
     )
   }
   return {
     dewPointC: dewPointC({ airC: damp.around.airC, humidity: values.humidity }),
-    marginK: values.dewMarginK ?? USUAL_DEW_MARGIN_K,
+    marginK: values.dewMarginK ?? usualLimits.dewMarginK,
   }
 }

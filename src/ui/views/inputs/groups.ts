@@ -1,5 +1,6 @@
 /** The fields of a run as a form: in groups, the usual ones first, the rest behind "More". */
 import type { FieldKey, RunValues } from '#model/fields.ts'
+import { usualLimits } from '#model/resolve/limits.ts'
 import { usualMoney } from '#model/resolve/money.ts'
 
 export interface FieldGroup {
@@ -103,8 +104,8 @@ export const standIns: Readonly<Partial<Record<FieldKey, string>>> = {
   method: 'detailed',
   reach: 'yes',
   touchClass: 'of the finish',
-  contactS: '5',
-  dewMarginK: '1',
+  contactS: String(usualLimits.contactS),
+  dewMarginK: String(usualLimits.dewMarginK),
   money: 'if fuel and hours are given',
   fuelPricePerKWh: 'of the fuel',
   efficiency: 'of the fuel',
