@@ -48,6 +48,8 @@ const symbols: Readonly<Record<string, string>> = {
   reynolds: 'Reynolds number',
   prandtl: 'Prandtl number',
   peclet: 'Re·Pr',
+  differenceK: 'temperature difference in K',
+  windMPerS: 'wind in m/s',
 }
 
 const short = (value: number): string => Number(value.toPrecision(3)).toString()
