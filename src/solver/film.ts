@@ -1,18 +1,23 @@
-/** The outer film by the `detailed` method: free and forced convection blended, properties at film temperature. */
+/** The outer film: a coefficient of convection on surface minus air, by the method chosen. */
 import { GRAVITY_M_PER_S2, kelvin } from './constants.ts'
 import { nusseltCylinderInWind, nusseltPlateInWind } from './convection/forced.ts'
 import {
-  type FreeFlow,
   nusseltHorizontalCylinder,
   nusseltPlateDrivingFlow,
   nusseltPlateHinderedFlow,
-  nusseltSlenderCylinder,
   nusseltVerticalCylinder,
   nusseltVerticalPlate,
 } from './convection/natural.ts'
-import { type Correlation, outOfRange } from './correlation.ts'
-import type { FaceShape } from './geometry.ts'
-import { airAt } from './properties/air.ts'
+import {
+  simplifiedFreePipe,
+  simplifiedFreeWall,
+  simplifiedWindOnPipe,
+  simplifiedWindOnWall,
+} from './convection/simplified.ts'
+import { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
+import type { FaceShape, FlowKind } from './geometry.ts'
+import { type Air, airAt, airViscosityPaS } from './properties/air.ts'
+import type { FilmChoice, System } from './types.ts'
 
 /** What the film needs of a design condition; the pressure is worked out once. */
 export interface Weather {
@@ -21,122 +26,178 @@ export interface Weather {
   readonly pressurePa: number
 }
 
-/** Film properties and the dimensionless numbers of one face at one surface temperature. */
-interface FilmState {
-  readonly conductivityWPerMK: number
-  readonly free: FreeFlow
-  readonly reynolds: number
+/** Coefficient of convection of one face [W/(m²·K)] by the excess of its surface over the air [K]. */
+export type Film = (excessK: number) => number
+
+export function filmOf(
+  face: FaceShape,
+  weather: Weather,
+  choice: FilmChoice,
+  inclinedFilm: System['inclinedFilm'],
+): Film {
+  if (face.flow === 'ground') return () => face.groundWPerM2K
+  if (typeof choice === 'object') return () => choice.fixedWPerM2K
+  return choice === 'simplified' && isSimplified(face.flow)
+    ? simplifiedFilm(face, weather, inclinedFilm)
+    : detailedFilm(face, weather, inclinedFilm)
 }
 
-function filmState(face: FaceShape, weather: Weather, excessK: number): FilmState {
-  const filmC = weather.airC + 0.5 * excessK
-  const air = airAt(filmC, weather.pressurePa)
-  const viscosity = air.kinematicViscosityM2PerS
-  const lengthM = face.freeLengthM
-  const rayleigh =
-    ((GRAVITY_M_PER_S2 * Math.abs(excessK) * lengthM * lengthM * lengthM) /
-      (kelvin(filmC) * viscosity * viscosity)) *
-    air.prandtl
-  return {
-    conductivityWPerMK: air.conductivityWPerMK,
-    free: { rayleigh, prandtl: air.prandtl },
-    reynolds: (weather.windMPerS * face.windLengthM) / viscosity,
+/** Soil and a fixed coefficient hold all of the heat that passes: nothing is radiated beside them. */
+export const radiates = (face: FaceShape, choice: FilmChoice): boolean =>
+  face.flow !== 'ground' && typeof choice !== 'object'
+
+/** Faces for which the simplified set has an equation; the others keep the detailed film. */
+export const isSimplified = (flow: FlowKind): boolean =>
+  flow !== 'up' && flow !== 'down' && flow !== 'sphere' && flow !== 'ground'
+
+export const isCylinder = (flow: FlowKind): boolean =>
+  flow === 'horizontal-cylinder' || flow === 'vertical-cylinder' || flow === 'inclined-cylinder'
+
+/**
+ * The `detailed` film: free and forced convection at film temperature, blended as (h_N^j + h_F^j)^(1/j), j = 4 for
+ * cylinders and spheres and 3 for flat faces, always assisting: smooth, without a switch of regime. Source: Incropera,
+ * mixed convection (from memory); the blend of the coefficients instead of the Nusselt numbers lets each part have its
+ * own length.
+ */
+function detailedFilm(
+  face: FaceShape,
+  weather: Weather,
+  inclinedFilm: System['inclinedFilm'],
+): Film {
+  const { airC, windMPerS, pressurePa } = weather
+  const takesHigher = inclinedFilm === 'higher'
+  if (windMPerS === 0) {
+    return (excessK) => {
+      const filmC = airC + 0.5 * excessK
+      return freeWPerM2K(face, airAt(filmC, pressurePa), kelvin(filmC), excessK, takesHigher)
+    }
   }
+  const forcedWPerM2K = windFilm(face, weather)
+  const isFlat = !isCylinder(face.flow) && face.flow !== 'sphere'
+  return (excessK) => {
+    const filmC = airC + 0.5 * excessK
+    const air = airAt(filmC, pressurePa)
+    const free = freeWPerM2K(face, air, kelvin(filmC), excessK, takesHigher)
+    const forced = forcedWPerM2K(excessK, air)
+    return isFlat
+      ? Math.cbrt(free * free * free + forced * forced * forced)
+      : Math.sqrt(Math.hypot(free * free, forced * forced))
+  }
+}
+
+/** gβ|Δθ|L³Pr/ν² with β = 1/T_film. */
+export function rayleighNumber(air: Air, filmK: number, excessK: number, lengthM: number): number {
+  const viscosity = air.kinematicViscosityM2PerS
+  return (
+    ((GRAVITY_M_PER_S2 * Math.abs(excessK) * lengthM * lengthM * lengthM) /
+      (filmK * viscosity * viscosity)) *
+    air.prandtl
+  )
 }
 
 /** True where buoyancy carries the air away from the surface: warm up, cold down. */
-const isDriving = (flow: 'up' | 'down', excessK: number): boolean =>
+export const isDriving = (flow: 'up' | 'down', excessK: number): boolean =>
   flow === 'up' ? excessK >= 0 : excessK < 0
 
-function freeNusselt(face: FaceShape, free: FreeFlow, excessK: number): number {
+function freeWPerM2K(
+  face: FaceShape,
+  air: Air,
+  filmK: number,
+  excessK: number,
+  takesHigher: boolean,
+): number {
+  const lengthM = face.freeLengthM
+  const { prandtl } = air
+  const rayleigh = rayleighNumber(air, filmK, excessK, lengthM)
+  const perLength = air.conductivityWPerMK / lengthM
   switch (face.flow) {
     case 'horizontal-cylinder':
-      return nusseltHorizontalCylinder(free)
-    case 'vertical-cylinder':
-      return nusseltVerticalCylinder({
-        rayleigh: free.rayleigh,
-        prandtl: free.prandtl,
-        slenderness: face.freeLengthM / face.windLengthM,
-      })
+      return nusseltHorizontalCylinder({ rayleigh, prandtl }) * perLength
+    case 'vertical-cylinder': {
+      const slenderness = lengthM / face.windLengthM
+      return nusseltVerticalCylinder({ rayleigh, prandtl, slenderness }) * perLength
+    }
+    case 'inclined-cylinder': {
+      const slenderness = lengthM / face.windLengthM
+      const upright = nusseltVerticalCylinder({ rayleigh, prandtl, slenderness }) * perLength
+      const lyingRayleigh = rayleigh / (slenderness * slenderness * slenderness)
+      const lying =
+        (nusseltHorizontalCylinder({ rayleigh: lyingRayleigh, prandtl }) * air.conductivityWPerMK) /
+        face.windLengthM
+      return takesHigher ? Math.max(upright, lying) : Math.min(upright, lying)
+    }
     case 'vertical-plate':
-      return nusseltVerticalPlate(free)
+      return nusseltVerticalPlate({ rayleigh, prandtl }) * perLength
+    case 'sphere':
+      return nusseltSphere({ rayleigh, prandtl }) * perLength
     case 'up':
     case 'down':
       return isDriving(face.flow, excessK)
-        ? nusseltPlateDrivingFlow(free)
-        : nusseltPlateHinderedFlow(free)
+        ? nusseltPlateDrivingFlow({ rayleigh, prandtl }) * perLength
+        : nusseltPlateHinderedFlow({ rayleigh, prandtl }) * perLength
+    case 'ground':
+      return face.groundWPerM2K
   }
 }
 
-const isCylinder = (face: FaceShape): boolean =>
-  face.flow === 'horizontal-cylinder' || face.flow === 'vertical-cylinder'
+/** Forced part by the excess and the air at film temperature; a sphere reads the air at its own temperature. */
+function windFilm(face: FaceShape, weather: Weather): (excessK: number, air: Air) => number {
+  const { windMPerS } = weather
+  const lengthM = face.windLengthM
+  if (face.flow === 'sphere') {
+    return (excessK) => {
+      const { wind, conductivityWPerMK } = sphereWind(face, weather, excessK)
+      return (nusseltSphereInWind(wind) * conductivityWPerMK) / lengthM
+    }
+  }
+  const nusselt = isCylinder(face.flow) ? nusseltCylinderInWind : nusseltPlateInWind
+  return (_, air) => {
+    const reynolds = (windMPerS * lengthM) / air.kinematicViscosityM2PerS
+    return (nusselt({ reynolds, prandtl: air.prandtl }) * air.conductivityWPerMK) / lengthM
+  }
+}
+
+export function sphereWind(face: FaceShape, weather: Weather, excessK: number) {
+  const { airC, windMPerS, pressurePa } = weather
+  const air = airAt(airC, pressurePa)
+  return {
+    wind: {
+      reynolds: (windMPerS * face.windLengthM) / air.kinematicViscosityM2PerS,
+      prandtl: air.prandtl,
+      viscosityRatio: airViscosityPaS(kelvin(airC)) / airViscosityPaS(kelvin(airC + excessK)),
+    },
+    conductivityWPerMK: air.conductivityWPerMK,
+  }
+}
 
 /**
- * Convection coefficient of one face [W/(m²·K)].
- *
- * `excessK` is surface minus air [K]. Free and forced parts are blended as (h_N^j + h_F^j)^(1/j), j = 4 for cylinders
- * and 3 for flat faces, always assisting: smooth, without a switch of regime. Source: Incropera, mixed convection
- * (from memory); the blend of the coefficients instead of the Nusselt numbers lets each part have its own length.
+ * The `simplified` film: the equations for indoors and for wind, the larger of the two, so that a faint breeze never
+ * cools less than still air.
  */
-export function convectionWPerM2K(face: FaceShape, weather: Weather, excessK: number): number {
-  const state = filmState(face, weather, excessK)
-  const free =
-    (freeNusselt(face, state.free, excessK) * state.conductivityWPerMK) / face.freeLengthM
-  if (weather.windMPerS === 0) return free
-  const wind = { reynolds: state.reynolds, prandtl: state.free.prandtl }
-  const onWindLength = state.conductivityWPerMK / face.windLengthM
-  if (isCylinder(face)) {
-    const forced = nusseltCylinderInWind(wind) * onWindLength
-    return (free ** 4 + forced ** 4) ** 0.25
-  }
-  const forced = nusseltPlateInWind(wind) * onWindLength
-  return Math.cbrt(free ** 3 + forced ** 3)
-}
-
-/** Film temperatures for which the fits of the air properties hold [°C]: 200 to 1000 K. */
-const FILM_RANGE_C = { from: -73.15, to: 726.85 }
-
-/** What to say about the formulas that a solved face used. */
-export function filmNotes(face: FaceShape, weather: Weather, excessK: number): string[] {
-  const state = filmState(face, weather, excessK)
-  const notes: string[] = []
-  const filmC = weather.airC + 0.5 * excessK
-  if (filmC < FILM_RANGE_C.from || filmC > FILM_RANGE_C.to) {
-    notes.push(
-      `Air at a film temperature of ${filmC.toFixed(0)} °C is outside the fitted range of its heat capacity, −73 to 727 °C.`,
-    )
-  }
-  if (weather.windMPerS > 0) {
-    const wind = { reynolds: state.reynolds, prandtl: state.free.prandtl }
-    notes.push(...outOfRange(isCylinder(face) ? nusseltCylinderInWind : nusseltPlateInWind, wind))
-  }
-  // A difference that is nothing makes no flow: no formula is in use.
-  if (Math.abs(excessK) > NEGLIGIBLE_EXCESS_K) notes.push(...freeNotes(face, state.free, excessK))
-  return notes
-}
-
-const NEGLIGIBLE_EXCESS_K = 0.01
-
-function freeNotes(face: FaceShape, free: FreeFlow, excessK: number): string[] {
-  switch (face.flow) {
-    case 'horizontal-cylinder':
-      return outOfRange(nusseltHorizontalCylinder, free)
-    case 'vertical-cylinder': {
-      const slender = { ...free, slenderness: face.freeLengthM / face.windLengthM }
-      const plate = nusseltVerticalPlate(free)
-      const usesSlender = nusseltVerticalCylinder(slender) > plate
-      return usesSlender
-        ? outOfRange(nusseltSlenderCylinder, slender)
-        : outOfRange(nusseltVerticalPlate, free)
-    }
-    case 'vertical-plate':
-      return outOfRange(nusseltVerticalPlate, free)
-    case 'up':
-    case 'down': {
-      const formula: Correlation<FreeFlow> = isDriving(face.flow, excessK)
-        ? nusseltPlateDrivingFlow
-        : nusseltPlateHinderedFlow
-      return outOfRange(formula, free)
-    }
+function simplifiedFilm(
+  face: FaceShape,
+  { windMPerS }: Weather,
+  inclinedFilm: System['inclinedFilm'],
+): Film {
+  const isPipe = isCylinder(face.flow)
+  const forced =
+    windMPerS === 0
+      ? 0
+      : isPipe
+        ? simplifiedWindOnPipe({ windMPerS, diameterM: face.windLengthM })
+        : simplifiedWindOnWall({ windMPerS, lengthM: face.windLengthM })
+  return (excessK) => {
+    const differenceK = Math.abs(excessK)
+    const lying =
+      face.flow === 'horizontal-cylinder' || face.flow === 'inclined-cylinder'
+        ? simplifiedFreePipe({ differenceK, diameterM: face.windLengthM })
+        : null
+    const upright =
+      face.flow === 'horizontal-cylinder'
+        ? null
+        : simplifiedFreeWall({ differenceK, heightM: face.freeLengthM })
+    if (lying === null || upright === null) return Math.max(forced, lying ?? upright ?? 0)
+    const free = inclinedFilm === 'higher' ? Math.max(lying, upright) : Math.min(lying, upright)
+    return Math.max(forced, free)
   }
 }

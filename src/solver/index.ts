@@ -10,10 +10,11 @@ export {
   nusseltVerticalCylinder,
   nusseltVerticalPlate,
 } from './convection/natural.ts'
-export { wallOf } from './geometry.ts'
+export { grown, wallOf } from './geometry.ts'
+export { beyondCurveK, notesOf } from './notes.ts'
 export { airAt, standardPressurePa } from './properties/air.ts'
 export { dewPointC, saturationPressurePa } from './properties/moist-air.ts'
 export { radiationWPerM2K } from './radiation.ts'
 export { bracketedRoot } from './root.ts'
-export { beyondCurveK, solve } from './solve.ts'
+export { acrossLayersK, solve } from './solve.ts'
 export { sources } from './sources.ts'

@@ -78,3 +78,89 @@ export function bracketedRoot(
     step = Math.min(Math.max(step, least), 1 - least)
   }
 }
+
+export interface Guess {
+  readonly at: number
+  /** What the function rises by there for each unit of its argument, > 0. */
+  readonly slope: number
+}
+
+/**
+ * Root of a function known not to be positive at `low` nor negative at `high`, looked for from a good guess.
+ *
+ * Neither end is evaluated unless the search comes to it. Steps go by the slope of the guess, then by the secant, then
+ * by inverse quadratic interpolation; a step that leaves the bracket, or a bracket that does not shrink while the value
+ * does not either, is answered with bisection. So it ends for every function, on a jump too, where `value` stays large;
+ * `otherEnd` is then the far side of the jump.
+ */
+export function risingRoot(
+  f: (x: number) => number,
+  {
+    low,
+    high,
+    guess,
+    value: closed,
+  }: {
+    readonly low: number
+    readonly high: number
+    readonly guess: Guess
+    /** Stop when the function is this near to zero. */
+    readonly value: number
+  },
+): Root {
+  let from = low
+  let to = high
+  let x = Math.min(Math.max(guess.at, from), to)
+  let value = f(x)
+  let evaluations = 1
+  // The two points before the present one, newest first.
+  let x1 = Number.NaN
+  let f1 = Number.NaN
+  let x2 = Number.NaN
+  let f2 = Number.NaN
+  let slowSteps = 0
+  for (;;) {
+    if (value > 0) to = x
+    else from = x
+    const smallest = 2 * Number.EPSILON * Math.max(Math.abs(from), Math.abs(to))
+    if (Math.abs(value) <= closed || to - from <= smallest || evaluations >= MAX_EVALUATIONS) {
+      return { at: x, value, otherEnd: x === to ? from : to, evaluations }
+    }
+    let next = interpolated(x, value, x1, f1, x2, f2, guess.slope)
+    const isSlow = slowSteps >= 2
+    if (!(next > from && next < to) || isSlow) {
+      next = from + 0.5 * (to - from)
+      slowSteps = 0
+      if (next <= from || next >= to) {
+        return { at: x, value, otherEnd: x === to ? from : to, evaluations }
+      }
+    }
+    x2 = x1
+    f2 = f1
+    x1 = x
+    f1 = value
+    x = next
+    value = f(x)
+    evaluations += 1
+    slowSteps = Math.abs(value) > 0.5 * Math.abs(f1) ? slowSteps + 1 : 0
+  }
+}
+
+/** The next point by as many of the last three as there are and as differ. */
+function interpolated(
+  x: number,
+  f: number,
+  x1: number,
+  f1: number,
+  x2: number,
+  f2: number,
+  slope: number,
+): number {
+  if (Number.isNaN(f1) || f1 === f) return x - f / slope
+  if (Number.isNaN(f2) || f2 === f || f2 === f1) return x - (f * (x - x1)) / (f - f1)
+  return (
+    (x * f1 * f2) / ((f - f1) * (f - f2)) +
+    (x1 * f * f2) / ((f1 - f) * (f1 - f2)) +
+    (x2 * f * f1) / ((f2 - f) * (f2 - f1))
+  )
+}

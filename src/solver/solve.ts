@@ -1,137 +1,211 @@
 import { layerDifferenceK } from './conductivity.ts'
-import { convectionWPerM2K, filmNotes, type Weather } from './film.ts'
+import { filmOf, radiates, type Weather } from './film.ts'
 import { type FaceShape, type Wall, wallOf } from './geometry.ts'
 import { standardPressurePa } from './properties/air.ts'
 import { radiationWPerM2K } from './radiation.ts'
-import { bracketedRoot } from './root.ts'
-import type { Conductivity, Face, Layer, Note, Solution, System } from './types.ts'
+import { bracketedRoot, risingRoot } from './root.ts'
+import type { Closure, Face, Layer, Solution, System } from './types.ts'
 
 /**
  * Steady heat balance of a lagged or bare surface.
  *
- * The unknown of each face is the excess of its surface over the air. A trial excess gives the flux of film and
- * radiation; that flux, carried inwards layer by layer, gives the medium temperature that would drive it; the excess is
+ * The unknown of each face is the excess of its surface over the air. A trial excess gives the flux of film, radiation
+ * and sun; that flux, carried inwards layer by layer, gives the medium temperature that would drive it; the excess is
  * right when that is the medium's own. So λ(T) is integrated exactly, any number of layers needs no inner iteration, and
- * the balance is one search in one unknown. It rises with the unknown save where a correlation
- * steps; there the search ends on one of the answers that close it, or on the step itself, and says so. Temperatures between −200 and 1000 °C; layers inside to outside.
- * Never throws and never gives NaN for finite input in the ranges of `model/fields.ts`.
+ * the balance is one search in one unknown. It rises with the unknown save where a correlation steps; there the search
+ * ends on one of the answers that close it, or on the step itself, and `closure` says so. Temperatures between −200 and
+ * 1000 °C; layers inside to outside. Never throws and never gives NaN for finite input in the ranges of
+ * `model/fields.ts`.
  */
 export function solve(system: System): Solution {
   const wall = wallOf(system.shape, system.layers)
-  const weather: Weather = {
-    airC: system.around.airC,
-    windMPerS: system.around.windMPerS,
-    pressurePa: standardPressurePa(system.around.altitudeM),
+  const weather = weatherOf(system)
+  const faces: Face[] = []
+  let filmEvaluations = 0
+  for (const shape of wall.faces) {
+    const solved = solveFace(system, shape, weather)
+    faces.push(solved.face)
+    filmEvaluations += solved.filmEvaluations
   }
-  const notes: Note[] = []
-  const faces = wall.faces.map((face) => solveFace(system, wall, face, weather, notes))
-  const mean = (pick: (face: Face) => number): number =>
-    faces.reduce((sum, face) => sum + face.share * pick(face), 0)
-  const heatFluxWPerM2 = mean((face) => face.heatFluxWPerM2)
-  notes.push(...conductivityNotes(system.layers, faces))
+  return { ...areaMean(system, wall, faces), faces, filmEvaluations }
+}
+
+export const weatherOf = ({ around }: System): Weather => ({
+  airC: around.airC,
+  windMPerS: around.windMPerS,
+  pressurePa: standardPressurePa(around.altitudeM),
+})
+
+function areaMean(
+  system: System,
+  wall: Wall,
+  faces: readonly Face[],
+): Omit<Solution, 'faces' | 'filmEvaluations'> {
+  const [only] = faces
+  const mean = (pick: (face: Face) => number): number => {
+    let sum = 0
+    for (const face of faces) sum += face.share * pick(face)
+    return sum
+  }
+  const averaged =
+    only && faces.length === 1
+      ? only
+      : {
+          heatFluxWPerM2: mean((face) => face.heatFluxWPerM2),
+          surfaceTempC: mean((face) => face.surfaceTempC),
+          convectionWPerM2K: mean((face) => face.convectionWPerM2K),
+          radiationWPerM2K: mean((face) => face.radiationWPerM2K),
+          interfaceTempsC: Array.from({ length: system.layers.length + 1 }, (_, index) =>
+            mean((face) => face.interfaceTempsC[index] ?? face.surfaceTempC),
+          ),
+        }
+  const heatFlowWPerUnit = averaged.heatFluxWPerM2 * wall.outerAreaM2PerUnit
   return {
-    heatLossWPerM: wall.outerAreaM2PerM === null ? null : heatFluxWPerM2 * wall.outerAreaM2PerM,
-    heatFluxWPerM2,
-    surfaceTempC: mean((face) => face.surfaceTempC),
-    convectionWPerM2K: mean((face) => face.convectionWPerM2K),
-    radiationWPerM2K: mean((face) => face.radiationWPerM2K),
-    interfaceTempsC: Array.from({ length: system.layers.length + 1 }, (_, index) =>
-      mean((face) => face.interfaceTempsC[index] ?? face.surfaceTempC),
-    ),
-    faces,
+    unit: wall.unit,
+    heatFlowWPerUnit,
+    outerAreaM2PerUnit: wall.outerAreaM2PerUnit,
+    heatLossWPerM: wall.unit === 'm' ? heatFlowWPerUnit : null,
+    heatFluxWPerM2: averaged.heatFluxWPerM2,
+    surfaceTempC: averaged.surfaceTempC,
+    convectionWPerM2K: averaged.convectionWPerM2K,
+    radiationWPerM2K: averaged.radiationWPerM2K,
+    interfaceTempsC: averaged.interfaceTempsC,
     outerDiameterM: wall.outerDiameterM,
-    outerAreaM2PerM: wall.outerAreaM2PerM,
-    notes: withoutRepeats(notes),
   }
 }
 
 /** The balance counts as closed when film and conduction differ by less than this share of the driving difference. */
-const CLOSED = 1e-12
+const CLOSED = 1e-11
 /** More than this share left over means that the search ended on a jump of a correlation. */
 const JUMP = 1e-9
 /** And never less than this is left over [K]: a difference of almost nothing has no share to judge by. */
 const NOTHING_K = 1e-12
 
-function solveFace(
-  system: System,
-  wall: Wall,
-  face: FaceShape,
-  weather: Weather,
-  notes: Note[],
-): Face {
+interface SolvedFace {
+  readonly face: Face
+  readonly filmEvaluations: number
+}
+
+function solveFace(system: System, face: FaceShape, weather: Weather): SolvedFace {
+  const { layers, emissivity, sunAbsorbedWPerM2 } = system
   const { airC, surroundingsC } = system.around
   const mediumExcessK = system.mediumC - airC
-  const surroundingsExcessK = surroundingsC - airC
+  const hasRadiation = radiates(face, system.film)
+  const surroundingsExcessK = hasRadiation ? surroundingsC - airC : 0
   const insideKPerWPerM2 =
-    system.insideFilmWPerM2K === null ? 0 : wall.outerOverInner / system.insideFilmWPerM2K
+    system.insideFilmWPerM2K === null ? 0 : face.outerOverInner / system.insideFilmWPerM2K
+  const film = filmOf(face, weather, system.film, system.inclinedFilm)
 
-  const radiated = (excessK: number): number =>
-    radiationWPerM2K(system.emissivity, airC + excessK, surroundingsC) *
-    (excessK - surroundingsExcessK)
-  const convected = (excessK: number): number =>
-    excessK === 0 ? 0 : convectionWPerM2K(face, weather, excessK) * excessK
-  const released = (excessK: number): number => convected(excessK) + radiated(excessK)
+  let filmEvaluations = 0
+  // The last film is kept: the search ends where it looked last, and its film is that of the answer.
+  let filmAtK = Number.NaN
+  let convection = 0
+  const convectionAt = (excessK: number): number => {
+    if (excessK !== filmAtK) {
+      filmEvaluations += 1
+      filmAtK = excessK
+      convection = film(excessK)
+    }
+    return convection
+  }
+  const radiationAt = (excessK: number): number =>
+    hasRadiation ? radiationWPerM2K(emissivity, airC + excessK, surroundingsC) : 0
+  const fluxAt = (excessK: number): number =>
+    (excessK === 0 ? 0 : convectionAt(excessK) * excessK) +
+    radiationAt(excessK) * (excessK - surroundingsExcessK) -
+    sunAbsorbedWPerM2
   const drivenK = (excessK: number, flux: number): number =>
-    acrossLayersK(system.layers, wall.formsM, airC + excessK, flux) + flux * insideKPerWPerM2
+    acrossLayersK(layers, face.formsM, airC + excessK, flux) + flux * insideKPerWPerM2
 
-  const finish = (excessK: number, flux: number, convection: number): Face => {
-    for (const text of filmNotes(face, weather, excessK)) notes.push({ code: 'film-range', text })
-    return {
+  const finished = (
+    excessK: number,
+    flux: number,
+    convectionWPerM2K: number,
+    closure: Closure,
+  ): SolvedFace => ({
+    face: {
       side: face.side,
       surfaceTempC: airC + excessK,
       heatFluxWPerM2: flux,
-      convectionWPerM2K: convection,
-      radiationWPerM2K: radiationWPerM2K(system.emissivity, airC + excessK, surroundingsC),
-      interfaceTempsC: interfaces(system.layers, wall.formsM, airC + excessK, flux),
+      convectionWPerM2K,
+      radiationWPerM2K: radiationAt(excessK),
+      interfaceTempsC: interfaces(layers, face.formsM, airC + excessK, flux),
       share: face.share,
-    }
-  }
-  const finishOnFilm = (excessK: number): Face => {
-    const convection = convectionWPerM2K(face, weather, excessK)
-    return finish(excessK, convection * excessK + radiated(excessK), convection)
-  }
-
-  if (system.layers.length === 0 && insideKPerWPerM2 === 0) {
-    return finishOnFilm(mediumExcessK)
-  }
-
-  const root = bracketedRoot(
-    (excessK) => excessK + drivenK(excessK, released(excessK)) - mediumExcessK,
-    {
-      low: Math.min(mediumExcessK, surroundingsExcessK, 0),
-      high: Math.max(mediumExcessK, surroundingsExcessK, 0),
+      closure,
     },
-    { width: 0, value: CLOSED * Math.abs(mediumExcessK - surroundingsExcessK) },
-  )
+    filmEvaluations,
+  })
+
+  if (layers.length === 0 && insideKPerWPerM2 === 0) {
+    const flux = fluxAt(mediumExcessK)
+    return finished(mediumExcessK, flux, convectionAt(mediumExcessK), 'closed')
+  }
+
+  const balance = (excessK: number): number =>
+    excessK + drivenK(excessK, fluxAt(excessK)) - mediumExcessK
+  const low = Math.min(mediumExcessK, surroundingsExcessK, 0)
+  const high = sunlitK(Math.max(mediumExcessK, surroundingsExcessK, 0), sunAbsorbedWPerM2, fluxAt)
+  // A first guess with a plain film: the layers' own resistance is known.
+  const plainW = PLAIN_FILM_W_PER_M2_K + radiationAt(0)
+  const resistance = drivenK(mediumExcessK / 2, 1)
+  const guess = guessed(mediumExcessK, surroundingsExcessK, resistance, plainW, radiationAt(0))
+  const root = risingRoot(balance, {
+    low,
+    high,
+    guess: { at: guess, slope: 1 + resistance * plainW * STIFFENING },
+    value: CLOSED * Math.max(Math.abs(mediumExcessK - surroundingsExcessK), Math.abs(high - low)),
+  })
   const excessK = root.at
   const differenceK = Math.max(Math.abs(mediumExcessK - excessK), Math.abs(excessK))
-  if (Math.abs(root.value) <= Math.max(JUMP * differenceK, NOTHING_K)) return finishOnFilm(excessK)
+  if (Math.abs(root.value) <= Math.max(JUMP * differenceK, NOTHING_K)) {
+    return finished(excessK, fluxAt(excessK), convectionAt(excessK), 'closed')
+  }
 
   // The bracket closed in on a jump between two ranges of a correlation: the flux that the layers carry lies between
   // the fluxes of the two sides, and that flux closes the balance.
-  const fluxHere = released(excessK)
-  const fluxBeyond = released(root.otherEnd)
+  const fluxHere = fluxAt(excessK)
+  const fluxBeyond = fluxAt(root.otherEnd)
   if (Math.abs(fluxHere - fluxBeyond) <= JUMP * Math.abs(fluxHere)) {
-    notes.push({
-      code: 'conductivity-steep',
-      text: 'The conductivity falls so steeply with temperature that more than one state would fit: do not rely on this result.',
-    })
-    return finishOnFilm(excessK)
+    return finished(excessK, fluxAt(excessK), convectionAt(excessK), 'steep')
   }
   const flux = bracketedRoot(
     (trial) => excessK + drivenK(excessK, trial) - mediumExcessK,
     { low: Math.min(fluxHere, fluxBeyond), high: Math.max(fluxHere, fluxBeyond) },
     { width: 0, value: 0 },
   ).at
-  notes.push({
-    code: 'film-jump',
-    text: `${capital(face.side)}: the balance falls on the jump between two ranges of the film formula; the coefficient that closes it lies between the two.`,
-  })
-  return finish(excessK, flux, (flux - radiated(excessK)) / excessK)
+  const radiated = radiationAt(excessK) * (excessK - surroundingsExcessK) - sunAbsorbedWPerM2
+  return finished(excessK, flux, (flux - radiated) / excessK, 'on-jump')
+}
+
+/** A coefficient of convection as good as any to begin with; only the first guess depends on it [W/(m²·K)]. */
+const PLAIN_FILM_W_PER_M2_K = 4
+/** A film grows with its difference: its slope is so much more than its coefficient. Only speed depends on it. */
+const STIFFENING = 1.2
+
+/** Where the surface would stand if the films were straight lines. */
+function guessed(
+  mediumExcessK: number,
+  surroundingsExcessK: number,
+  resistance: number,
+  filmWPerM2K: number,
+  radiationPart: number,
+): number {
+  return (
+    (mediumExcessK + resistance * radiationPart * surroundingsExcessK) /
+    (1 + resistance * filmWPerM2K)
+  )
+}
+
+/** The sun can heat a surface above medium, air and surroundings: a bound at which it gives off more than it takes up. */
+function sunlitK(highK: number, sunWPerM2: number, fluxAt: (excessK: number) => number): number {
+  if (sunWPerM2 === 0) return highK
+  for (let addedK = 0.1 * sunWPerM2; ; addedK *= 2) {
+    if (fluxAt(highK + addedK) >= 0) return highK + addedK
+  }
 }
 
 /** Inner minus outer temperature over all layers [K], for a flux on the outer area. */
-function acrossLayersK(
+export function acrossLayersK(
   layers: readonly Layer[],
   formsM: readonly number[],
   surfaceC: number,
@@ -165,41 +239,3 @@ function interfaces(
   }
   return tempsC
 }
-
-/** A layer read beyond the ends of its curve, judged at the layer's mean temperature. */
-function conductivityNotes(layers: readonly Layer[], faces: readonly Face[]): Note[] {
-  const notes: Note[] = []
-  layers.forEach(({ conductivity }, index) => {
-    for (const { interfaceTempsC } of faces) {
-      const beyondK = beyondCurveK(
-        conductivity,
-        ((interfaceTempsC[index] ?? 0) + (interfaceTempsC[index + 1] ?? 0)) / 2,
-      )
-      if (beyondK === 0 || conductivity.kind === 'constant') continue
-      const [first, last] = curveEndsC(conductivity)
-      notes.push({
-        code: 'conductivity-extrapolated',
-        text: `Layer ${index + 1}: its mean temperature is ${Math.max(1, Math.abs(beyondK)).toFixed(0)} K ${beyondK > 0 ? 'above' : 'below'} the conductivity curve, which holds from ${first} to ${last} °C.`,
-      })
-      return
-    }
-  })
-  return notes
-}
-
-/** How far a layer's mean temperature lies beyond its curve [K]: positive above, negative below, 0 within. */
-export function beyondCurveK(conductivity: Conductivity, meanC: number): number {
-  if (conductivity.kind === 'constant') return 0
-  const [first, last] = curveEndsC(conductivity)
-  return meanC > last ? meanC - last : meanC < first ? meanC - first : 0
-}
-
-function curveEndsC({ pointsC }: Extract<Conductivity, { kind: 'curve' }>): [number, number] {
-  return [pointsC[0] ?? 0, pointsC[pointsC.length - 1] ?? 0]
-}
-
-function withoutRepeats(notes: readonly Note[]): Note[] {
-  return notes.filter((note, index) => notes.findIndex(({ text }) => text === note.text) === index)
-}
-
-const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)

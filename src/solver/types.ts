@@ -24,9 +24,17 @@ export type Shape =
   | {
       readonly kind: 'pipe'
       readonly outerDiameterM: number
-      readonly orientation: 'vertical'
+      readonly orientation: 'vertical' | 'inclined'
       /** Height of the run [m]: the length of the boundary layer. */
       readonly riseM: number
+    }
+  | {
+      /** Laid in soil whose surface is at the air's temperature. */
+      readonly kind: 'buried-pipe'
+      readonly outerDiameterM: number
+      /** Of the axis below the surface [m]. */
+      readonly depthM: number
+      readonly soilWPerMK: number
     }
   | {
       readonly kind: 'rect-duct'
@@ -41,6 +49,20 @@ export type Shape =
       /** Height of a vertical surface, area/perimeter of a horizontal one [m]. */
       readonly characteristicLengthM: number
     }
+  | { readonly kind: 'sphere'; readonly outerDiameterM: number }
+  | {
+      readonly kind: 'vessel'
+      readonly outerDiameterM: number
+      /** Length or height of the cylindrical shell between its heads [m]. */
+      readonly shellLengthM: number
+      readonly orientation: 'horizontal' | 'vertical'
+      readonly heads: Heads
+    }
+
+export type Heads = 'flat' | 'domed'
+
+/** What heat flow and area are counted by: a metre of run, a square metre, or the whole thing. */
+export type Unit = 'm' | 'm2' | 'piece'
 
 /** The air and the surfaces around a run under one design condition. */
 export interface Surroundings {
@@ -50,6 +72,12 @@ export interface Surroundings {
   readonly windMPerS: number
   readonly altitudeM: number
 }
+
+/**
+ * How the outer film is worked out. A fixed coefficient is convection and radiation together on surface minus air,
+ * and then emissivity and surroundings count for nothing.
+ */
+export type FilmChoice = 'detailed' | 'simplified' | { readonly fixedWPerM2K: number }
 
 export interface System {
   readonly shape: Shape
@@ -61,17 +89,36 @@ export interface System {
   /** Film between medium and inner surface [W/(m²·K)]; null where it is neglected. */
   readonly insideFilmWPerM2K: number | null
   readonly around: Surroundings
+  /** Sun taken up, absorptance times irradiance, on each m² of the outer surface [W/m²], ≥ 0. */
+  readonly sunAbsorbedWPerM2: number
+  readonly film: FilmChoice
+  /** Inclined pipes lie between two films: the lower is cautious for a temperature, the higher for a loss. */
+  readonly inclinedFilm: 'lower' | 'higher'
 }
 
-/** A finding of the solver that a reader should know; never an exception. `code` is film-range, film-jump, conductivity-extrapolated or conductivity-steep. */
+/**
+ * A finding of the solver that a reader should know; never an exception. `code` is film-range, film-jump, film-method,
+ * duct-corners, vessel-heads, conductivity-extrapolated or conductivity-steep.
+ */
 export interface Note {
   readonly code: string
   readonly text: string
 }
 
-export type SideName = 'all round' | 'side' | 'top' | 'bottom'
+export type SideName =
+  | 'all round'
+  | 'side'
+  | 'top'
+  | 'bottom'
+  | 'shell'
+  | 'heads'
+  | 'top head'
+  | 'bottom head'
 
-/** One face of the surface: all of a pipe; side, top or bottom of a rectangular duct. */
+/** How the balance of a face was closed; the last two are said in a note. */
+export type Closure = 'closed' | 'on-jump' | 'steep'
+
+/** One face of the surface: all of a pipe; side, top or bottom of a rectangular duct; shell or head of a vessel. */
 export interface Face {
   readonly side: SideName
   readonly surfaceTempC: number
@@ -82,12 +129,18 @@ export interface Face {
   readonly interfaceTempsC: readonly number[]
   /** Share of the outer area. */
   readonly share: number
+  readonly closure: Closure
 }
 
 export interface Solution {
-  /** Null for a flat surface. */
+  readonly unit: Unit
+  /** Outwards, for one unit [W/m, W/m² or W]. */
+  readonly heatFlowWPerUnit: number
+  /** Outer area of one unit [m²]. */
+  readonly outerAreaM2PerUnit: number
+  /** Null where the unit is not a metre of run. */
   readonly heatLossWPerM: number | null
-  /** On the outer area, mean of the faces. */
+  /** On the outer area, mean of the faces: what passes outwards, the sun's share taken off. */
   readonly heatFluxWPerM2: number
   /** Area mean of the faces. */
   readonly surfaceTempC: number
@@ -95,9 +148,8 @@ export interface Solution {
   readonly radiationWPerM2K: number
   readonly interfaceTempsC: readonly number[]
   readonly faces: readonly Face[]
-  /** Outer diameter of a pipe or round duct [m], else null. */
+  /** Outer diameter of a pipe, round duct, sphere or vessel [m], else null. */
   readonly outerDiameterM: number | null
-  /** Outer area per metre [m²/m]; null for a flat surface. */
-  readonly outerAreaM2PerM: number | null
-  readonly notes: readonly Note[]
+  /** How often the film was worked out, all faces together. */
+  readonly filmEvaluations: number
 }

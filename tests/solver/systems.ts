@@ -16,8 +16,17 @@ export const constant = (thicknessM: number, conductivityWPerMK: number): Layer 
   conductivity: { kind: 'constant', conductivityWPerMK },
 })
 
-export const hasJump = ({ notes }: Solution): boolean =>
-  notes.some(({ code }) => code === 'film-jump')
+/** What a system has besides shape, layers, medium and air where a test says nothing else. */
+export const plainFilm = {
+  emissivity: 0.9,
+  insideFilmWPerM2K: null,
+  sunAbsorbedWPerM2: 0,
+  film: 'detailed',
+  inclinedFilm: 'higher',
+} as const satisfies Partial<System>
+
+export const hasJump = ({ faces }: Solution): boolean =>
+  faces.some(({ closure }) => closure === 'on-jump')
 
 /** Convection and radiation at a face, from its reported coefficients and temperature [W/m²]. */
 export function flowsOf(

@@ -24,23 +24,34 @@ const VISCOSITY_SCALE =
  * Absolute temperature [K], 60 to 2000 K. Source: Lemmon and Jacobsen 2004, eqs. (1) to (3).
  */
 export function airViscosityPaS(temperatureK: number): number {
-  const x = Math.log(temperatureK / COLLISION_ENERGY_K)
-  const omega = Math.exp(0.431 + x * (-0.4623 + x * (0.08406 + x * (0.005341 + x * -0.00331))))
-  return (1e-6 * VISCOSITY_SCALE * Math.sqrt(temperatureK)) / omega
+  return viscosityPaS(temperatureK, Math.log(temperatureK / COLLISION_ENERGY_K))
 }
+
+/** The logarithm is handed in: the conductivity shares it on the hot path. */
+function viscosityPaS(temperatureK: number, lnReduced: number): number {
+  const x = lnReduced
+  const lnOmega = 0.431 + x * (-0.4623 + x * (0.08406 + x * (0.005341 + x * -0.00331)))
+  return 1e-6 * VISCOSITY_SCALE * Math.sqrt(temperatureK) * Math.exp(-lnOmega)
+}
+
+/** ln(132.6312/103.3): from the temperature reduced by the collision energy to that reduced by the critical one. */
+const LN_REDUCING_RATIO = Math.log(REDUCING_TEMPERATURE_K / COLLISION_ENERGY_K)
 
 /**
  * Thermal conductivity of dilute air [W/(m·K)].
  *
  * Absolute temperature [K] and viscosity at it [Pa·s]. Source: Lemmon and Jacobsen 2004, eq. (6).
  */
-export function airConductivityWPerMK(temperatureK: number, viscosityPaS: number): number {
-  // tau^-0.3 and tau^-1.1 share one logarithm: this line is on the hot path.
-  const lnTau = Math.log(REDUCING_TEMPERATURE_K / temperatureK)
-  return (
-    1e-3 *
-    (1.308 * viscosityPaS * 1e6 + 1.405 * Math.exp(-1.1 * lnTau) - 1.036 * Math.exp(-0.3 * lnTau))
-  )
+export function airConductivityWPerMK(temperatureK: number, viscosity: number): number {
+  return conductivityWPerMK(Math.log(temperatureK / COLLISION_ENERGY_K), viscosity)
+}
+
+function conductivityWPerMK(lnReduced: number, viscosity: number): number {
+  // tau^-0.3 and tau^-1.1 are the third and eleventh power of one exponential: this line is on the hot path.
+  const tenth = Math.exp(0.1 * (lnReduced - LN_REDUCING_RATIO))
+  const third = tenth * tenth * tenth
+  const fourth = third * tenth
+  return 1e-3 * (1.308e6 * viscosity + 1.405 * fourth * fourth * third - 1.036 * third)
 }
 
 /**
@@ -60,8 +71,9 @@ export function airHeatCapacityJPerKgK(temperatureK: number): number {
  */
 export function airAt(tempC: number, pressurePa: number): Air {
   const T = kelvin(tempC)
-  const viscosity = airViscosityPaS(T)
-  const conductivity = airConductivityWPerMK(T, viscosity)
+  const lnReduced = Math.log(T / COLLISION_ENERGY_K)
+  const viscosity = viscosityPaS(T, lnReduced)
+  const conductivity = conductivityWPerMK(lnReduced, viscosity)
   return {
     conductivityWPerMK: conductivity,
     kinematicViscosityM2PerS: (viscosity * GAS_CONSTANT_J_PER_KG_K * T) / pressurePa,
