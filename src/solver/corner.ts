@@ -40,7 +40,5 @@ export function edgeFactorResistanceMKPerW(layer: RectangularLayer): number {
 export function cornerExcessFraction(layer: RectangularLayer): number {
   const { innerPerimeterM, thicknessM } = layer
   const excessEdge = MEAN_PERIMETER_EDGE - EDGE_SHAPE_FACTOR
-  return (
-    (4 * excessEdge * thicknessM) / (innerPerimeterM + 4 * EDGE_SHAPE_FACTOR * thicknessM)
-  )
+  return (4 * excessEdge * thicknessM) / (innerPerimeterM + 4 * EDGE_SHAPE_FACTOR * thicknessM)
 }

@@ -50,6 +50,7 @@ const symbols: Readonly<Record<string, string>> = {
   peclet: 'Re·Pr',
   differenceK: 'temperature difference in K',
   windMPerS: 'wind in m/s',
+  airC: 'air temperature in °C',
 }
 
 const short = (value: number): string => Number(value.toPrecision(3)).toString()
