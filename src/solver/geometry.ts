@@ -128,6 +128,9 @@ function pipeWall(shape: Of<'pipe'>, layers: readonly Layer[]): Wall {
   }
 }
 
+/** In place of soil that is not there, for a pipe whose layers reach up out of it: hardly any resistance [W/(m²·K)]. */
+const NO_SOIL_W_PER_M2_K = 1e6
+
 /** The soil is the film of a buried pipe: 1/(R_E·π·D_e) on its outer area, towards the temperature of the surface. */
 function buriedWall(shape: Of<'buried-pipe'>, layers: readonly Layer[]): Wall {
   const conduction = cylinderConduction(shape.outerDiameterM / 2, layers)
@@ -146,7 +149,10 @@ function buriedWall(shape: Of<'buried-pipe'>, layers: readonly Layer[]): Wall {
     faces: [
       {
         ...face('all round', 'ground', lengths, 1, conduction),
-        groundWPerM2K: 1 / (soilMKPerW * areaM2PerM),
+        groundWPerM2K:
+          soilMKPerW === null
+            ? NO_SOIL_W_PER_M2_K
+            : Math.min(1 / (soilMKPerW * areaM2PerM), NO_SOIL_W_PER_M2_K),
       },
     ],
   }

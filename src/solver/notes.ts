@@ -1,5 +1,5 @@
 /** What a reader should know of a solved system. Worked out apart, since only results that are shown need it. */
-import { cornerExcess } from './corner.ts'
+import { cornerExcessFraction } from './corner.ts'
 import { isSimplified } from './film.ts'
 import { filmNotes } from './film-notes.ts'
 import { wallOf } from './geometry.ts'
@@ -23,7 +23,7 @@ export function notesOf(system: System, solution: Solution): Note[] {
       text: `The film follows the simplified equations, which are recalled and not read: verify them against your own copy of ISO 12241.${all ? '' : ' They have none for surfaces that lie or for spheres: there the detailed film stands.'}`,
     })
   }
-  notes.push(...cornerNotes(system), ...headNotes(system))
+  notes.push(...cornerNotes(system), ...headNotes(system), ...soilNotes(system, solution))
   notes.push(...conductivityNotes(system.layers, solution.faces))
   return withoutRepeats(notes)
 }
@@ -54,9 +54,11 @@ const CORNERS_DIFFER = 0.05
 
 function cornerNotes({ shape, layers }: System): Note[] {
   if (shape.kind !== 'rect-duct' || layers.length === 0) return []
-  const excess = cornerExcess({
+  const excess = cornerExcessFraction({
     innerPerimeterM: 2 * (shape.widthM + shape.heightM),
     thicknessM: layers.reduce((sumM, { thicknessM }) => sumM + thicknessM, 0),
+    // Any other gives the same ratio.
+    conductivityWPerMK: 1,
   })
   if (excess <= CORNERS_DIFFER) return []
   return [
@@ -74,6 +76,16 @@ function headNotes({ shape }: System): Note[] {
       ? 'The domed heads are reckoned as half ellipsoids half as high as wide: they conduct as the half sphere of their area and are cooled as a sphere.'
       : 'The flat heads are reckoned as discs over their outer area; the edge where shell and head meet is not reckoned apart.'
   return [{ code: 'vessel-heads', text }]
+}
+
+function soilNotes({ shape }: System, { outerDiameterM }: Solution): Note[] {
+  if (shape.kind !== 'buried-pipe' || 2 * shape.depthM >= (outerDiameterM ?? 0)) return []
+  return [
+    {
+      code: 'soil-shallow',
+      text: 'Pipe and layers reach up out of the soil, which was taken as no resistance at all: the loss is overstated, the surface stands at the temperature of the ground.',
+    },
+  ]
 }
 
 /** A layer read beyond the ends of its curve, judged at the layer's mean temperature. */

@@ -98,7 +98,7 @@ export interface System {
 
 /**
  * A finding of the solver that a reader should know; never an exception. `code` is film-range, film-jump, film-method,
- * duct-corners, vessel-heads, conductivity-extrapolated or conductivity-steep.
+ * duct-corners, vessel-heads, soil-shallow, conductivity-extrapolated or conductivity-steep.
  */
 export interface Note {
   readonly code: string
