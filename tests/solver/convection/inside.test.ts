@@ -1,0 +1,95 @@
+import fc from 'fast-check'
+import { describe, expect, test } from 'vitest'
+import {
+  insideFilmWPerM2K,
+  nusseltInside,
+  nusseltTurbulentInside,
+  smoothPipeFriction,
+} from '#solver/convection/inside.ts'
+import { published } from '../../published.ts'
+import { spread, within } from '../arbitraries.ts'
+
+describe('nusseltTurbulentInside', () => {
+  published(nusseltTurbulentInside, [
+    {
+      from: 'check value of a public heat-transfer library, Gnielinski, Darcy friction 0.0185',
+      given: { reynolds: 1e5, prandtl: 1.2, friction: 0.0185 / 4 },
+      printed: '254.6268274936',
+    },
+  ])
+})
+
+describe('nusseltInside', () => {
+  test.each([0, 1, 1000, 2300])('is 3.66 in laminar flow, Re %d', (reynolds) => {
+    expect(nusseltInside({ reynolds, prandtl: 0.7 })).toBe(3.66)
+  })
+
+  // Dittus-Boelter, 0.023 Re^0.8 Pr^0.4 from Re 1e4, is printed with an error of a quarter.
+  test.each([1e4, 3e4, 1e5, 1e6])('keeps company with 0.023 Re^0.8 Pr^0.4 at Re %d', (reynolds) => {
+    const ratio = nusseltInside({ reynolds, prandtl: 0.7 }) / (0.023 * reynolds ** 0.8 * 0.7 ** 0.4)
+    expect(Math.abs(ratio - 1)).toBeLessThan(0.15)
+  })
+
+  test('is half way between both ends at Re 3150', () => {
+    const at = (reynolds: number) => nusseltInside({ reynolds, prandtl: 0.7 })
+    expect(at(3150)).toBeCloseTo((at(2300) + at(4000)) / 2, 12)
+  })
+
+  test.each([2300, 4000])('has no step at Re %d', (reynolds) => {
+    for (const prandtl of [0.5, 0.7, 10, 1000]) {
+      const below = nusseltInside({ reynolds: reynolds * (1 - 1e-9), prandtl })
+      const above = nusseltInside({ reynolds: reynolds * (1 + 1e-9), prandtl })
+      expect(above / below).toBeCloseTo(1, 6)
+    }
+  })
+
+  test('faster flow never carries less heat', () => {
+    fc.assert(
+      fc.property(spread(1, 5e6), spread(1, 10), spread(0.5, 2000), (reynolds, factor, prandtl) => {
+        expect(nusseltInside({ reynolds: reynolds * factor, prandtl })).toBeGreaterThanOrEqual(
+          nusseltInside({ reynolds, prandtl }) * (1 - 1e-12),
+        )
+      }),
+    )
+  })
+})
+
+describe('smoothPipeFriction', () => {
+  // Blasius, 0.0791 Re^(-1/4), is printed for smooth pipes up to 1e5.
+  test.each([5e3, 2e4, 1e5])('keeps company with Blasius at Re %d', (reynolds) => {
+    expect(Math.abs(smoothPipeFriction(reynolds) / (0.0791 * reynolds ** -0.25) - 1)).toBeLessThan(
+      0.05,
+    )
+  })
+})
+
+describe('insideFilmWPerM2K', () => {
+  const duct = { velocityMPerS: 5, hydraulicDiameterM: 0.3, airC: 20, pressurePa: 101325 }
+
+  test('standing air only conducts: 3.66 λ/D', () => {
+    expect(insideFilmWPerM2K({ ...duct, velocityMPerS: 0 })).toBeCloseTo((3.66 * 0.02588) / 0.3, 3)
+  })
+
+  test('is finite and above 0 for any duct, and never falls with velocity or pressure', () => {
+    fc.assert(
+      fc.property(
+        within(0, 60),
+        within(0, 10),
+        spread(0.005, 20),
+        within(-60, 1000),
+        spread(2e4, 2e5),
+        (velocityMPerS, moreMPerS, hydraulicDiameterM, airC, pressurePa) => {
+          const given = { velocityMPerS, hydraulicDiameterM, airC, pressurePa }
+          const film = insideFilmWPerM2K(given)
+          expect(film).toBeGreaterThan(0)
+          expect(film).toBeLessThan(1e4)
+          const faster = { ...given, velocityMPerS: velocityMPerS + moreMPerS }
+          expect(insideFilmWPerM2K(faster)).toBeGreaterThanOrEqual(film * (1 - 1e-12))
+          expect(
+            insideFilmWPerM2K({ ...given, pressurePa: 1.1 * pressurePa }),
+          ).toBeGreaterThanOrEqual(film * (1 - 1e-12))
+        },
+      ),
+    )
+  })
+})

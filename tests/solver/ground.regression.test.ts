@@ -1,0 +1,17 @@
+/** A worked example whose input is in print and whose result is from memory. */
+import { soilResistanceMKPerW } from '#solver/ground.ts'
+import { published } from '../published.ts'
+
+// Holman 3-1: a pipe of 75 °C, 4 m long, in earth whose surface has 5 °C.
+published(
+  (given: { depthM: number; outerDiameterM: number; soilWPerMK: number }) =>
+    (4 * (75 - 5)) / (soilResistanceMKPerW(given) ?? Number.NaN),
+  [
+    {
+      from: 'Holman 3-1, buried pipe (result from memory)',
+      given: { depthM: 0.2, outerDiameterM: 0.15, soilWPerMK: 0.8 },
+      printed: '859.6',
+      within: { absolute: 0.3, because: 'the book rounds its shape factor to 15.35 m' },
+    },
+  ],
+)
