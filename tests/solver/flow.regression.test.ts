@@ -31,6 +31,21 @@ describe('arrival temperature', () => {
   )
 })
 
+describe('arrival temperature of air', () => {
+  // Çengel 8-6: air of 80 °C through 8 m of duct 0.2 × 0.2 m whose walls have 60 °C, 0.15 m³/s, 13.5 W/(m²·K) inside.
+  published(
+    ({ filmWPerM2K }: { filmWPerM2K: number }) =>
+      arrivalTempC({
+        startC: 80,
+        airC: 60,
+        uaWPerK: filmWPerM2K * 4 * 0.2 * 8,
+        flowKgPerS: 0.9994 * 0.15,
+        heatCapacityJPerKgK: 1008,
+      }),
+    [{ from: 'Çengel 8-6, duct of a heating', given: { filmWPerM2K: 13.5 }, printed: '71.3' }],
+  )
+})
+
 describe('condensate', () => {
   // Kreith 2.4 (Incropera 3.6): 13.06 W boil liquid nitrogen of 200 kJ/kg; the same balance as for steam that condenses.
   published(

@@ -30,6 +30,15 @@ describe('nusseltInside', () => {
     expect(Math.abs(ratio - 1)).toBeLessThan(0.15)
   })
 
+  // Gnielinski's own short form for gases, printed for Re 1e4 to 5e6 and Pr 0.5 to 1.5.
+  test.each([1e4, 3e4, 1e5, 1e6])(
+    'keeps company with 0.0214 (Re^0.8 − 100) Pr^0.4 at Re %d',
+    (reynolds) => {
+      const short = 0.0214 * (reynolds ** 0.8 - 100) * 0.7 ** 0.4
+      expect(Math.abs(nusseltInside({ reynolds, prandtl: 0.7 }) / short - 1)).toBeLessThan(0.05)
+    },
+  )
+
   test('is half way between both ends at Re 3150', () => {
     const at = (reynolds: number) => nusseltInside({ reynolds, prandtl: 0.7 })
     expect(at(3150)).toBeCloseTo((at(2300) + at(4000)) / 2, 12)
