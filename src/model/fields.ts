@@ -45,6 +45,12 @@ const number = <K extends string>(
   max: number,
 ): NumberField<K> => ({ key, column, label, kind: 'number', quantity, min, max })
 
+/** How many of something: a whole number. */
+const count = <K extends string>(key: K, label: string): NumberField<K> => ({
+  ...number(key, key, label, 'count', 0, 10_000),
+  whole: true,
+})
+
 const text = <K extends string>(
   key: K,
   column: string,
@@ -66,9 +72,11 @@ const flag = <K extends string>(key: K, column: string, label: string): FlagFiel
   kind: 'flag',
 })
 
-export const shapes = ['pipe', 'round-duct', 'rect-duct', 'flat'] as const
-export const orientations = ['horizontal', 'vertical', 'up', 'down'] as const
-export const methods = ['detailed'] as const
+export const shapes = ['pipe', 'round-duct', 'rect-duct', 'flat', 'sphere', 'vessel'] as const
+export const orientations = ['horizontal', 'vertical', 'inclined', 'up', 'down'] as const
+export const headForms = ['domed', 'flat'] as const
+export const methods = ['detailed', 'simplified'] as const
+export const fittingStates = ['bare', 'lagged'] as const
 export const stepSeries = ['metric', 'inch', 'both'] as const
 export const media = ['water', 'steam', 'air', 'glycol', 'oil', 'other'] as const
 export const touchClasses = [
@@ -97,6 +105,18 @@ export const fields = [
   number('areaM2', 'area_m2', 'Area', 'area', 0, 1e6),
   choice('orientation', 'orientation', 'Lies', orientations),
   number('riseM', 'rise_m', 'Rise', 'length', 0.05, 500),
+  choice('heads', 'heads', 'Heads', headForms),
+  number('buryDepthM', 'bury_depth_m', 'Depth of the axis', 'length', 0.05, 50),
+  number('soilWPerMK', 'soil_w_mk', 'Soil conductivity', 'conductivity', 0.1, 5),
+  count('bends', 'Bends'),
+  count('tees', 'Tees'),
+  count('reducers', 'Reducers'),
+  count('flanges', 'Flange pairs'),
+  count('valves', 'Valves'),
+  count('strainers', 'Strainers'),
+  count('supports', 'Supports'),
+  count('ends', 'Open ends'),
+  choice('fittings', 'fittings', 'Fittings are', fittingStates),
 
   choice('medium', 'medium', 'What flows', media),
   number('mediumC', 'medium_c', 'Medium', 'temperature', -200, 1000),
@@ -104,13 +124,31 @@ export const fields = [
   number('mediumMinC', 'medium_min_c', 'Medium, coldest', 'temperature', -200, 1000),
   number('pressureGaugePa', 'pressure_bar_g', 'Steam pressure', 'gaugePressure', -0.95e5, 217e5),
 
+  number('flowKgPerS', 'flow_kg_s', 'Flow', 'massFlow', 1e-6, 1e5),
+  number('velocityMPerS', 'velocity_m_s', 'Air velocity inside', 'speed', 0.01, 60),
+  number(
+    'heatCapacityJPerKgK',
+    'heat_capacity_j_kgk',
+    'Heat capacity',
+    'heatCapacity',
+    100,
+    20_000,
+  ),
+  number('insideFilmWPerM2K', 'inside_film_w_m2k', 'Film inside', 'filmCoefficient', 0.5, 1e5),
+
   number('airC', 'air_c', 'Air', 'temperature', -70, 200),
   number('surroundingsC', 'surroundings_c', 'Surroundings', 'temperature', -100, 400),
   number('windMPerS', 'wind_m_s', 'Wind', 'speed', 0, 60),
   number('humidity', 'humidity_pct', 'Humidity', 'percentage', 0.01, 1),
   number('altitudeM', 'altitude_m', 'Altitude', 'length', -500, 6000),
+  number('solarWPerM2', 'solar_w_m2', 'Sun on the surface', 'heatFlux', 0, 1400),
+  number('skyView', 'sky_view', 'Sees the clear sky', 'fraction', 0, 1),
+  number('filmWPerM2K', 'film_w_m2k', 'Film outside, fixed', 'filmCoefficient', 0.5, 500),
+  text('monthlyAirC', 'monthly_air_c', 'Air, by the month', 160),
   number('touchAirC', 'touch_air_c', 'Air, hottest day', 'temperature', -70, 200),
   number('dampAirC', 'damp_air_c', 'Air, most humid', 'temperature', -40, 80),
+  number('frostAirC', 'frost_air_c', 'Air, coldest', 'temperature', -70, 100),
+  number('frostWindMPerS', 'frost_wind_m_s', 'Wind, coldest', 'speed', 0, 60),
 
   text('material', 'material', 'Lagging', 60),
   text('layers', 'layers', 'Layers', 400),
@@ -130,6 +168,36 @@ export const fields = [
   number('maxLossWPerM', 'max_loss_w_m', 'Loss, at most', 'heatLossPerLength', 0.01, 1e6),
   number('maxLossWPerM2', 'max_loss_w_m2', 'Loss, at most', 'heatFlux', 0.01, 1e6),
   number('dewMarginK', 'dew_margin_k', 'Dew-point margin', 'temperatureDifference', 0, 20),
+
+  number('frostHours', 'frost_hours', 'Must not freeze for', 'hours', 0.01, 10_000),
+  number('frostStartC', 'frost_start_c', 'Water at the start', 'temperature', 0, 100),
+  number('frostFraction', 'frost_fraction', 'Ice allowed', 'fraction', 0, 1),
+  number('maxDropK', 'max_drop_k', 'Drop along the run', 'temperatureDifference', 0.001, 500),
+  text('codeTable', 'code_table', 'Code table', 60),
+  number('codeFactor', 'code_factor', 'Factor on the code', 'fraction', 0.05, 10),
+  number('maxOuterDiameterM', 'max_od_mm', 'Space for', 'size', 0.005, 30),
+
+  number('measuredSurfaceC', 'measured_surface_c', 'Surface, measured', 'temperature', -200, 1000),
+  number('surveyMediumC', 'survey_medium_c', 'Medium that day', 'temperature', -200, 1000),
+  number('surveyAirC', 'survey_air_c', 'Air that day', 'temperature', -70, 200),
+  number(
+    'surveySurroundingsC',
+    'survey_surroundings_c',
+    'Surroundings that day',
+    'temperature',
+    -100,
+    400,
+  ),
+  number('surveyWindMPerS', 'survey_wind_m_s', 'Wind that day', 'speed', 0, 60),
+  number('surveyEmissivity', 'survey_emissivity', 'Emissivity, as found', 'fraction', 0.01, 1),
+  number(
+    'surveyToleranceK',
+    'survey_tolerance_k',
+    'Thermometer, ±',
+    'temperatureDifference',
+    0,
+    50,
+  ),
 
   flag('money', 'money', 'Weigh the cost'),
   text('fuel', 'fuel', 'Fuel', 60),

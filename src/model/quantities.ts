@@ -32,6 +32,11 @@ export const quantities = {
   duration: { unit: 's', suffix: 's', perUnit: 1 },
   hoursPerYear: { unit: 'h/year', suffix: 'hours_per_year', perUnit: 1 },
   years: { unit: 'years', suffix: 'years', perUnit: 1 },
+  hours: { unit: 'h', suffix: 'hours', perUnit: 1 },
+  massFlow: { unit: 'kg/s', suffix: 'kg_s', perUnit: 1 },
+  heatCapacity: { unit: 'J/kgK', suffix: 'j_kgk', perUnit: 1 },
+  filmCoefficient: { unit: 'W/m²K', suffix: 'w_m2k', perUnit: 1 },
+  count: { unit: '', suffix: '', perUnit: 1 },
   pricePerEnergy: { unit: 'per kWh', suffix: 'per_kwh', perUnit: 1 },
 } as const satisfies Record<string, QuantityForm>
 export type Quantity = keyof typeof quantities

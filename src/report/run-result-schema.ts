@@ -26,9 +26,11 @@ const limitResult = z
       .enum(['at most', 'below', 'at least'])
       .describe('How the value must stand to the bound'),
     bound: finite('What it was judged against, in `unit`'),
-    unit: text('Unit of `value` and `bound`'),
+    unit: z
+      .enum(['°C', 'K', 'W/m', 'W/m²', 'h', 'm', 'kg/s', 'm²K/W'])
+      .describe('Unit of `value` and `bound`'),
     condition: z
-      .enum(['loss', 'touch', 'damp', 'frost', 'survey'])
+      .enum(['loss', 'touch', 'damp', 'frost', 'survey', 'code'])
       .describe('The design condition of the place under which the limit was judged'),
     what: text('What was judged, in words'),
   })
@@ -55,7 +57,13 @@ const rating = z
     outerDiameterM: orNull('Outer diameter of a pipe or round duct [m]; else null'),
     heatLossWPerM: orNull('Heat flow outwards per metre of run [W/m]; null for a flat surface'),
     heatFluxWPerM2: finite('Heat flow outwards on the outer area [W/m²]'),
-    heatLossW: orNull('Heat flow outwards of the whole run [W]; null without length or area'),
+    heatLossW: orNull(
+      'Heat flow outwards of the whole run with its fittings [W]; null without length or area',
+    ),
+    fittingsLossW: orNull('What of it fittings, supports and ends lose [W]'),
+    yearlyMeanLossW: orNull(
+      'As `heatLossW`, mean of the months where those are given; months that need no making up count as nothing [W]',
+    ),
     yearlyKWh: orNull('Heat of the whole run in a year [kWh]; null without hours or length'),
     surfaceTempC: finite('Outer surface at the loss condition, mean of the faces [°C]'),
     convectionWPerM2K: finite('Convective film coefficient of the outer surface [W/(m²·K)]'),
@@ -68,6 +76,11 @@ const rating = z
     touchSurfaceC: finite(
       'Outer surface at the touch condition: the hottest day, no wind, new finish, worst face [°C]',
     ),
+    timeToFreezeH: orNull(
+      'Hours until stagnant water reaches 0 °C and freezes the stated fraction; null where not asked',
+    ),
+    arrivalTempC: orNull('Medium at the end of the run [°C]; null where its flow is not known'),
+    condensateKgPerS: orNull('Steam that condenses along the run [kg/s]; null elsewhere'),
     limits: z.array(limitResult),
     pass: z.boolean().describe('Whether every limit is met'),
     money: rungMoney.nullable(),
@@ -77,7 +90,9 @@ const rating = z
 const runMoney = z
   .strictObject({
     currency: text('Currency of every amount of the run'),
-    per: z.enum(['m', 'm2']).describe('Whether amounts are per metre of run or per square metre'),
+    per: z
+      .enum(['m', 'm2', 'piece'])
+      .describe('Whether amounts are per metre of run, per square metre, or for the whole piece'),
     hoursPerYear: finite('Hours in service [h/year]'),
     fuel: text('Id of the fuel'),
     fuelPricePerKWh: finite('Price of the fuel [currency/kWh]'),
@@ -102,6 +117,28 @@ const runMoney = z
   })
   .meta({ id: 'RunMoney', description: 'Money of the run' })
 
+const uncertain = z
+  .strictObject({
+    value: finite('The figure'),
+    plusMinus: finite('How far it may be off: root of the sum of squares of what each reading may'),
+  })
+  .meta({ id: 'Uncertain', description: 'A figure and how far it may be off' })
+
+const survey = z
+  .strictObject({
+    measuredSurfaceC: finite('Surface temperature as measured [°C]'),
+    heatFluxWPerM2: uncertain.describe('Heat flow outwards on the outer area [W/m²]'),
+    heatLossWPerM: uncertain.nullable().describe('Heat flow outwards per metre of run [W/m]'),
+    heatLossW: uncertain.nullable().describe('Heat flow outwards of the run, without fittings [W]'),
+    effectiveWPerMK: uncertain
+      .nullable()
+      .describe('Conductivity that the lagging as it stands must have [W/(m·K)]'),
+    soundWPerMK: orNull('Conductivity of the build-up as given, between the same temperatures'),
+    expectedSurfaceC: finite('Surface that the run as given would have that day [°C]'),
+    notes: z.array(note),
+  })
+  .meta({ id: 'SurveyResult', description: 'What the measured surface temperature says' })
+
 export const runResultSchema = z
   .strictObject({
     tag: text('Tag of the run'),
@@ -119,6 +156,7 @@ export const runResultSchema = z
       .describe('The limits of the chosen build-up; of the thickest rung where none passes'),
     ladder: z.array(rating).describe('Every rung that can be bought, thinnest first'),
     money: runMoney.nullable(),
+    survey: survey.nullable().describe('Null where no surface temperature was measured'),
     notes: z.array(note),
   })
   .meta({

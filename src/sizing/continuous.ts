@@ -1,9 +1,10 @@
 /** Exact thickness at which a limit begins to pass, between and beyond the rungs. */
 import { bracketedRoot } from '#solver/index.ts'
-import { type Settled, settle } from './build-up.ts'
+import { bare, type Settled, settle } from './build-up.ts'
 import { judge } from './limits.ts'
-import type { Problem } from './problem.ts'
+import type { Limits, Problem } from './problem.ts'
 import type { LimitEnd, LimitName, LimitResult } from './result.ts'
+import { overallSizeM } from './space.ts'
 import { solveStates } from './states.ts'
 
 const THINNEST_M = 1e-4
@@ -22,7 +23,8 @@ function settledAt(problem: Problem, thicknessM: number): Settled {
 /** The worst shortfall of the limits of one name; negative where that limit is not judged. */
 function shortfallAt(problem: Problem, limit: LimitName, thicknessM: number): number {
   const settled = settledAt(problem, thicknessM)
-  const judged = judge(problem, settled, solveStates(problem, settled)).filter(
+  const bareStates = solveStates(problem, bare)
+  const judged = judge(problem, settled, solveStates(problem, settled), bareStates).filter(
     (result) => result.limit === limit,
   )
   return Math.max(Number.NEGATIVE_INFINITY, ...judged.map(shortfall))
@@ -59,18 +61,34 @@ function continuousThicknessM(problem: Problem, limit: LimitName): number | null
 
 /**
  * The exact ends of the limits a problem sets, for the ladder picture, as thicknesses of the whole build-up like its
- * rungs. Service has no thickness end.
+ * rungs. Service has no thickness end; space has an upper one.
  */
 export function limitEnds(problem: Problem): LimitEnd[] {
   if (!problem.layers.some((layer) => layer.thicknessM === null)) return []
-  const { maxSurfaceC, burn, maxLossWPerM, maxLossWPerM2, damp } = problem.limits
-  const set: LimitName[] = []
-  if (maxSurfaceC !== null || burn !== null) set.push('touch')
-  if (maxLossWPerM !== null || maxLossWPerM2 !== null) set.push('loss')
-  if (damp !== null) set.push('damp')
   const fixedM = problem.layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
-  return set.map((limit) => {
+  const ends: LimitEnd[] = limitsWithLowerEnd(problem.limits).map((limit) => {
     const sizedM = continuousThicknessM(problem, limit)
-    return { limit, fromM: sizedM === null || sizedM === 0 ? sizedM : sizedM + fixedM }
+    return {
+      limit,
+      fromM: sizedM === null || sizedM === 0 ? sizedM : sizedM + fixedM,
+      upToM: null,
+    }
   })
+  const bareM = overallSizeM(problem, 0)
+  const { maxOuterDiameterM } = problem.limits
+  if (maxOuterDiameterM !== null && bareM !== null) {
+    ends.push({ limit: 'space', fromM: 0, upToM: Math.max(0, (maxOuterDiameterM - bareM) / 2) })
+  }
+  return ends
+}
+
+function limitsWithLowerEnd(limits: Limits): LimitName[] {
+  const set: LimitName[] = []
+  if (limits.maxSurfaceC !== null || limits.burn !== null) set.push('touch')
+  if (limits.maxLossWPerM !== null || limits.maxLossWPerM2 !== null) set.push('loss')
+  if (limits.damp !== null) set.push('damp')
+  if (limits.frost !== null) set.push('frost')
+  if (limits.arrival !== null) set.push('arrival')
+  if (limits.code !== null) set.push('code')
+  return set
 }

@@ -1,28 +1,11 @@
-/** Money of one rung: installed cost and energy, per metre of run or per m² of a flat surface. */
-import { type EnergyTerms, yearlyEnergyCost } from '#money/energy-cost.ts'
+/** Money of one rung: installed cost and energy, per metre of run, per m² of a flat surface, or per piece. */
+import { yearlyEnergyCost } from '#money/energy-cost.ts'
 import { installedCost, type PricedLayer } from '#money/installed-cost.ts'
 import { presentValueFactor } from '#money/present-value.ts'
-import type { Shape } from '#solver/types.ts'
+import { grown } from '#solver/index.ts'
 import type { Settled } from './build-up.ts'
 import type { MoneyTerms, Problem } from './problem.ts'
 import type { RungMoney } from './result.ts'
-
-/** Cross-section of the bare shape grown by a thickness: perimeter [m] and area [m²]; per m² for a flat surface. */
-function grown(shape: Shape, thicknessM: number): { perimeterM: number; areaM2: number } {
-  switch (shape.kind) {
-    case 'pipe': {
-      const diameterM = shape.outerDiameterM + 2 * thicknessM
-      return { perimeterM: Math.PI * diameterM, areaM2: (Math.PI * diameterM * diameterM) / 4 }
-    }
-    case 'rect-duct': {
-      const widthM = shape.widthM + 2 * thicknessM
-      const heightM = shape.heightM + 2 * thicknessM
-      return { perimeterM: 2 * (widthM + heightM), areaM2: widthM * heightM }
-    }
-    case 'flat':
-      return { perimeterM: 1, areaM2: thicknessM }
-  }
-}
 
 /** Installed cost of a settled build-up; null where a price is missing (never zero). */
 export function installedCostOf(
@@ -40,23 +23,17 @@ export function installedCostOf(
     const outer = grown(problem.shape, depthM)
     priced.push({
       price: material.price,
-      volumeM3: outer.areaM2 - inner.areaM2,
-      outerAreaM2: outer.perimeterM,
+      volumeM3: outer.volumeM3 - inner.volumeM3,
+      outerAreaM2: outer.areaM2,
       pieces: Math.max(1, piecesM.length),
     })
   }
   if (problem.finish && !problem.finish.price) return null
   const finish = problem.finish?.price
-    ? { price: problem.finish.price, outerAreaM2: grown(problem.shape, depthM).perimeterM }
+    ? { price: problem.finish.price, outerAreaM2: grown(problem.shape, depthM).areaM2 }
     : null
   return installedCost(priced, finish, terms.labour)
 }
-
-/** Heat flow per metre of run, or per m² of a flat surface [W/m or W/m²]. */
-export const flowPerUnit = (rating: {
-  readonly heatLossWPerM: number | null
-  readonly heatFluxWPerM2: number
-}): number => rating.heatLossWPerM ?? rating.heatFluxWPerM2
 
 export function rungMoney(
   problem: Problem,
@@ -66,13 +43,10 @@ export function rungMoney(
 ): RungMoney | null {
   const installed = installedCostOf(problem, settled, terms)
   if (installed === null) return null
-  const energyPerYear = energyCost(heatFlow, terms.energy)
+  const energyPerYear = yearlyEnergyCost(heatFlow, terms.energy)
   return {
     installed,
     energyPerYear,
     lifeCycle: installed + energyPerYear * presentValueFactor(terms),
   }
 }
-
-export const energyCost = (heatFlow: number, energy: EnergyTerms): number =>
-  yearlyEnergyCost(heatFlow, energy)

@@ -1,17 +1,30 @@
-/** The limits of the first door: touch, loss, damp and service, each judged at its own condition on the worst face. */
+/** The limits of a run, each judged at its own condition; touch, loss and damp here, on the worst face, the others beside. */
 import type { Face, Solution } from '#solver/types.ts'
+import { arrivalLimits } from './arrival.ts'
 import type { Settled } from './build-up.ts'
+import { codeLimits } from './code.ts'
+import { frostLimits } from './frost.ts'
 import type { Limits, Problem } from './problem.ts'
 import type { LimitResult } from './result.ts'
 import { serviceLimits } from './service.ts'
+import { spaceLimits } from './space.ts'
 import { hottestFace, type States } from './states.ts'
 
-/** Every limit of a run, judged on one solved build-up. */
-export function judge(problem: Problem, settled: Settled, states: States): LimitResult[] {
+/** Every limit of a run, judged on one solved build-up; the bare run's states are those of its bare fittings. */
+export function judge(
+  problem: Problem,
+  settled: Settled,
+  states: States,
+  bareStates: States,
+): LimitResult[] {
   return [
     ...touchLimits(problem.limits, states.touch, settled.layers.length === 0),
     ...lossLimits(problem.limits, states.loss),
     ...dampLimits(problem.limits, states.damp),
+    ...frostLimits(problem, settled),
+    ...arrivalLimits(problem, settled, states, bareStates),
+    ...codeLimits(problem, settled),
+    ...spaceLimits(problem, settled, states.loss),
     ...serviceLimits(problem, settled, states),
   ]
 }

@@ -1,17 +1,24 @@
 /** What sizing takes: one run with everything looked up and checked. SI units, temperatures in °C. */
 import type { FinishPrice, LabourTerms, PriceModel } from '#catalogue/types.ts'
 import type { EnergyTerms } from '#money/energy-cost.ts'
-import type { Conductivity, Shape, Surroundings } from '#solver/types.ts'
+import type { Conductivity, FilmChoice, Shape, Surroundings } from '#solver/types.ts'
 import type { Note } from './result.ts'
 
 /** The worst the run meets for one question. */
 export interface Condition {
   readonly around: Surroundings
   readonly mediumC: number
-  /** Of the jacket: aged for loss, new for touch and damp. */
+  /** Of the jacket: aged for loss and frost, new for touch and damp, as found for the survey. */
   readonly emissivity: number
   /** Of the bare surface. */
   readonly bareEmissivity: number
+  /** Sun on each m² of the outer surface [W/m²], and what jacket and bare surface take up of it. */
+  readonly sunWPerM2: number
+  readonly solarAbsorptance: number
+  readonly bareSolarAbsorptance: number
+  readonly film: FilmChoice
+  /** For an inclined pipe: the higher film where a loss is asked, the lower where a temperature is. */
+  readonly inclinedFilm: 'lower' | 'higher'
 }
 
 export interface LayerMaterial {
@@ -20,6 +27,8 @@ export interface LayerMaterial {
   /** Null where no range is stated, as for a conductivity given by hand. */
   readonly serviceMinC: number | null
   readonly serviceMaxC: number | null
+  /** Water vapour resistance factor; null where unknown. */
+  readonly vapourResistance: number | null
   readonly price: PriceModel | null
 }
 
@@ -34,6 +43,8 @@ export interface BuildUpLayer {
 export interface FinishChoice {
   readonly name: string
   readonly surfaceMaxC: number | null
+  /** Whether it keeps vapour out: a tight sheet, one whose laps must be sealed, or none. */
+  readonly vapourTight: 'yes' | 'if sealed' | 'no'
   readonly price: FinishPrice | null
 }
 
@@ -65,6 +76,84 @@ export interface Limits {
   readonly maxLossWPerM2: number | null
   /** Dew point of the damp air and the margin; null where damp is not judged. */
   readonly damp: { readonly dewPointC: number; readonly marginK: number } | null
+  /** Null where the run holds no water that could freeze, or is not asked about. */
+  readonly frost: FrostLimit | null
+  readonly arrival: ArrivalLimit | null
+  readonly code: CodeLimit | null
+  /** Largest overall diameter, or larger outer side of a duct [m]. */
+  readonly maxOuterDiameterM: number | null
+}
+
+/** Stagnant water in a pipe, judged at the frost condition, whose medium is the water at the start. */
+export interface FrostLimit {
+  readonly hours: number
+  /** Ice the water may hold at the end, 0 to 1; 0 where it may only just reach 0 °C. */
+  readonly iceFraction: number
+  readonly boreM: number
+  /** Heat capacity of wall and water for each metre [J/(m·K)]. */
+  readonly wallJPerMK: number
+  readonly waterJPerMK: number
+}
+
+/** What flows arrives with at most so much less (or more) than it set out with, at the loss condition. */
+export type ArrivalLimit =
+  | {
+      readonly kind: 'drop'
+      readonly maxDropK: number
+      readonly flowKgPerS: number
+      readonly heatCapacityJPerKgK: number
+    }
+  /** Steam condenses at its temperature: as long as some is left it arrives as it set out. */
+  | {
+      readonly kind: 'condensate'
+      readonly maxDropK: number
+      readonly flowKgPerS: number
+      readonly latentHeatJPerKg: number
+    }
+
+/** One row of a code table, brought to this run. */
+export type CodeLimit = { readonly table: string } & (
+  | {
+      readonly kind: 'thickness'
+      /** What the table asks for, its factor included [m]. */
+      readonly thicknessM: number
+      /** Conductivity that the table's thickness belongs to, and the temperature at which layers are compared with it. */
+      readonly conductivityWPerMK: number | null
+      readonly ratingMeanC: number
+      /** True where a run whose own conductivity lies in the table's range takes the thickness as it stands. */
+      readonly rangeWPerMK: readonly [number, number] | null
+    }
+  | {
+      readonly kind: 'resistance'
+      readonly resistanceM2KPerW: number
+      readonly ratingMeanC: number
+    }
+  | { readonly kind: 'loss'; readonly maxLossWPerM: number; readonly condition: Condition }
+)
+
+/** What the fittings of a run add to its loss; all by one convention, which is named. */
+export interface Fittings {
+  /** Surface of the bare fittings [m²]: it loses the flux of the bare run. */
+  readonly bareAreaM2: number
+  /** Length of lagged run that loses as much as the lagged fittings [m]. */
+  readonly laggedLengthM: number
+  /** True where the fittings stay bare on a lagged run. */
+  readonly areBare: boolean
+  /** Share that supports add to the loss of the lagged run. */
+  readonly supportShare: number
+  /** Ends of the run that are closed off like its surface: discs. */
+  readonly ends: number
+  /** Where the figures come from, in words. */
+  readonly convention: string
+}
+
+/** What was measured on the day, besides the survey condition. */
+export interface SurveyReading {
+  readonly surfaceTempC: number
+  /** How far each may be off: half width of what is believed. */
+  readonly thermometerK: number
+  readonly airK: number
+  readonly emissivity: number
 }
 
 export interface MoneyTerms {
@@ -82,7 +171,7 @@ export interface Problem {
   readonly tag: string
   readonly shape: Shape
   readonly insideFilmWPerM2K: number | null
-  /** Length of a pipe or duct [m], or area of a flat surface [m²]; null where not given. */
+  /** Length of a pipe or duct [m], area of a flat surface [m²], or 1 for a sphere or vessel; null where not given. */
   readonly extent: number | null
   readonly layers: readonly BuildUpLayer[]
   readonly finish: FinishChoice | null
@@ -92,8 +181,16 @@ export interface Problem {
     readonly loss: Condition
     readonly touch: Condition
     readonly damp: Condition
+    /** Coldest day; null where frost is not asked about. */
+    readonly frost: Condition | null
+    /** The day of the survey; null where nothing was measured. */
+    readonly survey: Condition | null
+    /** The loss condition in each month, January first; empty where the yearly mean stands for all. */
+    readonly months: readonly Condition[]
   }
   readonly limits: Limits
+  readonly fittings: Fittings
+  readonly survey: SurveyReading | null
   /** Null where the cost is not weighed. */
   readonly money: MoneyTerms | null
   /** Yearly running hours; null where not given. */

@@ -25,13 +25,17 @@ export const limitWords: Readonly<Record<LimitName, string>> = {
 }
 
 export type Governing = LimitName | 'money' | 'smallest' | 'fixed' | 'bare' | 'unmet'
-export type ConditionName = 'loss' | 'touch' | 'damp' | 'frost' | 'survey'
+/** `code`: the air and wind that a loss table of a code brings with it. */
+export type ConditionName = 'loss' | 'touch' | 'damp' | 'frost' | 'survey' | 'code'
 
 /** Something a reader should know: an assumption made, a range left, a caution. */
 export interface Note {
   readonly code: string
   readonly text: string
 }
+
+/** SI throughout; lengths and mass flows are shown in mm and kg/h. */
+export type LimitUnit = '°C' | 'K' | 'W/m' | 'W/m²' | 'h' | 'm' | 'kg/s' | 'm²K/W'
 
 /** One limit judged on one rung. */
 export interface LimitResult {
@@ -41,13 +45,13 @@ export interface LimitResult {
   /** How the value must stand to the bound. */
   readonly rule: 'at most' | 'below' | 'at least'
   readonly bound: number
-  readonly unit: string
+  readonly unit: LimitUnit
   readonly condition: ConditionName
   /** What was judged, in words: "surface, top" or "jacket", "stone wool, inside". */
   readonly what: string
 }
 
-/** Money of one rung, per metre of run (per m² for a flat surface), in the currency of the run. */
+/** Money of one rung, per metre of run (per m² of a flat surface, for the whole of a sphere or vessel), in the currency of the run. */
 export interface RungMoney {
   readonly installed: number
   readonly energyPerYear: number
@@ -63,13 +67,17 @@ export interface Rating {
   readonly nominalThicknessM: number | null
   /** Thickness of each piece, inside to outside [m]. */
   readonly piecesM: readonly number[]
-  /** Of a pipe or round duct [m]; else null. */
+  /** Of a pipe, round duct, sphere or vessel [m]; else null. */
   readonly outerDiameterM: number | null
-  /** Null for a flat surface. */
+  /** Null for a flat surface, a sphere and a vessel. */
   readonly heatLossWPerM: number | null
   readonly heatFluxWPerM2: number
-  /** Whole run [W]; null where neither length nor area is known. */
+  /** Whole run with its fittings and supports [W]; null where neither length nor area is known. */
   readonly heatLossW: number | null
+  /** What of it fittings, supports and ends lose [W]. */
+  readonly fittingsLossW: number | null
+  /** As `heatLossW`, mean of the twelve months where those are given. */
+  readonly yearlyMeanLossW: number | null
   readonly yearlyKWh: number | null
   readonly surfaceTempC: number
   readonly convectionWPerM2K: number
@@ -77,6 +85,12 @@ export interface Rating {
   readonly interfaceTempsC: readonly number[]
   /** Surface at the touch condition [°C]: the hottest day, no wind, new finish, worst face. */
   readonly touchSurfaceC: number
+  /** Hours until stagnant water at the frost condition reaches 0 °C and freezes the stated fraction; null where not asked. */
+  readonly timeToFreezeH: number | null
+  /** Of the medium at the end of the run [°C]; null where the flow is not known. */
+  readonly arrivalTempC: number | null
+  /** Steam that condenses along the run [kg/s]; null elsewhere. */
+  readonly condensateKgPerS: number | null
   readonly limits: readonly LimitResult[]
   readonly pass: boolean
   readonly money: RungMoney | null
@@ -84,8 +98,8 @@ export interface Rating {
 
 export interface RunMoney {
   readonly currency: string
-  /** Per metre of run, or per m² of a flat surface. */
-  readonly per: 'm' | 'm2'
+  /** Per metre of run, per m² of a flat surface, or for the whole of a sphere or vessel. */
+  readonly per: 'm' | 'm2' | 'piece'
   readonly hoursPerYear: number
   readonly fuel: string
   readonly fuelPricePerKWh: number
@@ -115,6 +129,31 @@ export interface LimitEnd {
   readonly limit: LimitName
   /** Passes from this thickness on [m]; null where no thickness up to the search end passes. */
   readonly fromM: number | null
+  /** And up to this one [m]; null where there is no upper end. */
+  readonly upToM: number | null
+}
+
+/** A figure and how far it may be off, from thermometer, emissivity and air together (root of the sum of squares). */
+export interface Uncertain {
+  readonly value: number
+  readonly plusMinus: number
+}
+
+/** What the measured surface temperature says. Null parts cannot be told from what is known. */
+export interface SurveyResult {
+  readonly measuredSurfaceC: number
+  readonly heatFluxWPerM2: Uncertain
+  /** Null for a flat surface, a sphere and a vessel. */
+  readonly heatLossWPerM: Uncertain | null
+  /** Whole run, without fittings [W]. */
+  readonly heatLossW: Uncertain | null
+  /** Of the lagging as it stands, if its thickness is known. */
+  readonly effectiveWPerMK: Uncertain | null
+  /** What the build-up as given would have: for comparison at the same mean temperature. */
+  readonly soundWPerMK: number | null
+  /** Surface that the run as given would have at the survey condition [°C]. */
+  readonly expectedSurfaceC: number
+  readonly notes: readonly Note[]
 }
 
 export interface RunResult {
@@ -130,6 +169,8 @@ export interface RunResult {
   readonly limits: readonly LimitResult[]
   readonly ladder: readonly Rating[]
   readonly money: RunMoney | null
+  /** Null where no surface temperature was measured. */
+  readonly survey: SurveyResult | null
   readonly notes: readonly Note[]
 }
 

@@ -1,32 +1,34 @@
-import { yearlyFuelKWh } from '#money/energy-cost.ts'
+import { yearlyEnergyCost, yearlyFuelKWh } from '#money/energy-cost.ts'
 import { presentValueFactor } from '#money/present-value.ts'
 import { bare, rungsOf } from './build-up.ts'
 import { passesFromM } from './continuous.ts'
-import { energyCost, flowPerUnit } from './cost.ts'
 import type { MoneyTerms, Problem } from './problem.ts'
 import { type Rated, rate } from './rating.ts'
 import { writeReason } from './reason.ts'
 import type { Governing, Note, Rating, RunMoney, RunResult } from './result.ts'
+import type { States } from './states.ts'
+import { surveyOf } from './survey.ts'
 
 /** Sizes one run: rates the bare run and every rung, chooses, and says why. */
 export function size(problem: Problem): RunResult {
-  const bareRated = rate(problem, bare)
-  const rungs = rungsOf(problem).map((settled) => rate(problem, settled))
+  const bareRated = rate(problem, bare, null)
+  const rungs = rungsOf(problem).map((settled) => rate(problem, settled, bareRated.states))
   const ladder = rungs.map(({ rating }) => rating)
   const choice = choose(problem, bareRated, rungs)
   const shown = choice.rated ?? rungs[rungs.length - 1] ?? bareRated
   const money = problem.money
-    ? runMoney(problem, problem.money, bareRated.rating, ladder, choice.rated?.rating ?? null)
+    ? runMoney(problem, problem.money, bareRated, ladder, choice.rated)
     : null
   const result = {
     tag: problem.tag,
     bare: bareRated.rating,
     chosen: choice.rated?.rating ?? null,
     governing: choice.governing,
-    mattThicknessM: mattThicknessM(problem, choice.governing, shown.rating),
+    mattThicknessM: mattThicknessM(problem, choice.governing, shown.rating, bareRated.states),
     limits: shown.rating.limits,
     ladder,
     money,
+    survey: surveyOf(problem),
     notes: notesOf(problem, shown, choice.governing),
   }
   return { ...result, reason: writeReason(result) }
@@ -82,7 +84,12 @@ const BRIGHT_EMISSIVITY = 0.5
 const MATT_EMISSIVITY = 0.9
 
 /** Where damp decides, or cannot be met, under a bright jacket: the rung a matt finish would need [m]. */
-function mattThicknessM(problem: Problem, governing: Governing, shown: Rating): number | null {
+function mattThicknessM(
+  problem: Problem,
+  governing: Governing,
+  shown: Rating,
+  bareStates: States,
+): number | null {
   const { damp } = problem.conditions
   const isDampUnmet =
     governing === 'unmet' && shown.limits.some(({ limit, pass }) => limit === 'damp' && !pass)
@@ -92,7 +99,7 @@ function mattThicknessM(problem: Problem, governing: Governing, shown: Rating): 
     conditions: { ...problem.conditions, damp: { ...damp, emissivity: MATT_EMISSIVITY } },
   }
   const found = rungsOf(matt)
-    .map((settled) => rate(matt, settled).rating)
+    .map((settled) => rate(matt, settled, bareStates).rating)
     .find(({ pass }) => pass)
   return found?.thicknessM ?? null
 }
@@ -100,27 +107,33 @@ function mattThicknessM(problem: Problem, governing: Governing, shown: Rating): 
 function runMoney(
   problem: Problem,
   terms: MoneyTerms,
-  bareRating: Rating,
+  bareRated: Rated,
   ladder: readonly Rating[],
-  chosen: Rating | null,
+  chosenRated: Rated | null,
 ): RunMoney | null {
+  const chosen = chosenRated?.rating ?? null
   const priced = ladder.filter((rung) => rung.money !== null)
   const cost = (rung: Rating): number => rung.money?.lifeCycle ?? Number.POSITIVE_INFINITY
   const cheapest = priced.length > 0 ? priced.reduce((a, b) => (cost(b) < cost(a) ? b : a)) : null
   if (!cheapest && !chosen) return null
   const { extent } = problem
-  const bareFlow = flowPerUnit(bareRating)
-  const chosenFlow = chosen ? flowPerUnit(chosen) : null
-  const bareEnergyPerYear = energyCost(bareFlow, terms.energy)
+  const bareFlow = bareRated.yearlyFlowPerUnit
+  const chosenFlow = chosenRated?.yearlyFlowPerUnit ?? null
   const installed = chosen?.money?.installed ?? null
-  const saving =
-    chosenFlow === null ? null : bareEnergyPerYear - energyCost(chosenFlow, terms.energy)
-  const fuelKWh = (flow: number): number => yearlyFuelKWh(flow, terms.energy)
-  const co2 = (fuelPerUnit: number): number | null =>
-    extent === null || terms.co2KgPerKWh === null ? null : fuelPerUnit * extent * terms.co2KgPerKWh
+  // Per unit the run is straight; its totals hold what its fittings lose too.
+  const bareTotalW = bareRated.rating.yearlyMeanLossW
+  const chosenTotalW = chosen?.yearlyMeanLossW ?? null
+  const costOf = (flow: number): number => yearlyEnergyCost(flow, terms.energy)
+  const saving = chosenFlow === null ? null : costOf(bareFlow) - costOf(chosenFlow)
+  const savingTotal =
+    chosenTotalW === null || bareTotalW === null ? null : costOf(bareTotalW) - costOf(chosenTotalW)
+  const co2KgPerYear = (totalW: number): number | null =>
+    terms.co2KgPerKWh === null ? null : yearlyFuelKWh(totalW, terms.energy) * terms.co2KgPerKWh
+  const bareCo2Kg = bareTotalW === null ? null : co2KgPerYear(bareTotalW)
+  const chosenCo2Kg = chosenTotalW === null ? null : co2KgPerYear(chosenTotalW)
   return {
     currency: terms.currency,
-    per: problem.shape.kind === 'flat' ? 'm2' : 'm',
+    per: bareRated.states.loss.unit,
     hoursPerYear: terms.energy.hoursPerYear,
     fuel: terms.fuelName,
     fuelPricePerKWh: terms.energy.fuelPricePerKWh,
@@ -129,12 +142,12 @@ function runMoney(
     growth: terms.growth,
     lifeYears: terms.lifeYears,
     presentValueFactor: presentValueFactor(terms),
-    bareEnergyPerYear,
+    bareEnergyPerYear: costOf(bareFlow),
     installedTotal: installed === null || extent === null ? null : installed * extent,
-    savingPerYearTotal: saving === null || extent === null ? null : saving * extent,
+    savingPerYearTotal: savingTotal,
     paybackYears: paybackYears(installed, saving),
-    co2KgPerYear: chosenFlow === null ? null : co2(fuelKWh(chosenFlow)),
-    co2SavedKgPerYear: chosenFlow === null ? null : co2(fuelKWh(bareFlow) - fuelKWh(chosenFlow)),
+    co2KgPerYear: chosenCo2Kg,
+    co2SavedKgPerYear: bareCo2Kg === null || chosenCo2Kg === null ? null : bareCo2Kg - chosenCo2Kg,
     cheapestThicknessM: cheapest?.thicknessM ?? null,
     withinTwoPercentM: chosen ? flatRange(ladder, chosen) : null,
   }

@@ -8,6 +8,8 @@ import type { Condition, Problem } from './problem.ts'
 export interface States {
   /** Yearly mean, aged finish: loss and money. */
   readonly loss: Solution
+  /** The same in each month, January first; empty where the yearly mean stands for all. */
+  readonly months: readonly Solution[]
   /** Hottest day and medium, no wind, new finish: touch and the hot end of service. */
   readonly touch: Solution
   /** Most humid air, coldest medium, no wind, new finish: damp and the cold end of service. */
@@ -23,6 +25,10 @@ export function systemOf(problem: Problem, settled: Settled, condition: Conditio
     mediumC: condition.mediumC,
     insideFilmWPerM2K: problem.insideFilmWPerM2K,
     around: condition.around,
+    sunAbsorbedWPerM2:
+      condition.sunWPerM2 * (isBare ? condition.bareSolarAbsorptance : condition.solarAbsorptance),
+    film: condition.film,
+    inclinedFilm: condition.inclinedFilm,
   }
 }
 
@@ -36,9 +42,10 @@ export function getsCold(problem: Problem): boolean {
 const asksDamp = (problem: Problem): boolean => getsCold(problem) || problem.limits.damp !== null
 
 export function solveStates(problem: Problem, settled: Settled): States {
-  const { loss, touch, damp } = problem.conditions
+  const { loss, months, touch, damp } = problem.conditions
   return {
     loss: solve(systemOf(problem, settled, loss)),
+    months: months.map((month) => solve(systemOf(problem, settled, month))),
     touch: solve(systemOf(problem, settled, touch)),
     damp: asksDamp(problem) ? solve(systemOf(problem, settled, damp)) : null,
   }

@@ -10,7 +10,6 @@ import {
   nusseltVerticalCylinder,
   nusseltVerticalPlate,
 } from './convection/natural.ts'
-import { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
 import {
   branchUsed,
   simplifiedFreePipe,
@@ -19,6 +18,7 @@ import {
   simplifiedWindOnWall,
   type TwoBranchFormula,
 } from './convection/simplified.ts'
+import { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
 import { outOfRange } from './correlation.ts'
 import {
   isCylinder,

@@ -190,7 +190,13 @@ function rectangularWall(shape: Of<'rect-duct'>, layers: readonly Layer[]): Wall
     faces:
       shape.riseM === null
         ? [
-            face('side', 'vertical-plate', upright, (2 * outerHeightM) / outerPerimeterM, conduction),
+            face(
+              'side',
+              'vertical-plate',
+              upright,
+              (2 * outerHeightM) / outerPerimeterM,
+              conduction,
+            ),
             face('top', 'up', across, acrossShare, conduction),
             face('bottom', 'down', across, acrossShare, conduction),
           ]

@@ -61,6 +61,12 @@ const quantities = {
     si: unit('W/m²K', 1, 1),
     us: unit('Btu/h·ft²°F', BTU_PER_HOUR_W / (FOOT2_M2 * FAHRENHEIT_K), 2),
   },
+  massFlow: { si: unit('kg/s', 1, 3), us: unit('lb/h', POUND_KG / HOUR_S, 0) },
+  heatCapacity: {
+    si: unit('J/kgK', 1, 0),
+    us: unit('Btu/lb°F', BTU_J / (POUND_KG * FAHRENHEIT_K), 3),
+  },
+  count: same('', 0),
   power: { si: unit('W', 1, 0), us: unit('Btu/h', BTU_PER_HOUR_W, 0) },
   plantPower: { si: unit('kW', 1000, 1), us: unit('kBtu/h', 1000 * BTU_PER_HOUR_W, 1) },
   energy: same('kWh', 0),

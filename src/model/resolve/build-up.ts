@@ -79,6 +79,7 @@ function singleMaterial(
       conductivity: { kind: 'constant', conductivityWPerMK } as const,
       serviceMinC: null,
       serviceMaxC: null,
+      vapourResistance: null,
       price: null,
     }
     findings.note(
@@ -118,6 +119,7 @@ function layerMaterial(material: Material, index: CatalogueIndex): LayerMaterial
     conductivity: material.conductivity,
     serviceMinC: material.serviceMinC,
     serviceMaxC: material.serviceMaxC,
+    vapourResistance: material.vapourResistance,
     price: index.priceModel(material.id),
   }
 }

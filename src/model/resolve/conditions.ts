@@ -2,20 +2,22 @@
 
 import type { Finish } from '#catalogue/types.ts'
 import type { Condition } from '#sizing/problem.ts'
+import { clearSkyC, radiantMixC } from '#solver/index.ts'
+import type { FilmChoice } from '#solver/types.ts'
 import type { RunValues } from '../fields.ts'
 import { type Findings, plain } from './findings.ts'
 import type { Medium } from './medium.ts'
+import { type MonthlyAir, parseMonthlyAir } from './monthly-air.ts'
 import type { Thing } from './standing.ts'
-
-/** Emissivity of a surface without a finish of the catalogue. Source: non-metallic surfaces, ASHRAE 2021 ch. 23 table 12. */
-const PLAIN_EMISSIVITY = 0.9
-/** Emissivity of bare steel pipe in service. Source: ASHRAE Handbook Fundamentals 2021, ch. 23, table 12. */
-const BARE_STEEL_EMISSIVITY = 0.8
+import { resolveSurfaces, type Surfaces } from './surfaces.ts'
 
 export interface Conditions {
   readonly loss: Condition
   readonly touch: Condition
   readonly damp: Condition
+  readonly frost: Condition | null
+  readonly survey: Condition | null
+  readonly months: readonly Condition[]
 }
 
 export function resolveConditions(
@@ -26,95 +28,221 @@ export function resolveConditions(
   findings: Findings,
 ): Conditions | null {
   const { airC } = values
+  const months = resolveMonths(values, findings)
   if (airC === undefined) {
     findings.fault('airC', 'nothing', 'the temperature of the air around the run in °C')
     return null
   }
-  const bareEmissivity = bareEmissivityOf(values, thing, findings)
-  const jacket = jacketEmissivity(values, finish)
-  const touchAirC = values.touchAirC ?? airC
-  const dampAirC = values.dampAirC ?? airC
-  const given = values.surroundingsC
-  // Surroundings are given once, for the yearly mean. Where a question's air is harder than they are, they follow it.
-  const surroundings = {
-    loss: given ?? airC,
-    touch: Math.max(given ?? touchAirC, touchAirC),
-    damp: Math.min(given ?? dampAirC, dampAirC),
-  }
-  const at = (
-    question: 'loss' | 'touch' | 'damp',
-    conditionAirC: number,
-    mediumC: number,
-    emissivity: number,
-  ): Condition => ({
-    around: {
-      airC: conditionAirC,
-      surroundingsC: surroundings[question],
-      windMPerS: question === 'loss' ? (values.windMPerS ?? 0) : 0,
-      altitudeM: values.altitudeM ?? 0,
-    },
-    mediumC,
-    emissivity,
-    bareEmissivity,
-  })
+  const place = { ...values, airC }
+  const surfaces = resolveSurfaces(values, thing, finish, findings)
+  const isBuried = thing.shape.kind === 'buried-pipe'
+  if (isBuried) noteUnusedUnderground(values, findings)
   return {
-    loss: at('loss', airC, medium.mediumC, jacket.agedEmissivity),
-    touch: at('touch', touchAirC, medium.hottestC, jacket.newEmissivity),
-    damp: at('damp', dampAirC, medium.coldestC, jacket.newEmissivity),
+    loss: lossCondition(place, medium, surfaces, isBuried),
+    touch: touchCondition(place, medium, surfaces),
+    damp: dampCondition(place, medium, surfaces),
+    frost: frostCondition(place, medium, surfaces, isBuried),
+    survey: surveyCondition(place, medium, surfaces, isBuried),
+    months: months.map((monthC) =>
+      lossCondition(inMonth(place, monthC), medium, surfaces, isBuried),
+    ),
   }
 }
 
-function jacketEmissivity(
-  { emissivity }: RunValues,
-  finish: Finish | null,
-): { agedEmissivity: number; newEmissivity: number } {
-  return {
-    agedEmissivity: emissivity ?? finish?.emissivityAged ?? PLAIN_EMISSIVITY,
-    newEmissivity: emissivity ?? finish?.emissivityNew ?? PLAIN_EMISSIVITY,
-  }
+type Place = RunValues & { readonly airC: number }
+
+/** Touch and damp are always judged with the detailed film: the simplified one makes hot surfaces too cool. */
+const lossFilm = ({ filmWPerM2K, method }: RunValues): FilmChoice =>
+  filmWPerM2K === undefined ? (method ?? 'detailed') : { fixedWPerM2K: filmWPerM2K }
+
+interface Weather {
+  readonly airC: number
+  readonly surroundingsC: number
+  readonly windMPerS: number
 }
 
-function bareEmissivityOf(values: RunValues, { wall }: Thing, findings: Findings): number {
-  if (values.thicknessM === 0 && values.emissivity !== undefined) return values.emissivity
-  if (values.bareEmissivity !== undefined) return values.bareEmissivity
-  const emissivity = wall?.emissivityBare ?? BARE_STEEL_EMISSIVITY
-  findings.note(
-    'bare-emissivity-assumed',
-    `The bare surface is taken with an emissivity of ${plain(emissivity, 2)}${wall ? `, ${wall.name.toLowerCase()} as found in service` : ''}.`,
+/** Under the open sky part of what a surface sees is colder than the air. */
+function underSky({ airC, surroundingsC, windMPerS }: Weather, { skyView }: RunValues): Weather {
+  if (skyView === undefined || skyView === 0) return { airC, surroundingsC, windMPerS }
+  const skyC = clearSkyC(airC)
+  return { airC, windMPerS, surroundingsC: radiantMixC({ skyView, skyC, surroundingsC }) }
+}
+
+function lossCondition(
+  place: Place,
+  { mediumC }: Medium,
+  { aged, bare }: Surfaces,
+  isBuried: boolean,
+): Condition {
+  const { airC } = place
+  const weather = underSky(
+    { airC, surroundingsC: place.surroundingsC ?? airC, windMPerS: place.windMPerS ?? 0 },
+    place,
   )
-  return emissivity
+  return {
+    around: { ...weather, altitudeM: place.altitudeM ?? 0 },
+    mediumC,
+    emissivity: aged.emissivity,
+    bareEmissivity: bare.emissivity,
+    sunWPerM2: isBuried ? 0 : (place.solarWPerM2 ?? 0),
+    solarAbsorptance: aged.absorptance,
+    bareSolarAbsorptance: bare.absorptance,
+    film: lossFilm(place),
+    inclinedFilm: 'higher',
+  }
+}
+
+/** No wind, no cold sky, the hottest medium; in the sun a jacket is taken as dark as it gets. */
+function touchCondition(place: Place, { hottestC }: Medium, surfaces: Surfaces): Condition {
+  const airC = place.touchAirC ?? place.airC
+  const { bare, new: fresh, aged } = surfaces
+  return {
+    // Surroundings are given once, for the yearly mean. Where a question's air is harder than they are, they follow it.
+    around: {
+      airC,
+      surroundingsC: Math.max(place.surroundingsC ?? airC, airC),
+      windMPerS: 0,
+      altitudeM: place.altitudeM ?? 0,
+    },
+    mediumC: hottestC,
+    emissivity: fresh.emissivity,
+    bareEmissivity: bare.emissivity,
+    sunWPerM2: place.solarWPerM2 ?? 0,
+    solarAbsorptance: Math.max(fresh.absorptance, aged.absorptance),
+    bareSolarAbsorptance: bare.absorptance,
+    film: 'detailed',
+    inclinedFilm: 'lower',
+  }
+}
+
+/** No wind, no sun, the coldest medium. */
+function dampCondition(place: Place, { coldestC }: Medium, surfaces: Surfaces): Condition {
+  const airC = place.dampAirC ?? place.airC
+  const { bare, new: fresh } = surfaces
+  const surroundingsC = Math.min(place.surroundingsC ?? airC, airC)
+  return {
+    around: {
+      ...underSky({ airC, surroundingsC, windMPerS: 0 }, place),
+      altitudeM: place.altitudeM ?? 0,
+    },
+    mediumC: coldestC,
+    emissivity: fresh.emissivity,
+    bareEmissivity: bare.emissivity,
+    sunWPerM2: 0,
+    solarAbsorptance: fresh.absorptance,
+    bareSolarAbsorptance: bare.absorptance,
+    film: 'detailed',
+    inclinedFilm: 'lower',
+  }
+}
+
+/** The coldest day, with wind, without sun; the medium is the water at the start. */
+function frostCondition(
+  place: Place,
+  { coldestC }: Medium,
+  surfaces: Surfaces,
+  isBuried: boolean,
+): Condition | null {
+  if (place.frostHours === undefined) return null
+  const airC = place.frostAirC ?? place.airC
+  const cold: Place = {
+    ...place,
+    airC,
+    surroundingsC: Math.min(place.surroundingsC ?? airC, airC),
+    windMPerS: place.frostWindMPerS ?? place.windMPerS ?? 0,
+    solarWPerM2: 0,
+  }
+  const mediumC = place.frostStartC ?? coldestC
+  return lossCondition(cold, { mediumC, hottestC: mediumC, coldestC: mediumC }, surfaces, isBuried)
+}
+
+/** What it was on the day; always the detailed film, since a surface temperature is what was measured. */
+function surveyCondition(
+  place: Place,
+  medium: Medium,
+  surfaces: Surfaces,
+  isBuried: boolean,
+): Condition | null {
+  if (place.measuredSurfaceC === undefined) return null
+  const airC = place.surveyAirC ?? place.airC
+  const { filmWPerM2K: _, skyView: __, ...rest } = place
+  const day: Place = {
+    ...rest,
+    airC,
+    surroundingsC: place.surveySurroundingsC ?? airC,
+    windMPerS: place.surveyWindMPerS ?? 0,
+    solarWPerM2: 0,
+    method: 'detailed',
+  }
+  const mediumC = place.surveyMediumC ?? medium.mediumC
+  const condition = lossCondition(day, { ...medium, mediumC }, surfaces, isBuried)
+  const { surveyEmissivity } = place
+  return surveyEmissivity === undefined
+    ? condition
+    : { ...condition, emissivity: surveyEmissivity, bareEmissivity: surveyEmissivity }
+}
+
+function resolveMonths(values: RunValues, findings: Findings): MonthlyAir | readonly [] {
+  if (values.monthlyAirC === undefined) return []
+  const parsed = parseMonthlyAir(values.monthlyAirC)
+  if (!parsed.ok) {
+    findings.fault('monthlyAirC', values.monthlyAirC, parsed.allowed)
+    return []
+  }
+  findings.note(
+    'by-the-month',
+    'The loss of the year is that of its twelve months, the hours in service spread evenly over them; the loss shown beside it stands at the yearly mean.',
+  )
+  return parsed.monthsC
+}
+
+/** A month keeps the difference between surroundings and air that the place has over the year. */
+function inMonth(place: Place, monthC: number): Place {
+  const { surroundingsC, airC } = place
+  return surroundingsC === undefined
+    ? { ...place, airC: monthC }
+    : { ...place, airC: monthC, surroundingsC: monthC + surroundingsC - airC }
+}
+
+function noteUnusedUnderground(values: RunValues, findings: Findings): void {
+  const given = [
+    values.windMPerS !== undefined && values.windMPerS > 0 ? 'wind' : '',
+    values.solarWPerM2 !== undefined && values.solarWPerM2 > 0 ? 'sun' : '',
+    values.surroundingsC === undefined ? '' : 'surroundings',
+    values.filmWPerM2K === undefined ? '' : 'film',
+  ].filter((word) => word !== '')
+  if (given.length > 0) {
+    findings.note('unused', `${given.join(', ')}: not used for a buried run.`)
+  }
 }
 
 /** Says what was assumed of the surface and of the air, once the limits are known. */
 export function noteConditions(
   values: RunValues,
-  finish: Finish | null,
   conditions: Conditions,
-  judged: { readonly touch: boolean; readonly damp: boolean },
+  judged: { readonly touch: boolean; readonly damp: boolean; readonly frost: boolean },
   findings: Findings,
 ): void {
   noteSurroundings(values.surroundingsC, conditions, judged, findings)
-  if (
-    values.thicknessM !== 0 &&
-    values.finish === undefined &&
-    values.emissivity === undefined &&
-    !finish
-  ) {
-    findings.note(
-      'finish-assumed',
-      `No finish is given: the surface is taken with an emissivity of ${PLAIN_EMISSIVITY}.`,
-    )
-  }
+  const air = `the air of the run, ${plain(values.airC ?? 0)} °C`
   if (judged.touch && values.touchAirC === undefined) {
-    findings.note(
-      'touch-air-assumed',
-      `Touch is judged at the air of the run, ${plain(values.airC ?? 0)} °C: no hottest-day air is given.`,
-    )
+    findings.note('touch-air-assumed', `Touch is judged at ${air}: no hottest-day air is given.`)
   }
   if (judged.damp && values.dampAirC === undefined) {
+    findings.note('damp-air-assumed', `Damp is judged at ${air}: no most-humid air is given.`)
+  }
+  if (judged.frost && values.frostAirC === undefined) {
+    findings.note('frost-air-assumed', `Frost is judged at ${air}: no coldest air is given.`)
+  }
+  if (values.filmWPerM2K !== undefined) {
     findings.note(
-      'damp-air-assumed',
-      `Damp is judged at the air of the run, ${plain(values.airC ?? 0)} °C: no most-humid air is given.`,
+      'film-fixed',
+      `The film outside is fixed at ${plain(values.filmWPerM2K, 2)} W/m²K, convection and radiation together, for loss and frost; touch and damp are judged with the film worked out.`,
+    )
+  } else if (values.method === 'simplified') {
+    findings.note(
+      'film-simplified',
+      'Loss and frost are reckoned with the simplified film; touch, damp and service with the detailed one, since the simplified makes hot surfaces too cool.',
     )
   }
 }
@@ -132,10 +260,10 @@ function noteSurroundings(
       `Touch is judged with surroundings at the air of the hottest day, ${plain(touch.around.surroundingsC)} °C, since those given are cooler.`,
     )
   }
-  if (judged.damp && damp.around.surroundingsC < given) {
+  if (judged.damp && damp.around.airC < given) {
     findings.note(
       'damp-surroundings',
-      `Damp is judged with surroundings at the most humid air, ${plain(damp.around.surroundingsC)} °C, since those given are warmer.`,
+      `Damp is judged with surroundings at the most humid air, ${plain(damp.around.airC)} °C, since those given are warmer.`,
     )
   }
 }

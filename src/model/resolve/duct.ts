@@ -1,7 +1,16 @@
+import { airDensityKgPerM3, insideFilmWPerM2K, standardPressurePa } from '#solver/index.ts'
 import type { RunValues } from '../fields.ts'
 import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
-import { cylinder, differs, lying, riseOf, type Thing, wallOf } from './standing.ts'
+import {
+  cylinder,
+  differs,
+  givenInsideFilm,
+  lying,
+  riseOf,
+  type Thing,
+  wallOf,
+} from './standing.ts'
 
 /** Inside film of an air duct at about 3 m/s [W/(m²·K)]. Source: CIBSE Guide C table 3.25, as quoted publicly. */
 const DUCT_FILM_W_PER_M2_K = 15.5
@@ -37,7 +46,13 @@ export function roundDuct(
     return null
   }
   const shape = cylinder(values, outerDiameterM, findings)
-  return shape && { shape, extent: values.lengthM ?? null, ...ductInside(values, index, findings) }
+  const bore = {
+    areaM2: (Math.PI / 4) * outerDiameterM * outerDiameterM,
+    perimeterM: Math.PI * outerDiameterM,
+  }
+  return (
+    shape && { shape, extent: values.lengthM ?? null, ...ductInside(values, bore, index, findings) }
+  )
 }
 
 export function rectangularDuct(
@@ -81,25 +96,80 @@ export function rectangularDuct(
       'the outer height of the duct in mm, or a size such as 600 x 400',
     )
   if (widthM === undefined || heightM === undefined) return null
-  const riseM = lying(values, findings) === 'vertical' ? riseOf(values, findings) : null
+  const lies = lying(values, findings)
+  if (lies === 'inclined') {
+    findings.fault(
+      'orientation',
+      lies,
+      'horizontal or vertical: a rectangular duct is reckoned lying or standing',
+    )
+  }
+  const riseM = lies === 'vertical' ? riseOf(values, findings) : null
   return {
     shape: { kind: 'rect-duct', widthM, heightM, riseM },
     extent: values.lengthM ?? null,
-    ...ductInside(values, index, findings),
+    ...ductInside(
+      values,
+      { areaM2: widthM * heightM, perimeterM: 2 * (widthM + heightM) },
+      index,
+      findings,
+    ),
   }
+}
+
+/** Cross-section of the air: the duct's own, its sheet being thin. */
+interface Bore {
+  readonly areaM2: number
+  readonly perimeterM: number
 }
 
 function ductInside(
   values: RunValues,
+  bore: Bore,
   index: CatalogueIndex,
   findings: Findings,
-): Pick<Thing, 'insideFilmWPerM2K' | 'wall'> {
-  findings.note(
-    'inside-film-assumed',
-    `The film inside the duct is taken as ${DUCT_FILM_W_PER_M2_K} W/m²K, air at about 3 m/s.`,
-  )
+): Pick<Thing, 'insideFilmWPerM2K' | 'wall' | 'wallM' | 'nominalM'> {
   return {
-    insideFilmWPerM2K: DUCT_FILM_W_PER_M2_K,
+    insideFilmWPerM2K: ductFilm(values, bore, findings),
     wall: wallOf(values, 'galvanised_steel', index, findings),
+    wallM: values.wallM ?? null,
+    nominalM: null,
   }
+}
+
+/** Film inside: as given, else by the velocity of the air, else of the usual velocity. */
+function ductFilm(values: RunValues, bore: Bore, findings: Findings): number {
+  const given = givenInsideFilm(values)
+  if (given !== null) return given
+  const airC = values.mediumC ?? USUAL_DUCT_AIR_C
+  const pressurePa = standardPressurePa(values.altitudeM ?? 0)
+  const velocityMPerS = ductVelocityMPerS(values, bore, airC, pressurePa)
+  if (velocityMPerS === null) {
+    findings.note(
+      'inside-film-assumed',
+      `The film inside the duct is taken as ${DUCT_FILM_W_PER_M2_K} W/m²K, air at about 3 m/s.`,
+    )
+    return DUCT_FILM_W_PER_M2_K
+  }
+  const hydraulicDiameterM = (4 * bore.areaM2) / bore.perimeterM
+  const film = insideFilmWPerM2K({ velocityMPerS, hydraulicDiameterM, airC, pressurePa })
+  findings.note(
+    'inside-film',
+    `The film inside the duct is ${plain(film)} W/m²K, of air at ${plain(velocityMPerS, 2)} m/s in a smooth duct.`,
+  )
+  return film
+}
+
+/** Only for the film of a duct whose air has no temperature yet: that is a fault of its own. */
+const USUAL_DUCT_AIR_C = 20
+
+function ductVelocityMPerS(
+  { velocityMPerS, flowKgPerS, medium }: RunValues,
+  { areaM2 }: Bore,
+  airC: number,
+  pressurePa: number,
+): number | null {
+  if (velocityMPerS !== undefined) return velocityMPerS
+  if (flowKgPerS === undefined || (medium !== undefined && medium !== 'air')) return null
+  return flowKgPerS / (airDensityKgPerM3(airC, pressurePa) * areaM2)
 }

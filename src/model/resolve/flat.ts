@@ -1,7 +1,7 @@
 import type { RunValues } from '../fields.ts'
 import type { Findings } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
-import { type Thing, wallOf } from './standing.ts'
+import { givenInsideFilm, type Thing, wallOf } from './standing.ts'
 
 export function flat(values: RunValues, index: CatalogueIndex, findings: Findings): Thing | null {
   const { widthM, heightM } = values
@@ -15,10 +15,10 @@ export function flat(values: RunValues, index: CatalogueIndex, findings: Finding
   let facing: 'vertical' | 'up' | 'down' = 'vertical'
   if (values.orientation === undefined) {
     findings.note('facing-assumed', 'The surface is taken as vertical: no orientation is given.')
-  } else if (values.orientation === 'horizontal') {
+  } else if (values.orientation === 'horizontal' || values.orientation === 'inclined') {
     findings.fault(
       'orientation',
-      'horizontal',
+      values.orientation,
       'vertical, up or down: a flat surface that lies faces up or down',
     )
   } else {
@@ -40,7 +40,9 @@ export function flat(values: RunValues, index: CatalogueIndex, findings: Finding
   return {
     shape: { kind: 'flat', facing, characteristicLengthM: lengthM ?? 1 },
     extent: values.areaM2 ?? areaM2,
-    insideFilmWPerM2K: null,
+    insideFilmWPerM2K: givenInsideFilm(values),
     wall: wallOf(values, 'carbon_steel', index, findings),
+    wallM: values.wallM ?? null,
+    nominalM: null,
   }
 }

@@ -10,8 +10,11 @@ import {
   type TouchedSurface,
 } from '#touch/burn-threshold.ts'
 import type { RunValues } from '../fields.ts'
+import { resolveArrival } from './arrival.ts'
+import { resolveCode } from './code.ts'
 import type { Conditions } from './conditions.ts'
 import { type Findings, plain } from './findings.ts'
+import { resolveFrost } from './frost.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import type { Thing } from './standing.ts'
 
@@ -32,11 +35,20 @@ export function resolveLimits(
   index: CatalogueIndex,
   findings: Findings,
 ): Limits {
-  if (values.shape === 'flat' && values.maxLossWPerM !== undefined) {
+  const { shape } = values
+  const isByMetre = shape !== 'flat' && shape !== 'sphere' && shape !== 'vessel'
+  if (!isByMetre && values.maxLossWPerM !== undefined) {
     findings.fault(
       'maxLossWPerM',
       `${plain(values.maxLossWPerM)} W/m`,
-      'nothing for a flat surface: give max_loss_w_m2',
+      `nothing for a ${shape === 'flat' ? 'flat surface' : shape}: give max_loss_w_m2`,
+    )
+  }
+  if (shape === 'flat' && values.maxOuterDiameterM !== undefined) {
+    findings.fault(
+      'maxOuterDiameterM',
+      `${plain(values.maxOuterDiameterM * 1000)} mm`,
+      'nothing for a flat surface: it has no diameter',
     )
   }
   const { burn, bareBurn } = resolveBurn(values, thing, finish, index, findings)
@@ -46,7 +58,11 @@ export function resolveLimits(
     bareBurn,
     maxLossWPerM: values.maxLossWPerM ?? null,
     maxLossWPerM2: values.maxLossWPerM2 ?? null,
-    damp: conditions && resolveDamp(values, conditions, findings),
+    damp: conditions && resolveDamp(values, thing, conditions, findings),
+    frost: resolveFrost(values, thing, conditions, index, findings),
+    arrival: resolveArrival(values, thing, conditions, index, findings),
+    code: resolveCode(values, thing, conditions, index, findings),
+    maxOuterDiameterM: values.maxOuterDiameterM ?? null,
   }
 }
 
@@ -57,6 +73,8 @@ function resolveBurn(
   index: CatalogueIndex,
   findings: Findings,
 ): Pick<Limits, 'burn' | 'bareBurn'> {
+  // Underground nobody reaches it; a note of the shape says so.
+  if (thing?.shape.kind === 'buried-pipe') return { burn: null, bareBurn: null }
   if (values.reach === false) {
     if (values.reachReason === undefined) {
       findings.fault(
@@ -144,8 +162,13 @@ function touchedSurface(
   }
 }
 
-function resolveDamp(values: RunValues, { damp }: Conditions, findings: Findings): Limits['damp'] {
-  if (values.humidity === undefined) return null
+function resolveDamp(
+  values: RunValues,
+  thing: Thing | null,
+  { damp }: Conditions,
+  findings: Findings,
+): Limits['damp'] {
+  if (values.humidity === undefined || thing?.shape.kind === 'buried-pipe') return null
   // No surface gets colder than the coldest of medium, air and surroundings.
   if (Math.min(damp.mediumC, damp.around.surroundingsC) >= damp.around.airC) return null
   if (values.dewMarginK === undefined) {

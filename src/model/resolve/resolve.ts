@@ -5,11 +5,14 @@ import type { RunValues } from '../fields.ts'
 import { resolveBuildUp, resolveFinish } from './build-up.ts'
 import { noteConditions, resolveConditions } from './conditions.ts'
 import { Findings } from './findings.ts'
+import { resolveFittings } from './fittings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import { resolveLimits } from './limits.ts'
 import { resolveMedium } from './medium.ts'
 import { resolveMoney } from './money.ts'
+import { resolveSurvey } from './survey.ts'
 import { resolveThing } from './thing.ts'
+import { noteVapour } from './vapour.ts'
 
 export type Resolved =
   | { readonly ok: true; readonly problem: Problem }
@@ -35,6 +38,8 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   const gainsHeat = conditions !== null && conditions.loss.mediumC < conditions.loss.around.airC
   const money = resolveMoney(values, gainsHeat, index, findings)
   const limits = resolveLimits(values, thing, finish, conditions, index, findings)
+  const fittings = resolveFittings(values, thing, index, findings)
+  const survey = resolveSurvey(values, findings)
   const finishPrice = finish && index.finishPrice(finish.id)
   const isWeighed =
     money !== null &&
@@ -58,11 +63,15 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   }
   noteConditions(
     values,
-    finish,
     conditions,
-    { touch: limits.burn !== null || limits.maxSurfaceC !== null, damp: limits.damp !== null },
+    {
+      touch: limits.burn !== null || limits.maxSurfaceC !== null,
+      damp: limits.damp !== null,
+      frost: limits.frost !== null,
+    },
     findings,
   )
+  noteVapour(buildUp.layers, finish, conditions, findings)
   return {
     ok: true,
     problem: {
@@ -74,11 +83,14 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
       finish: finish && {
         name: finish.name,
         surfaceMaxC: finish.surfaceMaxC,
+        vapourTight: finish.vapourTight ?? 'no',
         price: finishPrice,
       },
       steps: buildUp.steps,
       conditions,
       limits,
+      fittings,
+      survey,
       money,
       hoursPerYear: values.hoursPerYear ?? null,
       notes: findings.notes,
@@ -99,4 +111,7 @@ const setsAny = (limits: Problem['limits']): boolean =>
   limits.burn !== null ||
   limits.maxLossWPerM !== null ||
   limits.maxLossWPerM2 !== null ||
-  limits.damp !== null
+  limits.damp !== null ||
+  limits.frost !== null ||
+  limits.arrival !== null ||
+  limits.code !== null

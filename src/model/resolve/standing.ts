@@ -8,11 +8,15 @@ import type { CatalogueIndex } from './index-catalogue.ts'
 /** What is lagged: shape, size and extent of a run, and the wall as a bare surface. */
 export interface Thing {
   readonly shape: Shape
-  /** Length [m], or area of a flat surface [m²]; null where not given. */
+  /** Length [m], area of a flat surface [m²], or 1 for a sphere or vessel; null where not given. */
   readonly extent: number | null
   /** Film between the medium and the wall [W/(m²·K)]; null where it is neglected. */
   readonly insideFilmWPerM2K: number | null
   readonly wall: WallMaterial | null
+  /** Thickness of the wall [m]; null where neither given nor listed. */
+  readonly wallM: number | null
+  /** Nominal size of a pipe [m]; null where only a diameter is given. */
+  readonly nominalM: number | null
 }
 
 /** Diameters this near are the same [m]: a size and an od_mm may both be given if they agree. */
@@ -24,24 +28,67 @@ export function cylinder(
   outerDiameterM: number,
   findings: Findings,
 ): Shape | null {
+  if (values.buryDepthM !== undefined) return buried(values, outerDiameterM, findings)
   const orientation = lying(values, findings)
   if (orientation === 'horizontal') return { kind: 'pipe', outerDiameterM, orientation }
   const riseM = riseOf(values, findings)
-  return riseM === null ? null : { kind: 'pipe', outerDiameterM, orientation: 'vertical', riseM }
+  return riseM === null ? null : { kind: 'pipe', outerDiameterM, orientation, riseM }
 }
 
-/** Pipes and ducts lie or stand; only a flat surface faces up or down. */
-export function lying(values: RunValues, findings: Findings): 'horizontal' | 'vertical' {
-  const { orientation } = values
+/** Soil of which nothing is known [W/(m·K)]. Source: common practice, no source; moist soil. */
+const SOIL_W_PER_M_K = 1.5
+
+function buried(values: RunValues, outerDiameterM: number, findings: Findings): Shape | null {
+  const { buryDepthM: depthM, orientation } = values
+  if (depthM === undefined) return null
+  if (orientation !== undefined && orientation !== 'horizontal') {
+    findings.fault('orientation', orientation, 'horizontal, or nothing: the run is buried')
+  }
+  if (depthM <= outerDiameterM / 2) {
+    findings.fault(
+      'buryDepthM',
+      `${plain(depthM, 3)} m`,
+      `the depth of the axis below the surface, more than half the diameter, ${plain(outerDiameterM / 2, 3)} m`,
+    )
+    return null
+  }
+  if (values.soilWPerMK === undefined) {
+    findings.note(
+      'soil-assumed',
+      `The soil is taken to conduct ${SOIL_W_PER_M_K} W/mK, as moist soil does: none is given.`,
+    )
+  }
+  findings.note(
+    'buried',
+    'The run is buried: the surface of the soil is taken at the temperature of the air; touch and damp are not judged.',
+  )
+  return {
+    kind: 'buried-pipe',
+    outerDiameterM,
+    depthM,
+    soilWPerMK: values.soilWPerMK ?? SOIL_W_PER_M_K,
+  }
+}
+
+/** Pipes and ducts lie, stand or slope; only a flat surface faces up or down. */
+export function lying(
+  { orientation }: RunValues,
+  findings: Findings,
+): 'horizontal' | 'vertical' | 'inclined' {
   if (orientation === 'up' || orientation === 'down') {
     findings.fault(
       'orientation',
       orientation,
-      'horizontal or vertical; up and down are for flat surfaces',
+      'horizontal, vertical or inclined; up and down are for flat surfaces',
     )
     return 'horizontal'
   }
   return orientation ?? 'horizontal'
+}
+
+/** The film inside as given by hand; null where it is left to others. */
+export function givenInsideFilm({ insideFilmWPerM2K }: RunValues): number | null {
+  return insideFilmWPerM2K ?? null
 }
 
 /** Heights of a vertical run for which a film is worked out, as of the field `rise_m` [m]. */
@@ -51,7 +98,7 @@ const MOST_RISE_M = 500
 export function riseOf(values: RunValues, findings: Findings): number | null {
   const riseM = values.riseM ?? values.lengthM
   if (riseM === undefined) {
-    findings.fault('riseM', 'nothing', 'the height of the vertical run in m, or its length_m')
+    findings.fault('riseM', 'nothing', 'the height that the run rises in m, or its length_m')
     return null
   }
   if (riseM < LEAST_RISE_M || riseM > MOST_RISE_M) {

@@ -4,6 +4,7 @@ import type { Findings } from './findings.ts'
 import { flat } from './flat.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import { pipe } from './pipe.ts'
+import { sphere, vessel } from './round-vessel.ts'
 import { type Thing, wallOf } from './standing.ts'
 
 export function resolveThing(
@@ -21,7 +22,7 @@ export function resolveThing(
 function shaped(values: RunValues, index: CatalogueIndex, findings: Findings): Thing | null {
   const { shape } = values
   if (shape === undefined) {
-    findings.fault('shape', 'nothing', 'pipe, round-duct, rect-duct or flat')
+    findings.fault('shape', 'nothing', 'pipe, round-duct, rect-duct, flat, sphere or vessel')
     return null
   }
   for (const key of unused[shape]) {
@@ -37,13 +38,28 @@ function shaped(values: RunValues, index: CatalogueIndex, findings: Findings): T
       return rectangularDuct(values, index, findings)
     case 'flat':
       return flat(values, index, findings)
+    case 'sphere':
+      return sphere(values, index, findings)
+    case 'vessel':
+      return vessel(values, index, findings)
   }
 }
 
-/** Dimensions that say nothing about a shape: given all the same, a reader is told that they were not used. */
+/** What says nothing about a shape: given all the same, a reader is told that it was not used. */
 const unused: Readonly<Record<NonNullable<RunValues['shape']>, readonly FieldKey[]>> = {
-  pipe: ['widthM', 'heightM', 'areaM2'],
-  'round-duct': ['widthM', 'heightM', 'areaM2'],
-  'rect-duct': ['outerDiameterM', 'areaM2'],
-  flat: ['outerDiameterM', 'lengthM', 'riseM'],
+  pipe: ['widthM', 'heightM', 'areaM2', 'heads', 'velocityMPerS'],
+  'round-duct': ['widthM', 'heightM', 'areaM2', 'heads'],
+  'rect-duct': ['outerDiameterM', 'areaM2', 'heads', 'buryDepthM'],
+  flat: ['outerDiameterM', 'lengthM', 'riseM', 'heads', 'buryDepthM', 'velocityMPerS'],
+  sphere: [
+    'widthM',
+    'heightM',
+    'areaM2',
+    'lengthM',
+    'riseM',
+    'heads',
+    'buryDepthM',
+    'velocityMPerS',
+  ],
+  vessel: ['widthM', 'heightM', 'areaM2', 'riseM', 'buryDepthM', 'velocityMPerS'],
 }

@@ -81,6 +81,11 @@ export function airAt(tempC: number, pressurePa: number): Air {
   }
 }
 
+/** Density of dry air [kg/m³] at a temperature [°C] and pressure [Pa]. Source: ideal gas. */
+export function airDensityKgPerM3(tempC: number, pressurePa: number): number {
+  return pressurePa / (GAS_CONSTANT_J_PER_KG_K * kelvin(tempC))
+}
+
 /**
  * Standard pressure at an altitude [Pa].
  *
