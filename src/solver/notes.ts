@@ -1,5 +1,5 @@
 /** What a reader should know of a solved system. Worked out apart, since only results that are shown need it. */
-import { cornerExcessFraction } from './corner.ts'
+import { cornerExcess } from './corner.ts'
 import { isSimplified } from './film.ts'
 import { filmNotes } from './film-notes.ts'
 import { wallOf } from './geometry.ts'
@@ -54,7 +54,7 @@ const CORNERS_DIFFER = 0.05
 
 function cornerNotes({ shape, layers }: System): Note[] {
   if (shape.kind !== 'rect-duct' || layers.length === 0) return []
-  const excess = cornerExcessFraction({
+  const excess = cornerExcess({
     innerPerimeterM: 2 * (shape.widthM + shape.heightM),
     thicknessM: layers.reduce((sumM, { thicknessM }) => sumM + thicknessM, 0),
     // Any other gives the same ratio.
