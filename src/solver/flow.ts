@@ -14,7 +14,7 @@ export interface Stream {
  * Temperature of the stream at the end of the line [°C].
  *
  * (θ − θa) = (θ0 − θa) exp(−UA/(ṁc)), for a loss proportional to the difference. A stream that stands still takes the
- * temperature of the air. Source: energy balance of plug flow; ASHRAE Handbook Fundamentals 2021, ch. 4.
+ * temperature of the air. Source: energy balance of plug flow.
  */
 export function arrivalTempC({
   startC,

@@ -13,7 +13,7 @@ export interface BuriedPipe {
  * pipe that is not wholly in the ground.
  *
  * Exact for an even soil under a surface of one temperature: R = arcosh(2H/D) / (2πλ). Source: conduction shape factor
- * of a cylinder below a plane, as in Holman, Heat Transfer, table 3-1.
+ * of a cylinder below a plane, in any textbook of heat transfer, from memory.
  */
 export function soilResistanceMKPerW({
   depthM,

@@ -2,7 +2,11 @@
 import { kelvin, ZERO_CELSIUS_K } from './constants.ts'
 import { correlation } from './correlation.ts'
 
-/** Radiant temperature of a clear night sky [°C]; clouds bring it up to that of the air. */
+/**
+ * Radiant temperature of a clear night sky [°C]; clouds bring it up to that of the air.
+ *
+ * No range is remembered; given is that of the nights it was fitted to, widened. Above 55 °C it would pass the air itself.
+ */
 export const clearSky = correlation<{ readonly airC: number }>(
   {
     name: 'Swinbank, clear sky',

@@ -20,7 +20,6 @@ export const sources = {
   incropera: 'Incropera, DeWitt, Bergman and Lavine, Fundamentals of Heat and Mass Transfer',
   iso12241duct: 'ISO 12241:2022, rectangular duct, as quoted in a public building-energy model',
   iso12241form: 'ISO 12241 form, from memory, verify',
-  laminarPipe: 'Developed laminar flow in a tube of constant wall temperature (Graetz problem)',
   leFevreEde1956:
     'Le Fevre and Ede 1956, free convection from the outer surface of a vertical cylinder',
   lemmonJacobsen2004:

@@ -134,7 +134,7 @@ export const simplifiedFreePipe = twoBranches<FreeOnPipe>(
   },
 )
 
-/** Vertical wall or vertical pipe in still air. */
+/** Vertical wall or vertical pipe in still air. Turbulent, it lies 15 to 40 % above the detailed formula for heights of 1 to 10 m. */
 export const simplifiedFreeWall = twoBranches<FreeOnWall>(
   {
     name: 'ISO 12241 form, vertical wall or pipe in still air',
@@ -168,7 +168,12 @@ export const simplifiedWindOnWall = twoBranches<WindOnWall>(
   },
 )
 
-/** Pipe in wind, lying or standing. */
+/**
+ * Pipe in wind, lying or standing.
+ *
+ * Far above the detailed formula: 1.7 times at 0.1 m and 5 m/s, 3 times at 1 m and 10 m/s. That changes the loss of an
+ * insulated pipe little, but makes its surface look cooler than it is.
+ */
 export const simplifiedWindOnPipe = twoBranches<WindOnPipe>(
   {
     name: 'ISO 12241 form, pipe in wind',

@@ -1,4 +1,4 @@
-/** The formulas are remembered, not read: no printed values stand here, only the formulas worked by hand and their own shape. */
+/** The formulas are remembered, not read: they are worked by hand, and held against short forms that are in print. */
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import {
@@ -42,6 +42,28 @@ describe('each branch, worked by hand', () => {
     expect(simplifiedFreeWall(still(0, 0.1))).toBe(0)
     expect(simplifiedWindOnWall(windy(0, 0.1))).toBe(0)
     expect(simplifiedWindOnPipe(windy(0, 0.1))).toBeCloseTo(0.081, 12)
+  })
+})
+
+describe('beside short forms for air in print', () => {
+  const ashrae = (K: number, lengthM: number) => ({
+    laminarWall: 1.33 * (K / lengthM) ** 0.25,
+    turbulentPipe: 1.23 * K ** (1 / 3),
+  })
+
+  // ASHRAE Handbook Fundamentals 2021, ch. 4, simplified equations for air at 21 °C; Holman gives 1.32 for the pipe.
+  test('still air agrees to some per cent, but for turbulent walls', () => {
+    const wall = simplifiedFreeWall(still(20, 0.5)) / ashrae(20, 0.5).laminarWall
+    expect(Math.abs(wall - 1)).toBeLessThan(0.02)
+    const wide = simplifiedFreePipe(still(20, 1)) / ashrae(20, 1).turbulentPipe
+    expect(Math.abs(wide - 1)).toBeLessThan(0.02)
+    const narrow = simplifiedFreePipe(still(20, 0.1)) / (1.32 * (20 / 0.1) ** 0.25)
+    expect(Math.abs(narrow - 1)).toBeLessThan(0.06)
+  })
+
+  // 1.24 Δt^(1/3) in Holman, 1.26 in ASHRAE.
+  test('the turbulent wall lies some four tenths above', () => {
+    expect(simplifiedFreeWall(still(20, 3)) / (1.26 * 20 ** (1 / 3))).toBeCloseTo(1.38, 2)
   })
 })
 
