@@ -9,6 +9,8 @@ import type {
   DuctSize,
   Finish,
   FinishPrice,
+  FittingArea,
+  FittingLength,
   Fuel,
   InchSection,
   LabourTerms,
@@ -17,10 +19,12 @@ import type {
   PipeSize,
   PriceModel,
   SteamState,
+  SupportAllowance,
   ThicknessStep,
   WallMaterial,
 } from '#catalogue/types.ts'
 import { AppError } from '#contract/failures.ts'
+import { codeTables } from './catalogue-codes.ts'
 import { migrate } from './migrate.ts'
 import { seed } from './seed.ts'
 import { noPlaceWords } from './storage-failure.ts'
@@ -87,7 +91,9 @@ export function readCatalogue(db: Database.Database): Catalogue {
     finishes: all<Flagged<Finish, 'outdoor'> & { whereNote: string }>(
       `SELECT id, name, category, emissivity_new AS emissivityNew, emissivity_aged AS emissivityAged,
         touch_class AS touchClass, coating, coating_thickness_m AS coatingThicknessM,
-        surface_max_c AS surfaceMaxC, outdoor, note, where_note AS whereNote, ${provenance} FROM finish`,
+        surface_max_c AS surfaceMaxC, outdoor, solar_absorptance_new AS solarAbsorptanceNew,
+        solar_absorptance_aged AS solarAbsorptanceAged, vapour_tight AS vapourTight,
+        vapour_tightness AS vapourNote, note, where_note AS whereNote, ${provenance} FROM finish`,
     ).map(({ whereNote, outdoor, note, ...finish }) => ({
       ...finish,
       outdoor: outdoor === 1,
@@ -118,7 +124,8 @@ export function readCatalogue(db: Database.Database): Catalogue {
     steam: db
       .prepare<[], SteamState>(
         `SELECT pressure_absolute_pa AS pressureAbsolutePa, temperature_c AS temperatureC,
-        latent_heat_j_per_kg AS latentHeatJPerKg, ${provenance} FROM steam_state ORDER BY pressure_absolute_pa`,
+        latent_heat_j_per_kg AS latentHeatJPerKg, density_vapour_kg_per_m3 AS densityVapourKgPerM3,
+        specific_heat_vapour_j_per_kg_k AS specificHeatVapourJPerKgK, ${provenance} FROM steam_state ORDER BY pressure_absolute_pa`,
       )
       .all(),
     media: all<MediumState>(
@@ -133,6 +140,18 @@ export function readCatalogue(db: Database.Database): Catalogue {
     burnThresholds: all<BurnThreshold>(
       `SELECT surface, contact_s AS contactS, lower_c AS lowerC, upper_c AS upperC, grade, ${provenance}
         FROM burn_threshold`,
+    ),
+    codeTables: codeTables(db),
+    fittingAreas: all<FittingArea>(
+      `SELECT item, dn, pipe_outer_diameter_m AS pipeOuterDiameterM, pressure_class AS pressureClass,
+        area_m2 AS areaM2, note, ${provenance} FROM fitting_area`,
+    ),
+    fittingLengths: all<Flagged<FittingLength, 'lagged'>>(
+      `SELECT item, dn, pipe_outer_diameter_m AS pipeOuterDiameterM, medium_c AS mediumC, lagged, place,
+        length_m AS lengthM, length_low_m AS lowM, length_high_m AS highM, note, ${provenance} FROM fitting_length`,
+    ).map((row) => ({ ...row, lagged: row.lagged === 1 })),
+    supportAllowances: all<SupportAllowance>(
+      `SELECT place, loss_fraction AS lossFraction, note, ${provenance} FROM support_allowance`,
     ),
     priceModels: all<PriceModel>(
       `SELECT material_id AS materialId, per_m3 AS perM3, per_m2 AS perM2, per_m AS perM,

@@ -12,7 +12,13 @@ import type Database from 'better-sqlite3'
 import Papa from 'papaparse'
 
 /** Parents stand before the tables that refer to them. */
-const parents = ['material', 'conductivity_series', 'finish', 'wall_material'] as const
+const parents = [
+  'material',
+  'conductivity_series',
+  'finish',
+  'wall_material',
+  'code_table',
+] as const
 const others = [
   'conductivity_point',
   'wall_material_point',
@@ -25,6 +31,11 @@ const others = [
   'steam_state',
   'fuel',
   'burn_threshold',
+  'code_row',
+  'code_factor',
+  'fitting_area',
+  'fitting_length',
+  'support_allowance',
   'price_model',
   'finish_price',
   'labour_rate',
@@ -41,6 +52,7 @@ const unused: Readonly<Record<(typeof parents)[number], string>> = {
   finish: 'id NOT IN (SELECT finish_id FROM finish_price)',
   wall_material: `id NOT IN (SELECT wall_material_id FROM pipe_size
     UNION SELECT wall_material_id FROM wall_material_point)`,
+  code_table: 'id NOT IN (SELECT table_id FROM code_row UNION SELECT table_id FROM code_factor)',
 }
 
 /** Replaces the shipped rows if the seed files are not those they came from. Rows of the user stay as they are. */
@@ -58,7 +70,13 @@ export function seed(db: Database.Database, folder: string): void {
     if (seededFrom(db) === contentHash) return
     for (const table of others) db.exec(`DELETE FROM ${table} WHERE origin = 'shipped'`)
     // Series first, since a material is only free once its series are gone.
-    for (const table of ['conductivity_series', 'material', 'finish', 'wall_material'] as const)
+    for (const table of [
+      'conductivity_series',
+      'material',
+      'finish',
+      'wall_material',
+      'code_table',
+    ] as const)
       db.exec(`DELETE FROM ${table} WHERE origin = 'shipped' AND ${unused[table]}`)
     for (const { table, text } of files) insertRows(db, table, text)
     db.prepare('INSERT OR REPLACE INTO seed_state (id, content_hash) VALUES (1, ?)').run(

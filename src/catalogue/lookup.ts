@@ -180,7 +180,12 @@ interface Named {
   readonly name: string
 }
 
-function findNamed<T extends Named>(rows: readonly T[], what: string, text: string): Lookup<T> {
+/** By id or name; on a miss the nearest ids, or all of them where nothing is near. */
+export function findNamed<T extends Named>(
+  rows: readonly T[],
+  what: string,
+  text: string,
+): Lookup<T> {
   const wanted = bareName(text)
   const item = rows.find((row) => bareName(row.id) === wanted || bareName(row.name) === wanted)
   if (item) return found(item)

@@ -52,6 +52,13 @@ export interface Finish extends Provenance {
   /** Highest surface temperature the finish stands [°C]; null where none is stated. */
   readonly surfaceMaxC: number | null
   readonly outdoor: boolean
+  /** Share of the sun's heat the surface takes up. */
+  readonly solarAbsorptanceNew: number
+  readonly solarAbsorptanceAged: number
+  /** Whether it keeps vapour out by itself; null where nothing is stated, as for bare pipes. */
+  readonly vapourTight: 'yes' | 'if sealed' | 'no' | null
+  /** The same with its condition, e.g. `only if all laps sealed`. */
+  readonly vapourNote: string
   readonly note: string
 }
 
@@ -113,6 +120,9 @@ export interface SteamState extends Provenance {
   readonly pressureAbsolutePa: number
   readonly temperatureC: number
   readonly latentHeatJPerKg: number
+  /** Of the dry saturated vapour. */
+  readonly densityVapourKgPerM3: number
+  readonly specificHeatVapourJPerKgK: number
 }
 
 export interface MediumState extends Provenance {
@@ -147,6 +157,99 @@ export interface BurnThreshold extends Provenance {
   readonly upperC: number | null
   /** How sure the cell is: H may pass a surface, M may, L never does. */
   readonly grade: 'H' | 'M' | 'L'
+}
+
+/** What a code or a law asks for, as people select it by its id. */
+export interface CodeTable extends Provenance {
+  readonly id: string
+  readonly name: string
+  readonly edition: string
+  readonly service: string
+  /** The measure of the pipe that the size bands count. */
+  readonly sizeBasis: 'nominal' | 'outer-diameter' | 'inner-diameter' | 'any'
+  /** Which band a value on the border of two belongs to; the outermost ends belong to the table. */
+  readonly sizeBorder: BandBorder
+  readonly fluidBorder: BandBorder
+  /**
+   * How a thickness carries over to another conductivity: by T = r[(1 + t/r)^(K/k) − 1] outside the range of the row;
+   * by the thickness that loses the same heat; by interpolation between the rows of the band; not at all.
+   */
+  readonly conversion: 'conductivity-range' | 'equal-loss' | 'interpolate' | 'none'
+  readonly note: string
+  /** Stands wherever a figure of the table does. */
+  readonly warning: string
+  readonly rows: readonly CodeRow[]
+  /** Factors the code puts on its thicknesses, for `code_factor`. */
+  readonly factors: readonly CodeFactor[]
+}
+
+export type BandBorder = 'band-above' | 'band-below'
+
+/** One cell of a code table: null ends are open, null conductivities have no part in it. */
+export interface CodeRow extends Provenance {
+  readonly sizeMinM: number | null
+  readonly sizeMaxM: number | null
+  readonly fluidMinC: number | null
+  readonly fluidMaxC: number | null
+  readonly conductivityMinWPerMK: number | null
+  readonly conductivityMaxWPerMK: number | null
+  /** Mean temperature at which the conductivity is judged. */
+  readonly ratingMeanC: number | null
+  readonly quantity: 'min-thickness' | 'max-loss' | 'min-resistance'
+  /** Thickness [m], amount of loss or gain [W/m], resistance without films [m²K/W]; null where the rule stands for it. */
+  readonly value: number | null
+  /** `inner-diameter`: the thickness is the inner diameter of the pipe. */
+  readonly rule: 'inner-diameter' | null
+  /** What a loss is stated for. */
+  readonly conditions: CodeConditions | null
+  readonly note: string
+}
+
+export interface CodeConditions {
+  readonly mediumC: number
+  readonly airC: number
+  readonly windMPerS: number
+  /** Null: that of the finish. */
+  readonly emissivity: number | null
+}
+
+export interface CodeFactor extends Provenance {
+  readonly factor: number
+  readonly appliesTo: string
+}
+
+export type FittingItem = 'flange-pair' | 'valve'
+
+/** Convention "equal area of bare surface": the fitting loses heat as the same area of bare pipe does. */
+export interface FittingArea extends Provenance {
+  readonly item: FittingItem
+  readonly dn: number
+  readonly pipeOuterDiameterM: number
+  readonly pressureClass: number
+  readonly areaM2: number
+  readonly note: string
+}
+
+/** Convention "metres of insulated pipe": the fitting loses as much as this length of the lagged pipe beside it. */
+export interface FittingLength extends Provenance {
+  readonly item: FittingItem
+  readonly dn: number
+  readonly pipeOuterDiameterM: number
+  readonly mediumC: number
+  readonly lagged: boolean
+  readonly place: 'indoors' | 'outdoors' | 'any'
+  readonly lengthM: number
+  /** Range of the guideline [m]. */
+  readonly lowM: number
+  readonly highM: number
+  readonly note: string
+}
+
+/** What hangers and supports within the lagging add to the loss of the straight pipe. */
+export interface SupportAllowance extends Provenance {
+  readonly place: 'indoors' | 'outdoors'
+  readonly lossFraction: number
+  readonly note: string
 }
 
 /** The simple price model: installed price of one material, illustrative until the user owns a price book. */
@@ -188,6 +291,10 @@ export interface Catalogue {
   readonly media: readonly MediumState[]
   readonly fuels: readonly Fuel[]
   readonly burnThresholds: readonly BurnThreshold[]
+  readonly codeTables: readonly CodeTable[]
+  readonly fittingAreas: readonly FittingArea[]
+  readonly fittingLengths: readonly FittingLength[]
+  readonly supportAllowances: readonly SupportAllowance[]
   readonly priceModels: readonly PriceModel[]
   readonly finishPrices: readonly FinishPrice[]
   readonly labour: LabourTerms

@@ -25,6 +25,17 @@ function ownSeeds(change: (text: string) => string, table = 'finish'): string {
 const emissivity = (db: Database.Database, id: string) =>
   db.prepare('SELECT emissivity_new FROM finish WHERE id = ?').pluck().get(id)
 
+function ownLossTable(db: Database.Database): void {
+  db.exec(`
+    INSERT INTO code_table (id, name, edition, service, size_basis, size_border, fluid_border, conversion, note,
+      warning, source, confidence, origin)
+    VALUES ('my-losses', 'Losses of our contract', '2026', 'hot water', 'outer-diameter', 'band-below', 'band-below',
+      'none', '', 'ours', 'contract', 'found', 'user');
+    INSERT INTO code_row (table_id, size_max_m, quantity, value, condition_medium_c, condition_air_c,
+      condition_wind_m_per_s, condition_emissivity, note, source, confidence, origin)
+    VALUES ('my-losses', 0.008, 'max-loss', 7.06, 60, 15, 0, 0.9, '', 'contract', 'found', 'user');`)
+}
+
 describe('reading', () => {
   const catalogue = () => readCatalogue(opened(':memory:'))
 
@@ -64,6 +75,80 @@ describe('reading', () => {
     ])
   })
 
+  test('a finish says how it takes the sun and whether vapour gets through', () => {
+    const finish = (wanted: string) => {
+      const row = catalogue().finishes.find(({ id }) => id === wanted)
+      return [
+        row?.solarAbsorptanceNew,
+        row?.solarAbsorptanceAged,
+        row?.vapourTight,
+        row?.vapourNote,
+      ]
+    }
+    // As in db/seed/finish.csv; the absorptances are from memory there.
+    expect(finish('al_plain')).toEqual([0.15, 0.4, 'if sealed', 'only if all laps sealed'])
+    expect(finish('grp_uv')).toEqual([0.5, 0.6, 'yes', 'yes'])
+    expect(finish('canvas_glasscloth')).toEqual([0.4, 0.6, 'no', 'no'])
+    expect(finish('bare_steel_pipe')).toEqual([0.85, 0.9, null, ''])
+  })
+
+  test('a code table carries its rows and factors', () => {
+    const { codeTables } = catalogue()
+    const geg = codeTables.find(({ id }) => id === 'geg-2024-heating')
+    // German Building Energy Act, annex 8: 20 and 30 mm, then the inner diameter, then 100 mm; half and double.
+    expect(geg?.rows.map(({ value, rule }) => rule ?? value)).toEqual([
+      0.02,
+      0.03,
+      'inner-diameter',
+      0.1,
+    ])
+    expect(geg?.factors.map(({ factor }) => factor)).toEqual([0.5, 0.5, 2])
+    expect(codeTables.every(({ rows }) => rows.length > 0)).toBe(true)
+    expect(codeTables.flatMap(({ rows }) => rows)).toHaveLength(200)
+  })
+
+  test('a code table of the user may hold losses with conditions of their own', () => {
+    const db = opened(':memory:')
+    // BS 5422:2023 table 20A as quoted in an open-source hot-water model: 60 °C in still air at 15 °C, emissivity 0.90.
+    ownLossTable(db)
+    const own = readCatalogue(db).codeTables.find(({ id }) => id === 'my-losses')
+    expect(own).toMatchObject({ sizeBasis: 'outer-diameter', conversion: 'none', factors: [] })
+    expect(own?.rows).toMatchObject([
+      {
+        sizeMinM: null,
+        sizeMaxM: 0.008,
+        quantity: 'max-loss',
+        value: 7.06,
+        rule: null,
+        conductivityMinWPerMK: null,
+        conditions: { mediumC: 60, airC: 15, windMPerS: 0, emissivity: 0.9 },
+      },
+    ])
+  })
+
+  const thickness = { quantity: 'min-thickness', value: 0.02 }
+  const range = { conductivity_min_w_per_m_k: 0.04, conductivity_max_w_per_m_k: 0.04 }
+  const loss = { quantity: 'max-loss', value: 7.06, condition_medium_c: 60 }
+  test.each([
+    ['a thickness without a conductivity', thickness],
+    ['a loss without its air', { ...loss, condition_wind_m_per_s: 0 }],
+    ['a loss without its wind', { ...loss, condition_air_c: 15 }],
+    ['a resistance for one conductivity', { ...range, quantity: 'min-resistance', value: 1 }],
+    ['a row that asks for nothing', { ...range, quantity: 'min-thickness' }],
+    ['a number beside a rule', { ...range, ...thickness, rule: 'inner-diameter' }],
+    ['a band that ends before it starts', { ...range, ...thickness, size_min_m: 2, size_max_m: 1 }],
+  ])('refuses %s in a code', (_, cells) => {
+    const row = {
+      ...{ table_id: 'dpr-412-a', note: '', source: 'mine', confidence: 'found', origin: 'user' },
+      ...cells,
+    }
+    const names = Object.keys(row)
+    const insert = opened(':memory:').prepare(
+      `INSERT INTO code_row (${names.join(', ')}) VALUES (${names.map(() => '?').join(', ')})`,
+    )
+    expect(() => insert.run(Object.values(row))).toThrow('CHECK constraint failed')
+  })
+
   test('each key that one list takes from another is there', () => {
     const read = catalogue()
     const materials = new Set(read.materials.map(({ id }) => id))
@@ -91,7 +176,7 @@ describe('opening', () => {
         coating_thickness_m, surface_max_c, indoor, outdoor, where_note, vapour_tightness,
         solar_absorptance_new, solar_absorptance_aged, solar_confidence, conductivity_w_per_m_k,
         density_kg_per_m3, specific_heat_j_per_kg_k, thickness_min_m, thickness_max_m, properties_source, note,
-        'measured on site', 'found', 'user' FROM finish WHERE id = 'al_plain';
+        'measured on site', 'found', 'user', vapour_tight FROM finish WHERE id = 'al_plain';
       UPDATE finish_price SET per_m2 = 99, origin = 'user' WHERE finish_id = 'al_plain';`)
     before.close()
 
@@ -125,6 +210,31 @@ describe('opening', () => {
     const after = opened(folder, seeds)
     expect(emissivity(after, 'timber_board')).toBeUndefined()
     expect(emissivity(after, 'stainless')).toBe(0.2)
+  })
+
+  test('code tables of the user outlive a new seed, and keep a shipped table they add to', () => {
+    const folder = temporaryFolder()
+    const before = opened(folder)
+    ownLossTable(before)
+    before.exec(
+      `INSERT INTO code_factor VALUES ('geg-2024-floor', 2, 'our own rule', 'mine', 'found', 'user')`,
+    )
+    before.close()
+
+    const seeds = ownSeeds(
+      (text) => text.replace(/^geg-20.*-(floor|chilled),.*\n/gm, ''),
+      'code_table',
+    )
+    const rows = join(seeds, 'seed', 'code_row.csv')
+    const left = readFileSync(rows, 'utf8').replace(/^geg-20.*-(floor|chilled),.*\n/gm, '')
+    writeFileSync(rows, left)
+    const after = opened(folder, seeds)
+    const tables = readCatalogue(after).codeTables
+    const ids = tables.map(({ id }) => id).filter((id) => !/^(ashrae|dpr)/.test(id))
+    expect(ids.toSorted()).toEqual(['geg-2024-floor', 'geg-2024-heating', 'my-losses'])
+    const floor = tables.find(({ id }) => id === 'geg-2024-floor')
+    expect(floor).toMatchObject({ rows: [], factors: [{ factor: 2 }] })
+    expect(after.pragma('foreign_key_check')).toEqual([])
   })
 
   test('a seed that is wrong is named by file, row and cell, and changes nothing', () => {

@@ -74,6 +74,12 @@ describe('loading', () => {
     { table: 'layering_rule', found: 12, memory: 1, estimate: 0 },
     { table: 'medium_state', found: 113, memory: 15, estimate: 7 },
     { table: 'steam_state', found: 47, memory: 0, estimate: 0 },
+    { table: 'code_table', found: 27, memory: 1, estimate: 0 },
+    { table: 'code_row', found: 136, memory: 64, estimate: 0 },
+    { table: 'code_factor', found: 5, memory: 0, estimate: 0 },
+    { table: 'fitting_area', found: 42, memory: 16, estimate: 0 },
+    { table: 'fitting_length', found: 0, memory: 84, estimate: 0 },
+    { table: 'support_allowance', found: 0, memory: 2, estimate: 0 },
   ])('$table keeps its confidence', ({ table, ...expected }) => {
     const by = (confidence: string) =>
       count(`SELECT count(*) FROM ${table} WHERE confidence = '${confidence}'`)

@@ -4,6 +4,8 @@ import { wordsFor } from '#ui/state/cell-text.ts'
 import { formatNumber, formatQuantity, unitLabel } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
 import { type CatalogueTable, table } from './catalogue-table.ts'
+import { codesTable } from './codes-table.ts'
+import { fittingsTables } from './fittings-tables.ts'
 
 export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly CatalogueTable[] {
   const shown = (value: number | null, quantity: QuantityName, decimals?: number) =>
@@ -59,6 +61,8 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
         ['Touch class'],
         [`At most ${temperature}`, true],
         ['Outdoors'],
+        ['Sun taken up, aged', true],
+        ['Keeps vapour out'],
       ],
       catalogue.finishes,
       (row) => ({
@@ -71,6 +75,8 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
           wordsFor(row.touchClass),
           shown(row.surfaceMaxC, 'temperature', 0),
           row.outdoor ? 'yes' : 'no',
+          formatNumber(row.solarAbsorptanceAged, 2),
+          row.vapourNote || '–',
         ],
         note: row.note,
       }),
@@ -106,6 +112,8 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
         ],
       }),
     ),
+    codesTable(catalogue.codeTables, units),
+    ...fittingsTables(catalogue, units),
     table(
       'Fuels',
       'Price, efficiency and CO₂ belong to the same calorific basis. Prices are illustrative.',
