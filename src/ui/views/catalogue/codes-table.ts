@@ -81,7 +81,7 @@ function asked({ quantity, value, rule, conditions }: CodeRow, units: UnitSystem
   if (rule === 'inner-diameter') return 'thickness = inner diameter'
   if (quantity === 'min-thickness')
     return `at least ${formatWithUnit(value, 'thickness', units, units === 'si' ? 0 : 1)}`
-  if (quantity === 'min-resistance') return `at least ${formatNumber(value, 2)} m²K/W`
+  if (quantity === 'min-resistance') return `at least ${formatNumber(value, 2)}\u00a0m²K/W`
   const most = `at most ${formatWithUnit(value, 'heatLossPerLength', units)}`
   if (!conditions) return most
   const { mediumC, airC, windMPerS, emissivity } = conditions
