@@ -1,6 +1,6 @@
 /** The way into the solver. Pure: no dependency, no input or output, same input, same bits. */
 export { conductivityAtWPerMK, layerDifferenceK } from './conductivity.ts'
-export { kelvin, STEFAN_BOLTZMANN_W_PER_M2_K4 } from './constants.ts'
+export { GRAVITY_M_PER_S2, kelvin, STEFAN_BOLTZMANN_W_PER_M2_K4 } from './constants.ts'
 export { nusseltCylinderInWind, nusseltPlateInWind } from './convection/forced.ts'
 export { insideFilmWPerM2K } from './convection/inside.ts'
 export {
@@ -11,6 +11,25 @@ export {
   nusseltVerticalCylinder,
   nusseltVerticalPlate,
 } from './convection/natural.ts'
+export {
+  branchUsed,
+  simplifiedFreePipe,
+  simplifiedFreeWall,
+  simplifiedWindOnPipe,
+  simplifiedWindOnWall,
+  type TwoBranchFormula,
+} from './convection/simplified.ts'
+export { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
+export type { Correlation } from './correlation.ts'
+export {
+  isCylinder,
+  isDriving,
+  isSimplified,
+  radiates,
+  rayleighNumber,
+  sphereWind,
+  type Weather,
+} from './film.ts'
 export { arrivalTempC, condensateKgPerS } from './flow.ts'
 export {
   coolingTimeS,
@@ -18,12 +37,18 @@ export {
   wallCapacityJPerMK,
   waterCapacityJPerMK,
 } from './frost.ts'
-export { grown, wallOf } from './geometry.ts'
+export { type FaceShape, grown, wallOf } from './geometry.ts'
 export { beyondCurveK, notesOf } from './notes.ts'
-export { airAt, airDensityKgPerM3, standardPressurePa } from './properties/air.ts'
+export {
+  airAt,
+  airDensityKgPerM3,
+  airHeatCapacityJPerKgK,
+  airViscosityPaS,
+  standardPressurePa,
+} from './properties/air.ts'
 export { dewPointC, saturationPressurePa } from './properties/moist-air.ts'
 export { radiationWPerM2K } from './radiation.ts'
 export { bracketedRoot } from './root.ts'
 export { clearSkyC, radiantMixC } from './sky.ts'
-export { acrossLayersK, solve } from './solve.ts'
+export { acrossLayersK, solve, weatherOf } from './solve.ts'
 export { sources } from './sources.ts'
