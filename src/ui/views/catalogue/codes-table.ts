@@ -1,4 +1,4 @@
-/** The code tables in words: one line per band, with what the code adds to it on the first line of each. */
+/** The code tables in words: what each is for, and one line for each of its bands. */
 import type { BandBorder, CodeRow, CodeTable } from '#catalogue/types.ts'
 import { formatNumber, formatQuantity, formatWithUnit, unitLabel } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
@@ -9,48 +9,59 @@ interface Band {
   readonly max: number | null
 }
 
-export function codesTable(codes: readonly CodeTable[], units: UnitSystem): CatalogueTable {
+export function codesTables(
+  codes: readonly CodeTable[],
+  units: UnitSystem,
+): readonly CatalogueTable[] {
   const temperature = (value: number) => formatQuantity(value, 'temperature', units, 0)
   const size = (value: number) => formatQuantity(value, 'size', units, units === 'si' ? 0 : 2)
-  return table(
-    'Codes',
-    'Select one by its id. Every figure is to be verified against your own edition; a factor goes into the code factor of the run.',
-    [
-      ['Id'],
-      ['For'],
-      [`Pipe ${unitLabel('size', units)}`],
-      [`Medium ${unitLabel('temperature', units)}`],
-      [`Conductivity ${unitLabel('conductivity', units)}`],
-      ['Asks for'],
-    ],
-    codes.flatMap((code) =>
-      code.rows.map((row, index) => ({ ...row, code, isFirst: index === 0, index })),
+  return [
+    table(
+      'Codes',
+      'A run selects one by its id; a factor for its case goes into the code factor. Every figure is to be verified against your own edition.',
+      [['Id'], ['Code'], ['Edition'], ['For'], ['Factors']],
+      codes,
+      (code) => ({
+        id: code.id,
+        cells: [code.id, code.name, code.edition, code.service, factorWords(code)],
+        note: `${code.note} ${code.warning.charAt(0).toUpperCase()}${code.warning.slice(1)}.`.trim(),
+      }),
     ),
-    ({ code, isFirst, index, ...row }) => ({
-      id: `${code.id} ${index}`,
-      cells: [
-        code.id,
-        `${code.name}, ${code.edition}: ${code.service}`,
-        code.sizeBasis === 'any'
-          ? 'any'
-          : `${sizeWords[code.sizeBasis]} ${bandWords(sizeOf(row), code.rows.map(sizeOf), code.sizeBorder, size)}`,
-        bandWords(fluidOf(row), code.rows.map(fluidOf), code.fluidBorder, temperature),
-        conductivityWords(row, units),
-        asked(row, units),
+    table(
+      'Code figures',
+      'What each code asks for, by the size of the pipe and the temperature of the medium.',
+      [
+        ['Id'],
+        [`Pipe ${unitLabel('size', units)}`],
+        [`Medium ${unitLabel('temperature', units)}`],
+        [`Conductivity ${unitLabel('conductivity', units)}`],
+        ['Asks for'],
       ],
-      note: isFirst ? `${aboutCode(code)}${row.note}` : row.note,
-    }),
-  )
+      codes.flatMap((code) => code.rows.map((row, index) => ({ ...row, code, index }))),
+      ({ code, index, ...row }) => ({
+        id: `${code.id} ${index}`,
+        cells: [
+          code.id,
+          code.sizeBasis === 'any'
+            ? 'any'
+            : `${sizeWords[code.sizeBasis]} ${bandWords(sizeOf(row), code.rows.map(sizeOf), code.sizeBorder, size)}`,
+          bandWords(fluidOf(row), code.rows.map(fluidOf), code.fluidBorder, temperature),
+          conductivityWords(row, units),
+          asked(row, units),
+        ],
+        note: row.note,
+      }),
+    ),
+  ]
 }
 
 const sizeWords = { nominal: 'nominal', 'outer-diameter': 'outside', 'inner-diameter': 'inside' }
 const sizeOf = ({ sizeMinM, sizeMaxM }: CodeRow): Band => ({ min: sizeMinM, max: sizeMaxM })
 const fluidOf = ({ fluidMinC, fluidMaxC }: CodeRow): Band => ({ min: fluidMinC, max: fluidMaxC })
 
-function aboutCode({ note, warning, factors }: CodeTable): string {
+function factorWords({ factors }: CodeTable): string {
   const cases = factors.map(({ factor, appliesTo }) => `${factor} for ${appliesTo}`)
-  const allowed = cases.length > 0 ? ` Factors: ${cases.join('; ')}.` : ''
-  return `${note}${allowed} ${warning.charAt(0).toUpperCase()}${warning.slice(1)}. `
+  return cases.length > 0 ? cases.join('; ') : '–'
 }
 
 /** `above 22 to 35`, `25 to below 40`: a border belongs to one band only, the outermost ends to the table. */

@@ -4,7 +4,7 @@ import { wordsFor } from '#ui/state/cell-text.ts'
 import { formatNumber, formatQuantity, unitLabel } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
 import { type CatalogueTable, table } from './catalogue-table.ts'
-import { codesTable } from './codes-table.ts'
+import { codesTables } from './codes-table.ts'
 import { fittingsTables } from './fittings-tables.ts'
 
 export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly CatalogueTable[] {
@@ -112,7 +112,7 @@ export function tablesOf(catalogue: Catalogue, units: UnitSystem): readonly Cata
         ],
       }),
     ),
-    codesTable(catalogue.codeTables, units),
+    ...codesTables(catalogue.codeTables, units),
     ...fittingsTables(catalogue, units),
     table(
       'Fuels',
