@@ -90,6 +90,11 @@ describe('coolingTimeS', () => {
     )
   })
 
+  test('never ends at the temperature of the air itself', () => {
+    const pipe = { capacityJPerMK: 9000, resistanceMKPerW: 3, startC: 10 }
+    expect(coolingTimeS({ ...pipe, endC: 0, airC: 0 })).toBeNull()
+  })
+
   test('adds up over a stop on the way', () => {
     fc.assert(
       fc.property(within(-50, 0), within(0.01, 50), within(0.01, 50), (airC, aboveK, moreK) => {

@@ -44,6 +44,14 @@ describe('nusseltInside', () => {
     expect(at(3150)).toBeCloseTo((at(2300) + at(4000)) / 2, 12)
   })
 
+  test('is the turbulent formula from Re 4000 on, and below it on the straight line beneath', () => {
+    const gnielinski = (reynolds: number) =>
+      nusseltTurbulentInside({ reynolds, prandtl: 0.7, friction: smoothPipeFriction(reynolds) })
+    expect(nusseltInside({ reynolds: 4000, prandtl: 0.7 })).toBe(gnielinski(4000))
+    expect(nusseltInside({ reynolds: 4010, prandtl: 0.7 })).toBe(gnielinski(4010))
+    expect(nusseltInside({ reynolds: 3000, prandtl: 0.7 })).toBeLessThan(gnielinski(3000))
+  })
+
   test.each([2300, 4000])('has no step at Re %d', (reynolds) => {
     for (const prandtl of [0.5, 0.7, 10, 1000]) {
       const below = nusseltInside({ reynolds: reynolds * (1 - 1e-9), prandtl })
@@ -64,6 +72,11 @@ describe('nusseltInside', () => {
 })
 
 describe('smoothPipeFriction', () => {
+  // By hand: 1.58 · 11.512925 − 3.28 = 14.910422.
+  test('at Re 1e5', () => {
+    expect(smoothPipeFriction(1e5)).toBeCloseTo(1 / 14.910422 ** 2, 9)
+  })
+
   // Blasius, 0.0791 Re^(-1/4), is printed for smooth pipes up to 1e5.
   test.each([5e3, 2e4, 1e5])('keeps company with Blasius at Re %d', (reynolds) => {
     expect(Math.abs(smoothPipeFriction(reynolds) / (0.0791 * reynolds ** -0.25) - 1)).toBeLessThan(

@@ -37,6 +37,12 @@ describe('each branch, worked by hand', () => {
     expect(found).toBeCloseTo(expected, 9)
   })
 
+  test('the change itself still belongs to the laminar branch', () => {
+    expect(simplifiedFreePipe(still(10, 1))).toBeCloseTo(1.25 * 10 ** 0.25, 12)
+    expect(branchUsed(simplifiedFreePipe, still(10, 1)).branch).toBe('laminar')
+    expect(simplifiedWindOnWall(windy(8, 1))).toBeCloseTo(3.96 * 8 ** 0.5, 12)
+  })
+
   test('without difference or wind nothing moves, and a pipe still conducts', () => {
     expect(simplifiedFreePipe(still(0, 0.1))).toBe(0)
     expect(simplifiedFreeWall(still(0, 0.1))).toBe(0)
@@ -126,10 +132,10 @@ describe.each(formulas)('$name', ({ at, used, switchValue, jumpFraction }) => {
 
   test('says that the change is near within a fifth of it, where it steps at all', () => {
     const steps = Math.abs(jumpFraction) > 0.01
-    expect(used(switchValue * 0.81, 0.3).besideJump).toBe(steps)
-    expect(used(switchValue * 1.19, 0.3).besideJump).toBe(steps)
-    expect(used(switchValue * 0.79, 0.3).besideJump).toBe(false)
-    expect(used(switchValue * 1.21, 0.3).besideJump).toBe(false)
+    expect(used(switchValue * 0.801, 0.3).besideJump).toBe(steps)
+    expect(used(switchValue * 1.199, 0.3).besideJump).toBe(steps)
+    expect(used(switchValue * 0.799, 0.3).besideJump).toBe(false)
+    expect(used(switchValue * 1.201, 0.3).besideJump).toBe(false)
   })
 
   test('never falls with more flow', () => {
