@@ -33,10 +33,17 @@ export {
 export { arrivalTempC, condensateKgPerS } from './flow.ts'
 export {
   coolingTimeS,
+  FREEZING_C,
   freezingTimeS,
   wallCapacityJPerMK,
   waterCapacityJPerMK,
 } from './frost.ts'
+export {
+  conductionFluxWPerM2,
+  effectiveConductivityWPerMK,
+  fluxOf,
+  type SurfaceFlux,
+} from './from-surface.ts'
 export { type FaceShape, grown, wallOf } from './geometry.ts'
 export { beyondCurveK, notesOf } from './notes.ts'
 export {
