@@ -32,18 +32,18 @@ export {
 } from './film.ts'
 export { arrivalTempC, condensateKgPerS } from './flow.ts'
 export {
+  conductionFluxWPerM2,
+  effectiveConductivityWPerMK,
+  fluxOf,
+  type SurfaceFlux,
+} from './from-surface.ts'
+export {
   coolingTimeS,
   FREEZING_C,
   freezingTimeS,
   wallCapacityJPerMK,
   waterCapacityJPerMK,
 } from './frost.ts'
-export {
-  conductionFluxWPerM2,
-  effectiveConductivityWPerMK,
-  fluxOf,
-  type SurfaceFlux,
-} from './from-surface.ts'
 export { type FaceShape, grown, wallOf } from './geometry.ts'
 export { beyondCurveK, notesOf } from './notes.ts'
 export {
