@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { annuityFactor, presentValueFactor } from '#money/present-value.ts'
+import { type PublishedRow, published } from '../published.ts'
 
 const sum = (discount: number, growth: number, lifeYears: number): number => {
   let total = 0
@@ -8,28 +9,39 @@ const sum = (discount: number, growth: number, lifeYears: number): number => {
   return total
 }
 
-// Compound-interest tables as printed in textbooks of engineering economy, (P/A, i, n), four digits; from memory.
-test.each([
-  [0.01, 10, 9.4713],
-  [0.05, 10, 7.7217],
-  [0.05, 20, 12.4622],
-  [0.08, 15, 8.5595],
-  [0.1, 10, 6.1446],
-  [0.1, 20, 8.5136],
-  [0.12, 5, 3.6048],
-  [0.15, 8, 4.4873],
-])('(P/A, %d, %d) is %d', (discount, lifeYears, printed) => {
-  expect(presentValueFactor({ discount, growth: 0, lifeYears })).toBeCloseTo(printed, 4)
+type Terms = { readonly discount: number; readonly lifeYears: number }
+const table = (
+  from: string,
+  rows: readonly (readonly [discount: number, lifeYears: number, printed: string])[],
+): PublishedRow<Terms>[] =>
+  rows.map(([discount, lifeYears, printed]) => ({ from, given: { discount, lifeYears }, printed }))
+
+describe('the present value of equal payments', () => {
+  published(
+    (terms: Terms) => presentValueFactor({ ...terms, growth: 0 }),
+    table('compound-interest tables, (P/A, i, n) (from memory)', [
+      [0.01, 10, '9.4713'],
+      [0.05, 10, '7.7217'],
+      [0.05, 20, '12.4622'],
+      [0.08, 15, '8.5595'],
+      [0.1, 10, '6.1446'],
+      [0.1, 20, '8.5136'],
+      [0.12, 5, '3.6048'],
+      [0.15, 8, '4.4873'],
+    ]),
+  )
 })
 
-// The same tables, (A/P, i, n), capital recovery; from memory.
-test.each([
-  [0.05, 20, 0.08024],
-  [0.08, 15, 0.11683],
-  [0.1, 10, 0.16275],
-  [0.12, 5, 0.27741],
-])('(A/P, %d, %d) is %d', (discount, lifeYears, printed) => {
-  expect(annuityFactor({ discount, lifeYears })).toBeCloseTo(printed, 5)
+describe('the recovery of a capital', () => {
+  published(
+    annuityFactor,
+    table('compound-interest tables, (A/P, i, n) (from memory)', [
+      [0.05, 20, '0.08024'],
+      [0.08, 15, '0.11683'],
+      [0.1, 10, '0.16275'],
+      [0.12, 5, '0.27741'],
+    ]),
+  )
 })
 
 describe('a price that grows', () => {

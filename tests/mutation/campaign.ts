@@ -53,9 +53,9 @@ async function mutantsOf(folder: Folder): Promise<Mutant[]> {
     ignorePatterns: ['**', '!src/**', '!tests/**', '!db/**', '!package.json', '!tsconfig.json'],
     reporters: [process.stdout.isTTY ? 'progress' : 'progress-append-only'],
     allowConsoleColors: false,
-    // A mutant that runs three times as long as its tests usually do, and ten seconds, never ends.
-    timeoutFactor: 3,
-    timeoutMS: 10_000,
+    // A mutant that runs twice as long as its tests usually do, and five seconds, never ends.
+    timeoutFactor: 2,
+    timeoutMS: 5_000,
   })
   const mutants = await campaign.runMutationTest()
   return mutants.map((mutant) => ({ ...mutant, fileName: relative(program, mutant.fileName) }))

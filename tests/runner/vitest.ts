@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { faultOf } from '../published/report.ts'
 import { judged, notRun, type Outcome } from './outcome.ts'
 import { runTool, withReport } from './tool.ts'
 
@@ -13,15 +14,26 @@ const reportSchema = z.object({
 
 /** `whyNoBrowser`: why there is no Chromium, or null where there is one. */
 export async function runVitest(whyNoBrowser: string | null, outcomes: Outcome[]): Promise<void> {
-  outcomes.push(await runProject('node'))
-  if (whyNoBrowser === null) outcomes.push(await runProject('browser'))
+  const { outcome, report } = await runProject('node')
+  outcomes.push(outcome, await judgePublished(report))
+  if (whyNoBrowser === null) outcomes.push((await runProject('browser')).outcome)
   else {
     const why = `${whyNoBrowser}; a test over a table counts once`
     outcomes.push(notRun('vitest browser', await countBrowserTests(), why))
   }
 }
 
-async function runProject(project: 'node' | 'browser'): Promise<Outcome> {
+/** Whether the committed table of printed figures is what the tests just found. */
+async function judgePublished(report: unknown): Promise<Outcome> {
+  const fault = await faultOf(report)
+  if (fault !== null) console.error(`\n${fault}`)
+  const [passed, failed] = fault === null ? [1, 0] : [0, 1]
+  return { name: 'printed figures', passed, failed, notRun: 0 }
+}
+
+async function runProject(
+  project: 'node' | 'browser',
+): Promise<{ outcome: Outcome; report: unknown }> {
   console.log(`\n== vitest ${project}`)
   const { exitCode, report } = await withReport((file) =>
     runTool(tool, [
@@ -33,7 +45,7 @@ async function runProject(project: 'node' | 'browser'): Promise<Outcome> {
     ]),
   )
   const counts = reportSchema.safeParse(report).data
-  return judged(
+  const outcome = judged(
     `vitest ${project}`,
     exitCode,
     counts
@@ -44,6 +56,7 @@ async function runProject(project: 'node' | 'browser'): Promise<Outcome> {
         }
       : null,
   )
+  return { outcome, report }
 }
 
 /** By Vitest's own listing, which reads the files without running them. */

@@ -17,10 +17,12 @@ describe('radiationWPerM2K', () => {
     },
   ])
 
-  // CODATA 2018: σ = 5.670374419e-8 W/(m²·K⁴); between 0 K and 100 K a black surface sends σ·100⁴ = 5.670374419 W/m².
-  test('is the law of Stefan and Boltzmann', () => {
-    expect(100 * radiationWPerM2K(1, 100 - 273.15, -273.15)).toBeCloseTo(5.670374419, 9)
-  })
+  // Between 0 K and 100 K a black surface sends σ·100⁴.
+  published(
+    (temperatureK: number) =>
+      radiationWPerM2K(1, temperatureK - 273.15, -273.15) / temperatureK ** 3,
+    [{ from: 'CODATA 2018, Stefan-Boltzmann constant', given: 100, printed: '5.670374419e-8' }],
+  )
 
   test('times the difference is εσ(T⁴ − T_r⁴), and the same seen from either side', () => {
     fc.assert(

@@ -10,6 +10,7 @@ import {
   unitLabel,
 } from '#units/format.ts'
 import type { QuantityName } from '#units/quantities.ts'
+import { published } from '../published.ts'
 
 describe('exact definitions', () => {
   // NIST SP 811 (2008), appendix B: 1 in = 0.0254 m, 1 ft = 0.3048 m, 1 ft² = 0.092 903 04 m², 1 lb = 0.453 592 37 kg.
@@ -22,23 +23,24 @@ describe('exact definitions', () => {
     expect(shownValue(stored, quantity, 'us')).toBeCloseTo(shown, 13)
   })
 
-  // ISO 80000-5:2007, annex C: 1 Btu = 1055.055 852 62 J, so 1 Btu/h = 0.293 071 07 W (NIST SP 811: 2.930 711 E-01).
-  test('one Btu/h is 0.2930711 W', () => {
-    expect(storedValue(1, 'power', 'us')).toBeCloseTo(0.2930711, 7)
-    expect(storedValue(3600, 'power', 'us')).toBeCloseTo(1055.05585262, 9)
-  })
+  // A unit of energy is told by a unit of power over an hour.
+  published(
+    (hours: number) => storedValue(3600 * hours, 'power', 'us'),
+    [{ from: 'ISO 80000-5:2007, annex C, Btu in J', given: 1, printed: '1055.05585262' }],
+  )
 
-  // NIST SP 811 (2008), appendix B.8, factors for heat: Btu_IT/(h·ft²·°F) 5.678 263 E+00; Btu_IT/(h·ft²) 3.154 591 E+00;
-  // Btu_IT·in/(h·ft²·°F) 1.442 279 E-01; psi 6.894 757 E+03; mi/h 4.4704 E-01 (exact).
-  test.each<[QuantityName, number, number]>([
-    ['filmCoefficient', 5.678263, 6],
-    ['heatFlux', 3.154591, 6],
-    ['conductivity', 0.1442279, 7],
-    ['gaugePressure', 6894.757, 3],
-    ['speed', 0.44704, 12],
-  ])('one US unit of %s is %d in SI', (quantity, stored, digits) => {
-    expect(storedValue(1, quantity, 'us')).toBeCloseTo(stored, digits)
-  })
+  const factors = 'NIST SP 811 (2008), appendix B.8, one US unit in SI'
+  published(
+    (quantity: QuantityName) => storedValue(1, quantity, 'us'),
+    [
+      { from: factors, given: 'power', printed: '2.930711e-1' },
+      { from: factors, given: 'filmCoefficient', printed: '5.678263' },
+      { from: factors, given: 'heatFlux', printed: '3.154591' },
+      { from: factors, given: 'conductivity', printed: '1.442279e-1' },
+      { from: factors, given: 'gaugePressure', printed: '6.894757e3' },
+      { from: factors, given: 'speed', printed: '4.4704e-1' },
+    ],
+  )
 
   test('Btu/h·ft is Btu/h over a foot', () => {
     expect(storedValue(1, 'heatLossPerLength', 'us')).toBeCloseTo(1055.05585262 / 3600 / 0.3048, 12)
