@@ -134,7 +134,7 @@ const survey = z
       .nullable()
       .describe('Conductivity that the lagging as it stands must have [W/(m·K)]'),
     soundWPerMK: orNull('Conductivity of the build-up as given, between the same temperatures'),
-    expectedSurfaceC: finite('Surface that the run as given would have that day [°C]'),
+    expectedSurfaceC: orNull('Surface that the run as given would have that day [°C]'),
     notes: z.array(note),
   })
   .meta({ id: 'SurveyResult', description: 'What the measured surface temperature says' })

@@ -151,8 +151,8 @@ export interface SurveyResult {
   readonly effectiveWPerMK: Uncertain | null
   /** What the build-up as given would have: for comparison at the same mean temperature. */
   readonly soundWPerMK: number | null
-  /** Surface that the run as given would have at the survey condition [°C]. */
-  readonly expectedSurfaceC: number
+  /** Surface that the run as given would have at the survey condition [°C]; null where its thickness is not given. */
+  readonly expectedSurfaceC: number | null
   readonly notes: readonly Note[]
 }
 

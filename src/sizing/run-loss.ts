@@ -15,7 +15,8 @@ export interface RunLoss {
 /**
  * Loss of the whole run in one state, by the convention of its fittings: bare ones lose the flux of the bare run over
  * their own surface, lagged ones as much as their equivalent length; supports add a share of the lagged run's loss;
- * an end loses the run's flux over its disc. Null where the length is not known.
+ * an end loses the flux of the run over its disc, or where fittings stay bare that of the bare run. Null where the
+ * length is not known.
  */
 export function runLoss(
   { shape, extent, fittings }: Problem,
@@ -32,9 +33,11 @@ export function runLoss(
     ? bareState.heatFluxWPerM2 * fittings.bareAreaM2
     : state.heatFlowWPerUnit * fittings.laggedLengthM
   const endsW =
-    state.unit === 'm' && fittings.ends > 0
-      ? state.heatFluxWPerM2 * fittings.ends * grown(shape, settled.thicknessM).volumeM3
-      : 0
+    state.unit !== 'm' || fittings.ends === 0
+      ? 0
+      : fittingsAreBare
+        ? bareState.heatFluxWPerM2 * fittings.ends * grown(shape, 0).volumeM3
+        : state.heatFluxWPerM2 * fittings.ends * grown(shape, settled.thicknessM).volumeM3
   const fittingsW = supportsW + ownW + endsW
   return { totalW: straightW + fittingsW, fittingsW }
 }

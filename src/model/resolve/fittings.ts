@@ -1,22 +1,193 @@
 /** What flanges, valves, supports and ends add to the loss of a run. */
+import type { Figure } from '#catalogue/figure.ts'
+import { fittingAreaM2, laggedLengthM, supportFraction } from '#catalogue/fittings.ts'
+import type { FittingItem } from '#catalogue/types.ts'
 import type { Fittings } from '#sizing/problem.ts'
-import type { RunValues } from '../fields.ts'
-import type { Findings } from './findings.ts'
+import { type FieldKey, fieldOf, type RunValues } from '../fields.ts'
+import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
+import type { Medium } from './medium.ts'
 import type { Thing } from './standing.ts'
 
+const none: Fittings = {
+  bareAreaM2: 0,
+  laggedLengthM: 0,
+  areBare: false,
+  supportShare: 0,
+  ends: 0,
+  convention: '',
+}
+
+/** By item, in the singular and the plural. A strainer counts as a valve. Source: common practice, no source. */
+const counted = [
+  { key: 'valves', item: 'valve', one: 'valve', many: 'valves' },
+  { key: 'strainers', item: 'valve', one: 'strainer', many: 'strainers' },
+  { key: 'flanges', item: 'flange-pair', one: 'flange pair', many: 'flange pairs' },
+] as const satisfies readonly {
+  readonly key: FieldKey
+  readonly item: FittingItem
+  readonly one: string
+  readonly many: string
+}[]
+
+const inLength = ['bends', 'tees', 'reducers'] as const satisfies readonly FieldKey[]
+const others = ['supports', 'ends'] as const satisfies readonly FieldKey[]
+
+/** Without a thing or a medium (their own faults are already found) nothing is looked up. */
 export function resolveFittings(
-  _values: RunValues,
-  _thing: Thing | null,
-  _index: CatalogueIndex,
-  _findings: Findings,
+  values: RunValues,
+  thing: Thing | null,
+  medium: Medium | null,
+  index: CatalogueIndex,
+  findings: Findings,
 ): Fittings {
-  return {
-    bareAreaM2: 0,
-    laggedLengthM: 0,
-    areBare: false,
-    supportShare: 0,
-    ends: 0,
-    convention: '',
+  if (!thing || !medium) return none
+  const { shape } = thing
+  if (shape.kind === 'flat' || shape.kind === 'sphere' || shape.kind === 'vessel') {
+    noteUnused([...counted.map(({ key }) => key), ...inLength, ...others], values, findings)
+    return none
   }
+  const diameterM = shape.kind === 'rect-duct' ? null : shape.outerDiameterM
+  if (diameterM === null) {
+    noteUnused(
+      counted.map(({ key }) => key),
+      values,
+      findings,
+      'the catalogue holds them for pipes only',
+    )
+  }
+  const isBareRun = values.thicknessM === 0
+  const areBare = isBareRun || values.fittings === 'bare'
+  const given = diameterM === null ? [] : counted.filter(({ key }) => (values[key] ?? 0) > 0)
+  const sum = (figureOf: (item: FittingItem) => Figure): number =>
+    given.reduce((total, { key, item }) => {
+      const figure = figureOf(item)
+      return total + (figure.ok ? figure.value * (values[key] ?? 0) : 0)
+    }, 0)
+  const areaOf = (item: FittingItem): Figure => fittingAreaM2(index.catalogue, item, diameterM ?? 0)
+  const lengthOf = (item: FittingItem): Figure =>
+    laggedLengthM(index.catalogue, item, diameterM ?? 0, medium.mediumC)
+  const bareAreaM2 = sum(areaOf)
+  const equivalentM = areBare ? 0 : sum(lengthOf)
+  if (given.length > 0) {
+    const what = listed(given.map(({ key, one, many }) => numbered(values[key] ?? 0, one, many)))
+    noteFittings(what, { areBare, isBareRun, bareAreaM2, equivalentM }, findings)
+    noteFigures(
+      new Set(given.map(({ item }) => (areBare ? areaOf(item) : lengthOf(item)))),
+      findings,
+    )
+    if (values.fittings === 'lagged' && isBareRun) {
+      findings.note('fittings-bare', 'The run is bare, and its fittings are taken as bare with it.')
+    }
+    if (shape.kind === 'pipe' || shape.kind === 'buried-pipe') noteNoLength(values, findings)
+    else
+      findings.note(
+        'fittings-duct',
+        'The figures for valves and flanges are those of pipes of the same diameter: flanges and dampers of ducts are lighter.',
+      )
+  }
+  const supportShare = isBareRun ? 0 : supports(values, index, findings)
+  noteInLength(values, findings)
+  return {
+    bareAreaM2,
+    laggedLengthM: equivalentM,
+    areBare,
+    supportShare,
+    ends: ends(values, areBare, findings),
+    convention: given.length === 0 ? '' : areBare ? byArea : byLength,
+  }
+}
+
+const byArea = 'surface of the bare fitting, losing the flux of the bare run'
+const byLength = 'metres of the lagged run that lose as much'
+
+function noteUnused(
+  keys: readonly FieldKey[],
+  values: RunValues,
+  findings: Findings,
+  why = 'fittings are reckoned for pipes and ducts',
+): void {
+  const given = keys.filter((key) => Number(values[key] ?? 0) > 0)
+  if (given.length === 0) return
+  const columns = listed(given.map((key) => fieldOf(key).column))
+  findings.note('unused', `${columns}: not used for a ${values.shape}, since ${why}.`)
+}
+
+const numbered = (count: number, one: string, many: string): string =>
+  `${count} ${count === 1 ? one : many}`
+
+/** "a", "a and b", "a, b and c". */
+function listed(parts: readonly string[]): string {
+  const last = parts.at(-1) ?? ''
+  return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')} and ${last}`
+}
+
+function noteFittings(
+  what: string,
+  found: {
+    readonly areBare: boolean
+    readonly isBareRun: boolean
+    readonly bareAreaM2: number
+    readonly equivalentM: number
+  },
+  findings: Findings,
+): void {
+  const area = `${plain(found.bareAreaM2, 3)} m² of bare surface (flanges from their dimensions in class 150 without bolts, valves from memory: verify)`
+  const length = `${plain(found.equivalentM, 2)} m of the lagged run (ISO 12241 annex A / VDI 2055, from memory: verify)`
+  const stay = found.isBareRun ? '' : ' They stay bare on a lagged run: far hotter than its jacket.'
+  findings.note(
+    'fittings',
+    found.areBare
+      ? `${what}: ${area}; convention: ${byArea}.${stay}`
+      : `${what}, lagged like the run: ${length}; convention: ${byLength}. On the bare run they count as ${area}.`,
+  )
+}
+
+function noteFigures(figures: ReadonlySet<Figure>, findings: Findings): void {
+  for (const figure of figures) {
+    const text = figure.ok ? figure.assumption : figure.reason
+    if (text !== null) findings.note(figure.ok ? 'fittings-figure' : 'fittings-unknown', text)
+  }
+}
+
+function noteNoLength({ lengthM }: RunValues, findings: Findings): void {
+  if (lengthM !== undefined) return
+  findings.note(
+    'fittings-length',
+    'The run has no length: the loss of its fittings is not added up. Give length_m, 0 for fittings alone.',
+  )
+}
+
+/** Supports count as present or not; wind, sun and sky are outdoors. */
+function supports(values: RunValues, index: CatalogueIndex, findings: Findings): number {
+  if (!(values.supports ?? 0)) return 0
+  const isOutdoors =
+    (values.windMPerS ?? 0) > 0 || (values.solarWPerM2 ?? 0) > 0 || (values.skyView ?? 0) > 0
+  const place = isOutdoors ? 'outdoors' : 'indoors'
+  const share = supportFraction(index.catalogue, place)
+  findings.note(
+    'supports',
+    `Supports add ${plain(share * 100)} % to the loss of the lagged run, ${place}, however many they are (ISO 12241 annex A / VDI 2055, from memory: verify).`,
+  )
+  return share
+}
+
+function ends({ ends: count = 0 }: RunValues, areBare: boolean, findings: Findings): number {
+  if (count > 0) {
+    findings.note(
+      'ends',
+      `${numbered(count, 'open end', 'open ends')}: ${areBare ? 'bare, the flux of the bare run over the cross-section of the bare run' : 'closed off like the run, its flux over its cross-section'} (common practice, no source).`,
+    )
+  }
+  return count
+}
+
+function noteInLength(values: RunValues, findings: Findings): void {
+  const given = inLength.filter((key) => (values[key] ?? 0) > 0)
+  if (given.length === 0) return
+  const what = listed(given)
+  findings.note(
+    'in-length',
+    `${what.charAt(0).toUpperCase()}${what.slice(1)} lie within the length of the run and lose as much as it does (common practice, no source).`,
+  )
 }

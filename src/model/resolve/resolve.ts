@@ -38,8 +38,8 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   const gainsHeat = conditions !== null && conditions.loss.mediumC < conditions.loss.around.airC
   const money = resolveMoney(values, gainsHeat, index, findings)
   const limits = resolveLimits(values, thing, finish, conditions, index, findings)
-  const fittings = resolveFittings(values, thing, index, findings)
-  const survey = resolveSurvey(values, findings)
+  const fittings = resolveFittings(values, thing, medium, index, findings)
+  const survey = resolveSurvey(values, conditions, findings)
   const finishPrice = finish && index.finishPrice(finish.id)
   const isWeighed =
     money !== null &&
@@ -113,5 +113,5 @@ const setsAny = (limits: Problem['limits']): boolean =>
   limits.maxLossWPerM2 !== null ||
   limits.damp !== null ||
   limits.frost !== null ||
-  limits.arrival !== null ||
+  (limits.arrival !== null && limits.arrival.maxDropK !== null) ||
   limits.code !== null
