@@ -88,7 +88,7 @@ function limitsWithLowerEnd(limits: Limits): LimitName[] {
   if (limits.maxLossWPerM !== null || limits.maxLossWPerM2 !== null) set.push('loss')
   if (limits.damp !== null) set.push('damp')
   if (limits.frost !== null) set.push('frost')
-  if (limits.arrival !== null) set.push('arrival')
+  if (limits.arrival !== null && limits.arrival.maxDropK !== null) set.push('arrival')
   if (limits.code !== null) set.push('code')
   return set
 }

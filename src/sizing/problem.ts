@@ -95,41 +95,64 @@ export interface FrostLimit {
   readonly waterJPerMK: number
 }
 
-/** What flows arrives with at most so much less (or more) than it set out with, at the loss condition. */
+/** What flows along the run at the loss condition, and with how much less (or more) than it set out it may arrive. */
 export type ArrivalLimit =
   | {
       readonly kind: 'drop'
-      readonly maxDropK: number
+      /** Null where the arrival is told, not limited. */
+      readonly maxDropK: number | null
       readonly flowKgPerS: number
       readonly heatCapacityJPerKgK: number
     }
-  /** Steam condenses at its temperature: as long as some is left it arrives as it set out. */
+  /** Saturated steam condenses at its temperature: as long as some is left it arrives as it set out. */
   | {
       readonly kind: 'condensate'
-      readonly maxDropK: number
+      readonly maxDropK: number | null
       readonly flowKgPerS: number
       readonly latentHeatJPerKg: number
     }
 
-/** One row of a code table, brought to this run. */
-export type CodeLimit = { readonly table: string } & (
-  | {
-      readonly kind: 'thickness'
-      /** What the table asks for, its factor included [m]. */
-      readonly thicknessM: number
-      /** Conductivity that the table's thickness belongs to, and the temperature at which layers are compared with it. */
-      readonly conductivityWPerMK: number | null
-      readonly ratingMeanC: number
-      /** True where a run whose own conductivity lies in the table's range takes the thickness as it stands. */
-      readonly rangeWPerMK: readonly [number, number] | null
-    }
-  | {
-      readonly kind: 'resistance'
-      readonly resistanceM2KPerW: number
-      readonly ratingMeanC: number
-    }
-  | { readonly kind: 'loss'; readonly maxLossWPerM: number; readonly condition: Condition }
-)
+/** What the rows of a code table ask of this run: each is judged. */
+export interface CodeLimit {
+  /** Name and edition, as a reader looks them up. */
+  readonly table: string
+  readonly asks: readonly CodeAsk[]
+}
+
+export type CodeAsk = CodeThickness | CodeResistance | CodeLoss
+
+/** A thickness on this pipe. */
+export interface CodeThickness {
+  readonly kind: 'thickness'
+  /** Rising in conductivity; one where the table asks the same of every material it names. */
+  readonly rows: readonly CodeThicknessRow[]
+  /** How a thickness carries over to a conductivity that no row names. */
+  readonly conversion: 'conductivity-range' | 'equal-loss' | 'interpolate' | 'none'
+  /** Outside radius of the pipe [m]. */
+  readonly radiusM: number
+  /** Mean temperature at which the layers are compared with the table [°C]. */
+  readonly ratingMeanC: number
+}
+
+export interface CodeThicknessRow {
+  readonly thicknessM: number
+  /** Conductivities that take the thickness as it stands, from and to; null where any does. */
+  readonly rangeWPerMK: readonly [number, number] | null
+}
+
+/** Thickness over conductivity, films left out. */
+export interface CodeResistance {
+  readonly kind: 'resistance'
+  readonly resistanceM2KPerW: number
+  readonly ratingMeanC: number
+}
+
+/** A loss or gain, at the medium, air and wind that the table states it for. */
+export interface CodeLoss {
+  readonly kind: 'loss'
+  readonly maxLossWPerM: number
+  readonly condition: Condition
+}
 
 /** What the fittings of a run add to its loss; all by one convention, which is named. */
 export interface Fittings {

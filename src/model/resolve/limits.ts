@@ -59,7 +59,7 @@ export function resolveLimits(
     maxLossWPerM: values.maxLossWPerM ?? null,
     maxLossWPerM2: values.maxLossWPerM2 ?? null,
     damp: conditions && resolveDamp(values, thing, conditions, findings),
-    frost: resolveFrost(values, thing, conditions, index, findings),
+    frost: resolveFrost(values, thing, conditions, findings),
     arrival: resolveArrival(values, thing, conditions, index, findings),
     code: resolveCode(values, thing, conditions, index, findings),
     maxOuterDiameterM: values.maxOuterDiameterM ?? null,

@@ -7,6 +7,7 @@ import { noteConditions, resolveConditions } from './conditions.ts'
 import { Findings } from './findings.ts'
 import { resolveFittings } from './fittings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
+import { noteLayering } from './layering.ts'
 import { resolveLimits } from './limits.ts'
 import { resolveMedium } from './medium.ts'
 import { resolveMoney } from './money.ts'
@@ -71,7 +72,8 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
     },
     findings,
   )
-  noteVapour(buildUp.layers, finish, conditions, findings)
+  noteVapour(buildUp, finish, conditions, limits.damp?.dewPointC ?? null, findings)
+  noteLayering(values, thing, buildUp, finish, conditions, index, findings)
   return {
     ok: true,
     problem: {
