@@ -129,7 +129,7 @@ function pipeWall(shape: Of<'pipe'>, layers: readonly Layer[]): Wall {
 }
 
 /** In place of soil that is not there, for a pipe whose layers reach up out of it: hardly any resistance [W/(m²·K)]. */
-const NO_SOIL_W_PER_M2_K = 1e6
+const NO_SOIL_W_PER_M2_K = 1e4
 
 /** The soil is the film of a buried pipe: 1/(R_E·π·D_e) on its outer area, towards the temperature of the surface. */
 function buriedWall(shape: Of<'buried-pipe'>, layers: readonly Layer[]): Wall {

@@ -1,7 +1,7 @@
 /** Random systems over the whole of what a run may hold, ends and awkward values included. */
 import fc from 'fast-check'
 import { type FieldKey, fieldOf } from '#model/fields.ts'
-import type { Conductivity, Layer, Shape, Surroundings, System } from '#solver/types.ts'
+import type { Conductivity, FilmChoice, Layer, Shape, Surroundings, System } from '#solver/types.ts'
 
 // The same cases every time, so that what passed once passes again. To hunt further, try other seeds.
 fc.configureGlobal({ seed: 1 })
@@ -74,29 +74,73 @@ export const layersOf = (
     maxLength: most,
   })
 
-export const shape: fc.Arbitrary<Shape> = fc.oneof(
-  fc.record({
-    kind: fc.constant('pipe' as const),
+const pipe = fc.record({
+  kind: fc.constant('pipe' as const),
+  outerDiameterM: spread(0.001, 20),
+  orientation: fc.constant('horizontal' as const),
+})
+
+/** Pipes that stand or lean. */
+export const rising = fc.record({
+  kind: fc.constant('pipe' as const),
+  outerDiameterM: spread(0.001, 20),
+  orientation: fc.constantFrom('vertical' as const, 'inclined' as const),
+  riseM: spread(0.05, 500),
+})
+
+/** In the soil when bare; thick layers may bring it out. */
+export const buried = fc
+  .record({
+    kind: fc.constant('buried-pipe' as const),
     outerDiameterM: spread(0.001, 20),
-    orientation: fc.constant('horizontal' as const),
-  }),
-  fc.record({
-    kind: fc.constant('pipe' as const),
-    outerDiameterM: spread(0.001, 20),
-    orientation: fc.constant('vertical' as const),
-    riseM: spread(0.05, 500),
-  }),
-  fc.record({
-    kind: fc.constant('rect-duct' as const),
-    widthM: spread(0.01, 50),
-    heightM: spread(0.01, 50),
-    riseM: fc.oneof(fc.constant(null), spread(0.05, 500)),
-  }),
-  fc.record({
-    kind: fc.constant('flat' as const),
-    facing: fc.constantFrom('vertical' as const, 'up' as const, 'down' as const),
-    characteristicLengthM: spread(0.01, 50),
-  }),
+    coverM: spread(0.001, 40),
+    soilWPerMK: ofField('soilWPerMK'),
+  })
+  .map(({ coverM, ...rest }) => ({ ...rest, depthM: rest.outerDiameterM / 2 + coverM }))
+
+const duct = fc.record({
+  kind: fc.constant('rect-duct' as const),
+  widthM: spread(0.01, 50),
+  heightM: spread(0.01, 50),
+  riseM: fc.oneof(fc.constant(null), spread(0.05, 500)),
+})
+
+const flat = fc.record({
+  kind: fc.constant('flat' as const),
+  facing: fc.constantFrom('vertical' as const, 'up' as const, 'down' as const),
+  characteristicLengthM: spread(0.01, 50),
+})
+
+const sphere = fc.record({
+  kind: fc.constant('sphere' as const),
+  outerDiameterM: spread(0.001, 20),
+})
+
+const vessel = fc.record({
+  kind: fc.constant('vessel' as const),
+  outerDiameterM: spread(0.05, 20),
+  shellLengthM: spread(0.01, 100),
+  orientation: fc.constantFrom('horizontal' as const, 'vertical' as const),
+  heads: fc.constantFrom('flat' as const, 'domed' as const),
+})
+
+export const shape: fc.Arbitrary<Shape> = fc.oneof(pipe, rising, buried, duct, flat, sphere, vessel)
+
+/** Shapes whose detailed film has no step anywhere: a hotter surface always gives off more. */
+export const unfacing: fc.Arbitrary<Shape> = fc.oneof(
+  pipe,
+  flat.map((given) => ({ ...given, facing: 'vertical' as const })),
+  sphere,
+  buried,
+)
+
+export const film: fc.Arbitrary<FilmChoice> = fc.oneof(
+  { weight: 4, arbitrary: fc.constant('detailed' as const) },
+  { weight: 2, arbitrary: fc.constant('simplified' as const) },
+  {
+    weight: 1,
+    arbitrary: spread(0.1, 1000).map((fixedWPerM2K) => ({ fixedWPerM2K })),
+  },
 )
 
 export const around: fc.Arbitrary<Surroundings> = fc
@@ -117,6 +161,12 @@ export const systemOf = (layers: fc.Arbitrary<Layer[]>): fc.Arbitrary<System> =>
     mediumC: ofField('mediumC'),
     insideFilmWPerM2K: fc.oneof(fc.constant(null), spread(0.5, 1e4)),
     around,
+    sunAbsorbedWPerM2: fc.oneof(fc.constant(0), ofField('solarWPerM2')),
+    film,
+    inclinedFilm: fc.constantFrom('lower' as const, 'higher' as const),
   })
 
 export const anySystem = systemOf(layersOf(conductivity))
+
+/** Under the film whose formulas are those of the handbooks. */
+export const detailedSystem = anySystem.map((system) => ({ ...system, film: 'detailed' as const }))

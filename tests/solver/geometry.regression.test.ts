@@ -1,11 +1,12 @@
 /**
  * Conduction through layered walls with films of given coefficients: worked examples of textbooks as their published
- * companion calculations give them, in the resistance form that `solve` uses.
+ * companion calculations give them, through the whole of `solve` with fixed coefficients.
  */
 import { describe } from 'vitest'
-import { wallOf } from '#solver/geometry.ts'
+import { solve } from '#solver/solve.ts'
 import type { Shape } from '#solver/types.ts'
 import { type PublishedRow, published } from '../published.ts'
+import { constant, plainFilm, still } from './systems.ts'
 
 interface Example {
   /** Null for a flat wall. */
@@ -18,27 +19,30 @@ interface Example {
   readonly outsideFilmWPerM2K?: number
 }
 
-/** Heat flux on the outer area [W/m²], outer area per metre [m²/m], temperatures of the layers' borders [°C]. */
+/** A film that lets through whatever comes, where the example has none. */
+const NO_RESISTANCE_W_PER_M2_K = 1e9
+
+/** Heat flux on the outer area [W/m²], heat loss per metre [W/m], temperatures of the layers' borders [°C]. */
 function worked(given: Example): { flux: number; perM: number; bordersC: number[] } {
   const { innerRadiusM, insideC, outsideC, insideFilmWPerM2K, outsideFilmWPerM2K } = given
   const shape: Shape =
     innerRadiusM === null
       ? { kind: 'flat', facing: 'vertical', characteristicLengthM: 1 }
       : { kind: 'pipe', outerDiameterM: 2 * innerRadiusM, orientation: 'horizontal' }
-  const wall = wallOf(
+  const solution = solve({
+    ...plainFilm,
     shape,
-    given.layers.map(([thicknessM, conductivityWPerMK]) => ({
-      thicknessM,
-      conductivity: { kind: 'constant', conductivityWPerMK },
-    })),
-  )
-  const resistances = given.layers.map(([, λ], j) => (wall.formsM[j] ?? 0) / λ)
-  const inside = insideFilmWPerM2K === undefined ? 0 : wall.outerOverInner / insideFilmWPerM2K
-  const outside = outsideFilmWPerM2K === undefined ? 0 : 1 / outsideFilmWPerM2K
-  const flux = (insideC - outsideC) / resistances.reduce((sum, r) => sum + r, inside + outside)
-  const bordersC = [insideC - flux * inside]
-  for (const resistance of resistances) bordersC.push((bordersC.at(-1) ?? 0) - flux * resistance)
-  return { flux, perM: flux * (wall.outerAreaM2PerM ?? Number.NaN), bordersC }
+    layers: given.layers.map((layer) => constant(...layer)),
+    mediumC: insideC,
+    insideFilmWPerM2K: insideFilmWPerM2K ?? null,
+    film: { fixedWPerM2K: outsideFilmWPerM2K ?? NO_RESISTANCE_W_PER_M2_K },
+    around: still(outsideC),
+  })
+  return {
+    flux: solution.heatFluxWPerM2,
+    perM: solution.heatLossWPerM ?? Number.NaN,
+    bordersC: [...solution.interfaceTempsC],
+  }
 }
 
 const row = (

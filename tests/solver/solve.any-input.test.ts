@@ -1,10 +1,22 @@
 /** Whatever a run may hold: the solver answers in numbers, the same each time. */
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
+import { notesOf } from '#solver/notes.ts'
 import { solve } from '#solver/solve.ts'
 import type { System } from '#solver/types.ts'
 import { anySystem } from './arbitraries.ts'
-import { constant, lying } from './systems.ts'
+import { constant, lying, radiates } from './systems.ts'
+
+const noteCodes = [
+  'film-range',
+  'film-jump',
+  'film-method',
+  'duct-corners',
+  'vessel-heads',
+  'soil-shallow',
+  'conductivity-extrapolated',
+  'conductivity-steep',
+]
 
 describe('for any input', () => {
   test('every number is finite, every coefficient positive, the notes have text', () => {
@@ -14,10 +26,11 @@ describe('for any input', () => {
         expect(numbersIn(solution).every(Number.isFinite)).toBe(true)
         for (const face of solution.faces) {
           expect(face.convectionWPerM2K).toBeGreaterThanOrEqual(0)
-          expect(face.radiationWPerM2K).toBeGreaterThan(0)
+          if (radiates(system)) expect(face.radiationWPerM2K).toBeGreaterThan(0)
+          else expect(face.radiationWPerM2K).toBe(0)
         }
-        for (const { code, text } of solution.notes) {
-          expect(['film-range', 'film-jump', 'conductivity-extrapolated']).toContain(code)
+        for (const { code, text } of notesOf(system, solution)) {
+          expect(noteCodes).toContain(code)
           expect(text).toMatch(/^\S.*\.$/)
         }
       }),
@@ -33,10 +46,40 @@ describe('for any input', () => {
         { shape: lying(20) },
         { shape: { kind: 'rect-duct', widthM: 0.01, heightM: 50, riseM: null } },
         { shape: { kind: 'pipe', outerDiameterM: 0.001, orientation: 'vertical', riseM: 500 } },
+        { shape: { kind: 'pipe', outerDiameterM: 0.001, orientation: 'inclined', riseM: 500 } },
+        { shape: { kind: 'sphere', outerDiameterM: 0.001 } },
+        { shape: { kind: 'buried-pipe', outerDiameterM: 2, depthM: 1, soilWPerMK: 5 } },
+        {
+          shape: {
+            kind: 'vessel',
+            outerDiameterM: 20,
+            shellLengthM: 0.01,
+            orientation: 'vertical',
+            heads: 'flat',
+          },
+        },
+        {
+          shape: {
+            kind: 'vessel',
+            outerDiameterM: 0.05,
+            shellLengthM: 100,
+            orientation: 'horizontal',
+            heads: 'domed',
+          },
+        },
       ],
     ],
     ['mediumC', [{ mediumC: -200 }, { mediumC: 1000 }]],
     ['emissivity', [{ emissivity: 0.01 }, { emissivity: 1 }]],
+    ['sunAbsorbedWPerM2', [{ sunAbsorbedWPerM2: 0 }, { sunAbsorbedWPerM2: 1400 }]],
+    [
+      'film',
+      [
+        { film: 'detailed', inclinedFilm: 'lower' },
+        { film: 'simplified', inclinedFilm: 'higher' },
+        { film: { fixedWPerM2K: 0.1 }, inclinedFilm: 'lower' },
+      ],
+    ],
     [
       'layers',
       [
@@ -63,7 +106,7 @@ describe('for any input', () => {
       (all, [, choices]) => all.flatMap((one) => choices.map((choice) => ({ ...one, ...choice }))),
       [{}],
     )
-    expect(systems).toHaveLength(4 * 2 * 2 * 3 * 3 * 3)
+    expect(systems).toHaveLength(9 * 2 * 2 * 3 * 3 * 3 * 2 * 3)
     for (const system of systems) {
       expect(
         numbersIn(solve(system as System)).every(Number.isFinite),

@@ -3,6 +3,7 @@ import { describe } from 'vitest'
 import { solve } from '#solver/solve.ts'
 import { published, type Within } from '../published.ts'
 import { type BarePipe, bareCopper, bareSteel } from './printed/bare-pipe.ts'
+import { plainFilm } from './systems.ts'
 
 /** Still air of 80 °F; the wall's own resistance is neglected, as it is thousands of times smaller than the film's. */
 const AIR_C = (80 - 32) / 1.8
@@ -11,6 +12,7 @@ const lossWPerM =
   (emissivity: number) =>
   ({ outerDiameterIn, insideF }: BarePipe): number =>
     solve({
+      ...plainFilm,
       shape: {
         kind: 'pipe',
         outerDiameterM: outerDiameterIn * 0.0254,
@@ -19,7 +21,6 @@ const lossWPerM =
       layers: [],
       emissivity,
       mediumC: (insideF - 32) / 1.8,
-      insideFilmWPerM2K: null,
       around: { airC: AIR_C, surroundingsC: AIR_C, windMPerS: 0, altitudeM: 0 },
     }).heatLossWPerM ?? Number.NaN
 

@@ -1,7 +1,5 @@
 /** Small systems, and questions to their answers, that several tests share. */
-import fc from 'fast-check'
 import type { Layer, Shape, Solution, System } from '#solver/types.ts'
-import { spread } from './arbitraries.ts'
 
 export const still = (airC: number) => ({ airC, surroundingsC: airC, windMPerS: 0, altitudeM: 0 })
 
@@ -28,31 +26,20 @@ export const plainFilm = {
 export const hasJump = ({ faces }: Solution): boolean =>
   faces.some(({ closure }) => closure === 'on-jump')
 
-/** Convection and radiation at a face, from its reported coefficients and temperature [W/m²]. */
-export function flowsOf(
-  system: System,
-  face: Solution['faces'][number],
-): { convection: number; radiation: number } {
-  const { airC, surroundingsC } = system.around
-  return {
-    convection: face.convectionWPerM2K * (face.surfaceTempC - airC),
-    radiation:
-      system.emissivity *
-      5.670374419e-8 *
-      ((face.surfaceTempC + 273.15) ** 4 - (surroundingsC + 273.15) ** 4),
-  }
-}
+/** Soil and a fixed coefficient take convection and radiation in one. */
+export const radiates = ({ shape, film }: System): boolean =>
+  shape.kind !== 'buried-pipe' && typeof film !== 'object'
 
-/** Shapes whose film has no step anywhere: a hotter surface always gives off more. */
-export const unfacing = fc.oneof(
-  fc.record({
-    kind: fc.constant('pipe' as const),
-    outerDiameterM: spread(0.001, 20),
-    orientation: fc.constant('horizontal' as const),
-  }),
-  fc.record({
-    kind: fc.constant('flat' as const),
-    facing: fc.constant('vertical' as const),
-    characteristicLengthM: spread(0.01, 50),
-  }),
-)
+/** Convection, radiation and sun at a face, from its reported coefficients and temperature [W/m²]; all outwards. */
+export function flowsOf(system: System, face: Solution['faces'][number]) {
+  const { airC, surroundingsC } = system.around
+  const convection = face.convectionWPerM2K * (face.surfaceTempC - airC)
+  const radiation = radiates(system)
+    ? system.emissivity *
+      5.670374419e-8 *
+      ((face.surfaceTempC + 273.15) ** 4 - (surroundingsC + 273.15) ** 4)
+    : 0
+  const sun = 0 - system.sunAbsorbedWPerM2
+  const larger = Math.max(Math.abs(convection), Math.abs(radiation), -sun, 1e-6)
+  return { convection, radiation, sun, larger }
+}
