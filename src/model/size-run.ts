@@ -2,6 +2,8 @@
 import { limitEnds } from '#sizing/continuous.ts'
 import type { RunDetail, RunOutcome } from '#sizing/result.ts'
 import { size } from '#sizing/size.ts'
+import type { Working } from '#sizing/working/types.ts'
+import { workingOf } from '#sizing/working/working.ts'
 import type { RunValues } from './fields.ts'
 import type { CatalogueIndex } from './resolve/index-catalogue.ts'
 import { resolve } from './resolve/resolve.ts'
@@ -11,6 +13,16 @@ export { type CatalogueIndex, indexCatalogue } from './resolve/index-catalogue.t
 export function sizeRun(values: RunValues, defaults: RunValues, index: CatalogueIndex): RunOutcome {
   const resolved = resolve(withDefaults(values, defaults), index)
   return resolved.ok ? { ok: true, result: size(resolved.problem) } : resolved
+}
+
+/** The whole calculation of a run, line by line; null where the run cannot be sized. */
+export function workRun(
+  values: RunValues,
+  defaults: RunValues,
+  index: CatalogueIndex,
+): Working | null {
+  const resolved = resolve(withDefaults(values, defaults), index)
+  return resolved.ok ? workingOf(resolved.problem) : null
 }
 
 /** What the run sheet shows besides; null where the run cannot be sized. */
