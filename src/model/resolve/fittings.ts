@@ -71,7 +71,8 @@ export function resolveFittings(
   const equivalentM = areBare ? 0 : sum(lengthOf)
   if (given.length > 0) {
     const what = listed(given.map(({ key, one, many }) => numbered(values[key] ?? 0, one, many)))
-    noteFittings(what, { areBare, isBareRun, bareAreaM2, equivalentM }, findings)
+    const isCold = medium.mediumC < (values.airC ?? medium.mediumC)
+    noteFittings(what, { areBare, isBareRun, isCold, bareAreaM2, equivalentM }, findings)
     noteFigures(
       new Set(given.map(({ item }) => (areBare ? areaOf(item) : lengthOf(item)))),
       findings,
@@ -127,6 +128,7 @@ function noteFittings(
   found: {
     readonly areBare: boolean
     readonly isBareRun: boolean
+    readonly isCold: boolean
     readonly bareAreaM2: number
     readonly equivalentM: number
   },
@@ -134,7 +136,9 @@ function noteFittings(
 ): void {
   const area = `${plain(found.bareAreaM2, 3)} m² of bare surface (flanges from their dimensions in class 150 without bolts, valves from memory: verify)`
   const length = `${plain(found.equivalentM, 2)} m of the lagged run (ISO 12241 annex A / VDI 2055, from memory: verify)`
-  const stay = found.isBareRun ? '' : ' They stay bare on a lagged run: far hotter than its jacket.'
+  const stay = found.isBareRun
+    ? ''
+    : ` They stay bare on a lagged run: far ${found.isCold ? 'colder' : 'hotter'} than its jacket.`
   findings.note(
     'fittings',
     found.areBare

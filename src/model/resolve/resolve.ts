@@ -72,7 +72,9 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
     },
     findings,
   )
-  noteVapour(buildUp, finish, conditions, limits.damp?.dewPointC ?? null, findings)
+  if (thing.shape.kind !== 'buried-pipe') {
+    noteVapour(buildUp, finish, conditions, limits.damp?.dewPointC ?? null, findings)
+  }
   noteLayering(values, thing, buildUp, finish, conditions, index, findings)
   return {
     ok: true,
