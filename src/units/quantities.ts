@@ -61,7 +61,12 @@ const quantities = {
     si: unit('W/m²K', 1, 1),
     us: unit('Btu/h·ft²°F', BTU_PER_HOUR_W / (FOOT2_M2 * FAHRENHEIT_K), 2),
   },
+  resistance: {
+    si: unit('m²K/W', 1, 3),
+    us: unit('h·ft²°F/Btu', (FOOT2_M2 * FAHRENHEIT_K) / BTU_PER_HOUR_W, 2),
+  },
   massFlow: { si: unit('kg/s', 1, 3), us: unit('lb/h', POUND_KG / HOUR_S, 0) },
+  condensate: { si: unit('kg/h', 1 / HOUR_S, 1), us: unit('lb/h', POUND_KG / HOUR_S, 1) },
   heatCapacity: {
     si: unit('J/kgK', 1, 0),
     us: unit('Btu/lb°F', BTU_J / (POUND_KG * FAHRENHEIT_K), 3),
@@ -80,6 +85,7 @@ const quantities = {
   money: same('', 0),
   moneyPerLength: { si: unit('per m', 1, 2), us: unit('per ft', 1 / FOOT_M, 2) },
   moneyPerArea: { si: unit('per m²', 1, 2), us: unit('per ft²', 1 / FOOT2_M2, 2) },
+  moneyPerPiece: same('each', 0),
   pricePerEnergy: same('per kWh', 3),
 } as const satisfies Record<string, Record<UnitSystem, DisplayUnit>>
 

@@ -4,14 +4,19 @@ import type { QuantityName, UnitSystem } from './quantities.ts'
 
 /** Units as they are written after numbers in reasons and notes; the longest first, so that `W/m²K` is not `W/m`. */
 const written: readonly (readonly [unit: string, quantity: QuantityName])[] = [
+  ['m²K/W', 'resistance'],
   ['W/m²K', 'filmCoefficient'],
   ['W/mK', 'conductivity'],
   ['W/m²', 'heatFlux'],
   ['W/m', 'heatLossPerLength'],
+  ['J/kgK', 'heatCapacity'],
+  ['kg/s', 'massFlow'],
+  ['kg/h', 'condensate'],
   ['m/s', 'speed'],
   ['bar g', 'gaugePressure'],
   ['°C', 'temperature'],
   ['mm', 'thickness'],
+  ['m²', 'area'],
   ['K', 'temperatureDifference'],
   ['m', 'length'],
 ]
@@ -59,5 +64,11 @@ export function inSentence(
 }
 
 function siSize(unit: string): number {
-  return unit === 'mm' ? 0.001 : unit === 'bar g' ? 1e5 : 1
+  return sizes.get(unit) ?? 1
 }
+
+const sizes: ReadonlyMap<string, number> = new Map([
+  ['mm', 0.001],
+  ['bar g', 1e5],
+  ['kg/h', 1 / 3600],
+])
