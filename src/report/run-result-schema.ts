@@ -77,7 +77,7 @@ const rating = z
       'Outer surface at the touch condition: the hottest day, no wind, new finish, worst face [°C]',
     ),
     timeToFreezeH: orNull(
-      'Hours until stagnant water reaches 0 °C and freezes the stated fraction; null where not asked',
+      'Hours until stagnant water reaches 0 °C and freezes the stated fraction [h]; null where not asked',
     ),
     arrivalTempC: orNull('Medium at the end of the run [°C]; null where its flow is not known'),
     condensateKgPerS: orNull('Steam that condenses along the run [kg/s]; null elsewhere'),
@@ -119,8 +119,10 @@ const runMoney = z
 
 const uncertain = z
   .strictObject({
-    value: finite('The figure'),
-    plusMinus: finite('How far it may be off: root of the sum of squares of what each reading may'),
+    value: finite('The figure [unit of its name]'),
+    plusMinus: finite(
+      'How far it may be off: root of the sum of squares of what each reading may [same unit]',
+    ),
   })
   .meta({ id: 'Uncertain', description: 'A figure and how far it may be off' })
 
@@ -133,7 +135,9 @@ const survey = z
     effectiveWPerMK: uncertain
       .nullable()
       .describe('Conductivity that the lagging as it stands must have [W/(m·K)]'),
-    soundWPerMK: orNull('Conductivity of the build-up as given, between the same temperatures'),
+    soundWPerMK: orNull(
+      'Conductivity of the build-up as given, between the same temperatures [W/(m·K)]',
+    ),
     expectedSurfaceC: orNull('Surface that the run as given would have that day [°C]'),
     notes: z.array(note),
   })
