@@ -142,10 +142,10 @@ export function frozenAfterS(pipe: FreezingPipe, iceFraction: number, rings = 15
     }
     const meltW = at(flows, front)
     const toFreezeKg = Math.min((1 - shareOfFront) * frontKg, iceFraction * totalKg - iceKg)
-    // The ice at the front may not thicken by more than a twentieth of a ring unseen.
+    // The ice at the front may not thicken by more than a hundredth of a ring unseen.
     const stepS = Math.min(
       front === 0 ? Number.POSITIVE_INFINITY : shortestS,
-      (0.05 * frontKg * pipe.latentJPerKg) / meltW,
+      (0.01 * frontKg * pipe.latentJPerKg) / meltW,
       (toFreezeKg * pipe.latentJPerKg) / meltW,
     )
     for (let ring = 0; ring < front; ring += 1) {
