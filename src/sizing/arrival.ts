@@ -56,19 +56,24 @@ function streamEndC(
   { flowKgPerS, heatCapacityJPerKgK }: Drop,
   heatFlowW: number,
 ): number {
-  const condition = problem.conditions.loss
-  const startC = condition.mediumC
+  const startC = problem.conditions.loss.mediumC
   if (heatFlowW === 0) return startC
-  const tendsToC = equilibriumC(condition, (mediumC) => {
+  const tendsToC = tendsTo(problem, settled)
+  const differenceK = startC - tendsToC
+  if (Math.abs(differenceK) < NOTHING_K) return startC
+  const uaWPerK = Math.max(0, heatFlowW / differenceK)
+  return arrivalTempC({ startC, airC: tendsToC, uaWPerK, flowKgPerS, heatCapacityJPerKgK })
+}
+
+/** Temperature of the medium at which the whole run, its fittings included, would lose nothing [°C]. */
+export function tendsTo(problem: Problem, settled: Settled): number {
+  const condition = problem.conditions.loss
+  return equilibriumC(condition, (mediumC) => {
     const state = (of: Settled) => solve(systemOf(problem, of, { ...condition, mediumC }))
     const own = state(settled)
     const bareState = problem.fittings.bareAreaM2 > 0 ? state(bare) : own
     return runLoss(problem, settled, own, bareState)?.totalW ?? 0
   })
-  const differenceK = startC - tendsToC
-  if (Math.abs(differenceK) < NOTHING_K) return startC
-  const uaWPerK = Math.max(0, heatFlowW / differenceK)
-  return arrivalTempC({ startC, airC: tendsToC, uaWPerK, flowKgPerS, heatCapacityJPerKgK })
 }
 
 /** As if there were steam enough: more than the flow where all of it would condense. A run that gains heat makes none. */

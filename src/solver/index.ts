@@ -22,6 +22,7 @@ export {
 export { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
 export type { Correlation } from './correlation.ts'
 export {
+  filmOf,
   isCylinder,
   isDriving,
   isSimplified,

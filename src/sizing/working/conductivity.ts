@@ -112,7 +112,11 @@ function pointSteps(ledger: Ledger, temps: LayerTemps, curve: Curve, source: str
 }
 
 /** λ at a temperature: flat below the curve, the last slope above it (flat if that falls). */
-function interpolation({ pointsC, valuesWPerMK }: Curve, tempC: number, temp: string): string {
+export function interpolation(
+  { pointsC, valuesWPerMK }: Curve,
+  tempC: number,
+  temp: string,
+): string {
   const last = pointsC.length - 1
   const pieces = pointsC.findLastIndex((pointC) => pointC <= tempC)
   if (pieces < 0) return literal(valuesWPerMK[0] ?? 0)
@@ -126,7 +130,7 @@ function interpolation({ pointsC, valuesWPerMK }: Curve, tempC: number, temp: st
 }
 
 /** A number of the catalogue within a formula. */
-function literal(value: number): string {
+export function literal(value: number): string {
   const text = String(Number(Math.abs(value).toPrecision(12)))
   return value < 0 ? `(${MINUS}${text})` : text
 }

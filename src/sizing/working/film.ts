@@ -22,6 +22,8 @@ export interface FaceAt {
   /** Sun on the surface and what of it is taken up. */
   readonly sunWPerM2: number
   readonly solarAbsorptance: number
+  /** Where the surface temperature was not found but measured: what it is. */
+  readonly surfaceWords?: string
 }
 
 const W_M2K = 'W/(m²·K)'
@@ -64,12 +66,13 @@ export function filmSteps(ledger: Ledger, at: FaceAt): void {
 }
 
 /** A bare surface without a film inside is as warm as the medium; any other is found by search. */
-function surfaceLine(ledger: Ledger, { system, face }: FaceAt): void {
+function surfaceLine(ledger: Ledger, { system, face, surfaceWords }: FaceAt): void {
   const isMedium = system.layers.length === 0 && system.insideFilmWPerM2K === null
   ledger.given(
-    isMedium
-      ? 'Surface: bare, as warm as the medium'
-      : 'Surface: found by search so that both fluxes agree, that of the film here and that of the layers below',
+    surfaceWords ??
+      (isMedium
+        ? 'Surface: bare, as warm as the medium'
+        : 'Surface: found by search so that both fluxes agree, that of the film here and that of the layers below'),
     'θ_s',
     face.surfaceTempC,
     '°C',

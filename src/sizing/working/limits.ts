@@ -11,18 +11,22 @@ export function limitSection(
   limits: readonly LimitResult[],
   prepare: (ledger: Ledger) => void = () => undefined,
 ): Section | null {
-  const judged = limits.filter(({ limit }) => limit === name)
-  if (judged.length === 0) return null
+  if (!limits.some(({ limit }) => limit === name)) return null
   const ledger = new Ledger(`Limit: ${limitWords[name].toLowerCase()}`, null)
   prepare(ledger)
-  judged.forEach((limit, index) => {
-    verdict(ledger, limit, judged.length === 1 ? '' : `_${index + 1}`)
-  })
+  verdicts(ledger, name, limits)
   return ledger.section()
 }
 
+export function verdicts(ledger: Ledger, name: LimitName, limits: readonly LimitResult[]): void {
+  const judged = limits.filter(({ limit }) => limit === name)
+  judged.forEach((limit, index) => {
+    verdict(ledger, limit, judged.length === 1 ? '' : `_${index + 1}`)
+  })
+}
+
 /** Found, allowed, and what is between them: not less than nothing where the limit is met. */
-function verdict(ledger: Ledger, limit: LimitResult, ending: string): void {
+export function verdict(ledger: Ledger, limit: LimitResult, ending: string): void {
   const { value, bound, unit, rule, pass, what, condition } = limit
   ledger.given(`Found at the ${condition} condition: ${what}`, `X${ending}`, value, unit)
   ledger.given(`Bound, ${rule}`, `B${ending}`, bound, unit)

@@ -130,7 +130,7 @@ function volumeFormula(shape: Shape, layer: number): string {
 export function endSteps(ledger: Ledger, shape: Shape, thicknessM: number): void {
   if (shape.kind !== 'rect-duct' && shape.kind !== 'pipe' && shape.kind !== 'buried-pipe') return
   const value = grown(shape, thicknessM).volumeM3
-  ledger.given('Thickness of all layers', 's', thicknessM, 'm')
+  ledger.given('Thickness over the end', 's', thicknessM, 'm')
   if (shape.kind === 'rect-duct') {
     ledger.given('Width', 'W', shape.widthM, 'm')
     ledger.given('Height', 'H', shape.heightM, 'm')

@@ -61,9 +61,12 @@ function fittingSteps(
     ledger.step('Supports', 'Q_S', 'f × Q_0', 'W')
     added.push('Q_S')
   }
+  const hasEnds = state.unit === 'm' && fittings.ends > 0
+  if (areBare && (fittings.bareAreaM2 > 0 || hasEnds)) {
+    ledger.given('Flux of the bare run', 'q_b', bareState.heatFluxWPerM2, 'W/m²')
+  }
   if (areBare && fittings.bareAreaM2 > 0) {
     ledger.given('Surface of the bare fittings', 'A_F', fittings.bareAreaM2, 'm²', { source })
-    ledger.given('Flux of the bare run', 'q_b', bareState.heatFluxWPerM2, 'W/m²')
     ledger.step('Bare fittings lose the flux of the bare run', 'Q_F', 'A_F × q_b', 'W')
     added.push('Q_F')
   } else if (!areBare && fittings.laggedLengthM > 0) {
@@ -77,10 +80,15 @@ function fittingSteps(
     ledger.step('Lagged fittings', 'Q_F', 'l_F × Φ', 'W')
     added.push('Q_F')
   }
-  if (state.unit === 'm' && fittings.ends > 0) {
+  if (hasEnds) {
     ledger.given('Ends that are closed off', 'n', fittings.ends, '')
-    endSteps(ledger, shape, settled.thicknessM)
-    ledger.step('Ends lose the flux of the run', 'Q_E', 'n × A_E × q', 'W')
+    endSteps(ledger, shape, areBare ? 0 : settled.thicknessM)
+    ledger.step(
+      areBare ? 'Ends lose the flux of the bare run' : 'Ends lose the flux of the run',
+      'Q_E',
+      areBare ? 'n × A_E × q_b' : 'n × A_E × q',
+      'W',
+    )
     added.push('Q_E')
   }
   return added

@@ -5,10 +5,14 @@ import type { Rating, RunResult } from '../result.ts'
 import { yearlyFlowPerUnit } from '../run-loss.ts'
 import { size } from '../size.ts'
 import { type States, solveStates } from '../states.ts'
+import { arrivalSection } from './arrival.ts'
+import { codeSections } from './code.ts'
+import { frostSections } from './frost.ts'
 import { dewSteps, limitSection } from './limits.ts'
 import { moneySections } from './money.ts'
 import { runSection } from './run.ts'
 import { stateSections } from './state.ts'
+import { surveySections } from './survey.ts'
 import { totalsSection } from './totals.ts'
 import type { Section, Working } from './types.ts'
 import { yearSection } from './year.ts'
@@ -34,6 +38,7 @@ export function workingOf(problem: Problem): Working {
     ...dampSections(shown),
     ...limitSections(shown),
     ...costSections(shown),
+    ...surveySections(problem, shown.result.survey),
     ...closing(shown),
   ]
   return { tag: problem.tag, title: titleOf(shown), sections }
@@ -126,9 +131,13 @@ function dampSections({ problem, settled, states, rating }: Shown): Section[] {
   ]
 }
 
-function limitSections({ rating }: Shown): Section[] {
+function limitSections(shown: Shown): Section[] {
+  const { problem, settled, rating } = shown
   return present([
     limitSection('loss', rating.limits),
+    ...frostSections(problem, settled, rating),
+    arrivalSection(shown),
+    ...codeSections(problem, settled),
     limitSection('space', rating.limits),
     limitSection('service', rating.limits),
   ])

@@ -1,0 +1,120 @@
+/** Survey: from the surface as measured to what passes through it and how well the lagging conducts. */
+import { filmOf, fluxOf, radiates, radiationWPerM2K, wallOf, weatherOf } from '#solver/index.ts'
+import type { Face, System } from '#solver/types.ts'
+import { settle } from '../build-up.ts'
+import type { Condition, Problem } from '../problem.ts'
+import type { SurveyResult } from '../result.ts'
+import { systemOf } from '../states.ts'
+import { filmSteps } from './film.ts'
+import { Ledger } from './ledger.ts'
+import { conditionWords } from './state.ts'
+import type { Section } from './types.ts'
+
+export function surveySections(problem: Problem, survey: SurveyResult | null): Section[] {
+  const condition = problem.conditions.survey
+  if (condition === null || survey === null) return []
+  const system = systemOf(problem, settle(problem.layers, null), condition)
+  const films = filmSections(system, condition, survey.measuredSurfaceC)
+  return [...films, tellingSection(problem, system, survey)]
+}
+
+function filmSections(system: System, condition: Condition, measuredC: number): Section[] {
+  const isBare = system.layers.length === 0
+  return wallOf(system.shape, system.layers).faces.map((shape) => {
+    const { airC, surroundingsC } = system.around
+    const film = filmOf(shape, weatherOf(system), system.film, system.inclinedFilm)
+    const excessK = measuredC - airC
+    const convectionWPerM2K = film(excessK)
+    const radiation = radiates(shape, system.film)
+      ? radiationWPerM2K(system.emissivity, measuredC, surroundingsC)
+      : 0
+    const face: Face = {
+      side: shape.side,
+      surfaceTempC: measuredC,
+      heatFluxWPerM2:
+        convectionWPerM2K * excessK +
+        radiation * (measuredC - surroundingsC) -
+        system.sunAbsorbedWPerM2,
+      convectionWPerM2K,
+      radiationWPerM2K: radiation,
+      interfaceTempsC: [],
+      share: shape.share,
+      closure: 'closed',
+    }
+    const of = shape.side === 'all round' ? '' : `, ${shape.side}`
+    const ledger = new Ledger(`Survey: outer film${of}`, conditionWords(condition, isBare))
+    filmSteps(ledger, {
+      system,
+      shape,
+      face,
+      sunWPerM2: condition.sunWPerM2,
+      solarAbsorptance: isBare ? condition.bareSolarAbsorptance : condition.solarAbsorptance,
+      surfaceWords: 'Surface, as measured',
+    })
+    return ledger.section()
+  })
+}
+
+function tellingSection(problem: Problem, system: System, survey: SurveyResult): Section {
+  const ledger = new Ledger('Survey: what it says', null)
+  for (const { text } of survey.notes) ledger.say(text)
+  const { unit } = fluxOf(system, survey.measuredSurfaceC)
+  const wall = wallOf(system.shape, system.layers)
+  wall.faces.forEach(({ share, side }, index) => {
+    if (wall.faces.length > 1) ledger.given(`Share of the ${side}`, `a_${index + 1}`, share, '')
+  })
+  ledger.given('Flux on the outer area, mean', 'q', survey.heatFluxWPerM2.value, 'W/m²')
+  off(ledger, 'the flux', 'u_q', survey.heatFluxWPerM2.plusMinus, 'W/m²')
+  if (survey.heatLossWPerM !== null || survey.heatLossW !== null) {
+    const area = unit === 'm' ? 'm²/m' : 'm²'
+    ledger.given('Outer area', 'A', wall.outerAreaM2PerUnit, area)
+    ledger.step('Loss of one unit', 'Φ', 'q × A', unit === 'm' ? 'W/m' : 'W')
+  }
+  if (survey.heatLossW !== null && problem.extent !== null) {
+    ledger.given('Length, area or number', 'l', problem.extent, '')
+    ledger.step('Loss of the run, without fittings', 'Q', 'Φ × l', 'W', {
+      value: survey.heatLossW.value,
+    })
+    off(ledger, 'the loss', 'u_Q', survey.heatLossW.plusMinus, 'W')
+  }
+  conductivityLines(ledger, system, survey)
+  if (survey.expectedSurfaceC !== null) {
+    ledger.given('Surface that the run as given would have', 'θ_x', survey.expectedSurfaceC, '°C')
+  }
+  return ledger.section()
+}
+
+const off = (ledger: Ledger, of: string, symbol: string, value: number, unit: string): number =>
+  ledger.given(
+    `How far ${of} may be off: thermometer, air and emissivity, root of the sum of squares`,
+    symbol,
+    value,
+    unit,
+  )
+
+function conductivityLines(ledger: Ledger, system: System, survey: SurveyResult): void {
+  const { effectiveWPerMK, soundWPerMK } = survey
+  if (effectiveWPerMK !== null) {
+    const words = 'Conductivity that the lagging as it stands must have'
+    const { value } = effectiveWPerMK
+    const [shape] = wallOf(system.shape, system.layers).faces
+    if (system.shape.kind === 'vessel' || !shape) ledger.given(words, 'λ', value, 'W/(m·K)')
+    else {
+      const form = shape.formsM.reduce((sum, formM) => sum + formM, 0)
+      ledger.given('Medium on the day', 'θ_i', system.mediumC, '°C')
+      ledger.given('Surface, as measured', 'θ_s', survey.measuredSurfaceC, '°C')
+      ledger.given('Form of all layers', 'F', form, 'm')
+      const inside = system.insideFilmWPerM2K
+      if (inside !== null) {
+        ledger.given('Outer area over inner area', 'a', shape.outerOverInner, '')
+        ledger.given('Film coefficient inside', 'h_i', inside, 'W/(m²·K)')
+      }
+      const formula = inside === null ? 'q × F / (θ_i − θ_s)' : 'F / ((θ_i − θ_s) / q − a / h_i)'
+      ledger.step(words, 'λ', formula, 'W/(m·K)', { value })
+    }
+    off(ledger, 'that conductivity', 'u_λ', effectiveWPerMK.plusMinus, 'W/(m·K)')
+  }
+  if (soundWPerMK !== null) {
+    ledger.given('Conductivity of the build-up as given', 'λ_n', soundWPerMK, 'W/(m·K)')
+  }
+}
