@@ -1,6 +1,7 @@
 /** Sizes one run: its values and the job's defaults, looked up in the catalogue, solved on the whole ladder. */
 import { limitEnds } from '#sizing/continuous.ts'
 import type { RunDetail, RunOutcome } from '#sizing/result.ts'
+import { sensitivityOf } from '#sizing/sensitivity.ts'
 import { size } from '#sizing/size.ts'
 import type { Working } from '#sizing/working/types.ts'
 import { workingOf } from '#sizing/working/working.ts'
@@ -37,9 +38,11 @@ export function detailRun(
   const { thicknessM, ...free } = merged
   // A run with neither limit nor cost is sized by nothing: it has no ladder to choose from.
   const unfixed = thicknessM ? resolve(free, index) : null
-  return unfixed?.ok
-    ? { ends: limitEnds(unfixed.problem), otherRungs: size(unfixed.problem).ladder }
-    : { ends: limitEnds(resolved.problem), otherRungs: [] }
+  return {
+    ends: limitEnds(unfixed?.ok ? unfixed.problem : resolved.problem),
+    otherRungs: unfixed?.ok ? size(unfixed.problem).ladder : [],
+    sensitivity: sensitivityOf(resolved.problem),
+  }
 }
 
 /** The values a run is sized with: its own, else the job's. A lagging of its own replaces the job's as a whole. */

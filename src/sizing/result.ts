@@ -187,9 +187,56 @@ export type RunOutcome =
   | { readonly ok: true; readonly result: RunResult }
   | { readonly ok: false; readonly issues: readonly Issue[] }
 
+export type SensitivityInput =
+  | 'medium'
+  | 'air'
+  | 'wind'
+  | 'emissivity'
+  | 'conductivity'
+  | 'thickness'
+  | 'fuel price'
+  | 'hours'
+  | 'humidity'
+
+/** One input at one end of its range, against the run as given: the same build-up, except `chosenThicknessM`. */
+export interface SensitivityEnd {
+  /** How far the input was moved, in the unit of the sensitivity. */
+  readonly change: number
+  /** Of the loss of a metre, m² or piece, outwards [W]. */
+  readonly heatFlowChangeWPerUnit: number
+  /** Of the loss of the whole run [W]; null where its length is not known. */
+  readonly heatLossChangeW: number | null
+  /** Of the cost of the energy in a year, per metre, m² or piece; null where it is not weighed. */
+  readonly energyPerYearChange: number | null
+  /** Of the surface at the loss condition, and at the touch condition [K]. */
+  readonly surfaceChangeK: number
+  readonly touchSurfaceChangeK: number
+  /** What would be chosen here [m]; null where nothing passes. For the thickness as laid: as chosen. */
+  readonly chosenThicknessM: number | null
+  /** Why; null for the thickness as laid. */
+  readonly governing: Governing | null
+  /** Whether the build-up as chosen still passes every limit. */
+  readonly passes: boolean
+}
+
+/** What one input does to the answer when it alone is moved. */
+export interface Sensitivity {
+  readonly input: SensitivityInput
+  /** `share`: of its own value; `fraction`: of an emissivity or a relative humidity, added. */
+  readonly unit: 'K' | 'm/s' | 'fraction' | 'share'
+  /** The lower end first; one only where the other lies outside of what the input may be. */
+  readonly ends: readonly SensitivityEnd[]
+  /** True where another rung would be chosen at one of the ends. */
+  readonly movesRung: boolean
+  /** Largest change of the yearly energy cost, or without cost of the loss, as a share of it. */
+  readonly influence: number
+}
+
 /** What the run sheet asks for the selected run only. */
 export interface RunDetail {
   readonly ends: readonly LimitEnd[]
   /** Where one thickness is fixed by hand: the rungs it could be instead. Empty elsewhere. */
   readonly otherRungs: readonly Rating[]
+  /** What its inputs do to the answer, those that move it most first. */
+  readonly sensitivity: readonly Sensitivity[]
 }
