@@ -1,0 +1,145 @@
+/** Every line of a printed working is repeated with a calculator that knows only the page. */
+import { readFileSync } from 'node:fs'
+import { describe, expect, test } from 'vitest'
+import type { RunValues } from '#model/fields.ts'
+import { indexCatalogue, sizeRun, workRun } from '#model/size-run.ts'
+import { parseRunsCsv } from '#report/runs-csv.ts'
+import { writeWorkingText } from '#report/working-text.ts'
+import type { RunResult } from '#sizing/result.ts'
+import { shippedCatalogue } from '../catalogue/shipped-catalogue.ts'
+import { calculate } from './calculator.ts'
+import { demoFile } from './demo-runs.ts'
+import { numberOf, type PageSection, readPage } from './working-page.ts'
+import { workingRuns } from './working-runs.ts'
+
+const index = indexCatalogue(shippedCatalogue())
+
+function demoRuns(): readonly RunValues[] {
+  const read = parseRunsCsv(readFileSync(demoFile))
+  if (!read.ok) throw new Error('The demo list has problems')
+  return read.runs
+}
+
+function textOf(values: RunValues): string {
+  const working = workRun(values, {}, index)
+  if (!working) throw new Error(JSON.stringify(sizeRun(values, {}, index)))
+  return writeWorkingText(working)
+}
+
+function resultOf(values: RunValues): RunResult {
+  const outcome = sizeRun(values, {}, index)
+  if (!outcome.ok) throw new Error(JSON.stringify(outcome.issues))
+  return outcome.result
+}
+
+/** A line repeats within so much of what is printed, or comes to nothing as it does. */
+const REPEATS = 5e-4
+const NOTHING = 1e-9
+
+const agrees = (again: number, printed: number): boolean =>
+  Math.abs(again - printed) <= Math.max(REPEATS * Math.abs(printed), NOTHING)
+
+/** Lines that do not repeat from the page, in words; and how many there are in all. */
+function repeated({ title, lines }: PageSection): { wrong: string[]; formulas: number } {
+  const known = new Map<string, number>()
+  const wrong: string[] = []
+  let formulas = 0
+  for (const { symbol, parts, text } of lines) {
+    const printed = numberOf(parts.at(-1) ?? '')
+    if (!Number.isFinite(printed)) wrong.push(`${title}: ${text}: not a number`)
+    if (known.has(symbol)) wrong.push(`${title}: ${symbol} stands twice`)
+    const [formula, numbers = formula] = parts.slice(0, -1)
+    if (formula !== undefined && numbers !== undefined) {
+      formulas += 1
+      const fromSymbols = calculate(formula, known)
+      const fromNumbers = parts.length > 2 ? calculate(numbers) : fromSymbols
+      const isSame = Math.abs(fromSymbols - fromNumbers) <= 1e-12 * Math.abs(fromNumbers)
+      if (!isSame) wrong.push(`${title}: ${text}: other numbers than printed above`)
+      if (!agrees(fromNumbers, printed)) wrong.push(`${title}: ${text}: comes to ${fromNumbers}`)
+    }
+    known.set(symbol, printed)
+  }
+  return { wrong, formulas }
+}
+
+function printed(sections: readonly PageSection[], title: string, symbol: string): number {
+  const section = sections.find((found) => found.title === title)
+  const line = section?.lines.find((found) => found.symbol === symbol)
+  return numberOf(line?.parts.at(-1) ?? '')
+}
+
+const runs = [...demoRuns(), ...workingRuns]
+
+describe.each(runs)('the working of $tag', (values) => {
+  const text = textOf(values)
+  const sections = readPage(text)
+  const result = resultOf(values)
+  const { chosen, bare } = result
+  const shown = chosen ?? result.ladder.at(-1) ?? bare
+  const isBare = shown.thicknessM === 0
+  const title = isBare ? 'Bare run' : 'Loss condition'
+  const at = (section: string, symbol: string): number => printed(sections, section, symbol)
+
+  test('repeats line by line from the page alone', () => {
+    const all = sections.map(repeated)
+    expect(all.flatMap(({ wrong }) => wrong)).toEqual([])
+    expect(all.reduce((sum, { formulas }) => sum + formulas, 0)).toBeGreaterThan(12)
+  })
+
+  test('fits a page and hides nothing', () => {
+    expect(text.split('\n').filter((row) => [...row].length > 100)).toEqual([])
+    expect(text).not.toMatch(/NaN|Infinity|undefined|null/)
+    for (const note of result.notes) {
+      expect(text.replace(/\s+/g, ' ')).toContain(note.text.replace(/\s+/g, ' '))
+    }
+  })
+
+  test('closes its balances: layers carry what the film gives off', () => {
+    const layered = sections.filter((section) => section.title.includes('through the layers'))
+    if (!isBare) expect(layered.length).toBeGreaterThan(1)
+    for (const { title: of } of layered) {
+      const q = at(of, 'q')
+      expect(agrees(at(of, 'q_L'), q), of).toBe(true)
+      const film = at(of.replace('through the layers', 'outer film'), 'q')
+      expect(agrees(film, q), of).toBe(true)
+    }
+  })
+
+  test('ends at the figures of the schedule', () => {
+    const pairs: [string, number, number | null | undefined][] = [
+      ['flux', at(`${title}: the whole run`, 'q'), shown.heatFluxWPerM2],
+      ['total', at(`${title}: the whole run`, 'Q'), shown.heatLossW],
+      ['bare total', at('Bare run: the whole run', 'Q'), bare.heatLossW],
+      ['year', at(`${title}: the year`, 'E'), shown.yearlyKWh],
+      ['installed', at('Money: installed cost', 'C'), shown.money?.installed],
+      ['life', at('Money: energy and cost over the life', 'LCC'), shown.money?.lifeCycle],
+      ['factor', at('Money: energy and cost over the life', 'F'), result.money?.presentValueFactor],
+      ['freezing', at('Limit: frost', 't'), shown.timeToFreezeH],
+      ['arrival', at('Arrival of what flows', 'θ_2'), condenses(shown) ? null : shown.arrivalTempC],
+      ['condensate', at('Arrival of what flows', 'm_c'), shown.condensateKgPerS],
+      ['survey', at('Survey: what it says', 'q'), result.survey?.heatFluxWPerM2.value],
+      ['effective', at('Survey: what it says', 'λ'), result.survey?.effectiveWPerMK?.value],
+    ]
+    if (shown.heatLossWPerM !== null) {
+      pairs.push(['per metre', at(`${title}: the whole run`, 'Φ'), shown.heatLossWPerM])
+    }
+    for (const [name, found, wanted] of pairs) {
+      if (wanted === null || wanted === undefined) expect(found, name).toBeNaN()
+      else expect(agrees(found, wanted), `${name}: ${found} for ${wanted}`).toBe(true)
+    }
+  })
+
+  test('judges every limit as the schedule does', () => {
+    const verdicts = sections.flatMap(({ lines }) =>
+      lines.filter(({ symbol }) => /^X(_\d)?$/.test(symbol)),
+    )
+    expect(verdicts).toHaveLength(shown.limits.length)
+    for (const { value, bound } of shown.limits) {
+      const found = verdicts.some(({ parts }) => agrees(numberOf(parts.at(-1) ?? ''), value))
+      expect(found, `${value} against ${bound}`).toBe(true)
+    }
+  })
+})
+
+const condenses = ({ condensateKgPerS }: { condensateKgPerS: number | null }): boolean =>
+  condensateKgPerS !== null
