@@ -94,7 +94,11 @@ const bothSides = (by: number): number[] => [-by, by]
 /** To both sides of a value as far as it can go: at an end of what it may be only to the other. */
 const within = (value: number, by: number, bounded: (value: number) => number): number[] =>
   bothSides(by)
-    .map((change) => bounded(value + change) - value)
+    .map((change) => {
+      const wanted = value + change
+      const moved = bounded(wanted)
+      return moved === wanted ? change : moved - value
+    })
     .filter((change) => change !== 0)
 
 export function movesOf(problem: Problem, ranges: SensitivityRanges): Move[] {
