@@ -142,7 +142,7 @@ export const fields = [
   number('humidity', 'humidity_pct', 'Humidity', 'percentage', 0.01, 1),
   number('altitudeM', 'altitude_m', 'Altitude', 'length', -500, 6000),
   number('solarWPerM2', 'solar_w_m2', 'Sun on the surface', 'heatFlux', 0, 1400),
-  number('skyView', 'sky_view', 'Clear sky it sees', 'fraction', 0, 1),
+  number('skyView', 'sky_view', 'Clear sky seen, share', 'fraction', 0, 1),
   number('filmWPerM2K', 'film_w_m2k', 'Film outside', 'filmCoefficient', 0.5, 500),
   text('monthlyAirC', 'monthly_air_c', 'Air, by the month', 160),
   number('touchAirC', 'touch_air_c', 'Air, hottest day', 'temperature', -70, 200),
@@ -170,7 +170,7 @@ export const fields = [
   number('dewMarginK', 'dew_margin_k', 'Dew-point margin', 'temperatureDifference', 0, 20),
 
   number('frostHours', 'frost_hours', 'Must not freeze for', 'hours', 0.01, 10_000),
-  number('frostStartC', 'frost_start_c', 'Water, standing at', 'temperature', 0, 100),
+  number('frostStartC', 'frost_start_c', 'Water at first', 'temperature', 0, 100),
   number('frostFraction', 'frost_fraction', 'Ice allowed, share', 'fraction', 0, 1),
   number('maxDropK', 'max_drop_k', 'Drop, at most', 'temperatureDifference', 0.001, 500),
   text('codeTable', 'code_table', 'Code table', 60),

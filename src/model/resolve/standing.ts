@@ -36,7 +36,7 @@ export function cylinder(
 }
 
 /** Soil of which nothing is known [W/(m·K)]. Source: common practice, no source; moist soil. */
-const SOIL_W_PER_M_K = 1.5
+export const SOIL_W_PER_M_K = 1.5
 
 function buried(values: RunValues, outerDiameterM: number, findings: Findings): Shape | null {
   const { buryDepthM: depthM, orientation } = values

@@ -1,7 +1,8 @@
 /** Names for ids of the catalogue, both ways: cells show names and keep ids. */
 import { bareName } from '#catalogue/nearest.ts'
-import type { Catalogue } from '#catalogue/types.ts'
+import type { Catalogue, CodeTable } from '#catalogue/types.ts'
 import type { CellReader } from '#model/cell-edit.ts'
+import { writeDecimal } from '#model/decimal.ts'
 import type { FieldKey, RunValues } from '#model/fields.ts'
 
 interface Named {
@@ -9,7 +10,23 @@ interface Named {
   readonly name: string
   /** What the row is one of; empty where a list needs no parts. */
   readonly family: string
+  /** What tells it from the others of its family, where the name says the family too. */
+  readonly short?: string
 }
+
+/** What may be typed, and what it would mean. */
+export interface Suggestion {
+  readonly value: string
+  readonly hint: string
+}
+
+/** Code tables of one law stand together; the edition and what they are for tell them apart. */
+const codeTable = ({ id, name, edition, service }: CodeTable): Named => ({
+  id,
+  name: `${name}, ${edition}: ${service}`,
+  family: name,
+  short: `${edition}: ${service}`,
+})
 
 export class CatalogueWords {
   readonly #catalogue: Catalogue
@@ -23,6 +40,7 @@ export class CatalogueWords {
       ['finish', catalogue.finishes.map((row) => ({ ...row, family: row.category }))],
       ['fuel', catalogue.fuels.map((row) => ({ ...row, family: '' }))],
       ['pipeMaterial', catalogue.wallMaterials.map((row) => ({ ...row, family: '' }))],
+      ['codeTable', catalogue.codeTables.map(codeTable)],
     ])
     for (const [key, list] of this.#lists) {
       // As the catalogue is searched: without regard to case, spaces and joining marks.
@@ -63,7 +81,18 @@ export class CatalogueWords {
       )
       return [...new Set(sizes.map(({ label }) => label))]
     }
-    return shape === 'flat' ? [] : [...new Set(this.#catalogue.pipeSizes.map(({ label }) => label))]
+    if (shape !== undefined && shape !== 'pipe') return []
+    return [...new Set(this.#catalogue.pipeSizes.map(({ label }) => label))]
+  }
+
+  /** Factors that the code table of a run puts on its thicknesses, with what for. */
+  codeFactorsFor({ codeTable: table }: RunValues): readonly Suggestion[] {
+    const id = table === undefined ? '' : this.idOf('codeTable', table)
+    const factors = this.#catalogue.codeTables.find((row) => row.id === id)?.factors ?? []
+    return [...Map.groupBy(factors, ({ factor }) => factor)].map(([factor, rows]) => ({
+      value: writeDecimal(factor),
+      hint: rows.map(({ appliesTo }) => appliesTo).join('; or '),
+    }))
   }
 
   /** A reader that knows names besides. */

@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest'
+import type { RunValues } from '#model/fields.ts'
 import type { LimitResult } from '#sizing/result.ts'
 import { walkedTo } from '#ui/views/run-sheet/ladder-walk.ts'
 import { needsLook } from '#ui/views/run-sheet/notes.ts'
@@ -6,6 +7,7 @@ import { thicknessOverride } from '#ui/views/run-sheet/override.ts'
 import {
   boundWords,
   buildUpWords,
+  extentWords,
   mediumWord,
   paybackWords,
   piecesWords,
@@ -34,8 +36,35 @@ describe('bounds', () => {
     [{ limit: 'service', rule: 'at least', bound: -50 }, 'at least \u221250\u00a0°C'],
     [{ bound: 57.6 }, 'at most 57.6\u00a0°C'],
     [{ limit: 'loss', unit: 'W/m', bound: 22 }, 'at most 22.0\u00a0W/m'],
+    [{ limit: 'frost', rule: 'at least', unit: 'h', bound: 12 }, 'at least 12\u00a0h'],
+    [{ limit: 'space', unit: 'm', bound: 0.25 }, 'at most 250\u00a0mm'],
+    [{ limit: 'space', unit: 'm', bound: 0.2605 }, 'at most 260.5\u00a0mm'],
+    [{ limit: 'arrival', unit: 'K', bound: 1.5 }, 'at most 1.5\u00a0K'],
+    [{ limit: 'arrival', unit: 'kg/s', bound: 0.01 }, 'at most 36.0\u00a0kg/h'],
+    [{ limit: 'code', rule: 'at least', unit: 'm²K/W', bound: 0.6 }, 'at least 0.600\u00a0m²K/W'],
   ])('%o reads %s', (change, words) => {
     expect(boundWords(limit(change), 'si')).toBe(words)
+  })
+})
+
+// 0.25 m = 9.843 in (1 in = 0.0254 m exactly); 1 m²K/W = 5.678 263 h·ft²·°F/Btu (NIST SP 811, B.8).
+test.each<[Partial<LimitResult>, string]>([
+  [{ limit: 'space', unit: 'm', bound: 0.25 }, 'at most 9.843\u00a0in'],
+  [{ limit: 'code', rule: 'at least', unit: 'm²K/W', bound: 1 }, 'at least 5.68\u00a0h·ft²°F/Btu'],
+])('%o reads %s in US units', (change, words) => {
+  expect(boundWords(limit(change), 'us')).toBe(words)
+})
+
+describe('how much of a run there is', () => {
+  test.each<[RunValues, string]>([
+    [{ shape: 'pipe', lengthM: 24 }, '24.0\u00a0m'],
+    [{ shape: 'pipe', lengthM: 60, buryDepthM: 0.8 }, '60.0\u00a0m, 0.8\u00a0m deep'],
+    [{ shape: 'flat', areaM2: 12 }, '12.0\u00a0m²'],
+    [{ shape: 'sphere', outerDiameterM: 2 }, 'sphere'],
+    [{ shape: 'vessel', lengthM: 2.5 }, 'vessel, shell 2.5\u00a0m'],
+    [{ shape: 'pipe' }, ''],
+  ])('%o', (values, words) => {
+    expect(extentWords(values, 'si')).toBe(words)
   })
 })
 

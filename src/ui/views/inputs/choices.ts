@@ -18,7 +18,7 @@ export function choicesFor(key: FieldKey, words: CatalogueWords): readonly Choic
     const families = Map.groupBy(words.list(key), ({ family }) => family)
     return [...families].map(([title, rows]) => ({
       title,
-      choices: rows.map(({ id, name }) => ({ value: id, label: name })),
+      choices: rows.map(({ id, name, short = name }) => ({ value: id, label: short })),
     }))
   }
   const field = fieldOf(key)

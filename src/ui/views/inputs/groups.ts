@@ -1,7 +1,5 @@
 /** The fields of a run as a form: in groups, the usual ones first, the rest behind "More". */
 import type { FieldKey, RunValues } from '#model/fields.ts'
-import { usualLimits } from '#model/resolve/limits.ts'
-import { usualMoney } from '#model/resolve/money.ts'
 
 export interface FieldGroup {
   readonly title: string
@@ -23,18 +21,40 @@ export const groups: readonly FieldGroup[] = [
       'areaM2',
       'orientation',
       'riseM',
+      'heads',
     ],
-    more: ['outerDiameterM', 'wallM', 'pipeMaterial', 'group'],
+    more: ['outerDiameterM', 'wallM', 'pipeMaterial', 'buryDepthM', 'soilWPerMK', 'group'],
+  },
+  {
+    title: 'Fittings',
+    usual: ['valves', 'flanges', 'supports', 'fittings'],
+    more: ['strainers', 'bends', 'tees', 'reducers', 'ends'],
   },
   {
     title: 'Service',
     usual: ['service', 'medium', 'mediumC', 'pressureGaugePa'],
-    more: ['mediumMaxC', 'mediumMinC'],
+    more: [
+      'mediumMaxC',
+      'mediumMinC',
+      'flowKgPerS',
+      'velocityMPerS',
+      'heatCapacityJPerKgK',
+      'insideFilmWPerM2K',
+    ],
   },
   {
     title: 'Place',
     usual: ['place', 'airC', 'humidity', 'windMPerS'],
-    more: ['surroundingsC', 'touchAirC', 'dampAirC', 'altitudeM'],
+    more: [
+      'surroundingsC',
+      'solarWPerM2',
+      'skyView',
+      'touchAirC',
+      'dampAirC',
+      'monthlyAirC',
+      'altitudeM',
+      'filmWPerM2K',
+    ],
   },
   {
     title: 'Lagging',
@@ -43,75 +63,166 @@ export const groups: readonly FieldGroup[] = [
   },
   {
     title: 'Limits',
-    usual: ['reach', 'reachReason', 'contactS', 'maxSurfaceC', 'maxLossWPerM', 'maxLossWPerM2'],
-    more: ['touchClass', 'dewMarginK'],
+    usual: [
+      'reach',
+      'reachReason',
+      'contactS',
+      'maxSurfaceC',
+      'maxLossWPerM',
+      'maxLossWPerM2',
+      'codeTable',
+      'codeFactor',
+    ],
+    more: ['maxDropK', 'maxOuterDiameterM', 'touchClass', 'dewMarginK'],
+  },
+  {
+    title: 'Frost',
+    usual: ['frostHours', 'frostAirC', 'frostWindMPerS', 'frostStartC', 'frostFraction'],
+    more: [],
   },
   {
     title: 'Money',
     usual: ['money', 'fuel', 'hoursPerYear'],
     more: ['fuelPricePerKWh', 'efficiency', 'cop', 'discount', 'growth', 'lifeYears', 'currency'],
   },
+  {
+    title: 'Survey',
+    usual: [
+      'measuredSurfaceC',
+      'surveyMediumC',
+      'surveyAirC',
+      'surveyEmissivity',
+      'surveyToleranceK',
+    ],
+    more: ['surveySurroundingsC', 'surveyWindMPerS'],
+  },
 ]
 
-/** Whether a field has a say for a run of this shape. What has a value is always shown. */
+/** A group as it stands for one run: what has a say, and what its shape cannot do without. */
+export function groupFor(group: FieldGroup, values: RunValues): FieldGroup {
+  const isUsual = (key: FieldKey) => group.usual.includes(key) || isNeeded(key, values)
+  const all = [...group.usual, ...group.more].filter((key) => isRelevant(key, values))
+  const [first, rest] = [all.filter(isUsual), all.filter((key) => !isUsual(key))]
+  return { title: group.title, usual: inOrder(first), more: rest }
+}
+
+/** Only a diameter gives a sphere or vessel its size. */
+const isNeeded = (key: FieldKey, { shape }: RunValues): boolean =>
+  key === 'outerDiameterM' && isPiece(shape)
+
+/** A size stands where sizes stand, before the length. */
+function inOrder(keys: readonly FieldKey[]): readonly FieldKey[] {
+  if (!keys.includes('outerDiameterM')) return keys
+  const others: readonly FieldKey[] = keys.filter((key) => key !== 'outerDiameterM')
+  return others.toSpliced(others.indexOf('shape') + 1, 0, 'outerDiameterM')
+}
+
+/** Things that are counted by the piece. */
+export const isPiece = (shape: RunValues['shape']): boolean =>
+  shape === 'sphere' || shape === 'vessel'
+
+/** Whether a field has a say for this run. What has a value is always shown. */
 export function isRelevant(key: FieldKey, values: RunValues): boolean {
   if (values[key] !== undefined) return true
-  const { shape = 'pipe', orientation } = values
-  switch (key) {
-    case 'size':
-    case 'outerDiameterM':
-      return shape === 'pipe' || shape === 'round-duct'
-    case 'wallM':
-    case 'pipeMaterial':
-      return shape !== 'flat'
-    case 'widthM':
-    case 'heightM':
-      return shape === 'rect-duct' || shape === 'flat'
-    case 'lengthM':
-    case 'maxLossWPerM':
-      return shape !== 'flat'
-    case 'areaM2':
-    case 'maxLossWPerM2':
-      return shape === 'flat'
-    case 'riseM':
-      return orientation === 'vertical'
-    case 'pressureGaugePa':
-      return values.medium === 'steam'
-    case 'reachReason':
-      return values.reach === false
-    case 'cop':
-      return values.mediumC === undefined || values.mediumC < (values.airC ?? 20)
-    default:
-      return true
+  const has = sayOf[key]
+  return has === undefined || has(asked(values))
+}
+
+interface Asked extends RunValues {
+  readonly shape: NonNullable<RunValues['shape']>
+  readonly isBuried: boolean
+  /** A pipe or a duct, which something flows through. */
+  readonly isLine: boolean
+  readonly isDuct: boolean
+}
+
+function asked(values: RunValues): Asked {
+  const { shape = 'pipe', buryDepthM } = values
+  const isDuct = shape === 'round-duct' || shape === 'rect-duct'
+  return {
+    ...values,
+    shape,
+    isDuct,
+    isLine: isDuct || shape === 'pipe',
+    isBuried: buryDepthM !== undefined,
   }
 }
 
-/** What holds where a field is left empty and the job has no default either. */
-export const standIns: Readonly<Partial<Record<FieldKey, string>>> = {
-  orientation: 'horizontal',
-  riseM: 'the length',
-  mediumMaxC: 'as the medium',
-  mediumMinC: 'as the medium',
-  surroundingsC: 'as the air',
-  touchAirC: 'as the air',
-  dampAirC: 'as the air',
-  windMPerS: 'none',
-  altitudeM: 'sea level',
-  thicknessM: 'found for you',
-  emissivity: 'of the finish',
-  bareEmissivity: 'of the pipe',
-  steps: 'metric',
-  method: 'detailed',
-  reach: 'yes',
-  touchClass: 'of the finish',
-  contactS: String(usualLimits.contactS),
-  dewMarginK: String(usualLimits.dewMarginK),
-  money: 'if fuel and hours are given',
-  fuelPricePerKWh: 'of the fuel',
-  efficiency: 'of the fuel',
-  cop: String(usualMoney.cop),
-  discount: String(usualMoney.discount),
-  growth: String(usualMoney.growth),
-  lifeYears: String(usualMoney.lifeYears),
-  currency: 'of the prices',
+type Say = (run: Asked) => boolean
+const onLine: Say = ({ isLine }) => isLine
+const inAir: Say = ({ isBuried }) => !isBuried
+const surveyed: Say = ({ measuredSurfaceC }) => measuredSurfaceC !== undefined
+const frosty: Say = ({ frostHours }) => frostHours !== undefined
+const isRound: Say = ({ shape }) => shape === 'pipe' || shape === 'round-duct'
+const hasValves: Say = isRound
+
+/** When a field has a say; those that always have are left out. */
+const sayOf: Readonly<Partial<Record<FieldKey, Say>>> = {
+  size: ({ isLine }) => isLine,
+  outerDiameterM: ({ shape }) => shape !== 'rect-duct' && shape !== 'flat',
+  wallM: ({ shape }) => shape !== 'flat',
+  pipeMaterial: ({ shape }) => shape !== 'flat',
+  widthM: ({ shape }) => shape === 'rect-duct' || shape === 'flat',
+  heightM: ({ shape }) => shape === 'rect-duct' || shape === 'flat',
+  lengthM: ({ shape }) => shape !== 'flat' && shape !== 'sphere',
+  areaM2: ({ shape }) => shape === 'flat',
+  orientation: ({ shape, isBuried }) => shape !== 'sphere' && !isBuried,
+  riseM: ({ orientation, isLine }) =>
+    isLine && (orientation === 'vertical' || orientation === 'inclined'),
+  heads: ({ shape }) => shape === 'vessel',
+  buryDepthM: isRound,
+  soilWPerMK: ({ isBuried }) => isBuried,
+
+  valves: hasValves,
+  flanges: hasValves,
+  strainers: hasValves,
+  supports: onLine,
+  bends: onLine,
+  tees: onLine,
+  reducers: onLine,
+  ends: onLine,
+  fittings: ({ valves = 0, flanges = 0, strainers = 0, ends = 0, thicknessM }) =>
+    valves + flanges + strainers + ends > 0 && thicknessM !== 0,
+
+  pressureGaugePa: ({ medium }) => medium === 'steam',
+  flowKgPerS: onLine,
+  velocityMPerS: ({ isDuct }) => isDuct,
+  heatCapacityJPerKgK: ({ isLine, flowKgPerS, maxDropK }) =>
+    isLine && (flowKgPerS !== undefined || maxDropK !== undefined),
+
+  humidity: inAir,
+  windMPerS: inAir,
+  surroundingsC: inAir,
+  solarWPerM2: inAir,
+  skyView: inAir,
+  filmWPerM2K: inAir,
+  touchAirC: inAir,
+  dampAirC: ({ isBuried, humidity }) => !isBuried && humidity !== undefined,
+
+  reach: inAir,
+  reachReason: ({ reach }) => reach === false,
+  contactS: ({ isBuried, reach }) => !isBuried && reach !== false,
+  touchClass: ({ isBuried, reach }) => !isBuried && reach !== false,
+  maxLossWPerM: onLine,
+  maxLossWPerM2: ({ isLine }) => !isLine,
+  codeFactor: ({ codeTable }) => codeTable !== undefined,
+  maxDropK: onLine,
+  maxOuterDiameterM: ({ shape }) => shape !== 'flat',
+  dewMarginK: ({ isBuried, humidity }) => !isBuried && humidity !== undefined,
+
+  frostHours: ({ shape, medium }) =>
+    shape === 'pipe' && (medium === undefined || medium === 'water'),
+  frostAirC: frosty,
+  frostWindMPerS: ({ frostHours, isBuried }) => frostHours !== undefined && !isBuried,
+  frostStartC: frosty,
+  frostFraction: frosty,
+
+  surveyMediumC: surveyed,
+  surveyAirC: surveyed,
+  surveySurroundingsC: surveyed,
+  surveyWindMPerS: surveyed,
+  surveyEmissivity: surveyed,
+  surveyToleranceK: surveyed,
+
+  cop: ({ mediumC, airC = 20 }) => mediumC === undefined || mediumC < airC,
 }

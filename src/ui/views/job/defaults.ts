@@ -5,8 +5,20 @@ export const defaultGroups: readonly {
   readonly title: string
   readonly keys: readonly FieldKey[]
 }[] = [
-  { title: 'Place', keys: ['airC', 'touchAirC', 'humidity', 'windMPerS', 'altitudeM'] },
-  { title: 'Lagging', keys: ['material', 'finish', 'steps'] },
+  {
+    title: 'Place',
+    keys: [
+      'airC',
+      'monthlyAirC',
+      'touchAirC',
+      'dampAirC',
+      'frostAirC',
+      'humidity',
+      'windMPerS',
+      'altitudeM',
+    ],
+  },
+  { title: 'Lagging', keys: ['material', 'finish', 'steps', 'method'] },
   {
     title: 'Money',
     keys: [

@@ -12,7 +12,7 @@ export interface BarPiece {
   readonly width: number
   readonly words: string
   readonly wordsX: number
-  /** Words that do not fit stand before the bar. */
+  /** Words that do not fit stand before the bar, or after it where it begins at the very left. */
   readonly isBefore: boolean
 }
 
@@ -30,15 +30,18 @@ export function barPiece({ fromM, toM }: PassStretch, field: Field): BarPiece {
   const end = toM === null ? field.right : Math.min(field.right, field.x(toM))
   const words = stretchWords(fromM, toM, field.units)
   const width = Math.max(3, end - start)
-  const wordsX = clearOf(field.uprights, start + PADDING, words.length * LETTER)
-  const fits = wordsX + words.length * LETTER <= end
-  const isBefore = width < words.length * LETTER + PADDING
+  const length = words.length * LETTER
+  const wordsX = clearOf(field.uprights, start + PADDING, length)
+  const isOutside = width < length + PADDING
+  const isBefore = isOutside && start - PADDING - length >= field.left
+  const afterX = clearOf(field.uprights, start + width + PADDING, length)
+  const insideX = wordsX + length <= end ? wordsX : start + PADDING
   return {
     x: start,
     width,
     words,
     isBefore,
-    wordsX: isBefore ? start - PADDING : fits ? wordsX : start + PADDING,
+    wordsX: isBefore ? start - PADDING : isOutside ? afterX : insideX,
   }
 }
 

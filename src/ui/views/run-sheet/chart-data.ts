@@ -3,6 +3,7 @@ import type { Rating } from '#sizing/result.ts'
 import type { LineChartData, Series } from '#ui/components/line-chart.svelte.ts'
 import { formatNumber, shownValue, thicknessDecimals, unitLabel } from '#units/format.ts'
 import { displayUnit, type QuantityName, type UnitSystem } from '#units/quantities.ts'
+import { costQuantity, lossOf, lossQuantity, type Per } from './per.ts'
 
 interface Ladder {
   readonly ladder: readonly Rating[]
@@ -14,8 +15,8 @@ type Line = Pick<Series, 'name' | 'colour' | 'dash'> & {
 }
 
 /** Cost against thickness: what it costs to own, to install, and to feed. */
-export function costChart(input: Ladder, per: 'm' | 'm2', currency: string): LineChartData {
-  const quantity = per === 'm' ? 'moneyPerLength' : 'moneyPerArea'
+export function costChart(input: Ladder, per: Per, currency: string): LineChartData {
+  const quantity = costQuantity[per]
   const lines: Line[] = [
     { name: 'Life-cycle', colour: '--ink', dash: [], of: ({ money }) => money?.lifeCycle },
     {
@@ -41,15 +42,14 @@ export function costChart(input: Ladder, per: 'm' | 'm2', currency: string): Lin
 }
 
 /** Loss on the left axis, surface temperatures on the right. */
-export function lossChart(input: Ladder): LineChartData {
+export function lossChart(input: Ladder, per: Per): LineChartData {
   const { ladder, units } = input
-  const isFlat = ladder.every((rung) => rung.heatLossWPerM === null)
-  const loss = isFlat ? 'heatFlux' : 'heatLossPerLength'
+  const loss = lossQuantity[per]
   const lossLine: Line = {
     name: 'Loss',
     colour: '--ink',
     dash: [],
-    of: (rung) => rung.heatLossWPerM ?? rung.heatFluxWPerM2,
+    of: (rung) => lossOf(rung) ?? undefined,
   }
   const surfaces: Line[] = [
     {

@@ -3,6 +3,7 @@ import { governingWords } from '#report/run-words.ts'
 import type { Rating, RunDetail, RunResult } from '#sizing/result.ts'
 import { formatWithUnit } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
+import { costQuantity, lossOf, lossQuantity, type Per, perOf } from './per.ts'
 import { thicknessWords } from './words.ts'
 
 interface Place {
@@ -38,7 +39,7 @@ export function rungWords(
   rung: Rating,
   isChosen: boolean,
   units: UnitSystem,
-  per: 'm' | 'm2',
+  per: Per,
   currency: string,
 ): string {
   const failed = rung.limits.filter(({ pass }) => !pass).map(({ limit }) => governingWords[limit])
@@ -56,15 +57,13 @@ export function rungWords(
   ].join('; ')
 }
 
-/** Loss per length where there is one, else per area. */
+/** Loss of a metre, of a square metre where there is none, or of the whole piece. */
 export function lossWords(rung: Rating, units: UnitSystem): string {
-  return rung.heatLossWPerM === null
-    ? formatWithUnit(rung.heatFluxWPerM2, 'heatFlux', units)
-    : formatWithUnit(rung.heatLossWPerM, 'heatLossPerLength', units)
+  return formatWithUnit(lossOf(rung), lossQuantity[perOf(rung)], units)
 }
 
-export function moneyWords(value: number, per: 'm' | 'm2', units: UnitSystem): string {
-  return formatWithUnit(value, per === 'm' ? 'moneyPerLength' : 'moneyPerArea', units)
+export function moneyWords(value: number, per: Per, units: UnitSystem): string {
+  return formatWithUnit(value, costQuantity[per], units)
 }
 
 /** The rungs of a result; where its thickness is fixed by hand, among those it could be instead. */

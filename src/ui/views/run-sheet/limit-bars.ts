@@ -19,7 +19,10 @@ export function limitBars(ladder: readonly Rating[], ends: readonly LimitEnd[]):
   const names = [...new Set(ladder.flatMap((rung) => rung.limits.map(({ limit }) => limit)))]
   return names.map((limit) => ({
     limit,
-    stretches: stretches(limit, ladder, exactStartM(limit, ends)),
+    stretches: stretches(limit, ladder, {
+      startM: exactStartM(limit, ends),
+      endM: exactEndM(limit, ends),
+    }),
   }))
 }
 
@@ -35,24 +38,30 @@ function exactStartM(limit: LimitName, ends: readonly LimitEnd[]): number | null
   return known.length === 0 || known.length < starts.length ? null : Math.max(...known)
 }
 
-function stretches(
-  limit: LimitName,
-  ladder: readonly Rating[],
-  exactM: number | null,
-): PassStretch[] {
+/** Likewise of the thicknesses at which a limit ceases to pass, as that of the space does. */
+function exactEndM(limit: LimitName, ends: readonly LimitEnd[]): number | null {
+  const known = ends.flatMap((end) => (end.limit === limit ? (end.upToM ?? []) : []))
+  return known.length === 0 ? null : Math.min(...known)
+}
+
+interface Exact {
+  readonly startM: number | null
+  readonly endM: number | null
+}
+
+function stretches(limit: LimitName, ladder: readonly Rating[], exact: Exact): PassStretch[] {
   const found: PassStretch[] = []
   ladder.forEach((rung, at) => {
     if (!passesLimit(rung, limit)) return
     const previous = ladder[at - 1]
     const goesOn = previous !== undefined && passesLimit(previous, limit)
     const last = found.at(-1)
-    const isTop = at === ladder.length - 1
-    const toM = isTop ? null : rung.thicknessM
+    const toM = endM(rung.thicknessM, ladder[at + 1]?.thicknessM ?? null, exact.endM)
     if (goesOn && last) {
       found[found.length - 1] = { ...last, toM }
       return
     }
-    found.push({ fromM: startM(rung.thicknessM, previous?.thicknessM ?? null, exactM), toM })
+    found.push({ fromM: startM(rung.thicknessM, previous?.thicknessM ?? null, exact.startM), toM })
   })
   return found
 }
@@ -62,4 +71,12 @@ function startM(rungM: number, previousM: number | null, exactM: number | null):
   const isBetween = exactM !== null && exactM <= rungM && exactM > (previousM ?? 0)
   if (isBetween) return exactM
   return previousM === null ? null : rungM
+}
+
+/** The exact end where it lies between the rung that passes and the one that fails, or beyond them all; else the rung. */
+function endM(rungM: number, nextM: number | null, exactM: number | null): number | null {
+  const isBetween =
+    exactM !== null && exactM >= rungM && exactM < (nextM ?? Number.POSITIVE_INFINITY)
+  if (isBetween) return exactM
+  return nextM === null ? null : rungM
 }

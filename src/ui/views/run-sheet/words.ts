@@ -1,7 +1,7 @@
 /** The words of the run sheet: bounds, build-up, medium, payback. */
 import type { Catalogue } from '#catalogue/types.ts'
 import type { RunValues } from '#model/fields.ts'
-import type { LimitResult, Rating } from '#sizing/result.ts'
+import type { LimitResult, LimitUnit, Rating } from '#sizing/result.ts'
 import {
   formatNumber,
   formatWithUnit,
@@ -12,35 +12,37 @@ import {
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
 
 /** Quantities of the units in which limits are judged. */
-const quantityOfUnit: Readonly<Record<string, QuantityName>> = {
+const quantityOfUnit: Readonly<Record<LimitUnit, QuantityName>> = {
   '°C': 'temperature',
-  C: 'temperature',
   K: 'temperatureDifference',
   'W/m': 'heatLossPerLength',
   'W/m²': 'heatFlux',
-  'W/m2': 'heatFlux',
-  m: 'size',
   h: 'hours',
+  m: 'size',
+  'kg/s': 'condensate',
+  'm²K/W': 'resistance',
 }
+/** Units of what people write down as whole numbers. */
+const chosenWhole: ReadonlySet<LimitUnit> = new Set(['°C', 'K', 'h', 'm'])
 
 /** Value or bound of a limit with its unit. */
 export function limitNumber(
   value: number,
-  unit: string,
+  unit: LimitUnit,
   system: UnitSystem,
   decimals?: number,
 ): string {
-  const quantity = quantityOfUnit[unit]
-  return quantity
-    ? formatWithUnit(value, quantity, system, decimals)
-    : `${formatNumber(value, decimals ?? 2)} ${unit}`.trim()
+  return formatWithUnit(value, quantityOfUnit[unit], system, decimals)
 }
 
 /** `at most 57.6 °C`, and `at most 650 °C`: a bound that somebody wrote down as a whole number is said as one. */
 export function boundWords({ rule, bound, unit }: LimitResult, system: UnitSystem): string {
-  const decimals = unit === '°C' && wholeDegrees(bound, system) === 0 ? 0 : undefined
+  const shown = shownValue(bound, quantityOfUnit[unit], system) ?? 0
+  const decimals = chosenWhole.has(unit) && isWhole(shown) ? 0 : undefined
   return `${rule} ${limitNumber(bound, unit, system, decimals)}`
 }
+
+const isWhole = (shown: number): boolean => Math.abs(shown - Math.round(shown)) < 1e-6
 
 const lowerFirst = (text: string) => text.charAt(0).toLowerCase() + text.slice(1)
 
@@ -77,8 +79,7 @@ export function soldAs(nominalThicknessM: number): string {
 
 /** Decimals for a temperature that somebody chose: none where it is a whole number. */
 export function wholeDegrees(tempC: number, system: UnitSystem): number {
-  const shown = shownValue(tempC, 'temperature', system) ?? 0
-  return Math.abs(shown - Math.round(shown)) < 1e-6 ? 0 : 1
+  return isWhole(shownValue(tempC, 'temperature', system) ?? 0) ? 0 : 1
 }
 
 /** Without noughts behind the point: sizes are names rather than results. */
@@ -114,4 +115,16 @@ export function paybackWords(paybackYears: number | null): string {
 export function splitReason(reason: string): readonly [lead: string, rest: string] {
   const first = /^.*?[.:](?=\s|$)/.exec(reason)?.[0] ?? reason
   return [first, reason.slice(first.length)]
+}
+
+/** How much of it there is, and where that is not plain, of what: `24.0 m`, `vessel, shell 2.5 m`, `60.0 m, 0.8 m deep`. */
+export function extentWords(values: RunValues, system: UnitSystem): string {
+  const { shape, lengthM, areaM2, buryDepthM } = values
+  const length = lengthM === undefined ? '' : formatWithUnit(lengthM, 'length', system)
+  if (shape === 'sphere') return 'sphere'
+  if (shape === 'vessel') return length ? `vessel, shell ${length}` : 'vessel'
+  const depth =
+    buryDepthM === undefined ? '' : `${formatWithUnit(buryDepthM, 'length', system)} deep`
+  const area = areaM2 === undefined ? '' : formatWithUnit(areaM2, 'area', system)
+  return [length || area, depth].filter((words) => words !== '').join(', ')
 }
