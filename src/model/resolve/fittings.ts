@@ -80,12 +80,13 @@ export function resolveFittings(
     if (values.fittings === 'lagged' && isBareRun) {
       findings.note('fittings-bare', 'The run is bare, and its fittings are taken as bare with it.')
     }
-    if (shape.kind === 'pipe' || shape.kind === 'buried-pipe') noteNoLength(values, findings)
-    else
+    noteNoLength(values, findings)
+    if (values.shape === 'round-duct') {
       findings.note(
         'fittings-duct',
         'The figures for valves and flanges are those of pipes of the same diameter: flanges and dampers of ducts are lighter.',
       )
+    }
   }
   const supportShare = isBareRun ? 0 : supports(values, index, findings)
   noteInLength(values, findings)
