@@ -3,7 +3,7 @@ import type { Rating } from '#sizing/result.ts'
 import { formatQuantity, formatWithUnit, thicknessDecimals, unitLabel } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import { restated } from '#units/restate.ts'
-import { cautions } from './cautions.ts'
+import { cautionLines, inParts, noteLines, tagList } from './closing-lines.ts'
 import {
   governedBy,
   inchName,
@@ -43,16 +43,12 @@ export function writeRunTable(runs: Iterable<SizedRun>, options: TableOptions): 
   const lines = Array.from(runs, (run) => lineOf(run, options.units))
   const failing = lines.filter((line) => !line.meetsLimits).map(({ tag }) => tag)
   const unjudged = lines.filter((line) => !line.isJudged).length
-  const parts = [
+  return inParts([
     textTable(columnsOf(lines, options.units), options.width),
     [countWords(lines.length, failing, unjudged)],
     noteLines(lines),
-    ['Cautions', ...cautions.map(({ text, deferTo }) => `- ${text} In doubt: ${deferTo}.`)],
-  ]
-  return `${parts
-    .filter((part) => part.length > 0)
-    .map((part) => part.join('\n'))
-    .join('\n\n')}\n`
+    cautionLines(),
+  ])
 }
 
 function lineOf({ values, result }: SizedRun, units: UnitSystem): Line {
@@ -128,25 +124,4 @@ export function countWords(runs: number, failing: readonly string[], unjudged: n
   const open = unjudged === 0 ? '' : `, ${unjudged} with no limit judged`
   const not = failing.length === 0 ? '' : ` Not within: ${tagList(failing)}.`
   return `${total}, ${within} within their limits${open}.${not}`
-}
-
-function noteLines(lines: readonly Line[]): readonly string[] {
-  const tagsOf = new Map<string, string[]>()
-  for (const { tag, notes } of lines) {
-    for (const text of notes) {
-      const tags = tagsOf.get(text)
-      if (tags) tags.push(tag)
-      else tagsOf.set(text, [tag])
-    }
-  }
-  if (tagsOf.size === 0) return []
-  const who = (tags: readonly string[]) =>
-    tags.length === lines.length ? 'all runs' : tagList(tags)
-  return ['Notes', ...Array.from(tagsOf, ([text, tags]) => `- ${text} (${who(tags)})`)]
-}
-
-function tagList(tags: readonly string[]): string {
-  const most = 8
-  const more = tags.length - most
-  return more > 0 ? `${tags.slice(0, most).join(', ')} and ${more} more` : tags.join(', ')
 }
