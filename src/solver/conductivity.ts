@@ -82,7 +82,8 @@ function pointDifferenceK(curve: Curve, outerC: number, flow: number): number {
       Math.abs(endC) === Number.POSITIVE_INFINITY
         ? Number.POSITIVE_INFINITY
         : (here + 0.5 * slope * (endC - tempC)) * (endC - tempC)
-    if (Math.abs(toEnd) >= Math.abs(left)) {
+    // So written that it ends whatever comes, a flow that is no number too.
+    if (!(Math.abs(toEnd) < Math.abs(left))) {
       // here·δ + slope·δ²/2 = left, in the form that keeps its digits.
       return differenceK + (2 * left) / (here + Math.sqrt(here * here + 2 * slope * left))
     }
@@ -103,7 +104,7 @@ function meanDifferenceK(curve: Curve, outerC: number, flow: number): number {
     const toEnd = finite
       ? 2 * (startWPerMK + slope * (endC - startC)) * (endC - outerC)
       : Number.POSITIVE_INFINITY
-    if (Math.abs(toEnd) >= Math.abs(flow)) {
+    if (!(Math.abs(toEnd) < Math.abs(flow))) {
       return (2 * flow) / (atOuter + Math.sqrt(atOuter * atOuter + 2 * slope * flow))
     }
     meanC = endC

@@ -57,8 +57,6 @@ function cornerNotes({ shape, layers }: System): Note[] {
   const excess = cornerExcess({
     innerPerimeterM: 2 * (shape.widthM + shape.heightM),
     thicknessM: layers.reduce((sumM, { thicknessM }) => sumM + thicknessM, 0),
-    // Any other gives the same ratio.
-    conductivityWPerMK: 1,
   })
   if (excess <= CORNERS_DIFFER) return []
   return [

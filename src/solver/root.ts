@@ -81,8 +81,8 @@ export function bracketedRoot(
 
 export interface Guess {
   readonly at: number
-  /** What the function rises by there for each unit of its argument, > 0. */
-  readonly slope: number
+  /** What the function rises by there for each unit of its argument, > 0; asked for after the function itself. */
+  readonly slopeAt: (x: number) => number
 }
 
 /**
@@ -126,7 +126,8 @@ export function risingRoot(
     if (Math.abs(value) <= closed || to - from <= smallest || evaluations >= MAX_EVALUATIONS) {
       return { at: x, value, otherEnd: x === to ? from : to, evaluations }
     }
-    let next = interpolated(x, value, x1, f1, x2, f2, guess.slope)
+    let next =
+      evaluations === 1 ? x - value / guess.slopeAt(x) : interpolated(x, value, x1, f1, x2, f2)
     const isSlow = slowSteps >= 2
     if (!(next > from && next < to) || isSlow) {
       next = from + 0.5 * (to - from)
@@ -154,9 +155,7 @@ function interpolated(
   f1: number,
   x2: number,
   f2: number,
-  slope: number,
 ): number {
-  if (Number.isNaN(f1) || f1 === f) return x - f / slope
   if (Number.isNaN(f2) || f2 === f || f2 === f1) return x - (f * (x - x1)) / (f - f1)
   return (
     (x * f1 * f2) / ((f - f1) * (f - f2)) +

@@ -1,8 +1,8 @@
 import { layerDifferenceK } from './conductivity.ts'
-import { filmOf, radiates, type Weather } from './film.ts'
+import { filmOf, radiates, roughFilmOf, type Weather } from './film.ts'
 import { type FaceShape, type Wall, wallOf } from './geometry.ts'
 import { standardPressurePa } from './properties/air.ts'
-import { radiationWPerM2K } from './radiation.ts'
+import { radiationSlopeWPerM2K, radiationWPerM2K, radiativeC } from './radiation.ts'
 import { bracketedRoot, risingRoot } from './root.ts'
 import type { Closure, Face, Layer, Solution, System } from './types.ts'
 
@@ -114,6 +114,11 @@ function solveFace(system: System, face: FaceShape, weather: Weather): SolvedFac
     (excessK === 0 ? 0 : convectionAt(excessK) * excessK) +
     radiationAt(excessK) * (excessK - surroundingsExcessK) -
     sunAbsorbedWPerM2
+  // The sun can heat a surface above medium, air and surroundings, until radiation alone gives off all of it.
+  const sunlitExcessK = (): number =>
+    hasRadiation
+      ? radiativeC(emissivity, surroundingsC, sunAbsorbedWPerM2) - airC
+      : sunAbsorbedWPerM2 / film(1)
   const drivenK = (excessK: number, flux: number): number =>
     acrossLayersK(layers, face.formsM, airC + excessK, flux) + flux * insideKPerWPerM2
 
@@ -144,21 +149,56 @@ function solveFace(system: System, face: FaceShape, weather: Weather): SolvedFac
   const balance = (excessK: number): number =>
     excessK + drivenK(excessK, fluxAt(excessK)) - mediumExcessK
   const low = Math.min(mediumExcessK, surroundingsExcessK, 0)
-  const high = sunlitK(Math.max(mediumExcessK, surroundingsExcessK, 0), sunAbsorbedWPerM2, fluxAt)
-  // A first guess with a plain film: the layers' own resistance is known.
-  const plainW = PLAIN_FILM_W_PER_M2_K + radiationAt(0)
-  const resistance = drivenK(mediumExcessK / 2, 1)
-  const guess = guessed(mediumExcessK, surroundingsExcessK, resistance, plainW, radiationAt(0))
+  const high = Math.max(
+    mediumExcessK,
+    surroundingsExcessK,
+    0,
+    sunAbsorbedWPerM2 === 0 ? 0 : sunlitExcessK(),
+  )
+
+  // A first guess from a rough film: the layers' own resistance is known.
+  const rough = roughFilmOf(face, weather, system.film)
+  const resistanceAt = (excessK: number): number =>
+    drivenK(excessK, TRIAL_W_PER_M2) / TRIAL_W_PER_M2
+  const resistance = resistanceAt(mediumExcessK / 2)
+  let guessK = mediumExcessK / 2
+  for (let round = 0; round < GUESS_ROUNDS; round += 1) {
+    const radiation = radiationAt(guessK)
+    guessK =
+      (mediumExcessK + resistance * (radiation * surroundingsExcessK + sunAbsorbedWPerM2)) /
+      (1 + resistance * (rough.film(guessK) + radiation))
+  }
+  // ∫λ dT over the layers is the flux times their form: more of it is felt at the inner end, by the λ there.
+  const innerResistance = resistanceAt(mediumExcessK)
+  const slopeAt = (trialK: number): number =>
+    innerResistance / resistanceAt(trialK) +
+    innerResistance *
+      (convectionAt(trialK) * rough.stiffening +
+        (hasRadiation ? radiationSlopeWPerM2K(emissivity, airC + trialK) : 0))
+  // What drives the heat: the temperatures, or what sun and surroundings would drive through the layers.
+  const drivingK = Math.max(
+    high - low,
+    innerResistance * Math.max(sunAbsorbedWPerM2, Math.abs(radiationAt(0) * surroundingsExcessK)),
+  )
   const root = risingRoot(balance, {
     low,
     high,
-    guess: { at: guess, slope: 1 + resistance * plainW * STIFFENING },
-    value: CLOSED * Math.max(Math.abs(mediumExcessK - surroundingsExcessK), Math.abs(high - low)),
+    guess: { at: guessK, slopeAt },
+    value: CLOSED * drivingK,
   })
   const excessK = root.at
-  const differenceK = Math.max(Math.abs(mediumExcessK - excessK), Math.abs(excessK))
-  if (Math.abs(root.value) <= Math.max(JUMP * differenceK, NOTHING_K)) {
-    return finished(excessK, fluxAt(excessK), convectionAt(excessK), 'closed')
+  if (Math.abs(root.value) <= Math.max(JUMP * drivingK, NOTHING_K)) {
+    const filmFlux = fluxAt(excessK)
+    // Behind much lagging the last digits of the film's flux are kelvins at the medium: there the layers tell the flux.
+    const flux =
+      Math.abs(root.value) <= CLOSED * (high - low)
+        ? filmFlux
+        : secant(
+            (trial) => excessK + drivenK(excessK, trial) - mediumExcessK,
+            filmFlux,
+            filmFlux - root.value / innerResistance,
+          )
+    return finished(excessK, flux, convectionAt(excessK), 'closed')
   }
 
   // The bracket closed in on a jump between two ranges of a correlation: the flux that the layers carry lies between
@@ -177,32 +217,18 @@ function solveFace(system: System, face: FaceShape, weather: Weather): SolvedFac
   return finished(excessK, flux, (flux - radiated) / excessK, 'on-jump')
 }
 
-/** A coefficient of convection as good as any to begin with; only the first guess depends on it [W/(m²·K)]. */
-const PLAIN_FILM_W_PER_M2_K = 4
-/** A film grows with its difference: its slope is so much more than its coefficient. Only speed depends on it. */
-const STIFFENING = 1.2
-
-/** Where the surface would stand if the films were straight lines. */
-function guessed(
-  mediumExcessK: number,
-  surroundingsExcessK: number,
-  resistance: number,
-  filmWPerM2K: number,
-  radiationPart: number,
-): number {
-  return (
-    (mediumExcessK + resistance * radiationPart * surroundingsExcessK) /
-    (1 + resistance * filmWPerM2K)
-  )
+/** One step of the rule of false position from two points that are near a root. */
+function secant(f: (x: number) => number, x0: number, x1: number): number {
+  const f0 = f(x0)
+  const f1 = f(x1)
+  return f1 === f0 ? x1 : x1 - (f1 * (x1 - x0)) / (f1 - f0)
 }
 
-/** The sun can heat a surface above medium, air and surroundings: a bound at which it gives off more than it takes up. */
-function sunlitK(highK: number, sunWPerM2: number, fluxAt: (excessK: number) => number): number {
-  if (sunWPerM2 === 0) return highK
-  for (let addedK = 0.1 * sunWPerM2; ; addedK *= 2) {
-    if (fluxAt(highK + addedK) >= 0) return highK + addedK
-  }
-}
+/** So little that the layers stay at one temperature. */
+const TRIAL_W_PER_M2 = 1e-3
+
+/** How often the first guess is put into its own rough film; only speed depends on it. */
+const GUESS_ROUNDS = 2
 
 /** Inner minus outer temperature over all layers [K], for a flux on the outer area. */
 export function acrossLayersK(
