@@ -26,7 +26,10 @@ const works: readonly Work[] = [
     name: 'Thermal Insulation Handbook (Southern Africa, 2001)',
     begins: ['Thermal Insulation Handbook'],
   },
-  { name: 'US government tip sheet on steam lines', begins: ['US government tip sheet'] },
+  {
+    name: 'US government tip sheets on steam',
+    begins: ['US government tip sheet', 'US government steam tip sheet'],
+  },
   {
     name: 'Forensic engineering article on frozen pipes',
     begins: ['a forensic engineering article', 'the same article'],
