@@ -19,7 +19,7 @@ const NEVER_K = 1e-6
  * the wall and of the film inside are left out (an inside film that is given counts). The resistance from the water to
  * the place, per metre, is that of a steady solve: with the water midway between its start and 0 °C while it cools, at
  * 0 °C while it freezes. It is driven by the temperature that the pipe itself tends to, which lies below the air under a
- * cold sky. Against a cooling followed step by step from 60 °C or less this is never more than 1 % late, and early by
+ * cold sky. Against a cooling followed step by step from 60 °C or less this is never more than 2 % late, and early by
  * at most 7 % for lagged pipes and 18 % for bare ones: that far only where the air lies just below 0 °C and the film
  * weakens on the way; in air of −10 °C and from 20 °C by 1 % and 5 %. The figures of the water are those near 0 °C: at
  * 80 °C its heat capacity by volume is 3 % less.

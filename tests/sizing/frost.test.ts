@@ -149,12 +149,12 @@ describe('against cooling and freezing step by step', () => {
     ['lagged, from 20 °C in air of −10 °C', lagged, usual, 0.01],
     ['bare, from 20 °C in air of −10 °C', bare, usual, 0.05],
   ])(
-    '%s: never late by more than 1 %%, nor early by more than the docstring says',
+    '%s: never late by more than 2 %%, nor early by more than the docstring says',
     (_, of, runs, most) => {
       fc.assert(
         fc.property(runs, (run) => {
           const share = of(run)
-          expect(share).toBeLessThan(0.01)
+          expect(share).toBeLessThan(0.02)
           expect(share).toBeGreaterThan(-most)
         }),
         { seed: 31, numRuns: 60 },
