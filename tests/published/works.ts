@@ -24,7 +24,7 @@ const works: readonly Work[] = [
   },
   {
     name: 'Thermal Insulation Handbook (Southern Africa, 2001)',
-    begins: ['Thermal Insulation Handbook'],
+    begins: ['Thermal Insulation Handbook', 'TIASA Thermal Insulation Handbook'],
   },
   {
     name: 'US government tip sheets on steam',
