@@ -46,9 +46,22 @@ function longestWithin(phrase: string): FieldKey | null {
 function unitsNamed(key: FieldKey, unit: string): ReadAs['units'] | null {
   const field = fieldOf(key)
   if (unit === '' || field.kind !== 'number') return 'shown'
+  if (field.quantity === 'count' && piecesWords.has(unit)) return 'si'
   if (unit === plainUnit(quantities[field.quantity].unit)) return 'si'
   return unit === plainUnit(displayUnit(field.quantity, 'us').label) ? 'us' : null
 }
+
+/** How a list says that it counts pieces: "Valves (no)", "Flanges [pcs]". */
+const piecesWords: ReadonlySet<string> = new Set([
+  'no',
+  'nr',
+  'nos',
+  'pc',
+  'pcs',
+  'ea',
+  'each',
+  'qty',
+])
 
 /** The words of a header without its unit, and the unit: "Length (m)", "Fluid temp °C", "od_mm". */
 function parted(header: string): { readonly phrase: string; readonly unit: string } {
@@ -117,7 +130,9 @@ const sameUnit: ReadonlyMap<string, string> = new Map([
   ['sqm', 'm2'],
 ])
 const unitsKnown: ReadonlySet<string> = new Set(
-  'c f k m mm cm in ft m2 ft2 % bar barg psi psig kpa m/s mph w/m w/m2 h/year'.split(' '),
+  'c f k m mm cm in ft m2 ft2 % bar barg psi psig kpa m/s mph w/m w/m2 h/year h kg/s lb/h'.split(
+    ' ',
+  ),
 )
 
 const ownColumns: ReadonlyMap<string, ReadAs> = new Map<string, ReadAs>([
@@ -147,20 +162,42 @@ const phrases: Readonly<Partial<Record<FieldKey, string>>> = {
   pipeMaterial: 'pipe material',
   widthM: 'width',
   heightM: 'height',
-  lengthM: 'length, pipe length, run length, line length, total length, metres, lineal metres',
+  lengthM:
+    'length, pipe length, run length, line length, total length, metres, lineal metres, shell length, tan to tan',
   areaM2: 'surface area',
   orientation: 'orientation, direction',
+  riseM: 'rise, height of the riser',
+  heads: 'heads, head type, vessel heads, dished ends',
+  buryDepthM:
+    'bury depth, burial depth, buried depth, depth of burial, depth to axis, depth of axis',
+  soilWPerMK: 'soil conductivity, ground conductivity',
+  valves: 'valves, valve, no of valves, valve count',
+  flanges: 'flanges, flange pairs, flanged joints, no of flanges',
+  strainers: 'strainers, strainer',
+  bends: 'bends, elbows, bend, elbow',
+  tees: 'tees, tee, branches',
+  reducers: 'reducers, reducer',
+  supports: 'supports, hangers, pipe supports, brackets',
+  ends: 'open ends, ends, end caps',
+  fittings: 'fittings are, fittings lagged, fittings insulated',
   medium: 'medium, fluid, media, content, contents, commodity',
   mediumC:
     'temp, fluid temp, medium temp, operating temp, process temp, service temp, pipe temp, line temp, flow temp, water temp, content temp',
   mediumMaxC: 'maximum temp, design temp, maximum operating temp, maximum fluid temp',
   mediumMinC: 'minimum temp, minimum operating temp, minimum fluid temp',
   pressureGaugePa: 'pressure, steam pressure, operating pressure',
+  flowKgPerS: 'flow, flow rate, mass flow, mass flow rate',
+  velocityMPerS: 'velocity, air velocity, duct velocity',
+  heatCapacityJPerKgK: 'heat capacity, specific heat, cp',
   airC: 'air, air temp, ambient, ambient temp, room temp, ambient air, ambient air temp',
   surroundingsC: 'surroundings, surroundings temp',
   windMPerS: 'wind, wind speed, air speed',
   humidity: 'humidity, rh, relative humidity',
-  altitudeM: 'altitude',
+  altitudeM: 'altitude, elevation, height above sea level',
+  solarWPerM2: 'sun, solar, solar radiation, solar gain, irradiance',
+  monthlyAirC: 'monthly air temp, monthly mean temp, monthly temp',
+  frostAirC: 'winter air temp, winter design temp, minimum ambient temp, coldest air temp',
+  touchAirC: 'summer air temp, summer design temp, maximum ambient temp, hottest air temp',
   material:
     'insulation, insulation material, insulation type, lagging, lagging material, lagging type, insulant',
   thicknessM: 'thickness, insulation thickness, lagging thickness',
@@ -168,6 +205,18 @@ const phrases: Readonly<Partial<Record<FieldKey, string>>> = {
     'finish, cladding, cladding material, cladding type, jacket, jacketing, jacket material, covering, outer finish',
   emissivity: 'emissivity',
   maxSurfaceC: 'maximum surface temp, surface temp limit, maximum touch temp',
+  frostHours: 'frost hours, freezing time, time to freeze, hours to freeze, frost protection',
+  frostStartC: 'water start temp, initial water temp',
+  maxDropK: 'temp drop, maximum temp drop, allowable temp drop, drop',
+  codeTable: 'code, code table, energy code, regulation',
+  codeFactor: 'code factor',
+  maxOuterDiameterM: 'maximum od, maximum outside diameter, maximum overall diameter, clear space',
+  measuredSurfaceC:
+    'measured, measured temp, measured surface temp, surface temp measured, surface measured, skin temp, skin temp measured',
+  surveyMediumC: 'medium temp measured, measured fluid temp',
+  surveyAirC: 'air temp measured, measured air temp, survey air temp',
+  surveyEmissivity: 'emissivity setting, survey emissivity',
+  surveyToleranceK: 'thermometer tolerance, thermometer accuracy',
   fuel: 'fuel',
   hoursPerYear: 'hours, operating hours, running hours, hours per year',
 }

@@ -10,13 +10,15 @@ export interface SizedBrief {
   /** Of the chosen rung; null where none passes. */
   readonly thicknessM: number | null
   readonly nominalThicknessM: number | null
-  /** Null for a flat surface, and where no rung passes. */
+  /** Null for what has no metre that stands for the rest, and where no rung passes. */
   readonly heatLossWPerM: number | null
   readonly heatFluxWPerM2: number | null
   readonly surfaceTempC: number | null
   /** Of the bare thing: that of steam, whose pressure was given. */
   readonly insideTempC: number | null
   readonly governing: Governing
+  /** A sphere or a vessel, of which only the whole loss says something. */
+  readonly isPiece: boolean
   /** Of the whole run [W]. */
   readonly bareLossW: number | null
   readonly laggedLossW: number | null
@@ -57,6 +59,7 @@ function sizedBrief(result: RunResult): SizedBrief {
     surfaceTempC: chosen?.surfaceTempC ?? null,
     insideTempC: bare.interfaceTempsC[0] ?? null,
     governing: result.governing,
+    isPiece: bare.heatLossWPerM === null && bare.outerDiameterM !== null,
     bareLossW: bare.heatLossW,
     laggedLossW: chosen?.heatLossW ?? null,
     currency: money?.currency ?? null,

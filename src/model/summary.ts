@@ -23,7 +23,8 @@ export function summarise(runs: readonly Run[], briefs: ReadonlyMap<string, RunB
   let [sized, lengthM, savingPerYear, failing, heeding] = [0, 0, 0, 0, 0]
   let [bareLossW, laggedLossW]: [number | null, number | null] = [null, null]
   for (const run of runs) {
-    lengthM += run.values.lengthM ?? 0
+    // The shell of a vessel is no length of pipe.
+    if (run.values.shape !== 'vessel') lengthM += run.values.lengthM ?? 0
     const brief = briefs.get(run.id)
     if (!brief) continue
     sized++

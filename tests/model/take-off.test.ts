@@ -36,6 +36,23 @@ describe('what a column of another list is', () => {
     ['Cladding', 'finish', 'shown'],
     ['Location', 'place', 'shown'],
     ['Rel. humidity, average %', 'humidity', 'si'],
+    ['No. of valves', 'valves', 'shown'],
+    ['Flange pairs (no)', 'flanges', 'si'],
+    ['Elbows [pcs]', 'bends', 'si'],
+    ['Hangers', 'supports', 'shown'],
+    ['Flow rate (kg/s)', 'flowKgPerS', 'si'],
+    ['Flow (lb/h)', 'flowKgPerS', 'us'],
+    ['Flow temp', 'mediumC', 'shown'],
+    ['Skin temp °C', 'measuredSurfaceC', 'si'],
+    ['Measured surface temperature (°F)', 'measuredSurfaceC', 'us'],
+    ['Max. surface temp °C', 'maxSurfaceC', 'si'],
+    ['Bury depth (m)', 'buryDepthM', 'si'],
+    ['Allowable temp drop (K)', 'maxDropK', 'si'],
+    ['Energy code', 'codeTable', 'shown'],
+    ['Freezing time (h)', 'frostHours', 'si'],
+    ['Winter design temperature °C', 'frostAirC', 'si'],
+    ['Head type', 'heads', 'shown'],
+    ['Length tan to tan (m)', 'lengthM', 'si'],
   ])('%s', (header, key, units) => {
     expect(guessColumn(header)).toEqual({ key, units })
   })

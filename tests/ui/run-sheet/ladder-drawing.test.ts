@@ -97,7 +97,7 @@ describe('bars', () => {
   const words = (fromM: number | null, units: 'si' | 'us' = 'si') =>
     drawLadder({
       ladder,
-      ends: fromM === null ? [] : [{ limit: 'touch', fromM }],
+      ends: fromM === null ? [] : [{ limit: 'touch', fromM, upToM: null }],
       marked: [4],
       chosen: 4,
       isWhole: true,

@@ -29,6 +29,14 @@ describe('temperatures', () => {
     )
   })
 
+  // Steady conduction through a sphere: T falls with 1/r (Incropera 6e, section 3.3.2, from memory), so half the fall is reached at the
+  // harmonic mean of the radii: 2 x 0.05 x 0.10 / 0.15 = 0.066667 m.
+  test('fall with the inverse of the radius around a sphere', () => {
+    const view = viewOf({ shape: 'sphere', mediumC: 170 })
+    expect(temperatureAtC(view, (2 * 0.05 * 0.1) / 0.15 - 0.05)).toBeCloseTo((170 + 35) / 2, 12)
+    expect(temperatureAtC(view, 0.05)).toBeCloseTo(35, 12)
+  })
+
   test('fall in a straight line through a flat layer', () => {
     const flat = { ...bare, outerDiameterM: null }
     const view = viewOf({ shape: 'flat', mediumC: 85 }, madeRung(0.05), flat)
@@ -107,6 +115,21 @@ describe('drawing', () => {
       })
     },
   )
+
+  test('shows the ground over a buried pipe, to scale where it fits and broken where it does not', () => {
+    // 50 mm of lagging on a pipe of 100 mm: its edge is 100 mm from the axis, 0.8 px for a millimetre.
+    const near = drawSection(viewOf({ ...pipe, buryDepthM: 0.11 }), frame)
+    expect(near.ground).toMatchObject({ isCut: false })
+    expect((near.ground?.axisY ?? 0) - (near.ground?.y ?? 0)).toBeCloseTo(110 * 0.8, 9)
+    const deep = drawSection(viewOf({ ...pipe, buryDepthM: 1.2 }), frame)
+    expect(deep.ground).toMatchObject({ isCut: true })
+    expect(deep.jacket?.y ?? 0).toBeGreaterThan(deep.ground?.y ?? 0)
+  })
+
+  test('draws no ground where none is over it', () => {
+    expect(drawSection(viewOf(pipe), frame).ground).toBeNull()
+    expect(drawSection(viewOf({ shape: 'vessel', buryDepthM: 1 }), frame).ground).toBeNull()
+  })
 
   test('is not there where the size is not known', () => {
     expect(

@@ -1,5 +1,6 @@
 /** Pixels of the section drawing: where everything goes, to one scale. */
 import { type Core, type SectionView, shells } from './section.ts'
+import { type DrawnGround, drawGround, groundRoom, isBuried, soilCoverM } from './section-ground.ts'
 
 /** Room around what is drawn: half the width left over, the dimension line below, a label in the corner above. */
 const MARGIN = { beside: 8, below: 28, above: 2, label: 12 }
@@ -8,8 +9,7 @@ const LABEL = { width: 88, height: 36 }
 const SHELLS = 48
 /** How much of the wall behind a slab is shown, and the room for the dimension beside a lying one. */
 const SLAB = { wall: 34, beside: 48, air: 16 }
-
-interface Outline {
+export interface Outline {
   readonly x: number
   readonly y: number
   readonly width: number
@@ -35,6 +35,7 @@ export interface SectionDrawing {
     readonly isUpright: boolean
   } | null
   readonly label: Point & { readonly place: 'inside' | 'above' | 'corner' }
+  readonly ground: DrawnGround | null
 }
 
 export interface SectionFrame {
@@ -45,8 +46,10 @@ export interface SectionFrame {
 }
 
 export function drawSection(view: SectionView, { field, fitM }: SectionFrame): SectionDrawing {
-  const scale = pixelsPerMetre(view.core, Math.max(view.thicknessM, fitM), field)
-  const above = hasRoom(view.core, scale) ? MARGIN.above : MARGIN.label
+  const mostM = Math.max(view.thicknessM, fitM)
+  const scale = pixelsPerMetre(view.core, mostM, field)
+  const coverPx = soilCoverM(view.core, mostM) * scale
+  const above = roomAbove(view.core, scale, coverPx)
   const outlineAt = (depthM: number) => outline(view, depthM * scale, { scale, field, above })
   const core = outlineAt(0)
   const isLagged = view.thicknessM > 0
@@ -63,7 +66,13 @@ export function drawSection(view: SectionView, { field, fitM }: SectionFrame): S
     jacket: isLagged ? around : null,
     dimension: isLagged ? dimension(view.core, core, around) : null,
     label: label(view.core, core, scale),
+    ground: isBuried(view.core) ? drawGround(core, coverPx, field + 2 * MARGIN.beside) : null,
   }
+}
+
+function roomAbove(core: Core, scale: number, coverPx: number): number {
+  if (isBuried(core)) return groundRoom(coverPx)
+  return hasRoom(core, scale) ? MARGIN.above : MARGIN.label
 }
 
 function pixelsPerMetre(core: Core, fitM: number, field: number): number {

@@ -20,7 +20,7 @@ export function sectionWords({ values, bare, view, shown, airC, units, buildUp }
   const size = (sizeM: number | null) => formatWithUnit(sizeM, 'size', units)
   const temperature = (tempC: number) => formatWithUnit(tempC, 'temperature', units)
   const core = {
-    round: `${values.shape === 'round-duct' ? 'round duct' : 'pipe'} ${size(bare.outerDiameterM)} across`,
+    round: `${roundWord(values)} ${size(bare.outerDiameterM)} across`,
     box: 'rectangular duct',
     slab: 'flat surface',
   }[view.core.kind]
@@ -32,5 +32,22 @@ export function sectionWords({ values, bare, view, shown, airC, units, buildUp }
     shown.outerDiameterM === null || shown.thicknessM === 0
       ? []
       : [`${size(shown.outerDiameterM)} over all`]
-  return `Section to scale: ${[core, lagging, ...across].join(', ')}. ${temperature(view.mediumC)} inside, ${temperature(shown.surfaceTempC)} at the surface, air ${temperature(airC)}.`
+  const ground =
+    view.core.kind === 'round' && view.core.buriedM !== null
+      ? [`buried, ${depthWords(view.core.buriedM, units)}`]
+      : []
+  return `Section to scale: ${[core, lagging, ...across, ...ground].join(', ')}. ${temperature(view.mediumC)} inside, ${temperature(shown.surfaceTempC)} at the surface, air ${temperature(airC)}.`
+}
+
+function roundWord({ shape }: RunValues): string {
+  return shape === 'round-duct'
+    ? 'round duct'
+    : shape === 'sphere' || shape === 'vessel'
+      ? shape
+      : 'pipe'
+}
+
+/** How deep a run lies: `0.80 m to the axis`. */
+export function depthWords(depthM: number | null, units: UnitSystem): string {
+  return `${formatWithUnit(depthM, 'length', units, units === 'si' ? 2 : 1)} to the axis`
 }

@@ -4,7 +4,14 @@ import type { Rating } from '#sizing/result.ts'
 
 /** The bare thing in the middle. Half sizes in metres, since all is drawn from the middle outwards. */
 export type Core =
-  | { readonly kind: 'round'; readonly radiusM: number }
+  | {
+      readonly kind: 'round'
+      readonly radiusM: number
+      /** A sphere is cut through its middle; heat spreads in it faster than around a cylinder. */
+      readonly isSphere: boolean
+      /** Depth of the axis below the ground [m]; null in the air. */
+      readonly buriedM: number | null
+    }
   | { readonly kind: 'box'; readonly halfWidthM: number; readonly halfHeightM: number }
   | { readonly kind: 'slab'; readonly facing: 'side' | 'up' | 'down' }
 
@@ -42,18 +49,25 @@ export function sectionView(values: RunValues, bare: Rating, shown: Rating): Sec
   }
 }
 
-/** Temperature at a depth of the lagging [°C]: logarithmic around a cylinder, straight through anything flat. */
+/**
+ * Temperature at a depth of the lagging [°C]: with the logarithm of the radius around a cylinder, with its inverse
+ * around a sphere, straight through anything flat.
+ */
 export function temperatureAtC(view: SectionView, depthM: number): number {
   const stretch = view.stretches.find((one) => depthM <= one.toM) ?? view.stretches.at(-1)
   if (!stretch) return view.surfaceC
   const { fromM, toM, innerC, outerC } = stretch
   const inside = Math.min(toM, Math.max(fromM, depthM))
-  const share =
-    view.core.kind === 'round'
-      ? Math.log((view.core.radiusM + inside) / (view.core.radiusM + fromM)) /
-        Math.log((view.core.radiusM + toM) / (view.core.radiusM + fromM))
-      : (inside - fromM) / (toM - fromM)
+  const passed = resistanceTo(view.core)
+  const share = (passed(inside) - passed(fromM)) / (passed(toM) - passed(fromM))
   return innerC + (outerC - innerC) * share
+}
+
+/** What rises with depth as the resistance to heat does, up to a factor and a constant. */
+function resistanceTo(core: Core): (depthM: number) => number {
+  if (core.kind !== 'round') return (depthM) => depthM
+  const { radiusM, isSphere } = core
+  return isSphere ? (depthM) => -1 / (radiusM + depthM) : (depthM) => Math.log(radiusM + depthM)
 }
 
 /** Thin shells, outermost first, each to be drawn over the one before: outer depth and mean temperature. */
@@ -66,7 +80,15 @@ export function shells(view: SectionView, count: number): { outerM: number; temp
 }
 
 function coreOf(values: RunValues, bare: Rating): Core | null {
-  if (bare.outerDiameterM !== null) return { kind: 'round', radiusM: bare.outerDiameterM / 2 }
+  if (bare.outerDiameterM !== null) {
+    const isBurial = values.shape === 'pipe' || values.shape === 'round-duct'
+    return {
+      kind: 'round',
+      radiusM: bare.outerDiameterM / 2,
+      isSphere: values.shape === 'sphere',
+      buriedM: (isBurial ? values.buryDepthM : undefined) ?? null,
+    }
+  }
   if (values.shape === 'flat') {
     const facing = values.orientation
     return { kind: 'slab', facing: facing === 'up' || facing === 'down' ? facing : 'side' }

@@ -2,12 +2,12 @@
 import type { CellReader } from '#model/cell-edit.ts'
 import { type FieldKey, fieldOf, type RunValues } from '#model/fields.ts'
 import type { Run } from '#model/job.ts'
-import { isMissing, type RunBrief } from '#model/run-brief.ts'
+import { isMissing, type RunBrief, type SizedBrief } from '#model/run-brief.ts'
 import { governingWords } from '#report/run-words.ts'
 import type { Issue } from '#sizing/result.ts'
 import type { CatalogueWords } from '#ui/state/catalogue-words.ts'
 import { editText, readText } from '#ui/state/cell-text.ts'
-import { ABSENT, formatQuantity, thicknessDecimals } from '#units/format.ts'
+import { ABSENT, formatQuantity, formatWithUnit, thicknessDecimals } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import type { Column } from './columns.ts'
 import { issueSentence, shownIssues } from './issue-words.ts'
@@ -70,6 +70,8 @@ function shownText(
 
 /** What follows from other values of the run. */
 function composed(run: Run, brief: RunBrief | undefined, key: FieldKey, showing: Showing): string {
+  // Spheres are counted, not measured out.
+  if (key === 'lengthM') return run.values.shape === 'sphere' ? 'each' : ''
   if (key !== 'mediumC') return composedSize(run, key, showing.units)
   return readText(key, mediumOf(run, brief), showing.units, showing.decimals.get(key))
 }
@@ -98,6 +100,15 @@ function composedSize(run: Run, key: string, units: UnitSystem): string {
     : `Ø ${readText('outerDiameterM', outerDiameterM, units)}`
 }
 
+/** Loss with its unit, for a metre, a square metre or the whole of a piece. */
+export function lossText(brief: SizedBrief, units: UnitSystem): string {
+  if (brief.heatLossWPerM !== null)
+    return formatWithUnit(brief.heatLossWPerM, 'heatLossPerLength', units)
+  return brief.isPiece
+    ? formatWithUnit(brief.laggedLossW, 'power', units)
+    : formatWithUnit(brief.heatFluxWPerM2, 'heatFlux', units, 0)
+}
+
 function resultText(brief: RunBrief | undefined, column: Column, { units }: Showing): string {
   if (!brief) return column.result === 'governed' ? '…' : ''
   if (!brief.ok) return column.result === 'governed' ? unsizedWord(brief.issues) : ''
@@ -112,7 +123,10 @@ function resultText(brief: RunBrief | undefined, column: Column, { units }: Show
             thicknessDecimals([brief.thicknessM], units),
           )
     case 'loss':
-      return formatQuantity(brief.heatLossWPerM, 'heatLossPerLength', units)
+      // In the unit of the column the number alone; what has another says so.
+      return brief.heatLossWPerM === null
+        ? lossText(brief, units)
+        : formatQuantity(brief.heatLossWPerM, 'heatLossPerLength', units)
     case 'surface':
       return formatQuantity(brief.surfaceTempC, 'temperature', units)
     default:
