@@ -19,6 +19,12 @@ const works: readonly Work[] = [
     begins: ['Lemmon and Jacobsen 2004'],
   },
   {
+    name: 'BS 5422:2023, table 20A, as quoted in an open-source hot-water model',
+    begins: ['BS 5422:2023'],
+  },
+  { name: 'German Building Energy Act, annex 8', begins: ['German Building Energy Act'] },
+  { name: 'Italian DPR 412/1993, annex B', begins: ['Italian DPR 412/1993'] },
+  {
     name: 'BS 5422:1990, dew-point table, as printed in the Thermal Insulation Handbook',
     begins: ['BS 5422'],
   },
@@ -62,6 +68,11 @@ const works: readonly Work[] = [
     name: 'Public text with a reading of the figures of ISO 13732-1',
     begins: ['figure reading of ISO 13732-1'],
   },
+  {
+    name: 'German Building Energy Act (GEG), annex 8',
+    begins: ['German Building Energy Act'],
+  },
+  { name: 'Italian DPR 412/1993', begins: ['Italian DPR 412/1993'] },
   { name: 'CODATA 2018', begins: ['CODATA 2018'] },
   { name: 'NIST SP 811 (2008)', begins: ['NIST SP 811'] },
   { name: 'ISO 80000-5:2007', begins: ['ISO 80000-5'] },
