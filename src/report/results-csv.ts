@@ -1,11 +1,7 @@
 /** The answer as CSV for a spreadsheet: mm and kWh, one row per run, empty where a value does not apply. */
-import Papa from 'papaparse'
-import { writeDecimal } from '#model/decimal.ts'
 import type { RunResult } from '#sizing/result.ts'
-import { guardFormula } from './csv-text.ts'
+import { type Cell, cellText, millimetres, rowText } from './csv-cells.ts'
 import { isJudged, meetsLimits, type SizedRun, sizeWords } from './run-words.ts'
-
-type Cell = string | number | null | undefined
 
 const columns: readonly (readonly [header: string, cell: (run: SizedRun) => Cell])[] = [
   ['tag', ({ result }) => result.tag],
@@ -51,18 +47,4 @@ function meetsWord(result: RunResult): string {
 export function* writeResultsCsv(runs: Iterable<SizedRun>): Iterable<string> {
   yield rowText(columns.map(([header]) => header))
   for (const run of runs) yield rowText(columns.map(([, cell]) => cellText(cell(run))))
-}
-
-function rowText(cells: readonly string[]): string {
-  return `${Papa.unparse([[...cells]])}\n`
-}
-
-function millimetres(metres: number | null | undefined): number | null {
-  return metres === null || metres === undefined ? null : metres * 1000
-}
-
-/** Six digits: more than any input has. */
-function cellText(cell: Cell): string {
-  if (typeof cell === 'number') return writeDecimal(Number(cell.toPrecision(6)))
-  return guardFormula(cell ?? '')
 }

@@ -154,6 +154,17 @@ export const runResultSchema = z
     mattThicknessM: orNull(
       'Where damp governs under a bright jacket: the thickness a matt finish would need [m]; else null',
     ),
+    unmet: z
+      .array(
+        z.strictObject({
+          limit: limitName,
+          neededM: orNull(
+            'Whole thickness that would meet it, more than can be bought [m]; null where none up to 600 mm does',
+          ),
+          because: z.string().nullable().describe('Why none does; null where a thickness does'),
+        }),
+      )
+      .describe('Where no rung passes: the limits that none meets'),
     reason: text('The choice in a sentence or two, with the numbers that decided'),
     limits: z
       .array(limitResult)

@@ -67,6 +67,9 @@ const quantityOf: Readonly<Record<string, QuantityName>> = {
   K: 'temperatureDifference',
   'W/m': 'heatLossPerLength',
   'W/m²': 'heatFlux',
+  m: 'size',
+  h: 'hours',
+  'kg/s': 'massFlow',
 }
 
 const usWords: Words = {

@@ -10,6 +10,7 @@ import { solveStates } from './states.ts'
 const THINNEST_M = 1e-4
 /** Where the search ends: well beyond what is bought as lagging [m]. */
 const THICKEST_M = 0.6
+export const searchedUpToM = THICKEST_M
 const EXACT_M = 1e-7
 
 /** How far one limit is from its bound, in its own unit: negative passes, on whichever side of it that is. */
@@ -59,21 +60,24 @@ function continuousThicknessM(problem: Problem, limit: LimitName): number | null
   return passesM === undefined ? null : passesFromM(problem, limit, { failsM, passesM })
 }
 
+/** The same as a thickness of the whole build-up, fixed layers included [m]. */
+export function wholeThicknessM(problem: Problem, limit: LimitName): number | null {
+  const sizedM = continuousThicknessM(problem, limit)
+  if (sizedM === null || sizedM === 0) return sizedM
+  return sizedM + problem.layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
+}
+
 /**
  * The exact ends of the limits a problem sets, for the ladder picture, as thicknesses of the whole build-up like its
  * rungs. Service has no thickness end; space has an upper one.
  */
 export function limitEnds(problem: Problem): LimitEnd[] {
   if (!problem.layers.some((layer) => layer.thicknessM === null)) return []
-  const fixedM = problem.layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
-  const ends: LimitEnd[] = limitsWithLowerEnd(problem.limits).map((limit) => {
-    const sizedM = continuousThicknessM(problem, limit)
-    return {
-      limit,
-      fromM: sizedM === null || sizedM === 0 ? sizedM : sizedM + fixedM,
-      upToM: null,
-    }
-  })
+  const ends: LimitEnd[] = limitsWithLowerEnd(problem.limits).map((limit) => ({
+    limit,
+    fromM: wholeThicknessM(problem, limit),
+    upToM: null,
+  }))
   const bareM = overallSizeM(problem, 0)
   const { maxOuterDiameterM } = problem.limits
   if (maxOuterDiameterM !== null && bareM !== null) {

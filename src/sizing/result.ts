@@ -156,6 +156,15 @@ export interface SurveyResult {
   readonly notes: readonly Note[]
 }
 
+/** A limit that no rung meets. */
+export interface UnmetLimit {
+  readonly limit: LimitName
+  /** Whole thickness that would meet it, thicker than can be bought [m]; null where none up to 600 mm does. */
+  readonly neededM: number | null
+  /** Why none does, in words that end a sentence; null where a thickness does. */
+  readonly because: string | null
+}
+
 export interface RunResult {
   readonly tag: string
   readonly bare: Rating
@@ -163,6 +172,8 @@ export interface RunResult {
   readonly governing: Governing
   /** Where damp governs or cannot be met under a bright jacket: the thickness a matt finish would need [m]; else null. */
   readonly mattThicknessM: number | null
+  /** Where no rung passes: the limits that none meets; empty where limits only exclude each other. */
+  readonly unmet: readonly UnmetLimit[]
   /** One plain sentence or two, with the numbers that decided. */
   readonly reason: string
   /** The limits of the chosen rung; of the thickest rung where none passes. */

@@ -8,6 +8,7 @@ import { writeReason } from './reason.ts'
 import type { Governing, Note, Rating, RunMoney, RunResult } from './result.ts'
 import type { States } from './states.ts'
 import { surveyOf } from './survey.ts'
+import { unmetLimits } from './unmet.ts'
 
 /** Sizes one run: rates the bare run and every rung, chooses, and says why. */
 export function size(problem: Problem): RunResult {
@@ -25,6 +26,7 @@ export function size(problem: Problem): RunResult {
     chosen: choice.rated?.rating ?? null,
     governing: choice.governing,
     mattThicknessM: mattThicknessM(problem, choice.governing, shown.rating, bareRated.states),
+    unmet: choice.governing === 'unmet' ? unmetLimits(problem, ladder) : [],
     limits: shown.rating.limits,
     ladder,
     money,

@@ -1,4 +1,5 @@
 /** Over which thicknesses each limit passes: stretches of the ladder, their ends exact where they are known. */
+import { limitNames, passesLimit } from '#sizing/passes-limit.ts'
 import type { LimitEnd, LimitName, Rating } from '#sizing/result.ts'
 
 export interface PassStretch {
@@ -16,19 +17,13 @@ export interface LimitBar {
 
 /** One bar per limit that is judged, in the order of the results. */
 export function limitBars(ladder: readonly Rating[], ends: readonly LimitEnd[]): LimitBar[] {
-  const names = [...new Set(ladder.flatMap((rung) => rung.limits.map(({ limit }) => limit)))]
-  return names.map((limit) => ({
+  return limitNames(ladder).map((limit) => ({
     limit,
     stretches: stretches(limit, ladder, {
       startM: exactStartM(limit, ends),
       endM: exactEndM(limit, ends),
     }),
   }))
-}
-
-/** A rung passes a limit that is judged more than once only if it passes every time. */
-export function passesLimit(rung: Rating, limit: LimitName): boolean {
-  return rung.limits.every((result) => result.limit !== limit || result.pass)
 }
 
 /** Several ends of one limit: the strictest counts. */
