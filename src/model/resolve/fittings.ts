@@ -30,6 +30,7 @@ const counted = [
   readonly many: string
 }[]
 
+const countedKeys = counted.map(({ key }) => key)
 const inLength = ['bends', 'tees', 'reducers'] as const satisfies readonly FieldKey[]
 const others = ['supports', 'ends'] as const satisfies readonly FieldKey[]
 
@@ -44,60 +45,56 @@ export function resolveFittings(
   if (!thing || !medium) return none
   const { shape } = thing
   if (shape.kind === 'flat' || shape.kind === 'sphere' || shape.kind === 'vessel') {
-    noteUnused([...counted.map(({ key }) => key), ...inLength, ...others], values, findings)
+    noteUnused([...countedKeys, ...inLength, ...others], values, findings)
     return none
-  }
-  const diameterM = shape.kind === 'rect-duct' ? null : shape.outerDiameterM
-  if (diameterM === null) {
-    noteUnused(
-      counted.map(({ key }) => key),
-      values,
-      findings,
-      'the catalogue holds them for pipes only',
-    )
   }
   const isBareRun = values.thicknessM === 0
   const areBare = isBareRun || values.fittings === 'bare'
-  const given = diameterM === null ? [] : counted.filter(({ key }) => (values[key] ?? 0) > 0)
+  noteInLength(values, findings)
+  return {
+    ...countedFittings(values, thing, medium, areBare, index, findings),
+    areBare,
+    supportShare: isBareRun ? 0 : supports(values, index, findings),
+    ends: ends(values, areBare, findings),
+  }
+}
+
+type Counted = Pick<Fittings, 'bareAreaM2' | 'laggedLengthM' | 'convention'>
+
+/** Valves, strainers and flanges, by the outside diameter of the pipe. */
+function countedFittings(
+  values: RunValues,
+  { shape }: Thing,
+  { mediumC }: Medium,
+  areBare: boolean,
+  { catalogue }: CatalogueIndex,
+  findings: Findings,
+): Counted {
+  if (!('outerDiameterM' in shape)) {
+    noteUnused(countedKeys, values, findings, 'the catalogue holds them for pipes only')
+    return none
+  }
+  const given = counted.filter(({ key }) => (values[key] ?? 0) > 0)
+  if (given.length === 0) return none
+  const { outerDiameterM } = shape
+  const areaOf = (item: FittingItem): Figure => fittingAreaM2(catalogue, item, outerDiameterM)
+  const lengthOf = (item: FittingItem): Figure =>
+    laggedLengthM(catalogue, item, outerDiameterM, mediumC)
   const sum = (figureOf: (item: FittingItem) => Figure): number =>
     given.reduce((total, { key, item }) => {
       const figure = figureOf(item)
       return total + (figure.ok ? figure.value * (values[key] ?? 0) : 0)
     }, 0)
-  const areaOf = (item: FittingItem): Figure => fittingAreaM2(index.catalogue, item, diameterM ?? 0)
-  const lengthOf = (item: FittingItem): Figure =>
-    laggedLengthM(index.catalogue, item, diameterM ?? 0, medium.mediumC)
-  const bareAreaM2 = sum(areaOf)
-  const equivalentM = areBare ? 0 : sum(lengthOf)
-  if (given.length > 0) {
-    const what = listed(given.map(({ key, one, many }) => numbered(values[key] ?? 0, one, many)))
-    const isCold = medium.mediumC < (values.airC ?? medium.mediumC)
-    noteFittings(what, { areBare, isBareRun, isCold, bareAreaM2, equivalentM }, findings)
-    noteFigures(
-      new Set(given.map(({ item }) => (areBare ? areaOf(item) : lengthOf(item)))),
-      findings,
-    )
-    if (values.fittings === 'lagged' && isBareRun) {
-      findings.note('fittings-bare', 'The run is bare, and its fittings are taken as bare with it.')
-    }
-    noteNoLength(values, findings)
-    if (values.shape === 'round-duct') {
-      findings.note(
-        'fittings-duct',
-        'The figures for valves and flanges are those of pipes of the same diameter: flanges and dampers of ducts are lighter.',
-      )
-    }
+  const found = {
+    bareAreaM2: sum(areaOf),
+    laggedLengthM: areBare ? 0 : sum(lengthOf),
+    convention: areBare ? byArea : byLength,
   }
-  const supportShare = isBareRun ? 0 : supports(values, index, findings)
-  noteInLength(values, findings)
-  return {
-    bareAreaM2,
-    laggedLengthM: equivalentM,
-    areBare,
-    supportShare,
-    ends: ends(values, areBare, findings),
-    convention: given.length === 0 ? '' : areBare ? byArea : byLength,
-  }
+  const what = listed(given.map(({ key, one, many }) => numbered(values[key] ?? 0, one, many)))
+  noteFittings(what, found, values, mediumC, findings)
+  const items = new Set(given.map(({ item }) => item))
+  for (const item of items) noteFigure(areBare ? areaOf(item) : lengthOf(item), findings)
+  return found
 }
 
 const byArea = 'surface of the bare fitting, losing the flux of the bare run'
@@ -126,41 +123,42 @@ function listed(parts: readonly string[]): string {
 
 function noteFittings(
   what: string,
-  found: {
-    readonly areBare: boolean
-    readonly isBareRun: boolean
-    readonly isCold: boolean
-    readonly bareAreaM2: number
-    readonly equivalentM: number
-  },
+  { bareAreaM2, laggedLengthM: equivalentM, convention }: Counted,
+  values: RunValues,
+  mediumC: number,
   findings: Findings,
 ): void {
-  const area = `${plain(found.bareAreaM2, 3)} m² of bare surface (flanges from their dimensions in class 150 without bolts, valves from memory: verify)`
-  const length = `${plain(found.equivalentM, 2)} m of the lagged run (ISO 12241 annex A / VDI 2055, from memory: verify)`
-  const stay = found.isBareRun
-    ? ''
-    : ` They stay bare on a lagged run: far ${found.isCold ? 'colder' : 'hotter'} than its jacket.`
+  const area = `${plain(bareAreaM2, 3)} m² of bare surface (flanges from their dimensions in class 150 without bolts, valves from memory: verify)`
+  const length = `${plain(equivalentM, 2)} m of the lagged run (ISO 12241 annex A / VDI 2055, from memory: verify)`
+  const isBareRun = values.thicknessM === 0
+  const extreme = mediumC < (values.airC ?? mediumC) ? 'colder' : 'hotter'
+  const stay = isBareRun ? '' : ` They stay bare on a lagged run: far ${extreme} than its jacket.`
   findings.note(
     'fittings',
-    found.areBare
-      ? `${what}: ${area}; convention: ${byArea}.${stay}`
-      : `${what}, lagged like the run: ${length}; convention: ${byLength}. On the bare run they count as ${area}.`,
+    convention === byArea
+      ? `${what}: ${area}; convention: ${convention}.${stay}`
+      : `${what}, lagged like the run: ${length}; convention: ${convention}. On the bare run they count as ${area}.`,
   )
-}
-
-function noteFigures(figures: ReadonlySet<Figure>, findings: Findings): void {
-  for (const figure of figures) {
-    const text = figure.ok ? figure.assumption : figure.reason
-    if (text !== null) findings.note(figure.ok ? 'fittings-figure' : 'fittings-unknown', text)
+  if (values.fittings === 'lagged' && isBareRun) {
+    findings.note('fittings-bare', 'The run is bare, and its fittings are taken as bare with it.')
+  }
+  if (values.lengthM === undefined) {
+    findings.note(
+      'fittings-length',
+      'The run has no length: the loss of its fittings is not added up. Give length_m, 0 for fittings alone.',
+    )
+  }
+  if (values.shape === 'round-duct') {
+    findings.note(
+      'fittings-duct',
+      'The figures for valves and flanges are those of pipes of the same diameter: flanges and dampers of ducts are lighter.',
+    )
   }
 }
 
-function noteNoLength({ lengthM }: RunValues, findings: Findings): void {
-  if (lengthM !== undefined) return
-  findings.note(
-    'fittings-length',
-    'The run has no length: the loss of its fittings is not added up. Give length_m, 0 for fittings alone.',
-  )
+function noteFigure(figure: Figure, findings: Findings): void {
+  const text = figure.ok ? figure.assumption : figure.reason
+  if (text !== null) findings.note(figure.ok ? 'fittings-figure' : 'fittings-unknown', text)
 }
 
 /** Supports count as present or not; wind, sun and sky are outdoors. */
