@@ -15,10 +15,14 @@ export async function renewPublished(): Promise<number> {
       ...(await filesWithPrint()),
     ]),
   )
-  const fault = await renew(report)
+  // A file that does not even load leaves no rows.
+  const fault =
+    exitCode === 0
+      ? await renew(report)
+      : 'Some of these tests fail, so tests/published/REPORT.md stays as it was. Mend them first.'
   if (fault !== null) console.error(fault)
   else console.log('tests/published/REPORT.md is renewed.')
-  return fault === null ? exitCode : 1
+  return fault === null ? 0 : 1
 }
 
 async function filesWithPrint(): Promise<string[]> {
