@@ -68,11 +68,6 @@ const works: readonly Work[] = [
     name: 'Public text with a reading of the figures of ISO 13732-1',
     begins: ['figure reading of ISO 13732-1'],
   },
-  {
-    name: 'German Building Energy Act (GEG), annex 8',
-    begins: ['German Building Energy Act'],
-  },
-  { name: 'Italian DPR 412/1993', begins: ['Italian DPR 412/1993'] },
   { name: 'CODATA 2018', begins: ['CODATA 2018'] },
   { name: 'NIST SP 811 (2008)', begins: ['NIST SP 811'] },
   { name: 'ISO 80000-5:2007', begins: ['ISO 80000-5'] },
