@@ -51,11 +51,17 @@ export function resolveFittings(
   const isBareRun = values.thicknessM === 0
   const areBare = isBareRun || values.fittings === 'bare'
   noteInLength(values, findings)
+  const found = countedFittings(values, thing, medium, areBare, index, findings)
+  const supportShare = isBareRun ? 0 : supports(values, index, findings)
   return {
-    ...countedFittings(values, thing, medium, areBare, index, findings),
+    bareAreaM2: found.bareAreaM2,
+    laggedLengthM: found.laggedLengthM,
     areBare,
-    supportShare: isBareRun ? 0 : supports(values, index, findings),
+    supportShare,
     ends: ends(values, areBare, findings),
+    convention: [found.convention, supportShare > 0 ? bySupports : '']
+      .filter((text) => text !== '')
+      .join('; '),
   }
 }
 
@@ -99,6 +105,8 @@ function countedFittings(
 
 const byArea = 'surface of the bare fitting, losing the flux of the bare run'
 const byLength = 'metres of the lagged run that lose as much'
+const bySupports =
+  'supports as a share of the loss of the straight run (ISO 12241 annex A / VDI 2055, from memory)'
 
 function noteUnused(
   keys: readonly FieldKey[],

@@ -97,6 +97,16 @@ describe('supports', () => {
     },
   )
 
+  test('are named beside the convention of the fittings', () => {
+    expect(fittingsOf({ ...run, supports: 2 }).convention).toMatch(
+      /^supports as a share .*from memory/,
+    )
+    expect(fittingsOf({ ...run, supports: 2, valves: 1 }).convention).toMatch(
+      /^metres of the lagged run that lose as much; supports as a share/,
+    )
+    expect(fittingsOf(run).convention).toBe('')
+  })
+
   test('of a bare run add nothing', () => {
     expect(fittingsOf({ ...run, thicknessM: 0, supports: 2 }).supportShare).toBe(0)
   })
