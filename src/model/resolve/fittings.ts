@@ -103,10 +103,12 @@ function countedFittings(
   return found
 }
 
-const byArea = 'surface of the bare fitting, losing the flux of the bare run'
-const byLength = 'metres of the lagged run that lose as much'
+const byArea =
+  'surface of the bare fitting, losing the flux of the bare run (flanges from their dimensions in class 150 without bolts, valves from memory: verify)'
+const byLength =
+  'metres of the lagged run that lose as much (ISO 12241 annex A / VDI 2055, from memory: verify)'
 const bySupports =
-  'supports as a share of the loss of the straight run (ISO 12241 annex A / VDI 2055, from memory)'
+  'supports as a share of the loss of the straight run (ISO 12241 annex A / VDI 2055, from memory: verify)'
 
 function noteUnused(
   keys: readonly FieldKey[],
@@ -136,8 +138,8 @@ function noteFittings(
   mediumC: number,
   findings: Findings,
 ): void {
-  const area = `${plain(bareAreaM2, 3)} m² of bare surface (flanges from their dimensions in class 150 without bolts, valves from memory: verify)`
-  const length = `${plain(equivalentM, 2)} m of the lagged run (ISO 12241 annex A / VDI 2055, from memory: verify)`
+  const area = `${plain(bareAreaM2, 3)} m² of bare surface`
+  const length = `${plain(equivalentM, 2)} m of the lagged run`
   const isBareRun = values.thicknessM === 0
   const extreme = mediumC < (values.airC ?? mediumC) ? 'colder' : 'hotter'
   const stay = isBareRun ? '' : ` They stay bare on a lagged run: far ${extreme} than its jacket.`
