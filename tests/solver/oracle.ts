@@ -59,10 +59,6 @@ export function filmNumbers(system: System, face: number, surfaceC: number) {
   }
 }
 
-/** Convection and radiation less the sun that a face gives off at a surface temperature [W/m²]. */
-export const givenOff = (system: System, face: number, surfaceC: number): number =>
-  released(system, surfaceAt(system, face), surfaceC)
-
 function solveSurface(system: System, surface: Surface): OracleSurface {
   const { airC, surroundingsC } = system.around
   const arrivedC = (trial: number): number =>
