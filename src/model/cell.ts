@@ -1,7 +1,6 @@
 /** One cell: from what a person wrote to the value of a field and back, for the CSV and the window alike. */
 import { couldBeThousands, readDecimal, writeDecimal } from './decimal.ts'
 import type { Field, NumberField } from './fields.ts'
-import { laterChoices } from './later.ts'
 import { quantities } from './quantities.ts'
 
 export interface CellOptions {
@@ -119,11 +118,6 @@ function refusal(field: Field, text: string, options: CellOptions): string {
   const allowed = allowedIn(field, options.twin)
   if (field.kind === 'number' && isDoubtful(text, options)) {
     return `${allowed}, without a mark between the thousands`
-  }
-  if (field.kind === 'choice') {
-    const wanted = choiceForm(text.slice(0, longestCell))
-    if (laterChoices[field.column]?.includes(wanted))
-      return `${allowed} (${wanted} is not yet supported)`
   }
   return allowed
 }

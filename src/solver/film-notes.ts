@@ -2,6 +2,7 @@
 import { kelvin } from './constants.ts'
 import { nusseltCylinderInWind, nusseltPlateInWind } from './convection/forced.ts'
 import {
+  DRIVING_PLATE_STEPS_RAYLEIGH,
   type FreeFlow,
   nusseltHorizontalCylinder,
   nusseltPlateDrivingFlow,
@@ -9,6 +10,7 @@ import {
   nusseltSlenderCylinder,
   nusseltVerticalCylinder,
   nusseltVerticalPlate,
+  TURBULENT_RAYLEIGH,
 } from './convection/natural.ts'
 import {
   branchUsed,
@@ -48,8 +50,55 @@ export function filmNotes(
   if (face.flow === 'ground' || typeof choice === 'object') return []
   return choice === 'simplified' && isSimplified(face.flow)
     ? simplifiedNotes(face, weather, excessK).map((text) => ({ code: 'film-jump', text }))
-    : detailedNotes(face, weather, excessK).map((text) => ({ code: 'film-range', text }))
+    : [
+        ...detailedNotes(face, weather, excessK).map((text) => ({ code: 'film-range', text })),
+        ...stepNotes(face, weather, excessK).map((text) => ({ code: 'film-jump', text })),
+      ]
 }
+
+/** So near to a step, as a share of the Rayleigh number, that a small change of the inputs may cross it. */
+const BESIDE_STEP = 0.05
+/** A smaller step is lost in the accuracy of the formulas. */
+const STEP_WORTH_TELLING = 0.01
+
+/** Where a formula of the detailed set has a step and the face stands beside it. */
+function stepNotes(face: FaceShape, weather: Weather, excessK: number): string[] {
+  const filmC = weather.airC + 0.5 * excessK
+  const air = airAt(filmC, weather.pressurePa)
+  const { prandtl } = air
+  const rayleigh = rayleighNumber(air, kelvin(filmC), excessK, face.freeLengthM)
+  const at = (steps: readonly number[], nusselt: (rayleigh: number) => number): string[] =>
+    steps
+      .filter((step) => Math.abs(rayleigh / step - 1) <= BESIDE_STEP)
+      .flatMap((step) => {
+        const jump = nusselt(step * (1 + 1e-9)) / nusselt(step * (1 - 1e-9)) - 1
+        return Math.abs(jump) < STEP_WORTH_TELLING
+          ? []
+          : [
+              `${capital(face.side)}: the Rayleigh number of free convection, ${short(rayleigh)}, is near ${short(step)}, where the formula steps by ${(100 * jump).toFixed(0)} %.`,
+            ]
+      })
+  switch (face.flow) {
+    case 'up':
+    case 'down':
+      return isDriving(face.flow, excessK)
+        ? at(DRIVING_PLATE_STEPS_RAYLEIGH, (ra) =>
+            nusseltPlateDrivingFlow({ rayleigh: ra, prandtl }),
+          )
+        : []
+    case 'vertical-cylinder':
+    case 'inclined-cylinder': {
+      const slenderness = face.freeLengthM / face.windLengthM
+      return at([TURBULENT_RAYLEIGH], (ra) =>
+        nusseltVerticalCylinder({ rayleigh: ra, prandtl, slenderness }),
+      )
+    }
+    default:
+      return []
+  }
+}
+
+const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)
 
 /** Where a branch of the simplified set was taken beside a step of it. */
 function simplifiedNotes(face: FaceShape, { windMPerS }: Weather, excessK: number): string[] {

@@ -140,13 +140,13 @@ describe('other cells', () => {
     expect(value(key, text)).toBe(choice)
   })
 
-  it('names the choices, and those to come', () => {
-    expect(allowed('shape', 'tube')).toBe('one of pipe, round-duct, rect-duct, flat')
-    expect(allowed('shape', 'Sphere')).toBe(
-      'one of pipe, round-duct, rect-duct, flat (sphere is not yet supported)',
+  it('names the choices', () => {
+    expect(allowed('shape', 'tube')).toBe(
+      'one of pipe, round-duct, rect-duct, flat, sphere, vessel',
     )
-    expect(allowed('orientation', 'inclined')).toContain('(inclined is not yet supported)')
-    expect(allowed('method', 'simplified')).toContain('(simplified is not yet supported)')
+    expect(allowed('orientation', 'sideways')).toBe(
+      'one of horizontal, vertical, inclined, up, down',
+    )
     expect(value('shape', 'constructor')).toMatchObject({ ok: false })
   })
 

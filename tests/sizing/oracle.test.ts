@@ -2,7 +2,6 @@ import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import type { Material } from '#catalogue/types.ts'
 import type { RunValues } from '#model/fields.ts'
-import type { Shape } from '#solver/types.ts'
 import { evenly } from '../model/any-values.ts'
 import { catalogue, sized } from './catalogue.ts'
 import { type Plain, verdict } from './oracle.ts'
@@ -19,7 +18,7 @@ const finishes = ['al_plain', 'galv_steel', 'stainless', 'pvc_jacket', 'asj', 'e
   .map((id) => catalogue.finishes.find((finish) => finish.id === id))
   .filter((finish) => finish !== undefined)
 
-const shape: fc.Arbitrary<Shape> = fc.oneof(
+const shape: fc.Arbitrary<Plain['shape']> = fc.oneof(
   evenly(-2, 0).map((exponent) => ({
     kind: 'pipe' as const,
     outerDiameterM: 10 ** exponent,
@@ -129,7 +128,7 @@ function valuesOf(run: Plain): RunValues {
   }
 }
 
-function shapeValues(of: Shape): RunValues {
+function shapeValues(of: Plain['shape']): RunValues {
   switch (of.kind) {
     case 'pipe':
       return of.orientation === 'vertical'

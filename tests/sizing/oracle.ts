@@ -10,7 +10,7 @@ import { catalogue } from './catalogue.ts'
 
 /** A run with nothing left to look up but its rows. */
 export interface Plain {
-  readonly shape: Shape
+  readonly shape: Extract<Shape, { kind: 'pipe' | 'rect-duct' | 'flat' }>
   readonly isDuct: boolean
   readonly material: Material
   readonly finish: Finish
@@ -123,6 +123,9 @@ function solveAll(run: Plain, thicknessM: number): Solved {
       mediumC,
       insideFilmWPerM2K: run.isDuct ? 15.5 : null,
       around: { airC, surroundingsC: airC, windMPerS, altitudeM: 0 },
+      sunAbsorbedWPerM2: 0,
+      film: 'detailed',
+      inclinedFilm: 'higher',
     })
   const { emissivityNew, emissivityAged } = run.finish
   return {

@@ -56,13 +56,16 @@ export const nusseltSlenderCylinder = correlation<SlenderFreeFlow>(
 )
 
 /** Above this Rayleigh number the boundary layer is turbulent and the thin-cylinder form ends. */
-const TURBULENT_RAYLEIGH = 1e9
+export const TURBULENT_RAYLEIGH = 1e9
 
 /** Vertical cylinder: the larger of plate and thin cylinder while laminar, the plate above. */
 export function nusseltVerticalCylinder(flow: SlenderFreeFlow): number {
   const plate = nusseltVerticalPlate(flow)
   return flow.rayleigh <= TURBULENT_RAYLEIGH ? Math.max(plate, nusseltSlenderCylinder(flow)) : plate
 }
+
+/** Rayleigh numbers at which the formula for driving horizontal surfaces goes from one range to the next, with a step. */
+export const DRIVING_PLATE_STEPS_RAYLEIGH = [200, 1e4, 8e6] as const
 
 /** Horizontal surface whose warm side faces up or cold side faces down, on area over perimeter. */
 export const nusseltPlateDrivingFlow = correlation<FreeFlow>(
