@@ -1,9 +1,12 @@
-/** The command line: `lagwright size RUNS.csv`. */
+/** The command line: `lagwright size RUNS.csv` and its like. */
 import { readArguments } from './arguments.ts'
-import { help } from './help.ts'
+import type { Outcome } from './deliver.ts'
+import { helpOf } from './help.ts'
+import { loss } from './loss.ts'
 import { print, printProblems } from './print.ts'
 import { size } from './size.ts'
 import { version } from './version.ts'
+import { working } from './working.ts'
 
 export const exitCodes = { done: 0, unmet: 1, badInput: 2, failed: 3 } as const
 type ExitCode = (typeof exitCodes)[keyof typeof exitCodes]
@@ -12,7 +15,7 @@ async function run(words: readonly string[]): Promise<ExitCode> {
   const request = readArguments(words)
   switch (request.kind) {
     case 'help':
-      await print([help])
+      await print([helpOf(request.command)])
       return exitCodes.done
     case 'version':
       await print([`lagwright ${version()}\n`])
@@ -20,12 +23,18 @@ async function run(words: readonly string[]): Promise<ExitCode> {
     case 'mistaken':
       await printProblems(request.problems)
       return exitCodes.badInput
-    case 'size': {
-      const outcome = await size(request)
-      await printProblems(outcome.problems)
-      return exitCodes[outcome.end]
-    }
+    case 'size':
+      return ended(await size(request))
+    case 'loss':
+      return ended(await loss(request))
+    case 'working':
+      return ended(await working(request))
   }
+}
+
+async function ended({ end, problems }: Outcome): Promise<ExitCode> {
+  await printProblems(problems)
+  return exitCodes[end]
 }
 
 async function runToTheEnd(): Promise<void> {

@@ -3,6 +3,7 @@ import type { RunValues } from '#model/fields.ts'
 import { type CatalogueIndex, sizeRun, withDefaults } from '#model/size-run.ts'
 import { isJudged, meetsLimits, type SizedRun } from '#report/run-words.ts'
 import type { InputRun } from './input.ts'
+import type { OpenList } from './list.ts'
 
 export class SizedList implements Iterable<SizedRun> {
   /** Tags of the runs that do not meet their limits, as far as they were sized. */
@@ -13,7 +14,7 @@ export class SizedList implements Iterable<SizedRun> {
   readonly #defaults: RunValues
   readonly #index: CatalogueIndex
 
-  constructor(runs: readonly InputRun[], defaults: RunValues, index: CatalogueIndex) {
+  constructor({ runs, defaults, index }: OpenList) {
     this.#runs = runs
     this.#defaults = defaults
     this.#index = index

@@ -48,7 +48,7 @@ const badLists: readonly (readonly [
     'columns that every run lacks',
     'tag,length_m\nA,3\nB,4\n',
     [
-      'row 1, column shape: found no such column; allowed: pipe, round-duct, rect-duct or flat',
+      'row 1, column shape: found no such column; allowed: pipe, round-duct, rect-duct, flat, sphere or vessel',
       'row 1, column medium_c: found no such column; allowed: the temperature of the medium in °C, or pressure_bar_g if it is saturated steam',
       'row 1, column air_c: found no such column; allowed: the temperature of the air around the run in °C',
       'row 1, column material: found no such column; allowed: a material of the catalogue, conductivity_w_mk, layers, or thickness_mm 0 for a bare run',
@@ -72,19 +72,19 @@ const badLists: readonly (readonly [
   ],
   [
     'columns unknown, repeated and to come',
-    'tag,meduim_c,air_c,Air_F,valves\nA,80,20,68,2\n',
+    'tag,meduim_c,air_c,Air_F,access\nA,80,20,68,2\n',
     [
       'row 1, column meduim_c: found an unknown column; allowed: known columns, of which medium_c is the nearest',
       'row 1, column air_f: found the same as column air_c again; allowed: each column once, in one unit',
-      'row 1, column valves: found a column that is not yet supported; allowed: the list without it',
+      'row 1, column access: found a column that is not yet supported; allowed: the list without it',
     ],
   ],
   [
-    'choices to come',
-    'tag,shape,orientation,medium_c,air_c,material\nA,sphere,inclined,80,20,eps\n',
+    'words that are no choice',
+    'tag,shape,od_mm,orientation,medium_c,air_c,material\nA,cube,80,leaning,80,20,eps\n',
     [
-      'row 2, column shape: found "sphere"; allowed: one of pipe, round-duct, rect-duct, flat (sphere is not yet supported)',
-      'row 2, column orientation: found "inclined"; allowed: one of horizontal, vertical, up, down (inclined is not yet supported)',
+      'row 2, column shape: found "cube"; allowed: one of pipe, round-duct, rect-duct, flat, sphere, vessel',
+      'row 2, column orientation: found "leaning"; allowed: one of horizontal, vertical, inclined, up, down',
     ],
   ],
   ['a torn row', `${sized}\nA,pipe,DN`, ['row 2: found 3 cells; allowed: 7, as in the header']],
@@ -134,12 +134,26 @@ describe('bad input', slow, () => {
   })
 
   it.each([
-    [[], ['found no command; allowed: size. See --help.']],
-    [['frob'], ['found the unknown command "frob"; allowed: size. See --help.']],
+    [[], ['found no command; allowed: size, loss, working. See --help.']],
+    [['frob'], ['found the unknown command "frob"; allowed: size, loss, working. See --help.']],
     [['size'], ['found no list of runs; allowed: RUNS.csv, JOB.lagjob, or - for standard input']],
     [['size', 'a.csv', 'b.csv'], ['found 2 inputs; allowed: one list of runs']],
     [['size', 'a.csv', '--units'], ['--units: found no value; allowed: --units si|us']],
     [['size', 'a.csv', '--json', '--json'], ['--json: found twice; allowed: once']],
+    [
+      ['size', 'a.csv', '--tag', 'A-1'],
+      [
+        '--tag: not an option of size; allowed: --json, --out FILE, --force, --units si|us, --job JOB.lagjob, --help, --version',
+      ],
+    ],
+    [['working', 'a.csv'], ['found no run to work out; allowed: --tag TAG']],
+    [
+      ['working', 'a.csv', '--tag', 'A-1', '--units', 'us', '--out', 'a.csv'],
+      [
+        '--units: not an option of working; allowed: --json, --out FILE, --force, --job JOB.lagjob, --tag TAG, --help, --version',
+        '--out: found "a.csv"; allowed: a file name that ends in .json, .txt',
+      ],
+    ],
     [
       [
         'size',
@@ -181,21 +195,24 @@ describe('bad input', slow, () => {
     expect(code).toBe(2)
   })
 
-  it.each(['touch', 'loss', 'quote', 'walkdown', 'working'])(
-    '%s is refused by name',
-    async (door) => {
-      const { put, lagwright } = place()
-      const { code, err } = await lagwright(door, put('runs.csv', goodList))
-      expect(err).toEqual([`the command ${door} is not yet supported; allowed: size`])
-      expect(code).toBe(2)
-    },
-  )
+  it.each(['touch', 'quote', 'walkdown'])('%s is refused by name', async (door) => {
+    const { put, lagwright } = place()
+    const { code, err } = await lagwright(door, put('runs.csv', goodList))
+    expect(err).toEqual([`the command ${door} is not yet supported; allowed: size, loss, working`])
+    expect(code).toBe(2)
+  })
 })
 
 describe('asking', slow, () => {
-  it.each([['--help'], ['size', '--help'], ['-h']])('for help with %s', async (...words) => {
+  it.each([
+    [['--help'], 'lagwright working RUNS.csv|JOB.lagjob|- --tag TAG'],
+    [['-h'], 'lagwright loss RUNS.csv|JOB.lagjob|-'],
+    [['size', '--help'], 'lagwright size RUNS.csv|JOB.lagjob|- [options]'],
+    [['loss', 'runs.csv', '--help'], 'whether or not limits are met'],
+    [['working', '-h'], '--tag TAG'],
+  ])('for help with %j', async (words, said) => {
     const { code, out, err } = await place().lagwright(...words)
-    expect(out).toContain('lagwright size RUNS.csv|JOB.lagjob|-')
+    expect(out).toContain(said)
     expect(err).toEqual([])
     expect(code).toBe(0)
   })

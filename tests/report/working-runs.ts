@@ -1,7 +1,10 @@
 /** Runs of every shape, film, direction and limit, for the working. */
 import type { RunValues } from '#model/fields.ts'
 
-const hot: RunValues = {
+/** What is taken away from a run is written as undefined. */
+type Varied = { readonly [K in keyof RunValues]?: RunValues[K] | undefined }
+
+const hot: Varied = {
   shape: 'pipe',
   size: 'DN 80',
   lengthM: 12,
@@ -10,7 +13,7 @@ const hot: RunValues = {
   material: 'stone_wool_pipe_section',
   finish: 'al_plain',
 }
-const cold: RunValues = {
+const cold: Varied = {
   ...hot,
   mediumC: 6,
   airC: 24,
@@ -18,8 +21,8 @@ const cold: RunValues = {
   material: 'elastomeric_foam_nbr',
   finish: 'elastomeric_bare',
 }
-const slab: RunValues = { ...hot, size: undefined, lengthM: undefined, material: 'stone_wool_slab' }
-const duct: RunValues = {
+const slab: Varied = { ...hot, size: undefined, lengthM: undefined, material: 'stone_wool_slab' }
+const duct: Varied = {
   ...slab,
   shape: 'rect-duct',
   widthM: 0.6,
@@ -30,16 +33,16 @@ const duct: RunValues = {
   velocityMPerS: 6,
   thicknessM: 0.05,
 }
-const vessel: RunValues = {
+const vessel: Varied = {
   ...slab,
   shape: 'vessel',
   outerDiameterM: 1.2,
   lengthM: 2.5,
   thicknessM: 0.1,
 }
-const money: RunValues = { fuel: 'natural_gas', hoursPerYear: 8000 }
+const money: Varied = { fuel: 'natural_gas', hoursPerYear: 8000 }
 
-const runs: Readonly<Record<string, RunValues>> = {
+const runs: Readonly<Record<string, Varied>> = {
   lying: hot,
   wind: { ...hot, windMPerS: 4, altitudeM: 1600 },
   standing: { ...hot, orientation: 'vertical', riseM: 3 },
