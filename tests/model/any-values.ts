@@ -19,6 +19,8 @@ const names: Readonly<Partial<Record<string, readonly string[]>>> = {
   material: catalogue.materials.map(({ id }) => id),
   finish: catalogue.finishes.map(({ id }) => id),
   fuel: catalogue.fuels.map(({ id }) => id),
+  codeTable: catalogue.codeTables.map(({ id }) => id),
+  monthlyAirC: ['-2;0;4;9;14;17;19;18;14;9;4;0', '20;20;20;20;20;20;20;20;20;20;20;20'],
   layers: [
     'calcium_silicate:40;stone_wool_pipe_section:?',
     'elastomeric_foam_nbr:?',
@@ -106,7 +108,65 @@ const seldom: Weights = {
   steps: 10,
   size: 0,
   maxLossWPerM: 10,
+  maxOuterDiameterM: 10,
+  buryDepthM: 10,
   money: 10,
+  // Each asks for others to be given with it: they come together, from `asked`.
+  medium: 0,
+  wallM: 0,
+  monthlyAirC: 10,
+  frostHours: 0,
+  maxDropK: 0,
+  codeTable: 0,
+  codeFactor: 0,
+}
+
+/** Limits that need more than their own field. */
+const asked: fc.Arbitrary<RunValues> = fc.oneof(
+  { weight: 2, arbitrary: fc.constant({}) },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      medium: fc.constant('water' as const),
+      frostHours: evenly(-2, 3).map((exponent) => 10 ** exponent),
+      frostAirC: evenly(-70, 20),
+      frostStartC: evenly(0.001, 100),
+      frostFraction: evenly(0, 1),
+    }),
+  },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      medium: fc.constantFrom('water', 'steam', 'air', 'other'),
+      maxDropK: evenly(-2, 2).map((exponent) => 10 ** exponent),
+      flowKgPerS: evenly(-5, 4).map((exponent) => 10 ** exponent),
+      heatCapacityJPerKgK: evenly(500, 5000),
+      lengthM: evenly(0.1, 500),
+    }),
+  },
+  {
+    weight: 1,
+    arbitrary: fc.record({
+      codeTable: fc.constantFrom(...(names.codeTable ?? [])),
+      codeFactor: evenly(0.05, 10),
+    }),
+  },
+)
+
+/** Frost is for pipes, a drop for lines, a wall for what is round; a code table is for pipes or for ducts. */
+function suited(run: RunValues): RunValues {
+  const { frostHours, maxDropK, codeTable, ...rest } = run
+  const { shape, outerDiameterM } = run
+  const isForPipes = codeTable?.includes('duct') === false
+  return {
+    ...rest,
+    ...(frostHours !== undefined && shape === 'pipe' && { frostHours }),
+    ...(codeTable !== undefined && isForPipes === (shape === 'pipe') && { codeTable }),
+    ...(maxDropK !== undefined && shape !== 'flat' && { maxDropK }),
+    ...(outerDiameterM !== undefined && {
+      wallM: Math.min(0.5, Math.max(1e-4, 0.05 * outerDiameterM)),
+    }),
+  }
 }
 
 const shapeAndSize = fc.oneof(
@@ -145,11 +205,15 @@ export const usualValues: fc.Arbitrary<RunValues> = fc
       material: fc.constantFrom(...(names.material ?? [])),
     }),
     fc.tuple(evenly(0, 200), evenly(0, 200)),
+    asked,
   )
-  .map(([extra, size, needed, [hotterK, colderK]]) => ({
-    ...extra,
-    ...needed,
-    ...size,
-    ...(hotterK > 100 ? { mediumMaxC: Math.min(1000, needed.mediumC + hotterK - 100) } : {}),
-    ...(colderK > 100 ? { mediumMinC: Math.max(-200, needed.mediumC - colderK + 100) } : {}),
-  }))
+  .map(([extra, size, needed, [hotterK, colderK], limit]) =>
+    suited({
+      ...extra,
+      ...needed,
+      ...limit,
+      ...size,
+      ...(hotterK > 100 ? { mediumMaxC: Math.min(1000, needed.mediumC + hotterK - 100) } : {}),
+      ...(colderK > 100 ? { mediumMinC: Math.max(-200, needed.mediumC - colderK + 100) } : {}),
+    }),
+  )

@@ -59,7 +59,9 @@ const stream = fc.record({
   /** Of the driving difference, about so much is used up. */
   use: evenly(0.001, 1),
 })
-type Stream = typeof stream extends fc.Arbitrary<infer T> ? T : never
+type Stream = Omit<typeof stream extends fc.Arbitrary<infer T> ? T : never, 'thicknessMm'> & {
+  readonly thicknessMm: number
+}
 
 function valuesOf(run: Stream): RunValues {
   return {

@@ -103,8 +103,9 @@ describe('frost', () => {
   })
 
   test('all that is wrong is said at once', () => {
+    const { airC: _, ...airless } = unsized
     expect(
-      refusedColumns({ ...unsized, outerDiameterM: 0.06, mediumMinC: -5, airC: undefined }),
+      refusedColumns({ ...airless, outerDiameterM: 0.06, mediumMinC: -5, medium: 'water' }),
     ).toEqual(expect.arrayContaining(['wall_mm', 'air_c']))
   })
 })
