@@ -50,10 +50,7 @@ export function filmNotes(
   if (face.flow === 'ground' || typeof choice === 'object') return []
   return choice === 'simplified' && isSimplified(face.flow)
     ? simplifiedNotes(face, weather, excessK).map((text) => ({ code: 'film-jump', text }))
-    : [
-        ...detailedNotes(face, weather, excessK).map((text) => ({ code: 'film-range', text })),
-        ...stepNotes(face, weather, excessK).map((text) => ({ code: 'film-jump', text })),
-      ]
+    : detailedNotes(face, weather, excessK).map((text) => ({ code: 'film-range', text }))
 }
 
 /** So near to a step, as a share of the Rayleigh number, that a small change of the inputs may cross it. */
@@ -62,12 +59,18 @@ const BESIDE_STEP = 0.05
 const STEP_WORTH_TELLING = 0.01
 
 /** Where a formula of the detailed set has a step and the face stands beside it. */
-function stepNotes(face: FaceShape, weather: Weather, excessK: number): string[] {
+export function stepNotes(
+  face: FaceShape,
+  weather: Weather,
+  choice: FilmChoice,
+  excessK: number,
+): Note[] {
+  if (typeof choice === 'object' || (choice === 'simplified' && isSimplified(face.flow))) return []
   const filmC = weather.airC + 0.5 * excessK
   const air = airAt(filmC, weather.pressurePa)
   const { prandtl } = air
   const rayleigh = rayleighNumber(air, kelvin(filmC), excessK, face.freeLengthM)
-  const at = (steps: readonly number[], nusselt: (rayleigh: number) => number): string[] =>
+  const at = (steps: readonly number[], nusselt: (rayleigh: number) => number): Note[] =>
     steps
       .filter((step) => Math.abs(rayleigh / step - 1) <= BESIDE_STEP)
       .flatMap((step) => {
@@ -75,7 +78,10 @@ function stepNotes(face: FaceShape, weather: Weather, excessK: number): string[]
         return Math.abs(jump) < STEP_WORTH_TELLING
           ? []
           : [
-              `${capital(face.side)}: the Rayleigh number of free convection, ${short(rayleigh)}, is near ${short(step)}, where the formula steps by ${(100 * jump).toFixed(0)} %.`,
+              {
+                code: 'film-jump',
+                text: `${capital(face.side)}: the Rayleigh number of free convection, ${short(rayleigh)}, is near ${short(step)}, where the formula steps by ${(100 * jump).toFixed(0)} %.`,
+              },
             ]
       })
   switch (face.flow) {

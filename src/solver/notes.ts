@@ -1,7 +1,7 @@
 /** What a reader should know of a solved system. Worked out apart, since only results that are shown need it. */
 import { cornerExcess } from './corner.ts'
 import { isSimplified } from './film.ts'
-import { filmNotes } from './film-notes.ts'
+import { filmNotes, stepNotes } from './film-notes.ts'
 import { wallOf } from './geometry.ts'
 import { weatherOf } from './solve.ts'
 import type { Conductivity, Face, Layer, Note, Solution, System } from './types.ts'
@@ -15,6 +15,7 @@ export function notesOf(system: System, solution: Solution): Note[] {
     if (!shape) return
     const excessK = face.surfaceTempC - system.around.airC
     notes.push(...filmNotes(shape, weather, system.film, excessK), ...closureNotes(face))
+    if (face.closure === 'closed') notes.push(...stepNotes(shape, weather, system.film, excessK))
   })
   if (system.film === 'simplified') {
     const all = shapes.every(({ flow }) => isSimplified(flow))

@@ -117,9 +117,20 @@ describe('the jump of a plate formula', () => {
     },
   )
 
-  test.each([300, 330, 350, 380])('at %d °C there is none and nothing is said', (mediumC) => {
+  test.each([300, 380])('at %d °C there is none and nothing is said', (mediumC) => {
     const system = plate(mediumC)
     expect(notesOf(system, solve(system))).toEqual([])
+  })
+
+  // 0.54 Ra^(1/4) at 8e6 is 28.72; 0.15 Ra^(1/3) is 30.00: the formula steps up by 4 %.
+  test.each([330, 350])('at %d °C the balance closes beside it, and that is said', (mediumC) => {
+    const system = plate(mediumC)
+    const solution = solve(system)
+    expect(solution.faces[0]?.closure).toBe('closed')
+    const [note, ...more] = notesOf(system, solution)
+    expect(more).toEqual([])
+    expect(note?.code).toBe('film-jump')
+    expect(note?.text).toMatch(/is near 8000000, where the formula steps by 4 %\.$/)
   })
 
   test('stands in no answer of a shape whose film has no step', () => {
