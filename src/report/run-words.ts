@@ -1,7 +1,8 @@
 /** A run in the words of tables and documents, in either system of units. */
 import type { RunValues } from '#model/fields.ts'
-import { type Words, writeReason } from '#sizing/reason.ts'
+import { writeReason } from '#sizing/reason.ts'
 import { type Governing, limitWords, type RunResult } from '#sizing/result.ts'
+import type { Words } from '#sizing/words.ts'
 import { formatNumber, formatQuantity, formatWithUnit } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
 import { inSentence } from '#units/restate.ts'
@@ -70,7 +71,10 @@ const quantityOf: Readonly<Record<string, QuantityName>> = {
   m: 'size',
   h: 'hours',
   'kg/s': 'massFlow',
+  'm²K/W': 'resistance',
 }
+/** Inches and resistances tell nothing apart with one decimal. */
+const fewestDecimals: Readonly<Partial<Record<QuantityName, number>>> = { size: 2, resistance: 2 }
 
 const usWords: Words = {
   thickness: (thicknessM, nominalThicknessM) => {
@@ -79,10 +83,8 @@ const usWords: Words = {
   },
   quantity: (value, unit, digits) => {
     const quantity = quantityOf[unit]
+    if (!quantity) return `${formatNumber(value, Math.max(1, digits))} ${unit}`
     // A bound that is round in SI is not so here.
-    const decimals = Math.max(1, digits)
-    return quantity
-      ? inSentence(value, quantity, 'us', decimals)
-      : `${formatNumber(value, decimals)} ${unit}`
+    return inSentence(value, quantity, 'us', Math.max(fewestDecimals[quantity] ?? 1, digits))
   },
 }

@@ -123,7 +123,7 @@ describe('a sized run', () => {
     await page.getByText('The same as a table').click()
     const rows = page.getByRole('figure').getByRole('row')
     expect(rows.elements()).toHaveLength(result.ladder.length + 1)
-    await page.getByRole('tab', { name: 'Loss and surface' }).click()
+    await page.getByRole('tab', { name: 'Loss' }).click()
     await expect.element(page.getByRole('figure', { name: /^Heat loss and surface/ })).toBeVisible()
     await page.getByRole('tab', { name: /^Notes/ }).click()
     expect(page.getByRole('tabpanel').getByRole('listitem').elements()).toHaveLength(

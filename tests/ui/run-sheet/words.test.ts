@@ -58,7 +58,7 @@ test.each<[Partial<LimitResult>, string]>([
 describe('how much of a run there is', () => {
   test.each<[RunValues, string]>([
     [{ shape: 'pipe', lengthM: 24 }, '24.0\u00a0m'],
-    [{ shape: 'pipe', lengthM: 60, buryDepthM: 0.8 }, '60.0\u00a0m, 0.8\u00a0m deep'],
+    [{ shape: 'pipe', lengthM: 60, buryDepthM: 0.8 }, '60.0\u00a0m, 0.80\u00a0m deep'],
     [{ shape: 'flat', areaM2: 12 }, '12.0\u00a0m²'],
     [{ shape: 'sphere', outerDiameterM: 2 }, 'sphere'],
     [{ shape: 'vessel', lengthM: 2.5 }, 'vessel, shell 2.5\u00a0m'],

@@ -200,6 +200,7 @@ const sayOf: Readonly<Partial<Record<FieldKey, Say>>> = {
   dampAirC: ({ isBuried, humidity }) => !isBuried && humidity !== undefined,
 
   reach: inAir,
+  maxSurfaceC: inAir,
   reachReason: ({ reach }) => reach === false,
   contactS: ({ isBuried, reach }) => !isBuried && reach !== false,
   touchClass: ({ isBuried, reach }) => !isBuried && reach !== false,
@@ -224,5 +225,6 @@ const sayOf: Readonly<Partial<Record<FieldKey, Say>>> = {
   surveyEmissivity: surveyed,
   surveyToleranceK: surveyed,
 
-  cop: ({ mediumC, airC = 20 }) => mediumC === undefined || mediumC < airC,
+  cop: ({ medium, mediumC, airC = 20 }) =>
+    mediumC === undefined ? medium !== 'steam' : mediumC < airC,
 }

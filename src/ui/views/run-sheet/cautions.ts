@@ -16,6 +16,14 @@ export function limitCautions(values: RunValues, result: RunResult): string[] {
           'The vapour barrier has to stay closed at every joint and support, else damp gets in behind it.',
         ]
       : []),
+    ...(judged.has('frost')
+      ? [
+          'Lagging delays freezing and does not prevent it: water that stands for longer freezes all the same.',
+        ]
+      : []),
+    ...(judged.has('code')
+      ? ['The figures of a code are to be verified against your own edition of it.']
+      : []),
     ...(isLaggedOutdoors(values, result)
       ? ['Keep the weather barrier sealed: a pipe corrodes unseen under wet lagging.']
       : []),

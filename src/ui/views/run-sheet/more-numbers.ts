@@ -34,7 +34,7 @@ export function besides(values: RunValues, shown: Rating, units: UnitSystem): Nu
       : []),
     ...row(
       'Mean of the year',
-      shown.yearlyMeanLossW,
+      values.monthlyAirC === undefined ? null : shown.yearlyMeanLossW,
       'power',
       `the whole ${whole}, mean of its twelve months`,
     ),

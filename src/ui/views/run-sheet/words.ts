@@ -32,7 +32,10 @@ export function limitNumber(
   system: UnitSystem,
   decimals?: number,
 ): string {
-  return formatWithUnit(value, quantityOfUnit[unit], system, decimals)
+  const quantity = quantityOfUnit[unit]
+  // Sizes are names rather than results.
+  const isSize = unit === 'm' && isWhole(shownValue(value, quantity, system) ?? 0)
+  return formatWithUnit(value, quantity, system, decimals ?? (isSize ? 0 : undefined))
 }
 
 /** `at most 57.6 °C`, and `at most 650 °C`: a bound that somebody wrote down as a whole number is said as one. */
@@ -124,7 +127,9 @@ export function extentWords(values: RunValues, system: UnitSystem): string {
   if (shape === 'sphere') return 'sphere'
   if (shape === 'vessel') return length ? `vessel, shell ${length}` : 'vessel'
   const depth =
-    buryDepthM === undefined ? '' : `${formatWithUnit(buryDepthM, 'length', system)} deep`
+    buryDepthM === undefined
+      ? ''
+      : `${formatWithUnit(buryDepthM, 'length', system, system === 'si' ? 2 : 1)} deep`
   const area = areaM2 === undefined ? '' : formatWithUnit(areaM2, 'area', system)
   return [length || area, depth].filter((words) => words !== '').join(', ')
 }

@@ -105,7 +105,7 @@ export function lossText(brief: SizedBrief, units: UnitSystem): string {
   if (brief.heatLossWPerM !== null)
     return formatWithUnit(brief.heatLossWPerM, 'heatLossPerLength', units)
   return brief.isPiece
-    ? formatWithUnit(brief.laggedLossW, 'power', units)
+    ? formatWithUnit(brief.laggedLossW, units === 'us' ? 'plantPower' : 'power', units)
     : formatWithUnit(brief.heatFluxWPerM2, 'heatFlux', units, 0)
 }
 

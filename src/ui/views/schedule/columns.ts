@@ -89,7 +89,13 @@ function column(key: FieldKey | ResultName, widthPx: number, system: UnitSystem)
     case 'lagging':
       return result(key, 'Thickness', unitLabel('thickness', system), widthPx, 'thicknessM')
     case 'loss':
-      return result(key, 'Loss', unitLabel('heatLossPerLength', system), widthPx)
+      // Pieces and surfaces say their own unit, which is longer there.
+      return result(
+        key,
+        'Loss',
+        unitLabel('heatLossPerLength', system),
+        widthPx + (system === 'us' ? 28 : 0),
+      )
     case 'surface':
       return result(key, 'Surface', unitLabel('temperature', system), widthPx)
     case 'governed':
