@@ -47,9 +47,9 @@ const NOTHING_K = 1e-6
  * air, unless surroundings or sun say otherwise).
  *
  * The heat transfer is held the same along the run, though it changes as the stream nears the air. Against a run followed
- * metre by metre the drop is within 2 % for lagged runs, however much of the difference is used up, and within 3 % for
- * bare ones that use up a tenth of it; bare ones that use up most of it come out up to 15 % too large where hot, and
- * up to 8 % too small where colder than the air.
+ * metre by metre the drop is within 2 % for lagged runs, however much of the difference is used up, and within 4 % for
+ * bare ones that use up a tenth of it. Bare ones that use up most of it come out too large where hot, by up to 20 % from
+ * 250 °C, and up to 8 % too small where colder than the air.
  */
 function streamEndC(
   problem: Problem,

@@ -21,7 +21,7 @@ const NEVER_K = 1e-6
  * 0 °C while it freezes. It is driven by the temperature that the pipe itself tends to, which lies below the air under a
  * cold sky. Against a cooling followed step by step from 60 °C or less this is never more than 2 % late, and early by
  * at most 7 % for lagged pipes and 18 % for bare ones: that far only where the air lies just below 0 °C and the film
- * weakens on the way; in air of −10 °C and from 20 °C by 1 % and 5 %. The figures of the water are those near 0 °C: at
+ * weakens on the way; in air of −10 °C and from 20 °C by 2 % and 5 %. The figures of the water are those near 0 °C: at
  * 80 °C its heat capacity by volume is 3 % less.
  */
 export function timeToFreezeH(problem: Problem, settled: Settled): number | null {

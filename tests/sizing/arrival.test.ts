@@ -139,12 +139,12 @@ describe('against the line metre by metre', () => {
     )
   })
 
-  test('bare: within 3 % where a tenth of the difference is used up, else as the docstring says', () => {
+  test('bare: within 4 % where a tenth of the difference is used up, else as the docstring says', () => {
     fc.assert(
       fc.property(stream, (run) => {
         const { share, used } = off({ ...run, thicknessMm: 0 })
-        expect(share).toBeLessThan(used < 0.1 ? 0.03 : 0.15)
-        expect(share).toBeGreaterThan(used < 0.1 ? -0.03 : -0.08)
+        expect(share).toBeLessThan(used < 0.1 ? 0.04 : 0.2)
+        expect(share).toBeGreaterThan(used < 0.1 ? -0.04 : -0.08)
       }),
       { seed: 42, numRuns: 60 },
     )

@@ -3,7 +3,8 @@ import type { Problem } from '#sizing/problem.ts'
 import type { Issue } from '#sizing/result.ts'
 import type { RunValues } from '../fields.ts'
 import { resolveBuildUp, resolveFinish } from './build-up.ts'
-import { noteConditions, resolveConditions } from './conditions.ts'
+import { noteConditions } from './condition-notes.ts'
+import { resolveConditions } from './conditions.ts'
 import { Findings } from './findings.ts'
 import { resolveFittings } from './fittings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
@@ -38,7 +39,9 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   const buildUp = resolveBuildUp(values, thing, index, findings)
   const gainsHeat = conditions !== null && conditions.loss.mediumC < conditions.loss.around.airC
   const money = resolveMoney(values, gainsHeat, index, findings)
+  const faultsBefore = findings.issues.length
   const limits = resolveLimits(values, thing, finish, conditions, index, findings)
+  const isAskedInVain = findings.issues.length > faultsBefore && asksMore(values)
   const fittings = resolveFittings(values, thing, medium, index, findings)
   const survey = resolveSurvey(values, conditions, findings)
   const finishPrice = finish && index.finishPrice(finish.id)
@@ -46,7 +49,8 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
     money !== null &&
     (finish === null || finishPrice !== null) &&
     buildUp?.layers.every(({ material }) => material.price !== null)
-  if (conditions && buildUp && buildUp.steps.length > 0 && !isWeighed && !setsAny(limits)) {
+  const isSized = isWeighed || setsAny(limits) || isAskedInVain
+  if (conditions && buildUp && buildUp.steps.length > 0 && !isSized) {
     findings.fault(
       'reach',
       money === null ? 'no limit and no money' : 'no limit, and no price to weigh the cost with',
@@ -109,6 +113,10 @@ function withoutBlanks(values: RunValues): RunValues {
   )
   return Object.fromEntries(kept)
 }
+
+/** A limit that is asked for but lacks something has its own fault: that the run has none would be no news. */
+const asksMore = ({ frostHours, maxDropK, codeTable }: RunValues): boolean =>
+  frostHours !== undefined || maxDropK !== undefined || codeTable !== undefined
 
 const setsAny = (limits: Problem['limits']): boolean =>
   limits.maxSurfaceC !== null ||

@@ -47,6 +47,14 @@ describe('a code table', () => {
     expect(issue?.allowed).toContain('geg-2024-heating')
   })
 
+  test('that is misspelt is the one fault of a run sized by nothing else', () => {
+    const unreached = { ...heating, reach: false, reachReason: 'in a shaft' }
+    expect(columnsOf({ ...unreached, codeTable: 'geg' })).toEqual(['code_table'])
+    expect(columnsOf({ ...unreached, mediumC: 30, codeTable: 'ashrae-90.1-2010-heating' })).toEqual(
+      ['reach'],
+    )
+  })
+
   test('every table says its edition and that it is to be verified', () => {
     for (const { id, edition, service } of catalogue.codeTables) {
       const isDuct = id.includes('duct')
@@ -127,7 +135,7 @@ describe('the size it goes by', () => {
   test('one of losses is for runs in air', () => {
     const tube = { ...unsized, outerDiameterM: 0.022, codeTable: 'bs-5422-2023-domestic' }
     expect(problemOf(tube).limits.code?.asks[0]).toMatchObject({ kind: 'loss', maxLossWPerM: 9.12 })
-    expect(columnsOf({ ...tube, buryDepthM: 1, maxLossWPerM: 20 })).toEqual(['code_table'])
+    expect(columnsOf({ ...tube, buryDepthM: 1 })).toEqual(['code_table'])
     expect(columnsOf({ ...tube, codeFactor: 2 })).toEqual(['code_factor'])
     expect(columnsOf({ ...tube, codeFactor: 1 })).toEqual([])
   })
