@@ -43,7 +43,7 @@ export function textTable(columns: readonly TextColumn[], width: number | null):
 }
 
 /** Nothing that a terminal would obey, and no line ends. */
-function printable(text: string): string {
+export function printable(text: string): string {
   return text.replace(/[\p{Cc}\p{Cs}\p{Zl}\p{Zp}]+/gu, ' ')
 }
 

@@ -2,7 +2,7 @@
 import { MINUS, withNumbers } from '#sizing/working/formula.ts'
 import type { Section, Step, Working } from '#sizing/working/types.ts'
 import { cautions } from './cautions.ts'
-import { textTable, textWidth } from './text-table.ts'
+import { printable, textTable, textWidth } from './text-table.ts'
 
 const WIDTH = 100
 const INDENT = '    '
@@ -115,7 +115,7 @@ function wrapped(text: string, indent: string, mark = ''): string[] {
   let line = indent + mark
   const rest = indent + ' '.repeat(mark.length)
   let isEmpty = true
-  for (const word of text.split(' ')) {
+  for (const word of printable(text).split(' ')) {
     if (!isEmpty && textWidth(`${line} ${word}`) > WIDTH) {
       lines.push(line)
       line = rest

@@ -1,5 +1,4 @@
 /** Why the chosen rung is as thick as it is: a few plain sentences with the numbers that decided. */
-import { limitNames, passesLimit } from './passes-limit.ts'
 import {
   type LimitName,
   type LimitResult,
@@ -7,38 +6,8 @@ import {
   type Rating,
   type RunResult,
 } from './result.ts'
-
-/** How numbers are said; the window and the documents pass their own units. */
-export interface Words {
-  /** A thickness, and what an inch series calls it where it is one of those. */
-  thickness(thicknessM: number, nominalThicknessM: number | null): string
-  /** A number in one of the units of `LimitResult`, with its unit; `digits` after the point in SI. */
-  quantity(value: number, unit: string, digits: number): string
-}
-
-/** What reads better than the SI unit: millimetres and kilograms an hour. */
-const shownUnits: Readonly<Partial<Record<string, { unit: string; per: number }>>> = {
-  m: { unit: 'mm', per: 0.001 },
-  'kg/s': { unit: 'kg/h', per: 1 / 3600 },
-}
-
-const shownValue = (value: number, unit: string): number => value / (shownUnits[unit]?.per ?? 1)
-
-export const siWords: Words = {
-  thickness: (thicknessM, nominalThicknessM) => {
-    const mm = `${Number((thicknessM * 1000).toFixed(1))} mm`
-    return nominalThicknessM === null
-      ? mm
-      : `${Number((nominalThicknessM / 0.0254).toFixed(3))} in (${mm})`
-  },
-  quantity: (value, unit, digits) =>
-    `${minus(shownValue(value, unit).toFixed(digits))} ${shownUnits[unit]?.unit ?? unit}`,
-}
-
-/** A true minus sign, and no sign on a zero. */
-function minus(text: string): string {
-  return /^-0(\.0*)?$/.test(text) ? text.slice(1) : text.replace('-', '−')
-}
+import { unmetWords } from './unmet-words.ts'
+import { against, said, shownValue, siWords, type Words } from './words.ts'
 
 export type ReasonFacts = Pick<
   RunResult,
@@ -75,31 +44,10 @@ export function writeReason(facts: ReasonFacts, words: Words = siWords): string 
 const sentences = (...parts: readonly string[]): string =>
   parts.filter((part) => part !== '').join(' ')
 
-const said = (rung: Rating, words: Words): string =>
-  words.thickness(rung.thicknessM, rung.nominalThicknessM)
-
 /** A thickness that is a rung of the ladder, with the name its series gives it. */
 function saidThickness(thicknessM: number, { ladder }: ReasonFacts, words: Words): string {
   const rung = ladder.find((candidate) => candidate.thicknessM === thicknessM)
   return words.thickness(thicknessM, rung?.nominalThicknessM ?? null)
-}
-
-/** As many digits as tell a value from its bound, at least one. */
-function tellingDigits({ value, bound, unit }: LimitResult): number {
-  const [shown, shownBound] = [shownValue(value, unit), shownValue(bound, unit)]
-  return (
-    [1, 2, 3, 4, 5, 6].find((digits) => shown.toFixed(digits) !== shownBound.toFixed(digits)) ?? 6
-  )
-}
-
-/** A bound that somebody wrote down as a whole number, millimetres kept in metres included. */
-const isWhole = (value: number): boolean => Math.abs(value - Math.round(value)) < 1e-9
-
-function against(limit: LimitResult, words: Words): string {
-  const { value, bound, unit } = limit
-  const digits = tellingDigits(limit)
-  const boundDigits = isWhole(shownValue(bound, unit)) ? 0 : digits
-  return `${words.quantity(value, unit, digits)} against ${words.quantity(bound, unit, boundDigits)}`
 }
 
 /** A result that came through JSON or a worker holds the chosen rung twice: compared by thickness. */
@@ -215,57 +163,8 @@ function bareWords({ bare, limits }: ReasonFacts, words: Words): string {
 }
 
 function unmet(facts: ReasonFacts, words: Words): string {
-  const { ladder } = facts
-  if (ladder.length === 0) return 'No thickness of this material can be bought for this size.'
-  const alone = facts.unmet.map((limit) => cannotBeMet(limit, facts, words))
-  return sentences(
-    'No thickness passes every limit.',
-    ...(alone.length > 0 ? alone : [excluding(ladder, words)]),
-    matt(facts, words),
-  )
+  if (facts.ladder.length === 0) {
+    return 'No thickness of this material can be bought for this size.'
+  }
+  return sentences('No thickness passes every limit.', unmetWords(facts, words), matt(facts, words))
 }
-
-/** One limit that no rung meets: how near the best of them comes, and what it would take. */
-function cannotBeMet(
-  { limit, neededM, because }: RunResult['unmet'][number],
-  { ladder }: ReasonFacts,
-  words: Words,
-): string {
-  const best = nearestTo(ladder, limit)
-  const failed = best?.limits.find((result) => result.limit === limit && !result.pass)
-  if (!best || !failed) return ''
-  const stands = `${limitWords[limit]} cannot be met: at best, ${said(best, words)}, it stands at ${against(failed, words)} (${failed.what})`
-  return neededM === null
-    ? `${stands}, because ${because ?? 'no thickness would do'}.`
-    : `${stands}; it would take ${words.thickness(neededM, null)}, which is more than can be bought.`
-}
-
-/** The rung that misses a limit by least; the thinnest of equals. */
-function nearestTo(ladder: readonly Rating[], limit: LimitName): Rating | undefined {
-  const shortfall = (rung: Rating): number =>
-    Math.max(
-      ...rung.limits
-        .filter((result) => result.limit === limit && !result.pass)
-        .map(({ value, bound }) => Math.abs(value - bound)),
-    )
-  return ladder.length === 0
-    ? undefined
-    : ladder.reduce((a, b) => (shortfall(b) < shortfall(a) - 1e-9 ? b : a))
-}
-
-/** Each limit is met by some rung, but no rung meets all: the one that needs most and the one that allows least. */
-function excluding(ladder: readonly Rating[], words: Words): string {
-  const ranges = limitNames(ladder).map((limit) => {
-    const passing = ladder.filter((rung) => passesLimit(rung, limit))
-    return { limit, first: passing[0], last: passing[passing.length - 1] }
-  })
-  const known = ranges.filter(({ first, last }) => first && last)
-  if (known.length < 2) return ''
-  const needs = known.reduce((a, b) => (thicker(b.first, a.first) ? b : a))
-  const allows = known.reduce((a, b) => (thicker(a.last, b.last) ? b : a))
-  if (!needs.first || !allows.last || needs.limit === allows.limit) return ''
-  return `${limitWords[needs.limit]} needs ${said(needs.first, words)} or more, ${allows.limit} allows ${said(allows.last, words)} at most.`
-}
-
-const thicker = (a: Rating | undefined, b: Rating | undefined): boolean =>
-  (a?.thicknessM ?? 0) > (b?.thicknessM ?? 0)

@@ -5,7 +5,7 @@ import type { Condition } from '#sizing/problem.ts'
 import { clearSkyC, radiantMixC } from '#solver/index.ts'
 import type { FilmChoice } from '#solver/types.ts'
 import type { RunValues } from '../fields.ts'
-import { type Findings, plain } from './findings.ts'
+import type { Findings } from './findings.ts'
 import type { Medium } from './medium.ts'
 import { type MonthlyAir, parseMonthlyAir } from './monthly-air.ts'
 import type { Thing } from './standing.ts'
@@ -213,57 +213,5 @@ function noteUnusedUnderground(values: RunValues, findings: Findings): void {
   ].filter((word) => word !== '')
   if (given.length > 0) {
     findings.note('unused', `${given.join(', ')}: not used for a buried run.`)
-  }
-}
-
-/** Says what was assumed of the surface and of the air, once the limits are known. */
-export function noteConditions(
-  values: RunValues,
-  conditions: Conditions,
-  judged: { readonly touch: boolean; readonly damp: boolean; readonly frost: boolean },
-  findings: Findings,
-): void {
-  noteSurroundings(values.surroundingsC, conditions, judged, findings)
-  const air = `the air of the run, ${plain(values.airC ?? 0)} °C`
-  if (judged.touch && values.touchAirC === undefined) {
-    findings.note('touch-air-assumed', `Touch is judged at ${air}: no hottest-day air is given.`)
-  }
-  if (judged.damp && values.dampAirC === undefined) {
-    findings.note('damp-air-assumed', `Damp is judged at ${air}: no most-humid air is given.`)
-  }
-  if (judged.frost && values.frostAirC === undefined) {
-    findings.note('frost-air-assumed', `Frost is judged at ${air}: no coldest air is given.`)
-  }
-  if (values.filmWPerM2K !== undefined) {
-    findings.note(
-      'film-fixed',
-      `The film outside is fixed at ${plain(values.filmWPerM2K, 2)} W/m²K, convection and radiation together, for loss and frost; touch and damp are judged with the film worked out.`,
-    )
-  } else if (values.method === 'simplified') {
-    findings.note(
-      'film-simplified',
-      'Loss and frost are reckoned with the simplified film; touch, damp and service with the detailed one, since the simplified makes hot surfaces too cool.',
-    )
-  }
-}
-
-function noteSurroundings(
-  given: number | undefined,
-  { touch, damp }: Conditions,
-  judged: { readonly touch: boolean; readonly damp: boolean },
-  findings: Findings,
-): void {
-  if (given === undefined) return
-  if (judged.touch && touch.around.surroundingsC > given) {
-    findings.note(
-      'touch-surroundings',
-      `Touch is judged with surroundings at the air of the hottest day, ${plain(touch.around.surroundingsC)} °C, since those given are cooler.`,
-    )
-  }
-  if (judged.damp && damp.around.airC < given) {
-    findings.note(
-      'damp-surroundings',
-      `Damp is judged with surroundings at the most humid air, ${plain(damp.around.airC)} °C, since those given are warmer.`,
-    )
   }
 }

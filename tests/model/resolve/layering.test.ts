@@ -20,20 +20,6 @@ describe('cold work', () => {
   })
 })
 
-describe('movement', () => {
-  test('1 mm for each metre and 100 K, once it is worth a joint', () => {
-    // 40 m from 20 to 150 °C: 40 × 1.3 mm.
-    expect(textOf({ ...steamRun, lengthM: 40 }, 'movement')).toContain('about 52 mm over its 40 m')
-    expect(codes({ ...steamRun, lengthM: 10 })).not.toContain('movement')
-    expect(codes(steamRun)).not.toContain('movement')
-  })
-
-  test('counts the hottest and the coldest', () => {
-    expect(codes({ ...steamRun, lengthM: 10, mediumMaxC: 350 })).toContain('movement')
-    expect(codes({ ...coldRun, lengthM: 20, mediumMinC: -100 })).toContain('movement')
-  })
-})
-
 test('sections over sections have to nest', () => {
   const nested = { ...unlagged, layers: 'calcium_silicate:40;stone_wool_pipe_section:?' }
   expect(codes(nested)).toContain('nesting')
