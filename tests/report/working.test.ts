@@ -7,8 +7,8 @@ import { parseRunsCsv } from '#report/runs-csv.ts'
 import { writeWorkingText } from '#report/working-text.ts'
 import type { RunResult } from '#sizing/result.ts'
 import { shippedCatalogue } from '../catalogue/shipped-catalogue.ts'
-import { calculate } from './calculator.ts'
 import { demoFile } from './demo-runs.ts'
+import { agrees, repeated } from './repeated.ts'
 import { numberOf, type PageSection, readPage } from './working-page.ts'
 import { workingRuns } from './working-runs.ts'
 
@@ -30,36 +30,6 @@ function resultOf(values: RunValues): RunResult {
   const outcome = sizeRun(values, {}, index)
   if (!outcome.ok) throw new Error(JSON.stringify(outcome.issues))
   return outcome.result
-}
-
-/** A line repeats within so much of what is printed, or comes to nothing as it does. */
-const REPEATS = 5e-4
-const NOTHING = 1e-9
-
-const agrees = (again: number, printed: number): boolean =>
-  Math.abs(again - printed) <= Math.max(REPEATS * Math.abs(printed), NOTHING)
-
-/** Lines that do not repeat from the page, in words; and how many there are in all. */
-function repeated({ title, lines }: PageSection): { wrong: string[]; formulas: number } {
-  const known = new Map<string, number>()
-  const wrong: string[] = []
-  let formulas = 0
-  for (const { symbol, parts, text } of lines) {
-    const printed = numberOf(parts.at(-1) ?? '')
-    if (!Number.isFinite(printed)) wrong.push(`${title}: ${text}: not a number`)
-    if (known.has(symbol)) wrong.push(`${title}: ${symbol} stands twice`)
-    const [formula, numbers = formula] = parts.slice(0, -1)
-    if (formula !== undefined && numbers !== undefined) {
-      formulas += 1
-      const fromSymbols = calculate(formula, known)
-      const fromNumbers = parts.length > 2 ? calculate(numbers) : fromSymbols
-      const isSame = Math.abs(fromSymbols - fromNumbers) <= 1e-12 * Math.abs(fromNumbers)
-      if (!isSame) wrong.push(`${title}: ${text}: other numbers than printed above`)
-      if (!agrees(fromNumbers, printed)) wrong.push(`${title}: ${text}: comes to ${fromNumbers}`)
-    }
-    known.set(symbol, printed)
-  }
-  return { wrong, formulas }
 }
 
 function printed(sections: readonly PageSection[], title: string, symbol: string): number {

@@ -64,6 +64,10 @@ export function layerSteps(ledger: Ledger, at: FaceAt, settled: Settled): void {
     ledger.step('Resistance of the film inside', 'R_i', 'a / h_i', 'm²·K/W')
     resistances.push('R_i')
   }
+  if (holdsNothing(at)) {
+    ledger.say('The layers are so thin that they hold nothing back: there is no balance to repeat.')
+    return
+  }
   ledger.step(
     'Balance: the flux that all resistances let through, which must be q',
     'q_L',
@@ -72,3 +76,9 @@ export function layerSteps(ledger: Ledger, at: FaceAt, settled: Settled): void {
     { value: face.heatFluxWPerM2, source: `resistances in series: ${sources.ashrae2021ch23}` },
   )
 }
+
+/** A drop below this cannot be read off two temperatures [K]. */
+const NOTHING_K = 1e-8
+
+const holdsNothing = ({ system, face }: FaceAt): boolean =>
+  Math.abs(system.mediumC - face.surfaceTempC) < NOTHING_K && Math.abs(face.heatFluxWPerM2) > 0
