@@ -116,7 +116,7 @@ function drops(run: Stream): { fastK: number; slowK: number; used: number } {
     run.mediumC,
     run.lengthM,
     capacityRateWPerK / 50,
-    800,
+    400,
   )
   const chosenC = size(problem).chosen?.arrivalTempC ?? Number.NaN
   const slowK = run.mediumC - endC

@@ -17,7 +17,7 @@ export function coolingHours(
   capacityJPerMK: number,
   startC: number,
   endC: number,
-  steps = 200,
+  steps = 60,
 ): number {
   const stepK = (startC - endC) / steps
   let seconds = 0
@@ -31,7 +31,7 @@ export function freezingHours(
   standing: Standing,
   boreM: number,
   iceFraction: number,
-  rings = 200,
+  rings = 60,
 ): number {
   const areaM2 = (Math.PI / 4) * boreM ** 2
   const heatJPerM = (920 * 334e3 * areaM2 * iceFraction) / rings
@@ -41,7 +41,7 @@ export function freezingHours(
     const iceMKPerW = -Math.log(1 - share) / (4 * Math.PI * 2.2)
     // The wall temperature at which the ice passes on what leaves the pipe.
     let [low, high] = [-120, 0]
-    for (let halving = 0; halving < 40; halving += 1) {
+    for (let halving = 0; halving < 30; halving += 1) {
       const middle = (low + high) / 2
       if (flowAt(standing, middle) > -middle / iceMKPerW) high = middle
       else low = middle
@@ -57,7 +57,7 @@ export function streamEndC(
   startC: number,
   lengthM: number,
   capacityRateWPerK: number,
-  steps = 400,
+  steps = 120,
 ): number {
   let tempC = startC
   for (let n = 0; n < steps; n += 1) {
