@@ -1,5 +1,6 @@
 import { soilResistanceMKPerW } from './ground.ts'
-import type { Heads, Layer, Shape, SideName, Unit } from './types.ts'
+import { DOME_RADIUS_PER_DIAMETER, headOuterAreaM2 } from './heads.ts'
+import type { Layer, Shape, SideName, Unit } from './types.ts'
 
 /** A layered wall reduced to its outer area. */
 export interface Wall {
@@ -238,14 +239,6 @@ function sphereWall(shape: Of<'sphere'>, layers: readonly Layer[]): Wall {
 }
 
 /**
- * Radius of the half sphere that has the area of a domed head, by the diameter of the vessel. The head is a half
- * ellipsoid half as high as wide; its area is π/4·D²·[1 + (1 − e²)/e·artanh e] with e² = 3/4. Source: geometry.
- */
-const DOME_RADIUS_PER_DIAMETER = Math.sqrt(
-  (1 + (0.25 / Math.sqrt(0.75)) * Math.atanh(Math.sqrt(0.75))) / 8,
-)
-
-/**
  * Vessel: the shell as a cylinder, two heads as discs or domes; one piece. A dome conducts as the half sphere of its
  * area and is cooled as a sphere of the vessel's diameter; a disc conducts straight through to its outer area.
  */
@@ -285,45 +278,5 @@ function vesselWall(shape: Of<'vessel'>, layers: readonly Layer[]): Wall {
               head('bottom head', 'down', diameterM / 4, 1),
             ]),
     ],
-  }
-}
-
-/** Outer area of one head of a vessel, lagged [m²]. */
-function headOuterAreaM2(heads: Heads, bareDiameterM: number, thicknessM: number): number {
-  if (heads === 'flat') return (Math.PI / 4) * (bareDiameterM + 2 * thicknessM) ** 2
-  return 2 * Math.PI * (bareDiameterM * DOME_RADIUS_PER_DIAMETER + thicknessM) ** 2
-}
-
-/** Area [m²] and enclosed volume [m³] of one unit of a shape grown by a thickness; of a flat surface, the layer's own. */
-export function grown(shape: Shape, thicknessM: number): { areaM2: number; volumeM3: number } {
-  switch (shape.kind) {
-    case 'pipe':
-    case 'buried-pipe': {
-      const diameterM = shape.outerDiameterM + 2 * thicknessM
-      return { areaM2: Math.PI * diameterM, volumeM3: (Math.PI * diameterM * diameterM) / 4 }
-    }
-    case 'rect-duct': {
-      const widthM = shape.widthM + 2 * thicknessM
-      const heightM = shape.heightM + 2 * thicknessM
-      return { areaM2: 2 * (widthM + heightM), volumeM3: widthM * heightM }
-    }
-    case 'flat':
-      return { areaM2: 1, volumeM3: thicknessM }
-    case 'sphere': {
-      const diameterM = shape.outerDiameterM + 2 * thicknessM
-      return { areaM2: Math.PI * diameterM ** 2, volumeM3: (Math.PI / 6) * diameterM ** 3 }
-    }
-    case 'vessel': {
-      const diameterM = shape.outerDiameterM + 2 * thicknessM
-      const headAreaM2 = headOuterAreaM2(shape.heads, shape.outerDiameterM, thicknessM)
-      const headVolumeM3 =
-        shape.heads === 'flat'
-          ? headAreaM2 * thicknessM
-          : (2 / 3) * Math.PI * (shape.outerDiameterM * DOME_RADIUS_PER_DIAMETER + thicknessM) ** 3
-      return {
-        areaM2: Math.PI * diameterM * shape.shellLengthM + 2 * headAreaM2,
-        volumeM3: (Math.PI / 4) * diameterM ** 2 * shape.shellLengthM + 2 * headVolumeM3,
-      }
-    }
   }
 }

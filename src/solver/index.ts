@@ -45,7 +45,8 @@ export {
   wallCapacityJPerMK,
   waterCapacityJPerMK,
 } from './frost.ts'
-export { type FaceShape, grown, wallOf } from './geometry.ts'
+export { type FaceShape, wallOf } from './geometry.ts'
+export { grown } from './grown.ts'
 export { beyondCurveK, notesOf } from './notes.ts'
 export {
   airAt,

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { type FaceShape, grown, wallOf } from '#solver/geometry.ts'
+import { type FaceShape, wallOf } from '#solver/geometry.ts'
+import { grown } from '#solver/grown.ts'
 import type { Layer, Shape } from '#solver/types.ts'
 import { constantConductivity, layersOf, shape, spread } from './arbitraries.ts'
 

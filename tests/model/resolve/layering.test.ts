@@ -5,8 +5,6 @@ import { coldRun, noteCodes, steamRun } from '../../sizing/catalogue.ts'
 import { problemOf } from './problem.ts'
 
 const codes = (values: RunValues): string[] => noteCodes(problemOf(values))
-const textOf = (values: RunValues, code: string): string | undefined =>
-  problemOf(values).notes.find((note) => note.code === code)?.text
 
 const { material: _, ...unlagged } = steamRun
 
