@@ -60,7 +60,8 @@ interface Variation {
 /** What the emissivity of a surface may be: neither none nor more than all. */
 export const EMISSIVITIES = { least: 0.01, most: 1 }
 
-function variations(day: Day, reading: SurveyReading): Variation[] {
+/** Thermometer, air and emissivity, in this order. */
+export function variations(day: Day, reading: SurveyReading): Variation[] {
   const { surfaceTempC, system } = day
   const { least, most } = EMISSIVITIES
   const lowEmissivity = Math.max(least, system.emissivity - reading.emissivity)

@@ -5,6 +5,7 @@ import { settle } from '../build-up.ts'
 import type { Condition, Problem } from '../problem.ts'
 import type { SurveyResult } from '../result.ts'
 import { systemOf } from '../states.ts'
+import { variations } from '../survey.ts'
 import { filmSteps } from './film.ts'
 import { Ledger } from './ledger.ts'
 import { conditionWords } from './state.ts'
@@ -64,18 +65,25 @@ function tellingSection(problem: Problem, system: System, survey: SurveyResult):
     if (wall.faces.length > 1) ledger.given(`Share of the ${side}`, `a_${index + 1}`, share, '')
   })
   ledger.given('Flux on the outer area, mean', 'q', survey.heatFluxWPerM2.value, 'W/m²')
-  off(ledger, 'the flux', 'u_q', survey.heatFluxWPerM2.plusMinus, 'W/m²')
+  uncertaintySteps(ledger, problem, system, survey)
   if (survey.heatLossWPerM !== null || survey.heatLossW !== null) {
     const area = unit === 'm' ? 'm²/m' : 'm²'
     ledger.given('Outer area', 'A', wall.outerAreaM2PerUnit, area)
     ledger.step('Loss of one unit', 'Φ', 'q × A', unit === 'm' ? 'W/m' : 'W')
   }
   if (survey.heatLossW !== null && problem.extent !== null) {
-    ledger.given('Length, area or number', 'l', problem.extent, '')
+    ledger.given(
+      unit === 'm' ? 'Length' : unit === 'm2' ? 'Area' : 'Pieces',
+      'l',
+      problem.extent,
+      unit === 'm' ? 'm' : unit === 'm2' ? 'm²' : '',
+    )
     ledger.step('Loss of the run, without fittings', 'Q', 'Φ × l', 'W', {
       value: survey.heatLossW.value,
     })
-    off(ledger, 'the loss', 'u_Q', survey.heatLossW.plusMinus, 'W')
+    ledger.step('How far that may be off', 'u_Q', 'u_q × A × l', 'W', {
+      value: survey.heatLossW.plusMinus,
+    })
   }
   conductivityLines(ledger, system, survey)
   if (survey.expectedSurfaceC !== null) {
@@ -84,13 +92,36 @@ function tellingSection(problem: Problem, system: System, survey: SurveyResult):
   return ledger.section()
 }
 
-const off = (ledger: Ledger, of: string, symbol: string, value: number, unit: string): number =>
-  ledger.given(
-    `How far ${of} may be off: thermometer, air and emissivity, root of the sum of squares`,
-    symbol,
-    value,
-    unit,
-  )
+/** What the flux would be with each reading as far off as is believed, and the three together. */
+function uncertaintySteps(
+  ledger: Ledger,
+  { survey: reading }: Problem,
+  system: System,
+  survey: SurveyResult,
+): void {
+  if (reading === null) return
+  const day = { system, surfaceTempC: survey.measuredSurfaceC }
+  const readings = ['thermometer', 'air', 'emissivity']
+  const changes = variations(day, reading).map(({ low, high, share }, index) => {
+    const at = index + 1
+    const of = readings[index] ?? 'reading'
+    const fluxOn = (of: typeof low): number => fluxOf(of.system, of.surfaceTempC).heatFluxWPerM2
+    ledger.given(
+      `Flux with the ${of} at the low end of what is believed`,
+      `q_${at}l`,
+      fluxOn(low),
+      'W/m²',
+    )
+    ledger.given(`Flux with the ${of} at the high end`, `q_${at}h`, fluxOn(high), 'W/m²')
+    ledger.given('Share of their difference that is one half width', `w_${at}`, share, '')
+    ledger.step(`What the ${of} changes`, `d_${at}`, `w_${at} × (q_${at}h − q_${at}l)`, 'W/m²')
+    return `d_${at}^2`
+  })
+  ledger.step('How far the flux may be off', 'u_q', `sqrt(${changes.join(' + ')})`, 'W/m²', {
+    value: survey.heatFluxWPerM2.plusMinus,
+    source: 'independent errors: root of the sum of squares',
+  })
+}
 
 function conductivityLines(ledger: Ledger, system: System, survey: SurveyResult): void {
   const { effectiveWPerMK, soundWPerMK } = survey
@@ -112,7 +143,12 @@ function conductivityLines(ledger: Ledger, system: System, survey: SurveyResult)
       const formula = inside === null ? 'q × F / (θ_i − θ_s)' : 'F / ((θ_i − θ_s) / q − a / h_i)'
       ledger.step(words, 'λ', formula, 'W/(m·K)', { value })
     }
-    off(ledger, 'that conductivity', 'u_λ', effectiveWPerMK.plusMinus, 'W/(m·K)')
+    ledger.given(
+      'How far that may be off, worked out from the readings as for the flux',
+      'u_λ',
+      effectiveWPerMK.plusMinus,
+      'W/(m·K)',
+    )
   }
   if (soundWPerMK !== null) {
     ledger.given('Conductivity of the build-up as given', 'λ_n', soundWPerMK, 'W/(m·K)')
