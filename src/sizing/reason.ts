@@ -62,6 +62,11 @@ function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
   if (limit === 'service' && thinner && failed) {
     return `${said(chosen, words)} serves; at ${said(thinner, words)} ${failed.what} would stand at ${against(failed, words)}.`
   }
+  // A code that asks for a thickness is met or not by the thickness itself.
+  if (thinner && failed && failed.unit === 'm') {
+    const asked = words.quantity(failed.bound, failed.unit, 1)
+    return `${said(chosen, words)} meets the ${asked} asked for; ${said(thinner, words)} does not.`
+  }
   // Touch may be judged twice: the chosen rung is shown against the bound that the thinner one failed.
   const own = chosen.limits.filter((result) => result.limit === limit)
   const here = own.find((result) => result.bound === failed?.bound) ?? own[0]
