@@ -8,9 +8,21 @@ const of = (tag: string) => runs.find(({ result }) => result.tag === tag)?.resul
 describe('the demo job', () => {
   it('tells a varied story', () => {
     const governing = new Set(runs.map(({ result }) => result.governing))
-    for (const word of ['money', 'touch', 'loss', 'damp', 'smallest', 'fixed', 'bare', 'unmet']) {
+    const words = ['money', 'touch', 'loss', 'damp', 'frost', 'arrival', 'code']
+    for (const word of [...words, 'smallest', 'fixed', 'bare', 'unmet']) {
       expect(governing).toContain(word)
     }
+  })
+
+  it('shows a vessel, a buried run, fittings, condensate, months, and what a measured surface says', () => {
+    expect(of('MS-611')?.chosen).toMatchObject({ heatLossWPerM: null, fittingsLossW: 0 })
+    expect(of('LH-414')?.notes.map(({ code }) => code)).toContain('buried')
+    expect(of('ST-101')?.chosen?.fittingsLossW).toBeGreaterThan(0)
+    expect(of('ST-101')?.chosen?.condensateKgPerS).toBeGreaterThan(0)
+    const bridge = of('CR-204')?.chosen
+    expect(bridge?.yearlyMeanLossW).not.toBe(bridge?.heatLossW)
+    const survey = of('ST-106')?.survey
+    expect(survey?.effectiveWPerMK?.value).toBeGreaterThan(survey?.soundWPerMK ?? 0)
   })
 
   it('has one bare run that burns, one that cannot meet its limit, and a few that need a look', () => {

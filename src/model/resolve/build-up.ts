@@ -129,13 +129,14 @@ function noteFit(material: Material, thing: Thing | null, findings: Findings): v
   if (!thing) return
   const { shape } = thing
   const upToM = material.notOnDiametersUpToM
-  if (shape.kind === 'pipe' && upToM !== null && shape.outerDiameterM <= upToM) {
+  const isPipe = shape.kind === 'pipe' || shape.kind === 'buried-pipe'
+  if (isPipe && upToM !== null && shape.outerDiameterM <= upToM) {
     findings.note(
       'form-unusual',
       `${material.name} is not used on outside diameters of ${plain(upToM * 1000)} mm or less: choose a section.`,
     )
   }
-  if (shape.kind !== 'pipe' && material.form === 'pipe section') {
+  if (!isPipe && material.form === 'pipe section') {
     findings.note(
       'form-unusual',
       `${material.name} is made for pipes: on this shape a slab or mat is usual.`,
