@@ -32,7 +32,8 @@ const W_M2 = 'W/m²'
 export function filmSteps(ledger: Ledger, at: FaceAt): void {
   const { system, shape, face } = at
   const { around } = system
-  ledger.given('Air', 'θ_a', around.airC, '°C')
+  const isGround = shape.flow === 'ground'
+  ledger.given(isGround ? 'Surface of the ground' : 'Air', 'θ_a', around.airC, '°C')
   surfaceLine(ledger, at)
   const isRadiating = radiates(shape, system.film)
   if (face.closure === 'on-jump') {
@@ -44,7 +45,7 @@ export function filmSteps(ledger: Ledger, at: FaceAt): void {
     )
   } else convectionSteps(ledger, at)
   ledger.step(
-    isRadiating ? 'Flux by convection' : 'Flux to the air or ground',
+    isRadiating ? 'Flux by convection' : isGround ? 'Flux into the ground' : 'Flux to the air',
     'q_c',
     'h_c × (θ_s − θ_a)',
     W_M2,

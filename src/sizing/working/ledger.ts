@@ -66,8 +66,8 @@ export class Ledger {
     if (this.#bySymbol.has(line.symbol)) throw new Error(`${this.#title}: ${line.symbol} twice`)
     const { source = null, validity = null } = about
     // What is given stands as it was given, as far as that is short.
-    const digits =
-      line.formula === null ? Math.max(USUAL_DIGITS, shortest(line.value)) : USUAL_DIGITS
+    const least = Math.max(USUAL_DIGITS, wholeDigits(line.value))
+    const digits = line.formula === null ? Math.max(least, shortest(line.value)) : least
     const whole = { ...line, source, validity, digits }
     this.#lines.push(whole)
     this.#bySymbol.set(line.symbol, whole)
@@ -144,3 +144,11 @@ function shortest(value: number): number {
   }
   return USUAL_DIGITS
 }
+
+/** Up to millions a whole number is printed whole: 101325, not 101330. */
+const WHOLE_TO = 1e7
+
+const wholeDigits = (value: number): number =>
+  Math.abs(value) >= 1 && Math.abs(value) < WHOLE_TO
+    ? Math.floor(Math.log10(Math.abs(value))) + 1
+    : 0

@@ -24,7 +24,7 @@ export function stateSections(state: StateWorking): Section[] {
   const system = systemOf(problem, settled, condition)
   const isBare = settled.layers.length === 0
   const shapes = wallOf(problem.shape, solverLayers(settled)).faces
-  const words = conditionWords(condition, isBare)
+  const words = conditionWords(condition, isBare, problem.shape.kind === 'buried-pipe')
   const sections = solution.faces.flatMap((face, index) => {
     const shape = shapes[index]
     if (!shape) return []
@@ -70,13 +70,15 @@ function facesSection({ title, solution }: StateWorking, words: string): Section
 }
 
 /** "air 28 °C, surroundings 28 °C, wind 0 m/s, medium 170.4 °C, emissivity 0.13" */
-export function conditionWords(condition: Condition, isBare: boolean): string {
+export function conditionWords(condition: Condition, isBare: boolean, isBuried = false): string {
   const { around, mediumC, emissivity, bareEmissivity, sunWPerM2, film } = condition
+  const medium = `medium ${shown(mediumC)} °C`
+  if (isBuried) return `surface of the ground ${shown(around.airC)} °C, ${medium}`
   const parts = [
     `air ${shown(around.airC)} °C`,
     `surroundings ${shown(around.surroundingsC)} °C`,
     `wind ${shown(around.windMPerS)} m/s`,
-    `medium ${shown(mediumC)} °C`,
+    medium,
     `emissivity ${shown(isBare ? bareEmissivity : emissivity)}`,
   ]
   if (sunWPerM2 > 0) parts.push(`sun ${shown(sunWPerM2)} W/m²`)
