@@ -1,4 +1,5 @@
 /** Repeats the lines of a printed section with a calculator that knows only the page. */
+import type { Section } from '#sizing/working/types.ts'
 import { calculate } from './calculator.ts'
 import { numberOf, type PageSection } from './working-page.ts'
 
@@ -36,4 +37,18 @@ export function repeated({ title, lines }: PageSection): Repeated {
     known.set(symbol, printed)
   }
   return { wrong, formulas }
+}
+
+/** Rounding apart, a formula is the program's own: with unrounded numbers it comes to the value much nearer than print. */
+const EXACT = 1e-7
+
+/** Lines whose formula does not come to their value with unrounded numbers, in words. */
+export function inexact({ title, steps }: Section): string[] {
+  return steps.flatMap(({ symbol, formula, inputs, value }) => {
+    if (formula === null) return []
+    const known = new Map(inputs.map((input) => [input.symbol, input.value]))
+    const again = calculate(formula, known)
+    const isExact = Math.abs(again - value) <= Math.max(EXACT * Math.abs(value), NOTHING)
+    return isExact ? [] : [`${title}: ${symbol} = ${formula}: ${again}, not ${value}`]
+  })
 }

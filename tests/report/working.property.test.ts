@@ -7,7 +7,7 @@ import { workingSchema, writeWorkingJson } from '#report/working-schema.ts'
 import { writeWorkingText } from '#report/working-text.ts'
 import { anyValues, usualValues } from '../model/any-values.ts'
 import { index } from '../sizing/catalogue.ts'
-import { repeated } from './repeated.ts'
+import { inexact, repeated } from './repeated.ts'
 import { readPage } from './working-page.ts'
 
 /** A tag and a currency that could be mistaken for lines would mislead the reader of the test, not of the page. */
@@ -19,6 +19,9 @@ function check(values: RunValues): boolean {
   workingSchema.parse(JSON.parse(writeWorkingJson(working)))
   const sections = readPage(writeWorkingText(working))
   expect(sections.flatMap((section) => repeated(section).wrong)).toEqual([])
+  // A balance is found by search, and a drop of next to nothing shows how near.
+  const wrong = working.sections.flatMap(inexact).filter((line) => !line.includes(': q_L = '))
+  expect(wrong).toEqual([])
   return true
 }
 
@@ -29,9 +32,9 @@ describe('the working of any run', () => {
       fc.property(usualValues, (values) => {
         if (check(values)) worked += 1
       }),
-      { seed: 7, numRuns: 400 },
+      { seed: 7, numRuns: 250 },
     )
-    expect(worked).toBeGreaterThan(100)
+    expect(worked).toBeGreaterThan(60)
   })
 
   test('so does that of nonsense that happens to be a run', () => {
@@ -39,7 +42,7 @@ describe('the working of any run', () => {
       fc.property(anyValues, (values) => {
         check(values)
       }),
-      { seed: 8, numRuns: 1000 },
+      { seed: 8, numRuns: 500 },
     )
   })
 })

@@ -6,9 +6,10 @@ import { indexCatalogue, sizeRun, workRun } from '#model/size-run.ts'
 import { parseRunsCsv } from '#report/runs-csv.ts'
 import { writeWorkingText } from '#report/working-text.ts'
 import type { RunResult } from '#sizing/result.ts'
+import type { Working } from '#sizing/working/types.ts'
 import { shippedCatalogue } from '../catalogue/shipped-catalogue.ts'
 import { demoFile } from './demo-runs.ts'
-import { agrees, repeated } from './repeated.ts'
+import { agrees, inexact, repeated } from './repeated.ts'
 import { numberOf, type PageSection, readPage } from './working-page.ts'
 import { workingRuns } from './working-runs.ts'
 
@@ -20,10 +21,10 @@ function demoRuns(): readonly RunValues[] {
   return read.runs
 }
 
-function textOf(values: RunValues): string {
+function workingOf(values: RunValues): Working {
   const working = workRun(values, {}, index)
   if (!working) throw new Error(JSON.stringify(sizeRun(values, {}, index)))
-  return writeWorkingText(working)
+  return working
 }
 
 function resultOf(values: RunValues): RunResult {
@@ -41,7 +42,8 @@ function printed(sections: readonly PageSection[], title: string, symbol: string
 const runs = [...demoRuns(), ...workingRuns]
 
 describe.each(runs)('the working of $tag', (values) => {
-  const text = textOf(values)
+  const working = workingOf(values)
+  const text = writeWorkingText(working)
   const sections = readPage(text)
   const result = resultOf(values)
   const { chosen, bare } = result
@@ -54,6 +56,10 @@ describe.each(runs)('the working of $tag', (values) => {
     const all = sections.map(repeated)
     expect(all.flatMap(({ wrong }) => wrong)).toEqual([])
     expect(all.reduce((sum, { formulas }) => sum + formulas, 0)).toBeGreaterThan(12)
+  })
+
+  test('shows formulas that are the program’s own', () => {
+    expect(working.sections.flatMap(inexact)).toEqual([])
   })
 
   test('fits a page and hides nothing', () => {
