@@ -68,6 +68,7 @@ const works: readonly Work[] = [
     name: 'Public text with a reading of the figures of ISO 13732-1',
     begins: ['figure reading of ISO 13732-1'],
   },
+  { name: 'Psychrometric library of the npm registry', begins: ['psychrolib 1.1.1'] },
   { name: 'CODATA 2018', begins: ['CODATA 2018'] },
   { name: 'NIST SP 811 (2008)', begins: ['NIST SP 811'] },
   { name: 'ISO 80000-5:2007', begins: ['ISO 80000-5'] },
