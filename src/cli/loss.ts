@@ -19,10 +19,10 @@ export async function loss(request: ListRequest): Promise<Outcome> {
     forFile: {
       json: () => jsonTexts(lines),
       csv: () => writeLossCsv(lines),
-      txt: () => [writeLossTable(lines, { units, width: null })],
+      txt: () => [writeLossTable(lines, units)],
     },
     json: () => jsonTexts(lines),
-    terminal: () => [writeLossTable(lines, { units, width: process.stdout.columns ?? null })],
+    terminal: () => [writeLossTable(lines, units)],
     summary: () => lossCountWords(totalLoss(lines.map((line) => line.loss))),
   })
   if (notWritten) return { end: 'badInput', problems: [notWritten] }

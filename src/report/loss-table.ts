@@ -7,16 +7,8 @@ import { lossColumns } from './loss-columns.ts'
 import type { LossLine } from './loss-csv.ts'
 import { textTable } from './text-table.ts'
 
-export interface LossTableOptions {
-  readonly units: UnitSystem
-  /** Columns of the terminal; null where the text is not for one. */
-  readonly width: number | null
-}
-
-export function writeLossTable(
-  lines: Iterable<LossLine>,
-  { units, width }: LossTableOptions,
-): string {
+/** As wide as it comes out: its last column is a figure, which is not to be cut. */
+export function writeLossTable(lines: Iterable<LossLine>, units: UnitSystem): string {
   const all = [...lines]
   const losses = all.map(({ loss }) => loss)
   const said = losses.map(({ tag, notes }) => ({
@@ -24,7 +16,7 @@ export function writeLossTable(
     notes: notes.map(({ text }) => (units === 'si' ? text : restated(text, units))),
   }))
   return inParts([
-    textTable(lossColumns(all, units), width),
+    textTable(lossColumns(all, units), null),
     [lossCountWords(totalLoss(losses))],
     noteLines(said),
     cautionLines(),
