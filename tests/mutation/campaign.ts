@@ -2,48 +2,90 @@ import { mkdir, writeFile } from 'node:fs/promises'
 import { join, relative } from 'node:path'
 import { Stryker } from '@stryker-mutator/core'
 import { program } from '../runner/tool.ts'
-import { type Folder, folders, isFolder, putUnderTest } from './folders.ts'
+import { folders, type Part, parts, partsOf, putUnderTest } from './folders.ts'
 import { isEnough, type Mutant, survivorsText, tallyLine, tallyOf } from './tally.ts'
 
 /** Kept out of git: what a campaign leaves behind, also to start the next one from. */
 const RESULTS = 'mutation-results'
+/** Given where other work keeps the machine busy, so that a slow trial does not count as one without end. */
+const BUSY = '--busy'
 
-/** Mutates the named folders of src, or all, one after the other; the exit code. */
-export async function mutate(words: readonly string[]): Promise<number> {
-  const unknown = words.filter((word) => !isFolder(word))
+/**
+ * A mutant never ends that runs `timeoutFactor` times as long as its tests usually do, and so many milliseconds.
+ */
+const patience = { timeoutFactor: 2, timeoutMS: 5_000 }
+const busyPatience = { timeoutFactor: 4, timeoutMS: 20_000 }
+
+/** Mutates the named folders of src or parts of them, or all, one after the other; the exit code. */
+export async function mutate(given: readonly string[]): Promise<number> {
+  const words = given.filter((word) => word !== BUSY)
+  const unknown = words.filter((word) => partsOf(word).length === 0)
   if (unknown.length > 0) {
     console.error(
-      `There is no folder ${unknown.join(', ')} to mutate; there are ${folders.join(', ')}. ` +
-        'Example: npm run mutate -- solver',
+      `There is no ${unknown.join(', ')} to mutate; there are the folders ${folders.join(', ')} and the parts ` +
+        `${parts.map(({ name }) => name).join(', ')}. Example: npm run mutate -- solver ${BUSY}`,
     )
     return 2
   }
-  const chosen = words.length > 0 ? folders.filter((folder) => words.includes(folder)) : folders
+  const chosen = words.length > 0 ? words.flatMap(partsOf) : parts
   process.chdir(program)
-  const lines: string[] = []
-  let isAllEnough = true
-  for (const folder of chosen) {
-    const startMs = performance.now()
-    const mutants = await mutantsOf(folder)
-    const survivors = join(RESULTS, folder, 'survivors.txt')
-    await writeFile(survivors, survivorsText(mutants))
-    const tally = tallyOf(mutants)
-    const minutes = ((performance.now() - startMs) / 60_000).toFixed(1)
-    lines.push(`${tallyLine(folder, tally)} (${minutes} min; survivors in ${survivors})`)
-    isAllEnough &&= isEnough(tally)
+  const trials: Trial[] = []
+  for (const part of parts.filter((any) => chosen.includes(any))) {
+    trials.push(await trialOf(part, given.includes(BUSY)))
   }
-  console.log(`\n${lines.join('\n')}`)
-  return isAllEnough ? 0 : 1
+  const report = reportOf(trials)
+  console.log(`\n${report.lines.join('\n')}`)
+  return report.isEnough ? 0 : 1
 }
 
-async function mutantsOf(folder: Folder): Promise<Mutant[]> {
-  const results = join(RESULTS, folder)
+interface Trial {
+  readonly part: Part
+  readonly mutants: readonly Mutant[]
+  readonly minutes: number
+}
+
+async function trialOf(part: Part, isBusy: boolean): Promise<Trial> {
+  const startMs = performance.now()
+  const mutants = await mutantsOf(part, isBusy)
+  await writeFile(survivorsOf(part), survivorsText(mutants))
+  return { part, mutants, minutes: (performance.now() - startMs) / 60_000 }
+}
+
+const resultsOf = ({ name }: Part): string => join(RESULTS, name.replace('/', '-'))
+const survivorsOf = (part: Part): string => join(resultsOf(part), 'survivors.txt')
+
+/** A line for each part, and for each folder of several parts one for all of them: that is the score that counts. */
+function reportOf(trials: readonly Trial[]): { lines: string[]; isEnough: boolean } {
+  const lines: string[] = []
+  let isAllEnough = true
+  for (const folder of folders) {
+    const own = trials.filter(({ part }) => part.folder === folder)
+    if (own.length === 0) continue
+    for (const trial of own) lines.push(`${lineOf(trial)}; survivors in ${survivorsOf(trial.part)}`)
+    const mutants = own.flatMap((trial) => trial.mutants)
+    const minutes = own.reduce((sum, trial) => sum + trial.minutes, 0)
+    if (own.length > 1) lines.push(lineOf({ part: { name: folder }, mutants, minutes }))
+    isAllEnough &&= isEnough(tallyOf(mutants))
+  }
+  return { lines, isEnough: isAllEnough }
+}
+
+const lineOf = ({
+  part,
+  mutants,
+  minutes,
+}: Omit<Trial, 'part'> & { part: Pick<Part, 'name'> }): string =>
+  `${tallyLine(part.name, tallyOf(mutants))} (${minutes.toFixed(1)} min)`
+
+async function mutantsOf(part: Part, isBusy: boolean): Promise<Mutant[]> {
+  const results = resultsOf(part)
   await mkdir(results, { recursive: true })
-  putUnderTest(folder)
+  putUnderTest(part)
   const campaign = new Stryker({
-    mutate: [`src/${folder}/**/*.ts`],
+    mutate: part.sources.map(inSrc),
     testRunner: 'vitest',
-    vitest: { configFile: 'tests/mutation/vitest.config.ts' },
+    // A part says itself which tests examine it.
+    vitest: { configFile: 'tests/mutation/vitest.config.ts', related: false },
     coverageAnalysis: 'perTest',
     concurrency: 2,
     incremental: true,
@@ -53,10 +95,11 @@ async function mutantsOf(folder: Folder): Promise<Mutant[]> {
     ignorePatterns: ['**', '!src/**', '!tests/**', '!db/**', '!package.json', '!tsconfig.json'],
     reporters: [process.stdout.isTTY ? 'progress' : 'progress-append-only'],
     allowConsoleColors: false,
-    // A mutant that runs twice as long as its tests usually do, and five seconds, never ends.
-    timeoutFactor: 2,
-    timeoutMS: 5_000,
+    ...(isBusy ? busyPatience : patience),
   })
   const mutants = await campaign.runMutationTest()
   return mutants.map((mutant) => ({ ...mutant, fileName: relative(program, mutant.fileName) }))
 }
+
+const inSrc = (glob: string): string =>
+  glob.startsWith('!') ? `!src/${glob.slice(1)}` : `src/${glob}`

@@ -1,31 +1,117 @@
-/** What can be mutated: the folders of src that only calculate, with the tests that have to notice. */
+/**
+ * What can be mutated: the folders of src that only calculate, in parts, each with the test files that examine it and
+ * no others. A survivor runs every test that reaches it, so that whole solves over a formula with tests of its own
+ * would take most of the hour; so would the second implementations in `independent/`, which `npm test` has.
+ */
 export const folders = ['solver', 'sizing', 'money', 'touch'] as const
 export type Folder = (typeof folders)[number]
 
-export const isFolder = (word: string): word is Folder => folders.some((folder) => folder === word)
+export interface Part {
+  readonly folder: Folder
+  /** `money`, or `solver/heat` where a folder has several. */
+  readonly name: string
+  /** Globs under src; a leading exclamation mark takes away. */
+  readonly sources: readonly string[]
+  /** Globs under tests. */
+  readonly tests: readonly string[]
+}
 
-export function testsOf(folder: Folder): {
-  readonly include: readonly string[]
-  readonly exclude: readonly string[]
-} {
+const files = (folder: string, names: readonly string[], ending: string): string[] =>
+  names.map((name) => `${folder}/${name}${ending}`)
+
+/** Sources with a test file of the same name each, and any other tests that reach them on short ways. */
+function ofOneName(
+  folder: Folder,
+  name: string,
+  names: readonly string[],
+  others: readonly string[] = [],
+): Part {
   return {
-    include: [`tests/${folder}/**/*.test.ts`],
-    // A survivor runs every test that reaches it, so the second implementations, which solve whole fields cell by
-    // cell, would take more of the hour than all the others together. `npm test` has them.
-    exclude: [`tests/${folder}/independent/**`],
+    folder,
+    name: `${folder}/${name}`,
+    sources: files(folder, names, '.ts'),
+    tests: files(folder, [...names, ...others], '{,.*}.test.ts'),
   }
 }
 
-/** Told to the processes that run the tests by an environment variable, since they read a configuration of their own. */
-const VARIABLE = 'LAGWRIGHT_MUTATED_FOLDER'
+const insideFolder = (folder: Folder, name: string, others: readonly string[] = []): Part => ({
+  folder,
+  name: `${folder}/${name}`,
+  sources: [`${folder}/${name}/**/*.ts`],
+  tests: [`${folder}/${name}/**/*.test.ts`, ...others],
+})
 
-export function putUnderTest(folder: Folder): void {
-  process.env[VARIABLE] = folder
+/** What the other parts of the folder have not taken. */
+const rest = (name: string, tests: readonly string[], others: readonly Part[]): Part => {
+  const folder = others[0]?.folder
+  if (!folder) throw new Error(`${name} is the rest of nothing`)
+  const taken = others.flatMap(({ sources }) => sources).map((glob) => `!${glob}`)
+  return { folder, name, sources: [`${folder}/**/*.ts`, ...taken], tests }
 }
 
-export function folderUnderTest(): Folder {
-  const word = process.env[VARIABLE] ?? ''
-  if (!isFolder(word))
-    throw new Error(`${VARIABLE} is "${word}"; it is one of ${folders.join(', ')}.`)
-  return word
+const whole = (folder: Folder): Part => ({
+  folder,
+  name: folder,
+  sources: [`${folder}/**/*.ts`],
+  tests: [`${folder}/**/*.test.ts`],
+})
+
+const solver: readonly Part[] = [
+  insideFolder('solver', 'convection', ['solver/pedigrees.test.ts']),
+  insideFolder('solver', 'properties'),
+  ofOneName(
+    'solver',
+    'small',
+    ['corner', 'correlation', 'flow', 'frost', 'ground', 'radiation', 'sky', 'sources'],
+    ['pedigrees'],
+  ),
+  ofOneName('solver', 'layers', ['conductivity', 'geometry', 'root'], ['solve.balance']),
+]
+
+const sizing: readonly Part[] = [
+  insideFolder('sizing', 'working', ['report/working.test.ts']),
+  ofOneName(
+    'sizing',
+    'limits',
+    [
+      'arrival',
+      'code',
+      'equilibrium',
+      'frost',
+      'limits',
+      'passes-limit',
+      'service',
+      'space',
+      'states',
+    ],
+    ['size'],
+  ),
+  ofOneName('sizing', 'inverse', ['moved', 'sensitivity', 'sensitivity-moves', 'survey']),
+]
+
+export const parts: readonly Part[] = [
+  ...solver,
+  rest('solver/heat', ['solver/{film,from-surface,solve}{,.*}.test.ts'], solver),
+  ...sizing,
+  rest('sizing/rungs', ['sizing/*.test.ts'], sizing),
+  whole('money'),
+  whole('touch'),
+]
+
+/** The parts that a word on the command line means: one, or all of a folder. */
+export const partsOf = (word: string): readonly Part[] =>
+  parts.filter(({ folder, name }) => word === folder || word === name)
+
+/** Told to the processes that run the tests by an environment variable, since they read a configuration of their own. */
+const VARIABLE = 'LAGWRIGHT_MUTATED_PART'
+
+export function putUnderTest({ name }: Part): void {
+  process.env[VARIABLE] = name
+}
+
+export function partUnderTest(): Part {
+  const name = process.env[VARIABLE] ?? ''
+  const part = parts.find((any) => any.name === name)
+  if (!part) throw new Error(`${VARIABLE} is "${name}", which is no part to mutate.`)
+  return part
 }

@@ -56,7 +56,7 @@ export function tallyLine(folder: string, tally: Tally): string {
   ]
   const score = scorePercent === null ? 'no mutants' : percent(scorePercent)
   const verdict = isEnough(tally) ? '' : `, BELOW ${LEAST_SCORE_PERCENT} %`
-  return `${folder.padEnd(8)} ${parts.join(', ')}: ${score}${verdict}`
+  return `${folder.padEnd(18)} ${parts.join(', ')}: ${score}${verdict}`
 }
 
 /** The mutants that no test noticed, in the order of the source, each with what stood there instead. */
