@@ -29,7 +29,7 @@ export function verdicts(ledger: Ledger, name: LimitName, limits: readonly Limit
 export function verdict(ledger: Ledger, limit: LimitResult, ending: string): void {
   const { value, bound, unit, rule, pass, what, condition } = limit
   ledger.given(`Found at the ${condition} condition: ${what}`, `X${ending}`, value, unit)
-  ledger.given(`Bound, ${rule}`, `B${ending}`, bound, unit)
+  ledger.given(`Bound, ${rule}`, `B${ending}`, bound, unit, { source: boundSource(limit) })
   ledger.step(
     pass ? 'Room to spare: the limit is met' : 'Room to spare: the limit is not met',
     `M${ending}`,
@@ -37,6 +37,12 @@ export function verdict(ledger: Ledger, limit: LimitResult, ending: string): voi
     unit,
   )
 }
+
+/** A surface passes only below the burn curve, and up to a stated temperature. */
+const boundSource = ({ limit, rule }: LimitResult): string | null =>
+  limit === 'touch' && rule === 'below'
+    ? 'lower curve of ISO 13732-1 by surface and contact time, straight in the logarithm of time'
+    : null
 
 const HYLAND_WEXLER = sources.hylandWexler1983
 
