@@ -1,9 +1,9 @@
-import { mkdir, writeFile } from 'node:fs/promises'
+import { mkdir, readFile, writeFile } from 'node:fs/promises'
 import { join, relative } from 'node:path'
 import { Stryker } from '@stryker-mutator/core'
 import { program } from '../runner/tool.ts'
 import { folders, type Part, parts, partsOf, putUnderTest } from './folders.ts'
-import { isEnough, type Mutant, survivorsText, tallyLine, tallyOf } from './tally.ts'
+import { isEnough, isSurvivor, type Mutant, survivorsText, tallyLine, tallyOf } from './tally.ts'
 
 /** Kept out of git: what a campaign leaves behind, also to start the next one from. */
 const RESULTS = 'mutation-results'
@@ -79,7 +79,9 @@ const lineOf = ({
 
 async function mutantsOf(part: Part, isBusy: boolean): Promise<Mutant[]> {
   const results = resultsOf(part)
+  const former = join(results, 'incremental.json')
   await mkdir(results, { recursive: true })
+  await forgetSurvivors(former)
   putUnderTest(part)
   const campaign = new Stryker({
     mutate: part.sources.map(inSrc),
@@ -89,7 +91,7 @@ async function mutantsOf(part: Part, isBusy: boolean): Promise<Mutant[]> {
     coverageAnalysis: 'perTest',
     concurrency: 2,
     incremental: true,
-    incrementalFile: join(results, 'incremental.json'),
+    incrementalFile: former,
     tempDirName: join(results, 'sandbox'),
     // What the tests of these folders need, and nothing else, is copied.
     ignorePatterns: ['**', '!src/**', '!tests/**', '!db/**', '!package.json', '!tsconfig.json'],
@@ -99,6 +101,20 @@ async function mutantsOf(part: Part, isBusy: boolean): Promise<Mutant[]> {
   })
   const mutants = await campaign.runMutationTest()
   return mutants.map((mutant) => ({ ...mutant, fileName: relative(program, mutant.fileName) }))
+}
+
+/**
+ * Takes the mutants that no test noticed out of what a former campaign left, so that they are tried again: of those in
+ * what a module computes once when it loads, a new test would otherwise never get to see any.
+ */
+async function forgetSurvivors(file: string): Promise<void> {
+  const text = await readFile(file, 'utf8').catch(() => null)
+  if (text === null) return
+  const former = JSON.parse(text) as { files: Record<string, { mutants: Mutant[] }> }
+  for (const one of Object.values(former.files)) {
+    one.mutants = one.mutants.filter((mutant) => !isSurvivor(mutant))
+  }
+  await writeFile(file, JSON.stringify(former))
 }
 
 const inSrc = (glob: string): string =>

@@ -65,7 +65,12 @@ const solver: readonly Part[] = [
     ['corner', 'correlation', 'flow', 'frost', 'ground', 'radiation', 'sky', 'sources'],
     ['pedigrees'],
   ),
-  ofOneName('solver', 'layers', ['conductivity', 'geometry', 'root'], ['solve.balance']),
+  ofOneName(
+    'solver',
+    'layers',
+    ['conductivity', 'geometry', 'grown', 'heads', 'root'],
+    ['solve.balance'],
+  ),
 ]
 
 const sizing: readonly Part[] = [

@@ -59,10 +59,13 @@ export function tallyLine(folder: string, tally: Tally): string {
   return `${folder.padEnd(18)} ${parts.join(', ')}: ${score}${verdict}`
 }
 
+export const isSurvivor = ({ status }: Mutant): boolean =>
+  status === 'Survived' || status === 'NoCoverage'
+
 /** The mutants that no test noticed, in the order of the source, each with what stood there instead. */
 export function survivorsText(mutants: readonly Mutant[]): string {
   return mutants
-    .filter(({ status }) => status === 'Survived' || status === 'NoCoverage')
+    .filter(isSurvivor)
     .toSorted(
       (a, b) =>
         a.fileName.localeCompare(b.fileName, 'en') ||
