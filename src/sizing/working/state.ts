@@ -39,7 +39,8 @@ export function stateSections(state: StateWorking): Section[] {
     const film = new Ledger(`${title}: outer film${of}`, words)
     filmSteps(film, at)
     if (isBare && system.insideFilmWPerM2K === null) return [film.section()]
-    const layers = new Ledger(`${title}: through the layers${of}`, words)
+    const through = isBare ? 'through the film inside' : 'through the layers'
+    const layers = new Ledger(`${title}: ${through}${of}`, words)
     if (face.closure === 'steep') {
       layers.say(
         'The conductivity falls so steeply with temperature that the balance did not close: do not rely on these lines.',
