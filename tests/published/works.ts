@@ -69,6 +69,14 @@ const works: readonly Work[] = [
     begins: ['figure reading of ISO 13732-1'],
   },
   { name: 'Psychrometric library of the npm registry', begins: ['psychrolib 1.1.1'] },
+  {
+    name: 'Fundamentals Handbook, Heat Transfer, of the US Department of Energy',
+    begins: ['US Department of Energy, Fundamentals Handbook, Heat Transfer'],
+  },
+  {
+    name: 'Exercise sheets of universities, with their answers',
+    begins: ['university exercise'],
+  },
   { name: 'CODATA 2018', begins: ['CODATA 2018'] },
   { name: 'NIST SP 811 (2008)', begins: ['NIST SP 811'] },
   { name: 'ISO 80000-5:2007', begins: ['ISO 80000-5'] },
@@ -92,7 +100,12 @@ const works: readonly Work[] = [
     name: 'Compound-interest tables of engineering economy',
     begins: ['compound-interest tables'],
   },
-  textbook('Çengel, Heat and Mass Transfer', 'Çengel'),
+  textbook('Çengel, Cimbala and Turner, Fundamentals of Thermal-Fluid Sciences', 'Çengel, Cimbala'),
+  // After the book above, whose beginning is longer.
+  {
+    name: 'Çengel, Heat and Mass Transfer',
+    begins: ['Çengel, Heat and Mass Transfer', 'Çengel'],
+  },
   textbook('Coulson and Richardson, Chemical Engineering, volume 1', 'Coulson and Richardson'),
   textbook('Dutta, Heat Transfer', 'Dutta'),
   textbook('Gavhane, Heat Transfer', 'Gavhane'),
