@@ -77,6 +77,34 @@ const works: readonly Work[] = [
     name: 'Exercise sheets of universities, with their answers',
     begins: ['university exercise'],
   },
+  {
+    name: 'Fishenden and Saunders, An Introduction to Heat Transfer',
+    begins: ['Fishenden and Saunders'],
+  },
+  {
+    name: "Mechanical Engineer's Data Handbook",
+    begins: ["Mechanical Engineer's Data Handbook"],
+  },
+  {
+    name: "Mechanical Engineers' Handbook, volume 4",
+    begins: ["Mechanical Engineers' Handbook"],
+  },
+  {
+    name: 'Carroll, Lo and Stiel 1968, conductivity of gaseous air',
+    begins: ['Carroll, Lo and Stiel 1968'],
+  },
+  { name: 'Book of Engineering', begins: ['Book of Engineering'] },
+  { name: 'IAPWS R14-08, sublimation and melting of ice', begins: ['IAPWS R14-08'] },
+  {
+    name: 'Public table of the vapour pressure of water',
+    begins: ['public table of the vapour pressure of water'],
+  },
+  { name: 'Manual of a hygrometer', begins: ["hygrometer's manual"] },
+  { name: 'Climate table of humidity and dew point', begins: ['climate table'] },
+  {
+    name: 'Engineering handbook of the web, heat losses of pipes',
+    begins: ['engineering handbook of the web'],
+  },
   { name: 'CODATA 2018', begins: ['CODATA 2018'] },
   { name: 'NIST SP 811 (2008)', begins: ['NIST SP 811'] },
   { name: 'ISO 80000-5:2007', begins: ['ISO 80000-5'] },
