@@ -17,6 +17,7 @@ import {
   simplifiedWindOnWall,
 } from '#solver/convection/simplified.ts'
 import { nusseltSphere, nusseltSphereInWind } from '#solver/convection/sphere.ts'
+import { outOfRange } from '#solver/correlation.ts'
 import { clearSky } from '#solver/sky.ts'
 import { calculate } from '../report/calculator.ts'
 
@@ -246,4 +247,22 @@ test('each simplified formula names the number that decides between its branches
     'vD in m²/s',
   ])
   expect(numbers.map(({ value }) => value)).toEqual([240, 240, 6, 6])
+})
+
+test('what left its range is named in words, with its unit', () => {
+  const sentences = [
+    ...outOfRange(nusseltPlateInWind, { reynolds: 2e8, prandtl: 70 }),
+    ...outOfRange(simplifiedFreePipe, { differenceK: 150, diameterM: 0.1 }),
+    ...outOfRange(simplifiedWindOnPipe, { windMPerS: 40, diameterM: 0.1 }),
+    ...outOfRange(clearSky, { airC: 50 }),
+  ]
+  expect(sentences.map((text) => /: (.*) is outside its range (.*);/.exec(text)?.slice(1))).toEqual(
+    [
+      ['Reynolds number 200000000', '0 to 100000000'],
+      ['Prandtl number 70', '0.6 to 60'],
+      ['temperature difference in K 150', '0 to 100'],
+      ['wind in m/s 40', '0 to 30'],
+      ['air temperature in °C 50', '-10 to 40'],
+    ],
+  )
 })

@@ -22,6 +22,19 @@ function expectSeen(seen: readonly number[], expected: readonly number[]): void 
   }
 }
 
+/** Straight from each point to the next. */
+const straight =
+  (points: readonly (readonly [x: number, value: number])[]) =>
+  (x: number): number => {
+    const after = Math.max(
+      1,
+      points.findIndex(([at]) => x <= at),
+    )
+    const [x0, f0] = points[after - 1] ?? [0, 0]
+    const [x1, f1] = points[after] ?? [1, 0]
+    return f0 + ((x - x0) / (x1 - x0)) * (f1 - f0)
+  }
+
 const step = (at: number) => (x: number) => (x <= at ? -1 : 1)
 
 describe('bracketedRoot', () => {
@@ -52,6 +65,39 @@ describe('bracketedRoot', () => {
   test('halves the bracket where the parabola cannot be trusted', () => {
     const { seen } = watched((x) => Math.cbrt(x) - 1, between(0, 8))
     expectSeen(seen, [8, 0, 4, 2])
+  })
+
+  // Steep between 0.05 and 0.1, so that 0.05 is half of the way to 0 with 0.158 of the rise left; (1 − 0.158)² is more
+  // than a half, and the parabola is not trusted from the other side.
+  test('nor is it where the curve bends the other way', () => {
+    const f = straight([
+      [0, -0.1],
+      [0.05, 0.05],
+      [0.1, 0.85],
+      [1, 0.9],
+    ])
+    expectSeen(watched(f, between(0, 1)).seen, [1, 0, 0.1, 0.05, 0.025])
+  })
+
+  // The parabola would lead from 0.5 by a hundredth of the bracket's 0.5; half of the width asked for is 0.05.
+  test('goes at least half of the width asked for', () => {
+    const f = straight([
+      [0, -1],
+      [0.5, 0.01],
+      [1, 1],
+    ])
+    expectSeen(watched(f, between(0, 1, { width: 0.1, value: 0 })).seen, [1, 0, 0.5, 0.45])
+  })
+
+  // The chord leads to 1/51; from there the parabola would go 0.93 of the way to 0, nearer than half of the width.
+  test('and stays as far from the other end', () => {
+    const f = straight([
+      [0, -0.02],
+      [1 / 51, 0.1],
+      [1, 1],
+    ])
+    const { seen } = watched(f, between(0, 1, { width: 0.5 / 51, value: 0 }))
+    expectSeen(seen, [1, 0, 1 / 51, 0.25 / 51])
   })
 
   test('gives the end with the smaller value, and the other one beside it', () => {
@@ -105,9 +151,9 @@ describe('risingRoot', () => {
     expect(asked).toEqual([0.9])
   })
 
-  // From (4, 1) the slope ½ leads to 2, the secant from there to 2 − √2, the parabola through all three to 1.
+  // From (4, 2) the slope 1 leads to 2, the secant from there to 2 − √2, the parabola through all three to 1.
   test('then the parabola through three points', () => {
-    const { seen, root } = watched((x) => Math.sqrt(x) - 1, from(4, 0.5, 0, 16))
+    const { seen, root } = watched((x) => 2 * (Math.sqrt(x) - 1), from(4, 1, 0, 16))
     expectSeen(seen, [4, 2, 2 - Math.SQRT2, 1])
     expect(root.evaluations).toBe(4)
   })
@@ -131,13 +177,16 @@ describe('risingRoot', () => {
   })
 
   // 1 at 1, 0.9 at 0.9, and from there on nearly flat: the secant leads to 0, where the value has hardly fallen either.
+  // The parabola through all three would lead to −36.
   test('two steps without gain are answered with the middle of the bracket', () => {
-    const f = (x: number) => {
-      if (x >= 0.9) return x
-      return x >= 0 ? 0.8 + x / 9 : 0.8 + 1.6 * x
-    }
-    const { seen, root } = watched(f, from(1, 10, -1))
-    expectSeen(seen, [1, 0.9, 0, -0.5])
+    const f = straight([
+      [-100, -0.8],
+      [0, 0.8],
+      [0.9, 0.9],
+      [1, 1],
+    ])
+    const { seen, root } = watched(f, from(1, 10, -100))
+    expectSeen(seen, [1, 0.9, 0, -50])
     expect(root.evaluations).toBe(4)
   })
 
