@@ -71,6 +71,21 @@ describe('design coefficients of still indoor air', () => {
         within: { fraction: 0.1, because: 'one value for every size and temperature' },
       },
       {
+        from: `${from}, galvanised steel`,
+        given: { emissivity: 0.26 },
+        printed: '6.3',
+        within: { fraction: 0.1, because: 'one value for every size and temperature' },
+      },
+      {
+        from: `${from}, planished`,
+        given: { emissivity: 0.5 },
+        printed: '8.0',
+        within: {
+          fraction: 0.1,
+          because: 'one value for every size and temperature; "medium emissivity" is taken as 0.5',
+        },
+      },
+      {
         from: `${from}, bright`,
         given: { emissivity: 0.1 },
         printed: '5.7',

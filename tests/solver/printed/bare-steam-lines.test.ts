@@ -2,7 +2,7 @@
 import { describe } from 'vitest'
 import { solve } from '#solver/solve.ts'
 import { type PublishedRow, published } from '../../published.ts'
-import { lying, plainFilm, still } from '../systems.ts'
+import { constant, lying, plainFilm, still } from '../systems.ts'
 
 interface Line {
   readonly outerDiameterM: number
@@ -77,4 +77,28 @@ describe('an engineering handbook of the web', () => {
     })),
   )
   published(lossWPerM, rows)
+})
+
+describe('what an inch of insulation saves', () => {
+  // The handbook says no more than that: indoors, a pipe with steam of 175 °C, 25 mm of insulation.
+  const ratio = (outerDiameterM: number): number => {
+    const bare: Line = { outerDiameterM, steamC: 175, airC: 25, emissivity: 0.8 }
+    const lagged = solve({
+      ...plainFilm,
+      shape: lying(outerDiameterM),
+      layers: [constant(0.025, 0.05)],
+      mediumC: bare.steamC,
+      around: still(bare.airC),
+    })
+    return lossWPerM(bare) / (lagged.heatLossWPerM ?? Number.NaN)
+  }
+  published(
+    ratio,
+    [0.0603, 0.1143, 0.1683].map((given) => ({
+      from: 'ASHRAE Handbook Fundamentals 2021, ch. 23, section 3, bare to 25 mm of insulation',
+      given,
+      printed: '8',
+      within: { absolute: 1, because: 'a round figure, without pipe and conductivity (here 0.05)' },
+    })),
+  )
 })
