@@ -2,7 +2,7 @@
 import { AxeBuilder } from '@axe-core/playwright'
 import type { Page } from '@playwright/test'
 import { expect, test } from './fixture.ts'
-import { paste } from './window.ts'
+import { cell, paste } from './window.ts'
 
 async function violations(page: Page): Promise<string[]> {
   const { violations: found } = await new AxeBuilder({ page }).analyze()
@@ -15,6 +15,21 @@ const screens: readonly { readonly name: string; readonly go: (page: Page) => Pr
     name: 'the take-off and the form',
     go: async (page) => {
       await page.getByText('Take-off', { exact: true }).click()
+      await page.getByText('Inputs', { exact: true }).click()
+    },
+  },
+  {
+    name: 'a survey and what moves the answer',
+    go: async (page) => {
+      await cell(page, 'ST-106', 'description').click()
+      await expect(page.getByRole('table', { name: 'As measured' })).toBeVisible()
+      await page.getByRole('tab', { name: 'Sensitivity' }).click()
+    },
+  },
+  {
+    name: 'the form of a buried run',
+    go: async (page) => {
+      await cell(page, 'LH-414', 'description').click()
       await page.getByText('Inputs', { exact: true }).click()
     },
   },

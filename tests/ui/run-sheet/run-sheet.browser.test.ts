@@ -215,6 +215,70 @@ describe('special cases', () => {
     await expect.element(ladder).toHaveAttribute('aria-valuemax', String(others + 1))
   })
 
+  test('a measured surface: what it says, how far it may be off, and what sound lagging would show', async () => {
+    const values = demoRun('ST-106')
+    await render(RunSheet, sheetOf(values))
+    const found = page.getByRole('table', { name: 'As measured' })
+    const survey = resultOf(values).survey
+    await expect
+      .element(found.getByRole('row', { name: /^Surface, measured/ }))
+      .toHaveTextContent('58.0')
+    await expect.element(found.getByRole('row', { name: /^Heat flux/ })).toHaveTextContent('±')
+    await expect
+      .element(found.getByRole('row', { name: /^Conducts/ }))
+      .toHaveTextContent(`${survey?.soundWPerMK?.toFixed(3)} W/mK if sound`)
+  })
+
+  test('a vessel: loss and cost are those of the whole', async () => {
+    await render(
+      RunSheet,
+      sheetOf({ ...demoRun('MS-611'), fuel: 'electricity', hoursPerYear: 8000 }),
+    )
+    await expect.element(page.getByText(/vessel, shell 4.2/)).toBeVisible()
+    await expect.element(page.getByRole('img', { name: /^Section to scale: vessel/ })).toBeVisible()
+    await expect.element(page.getByText(/Life-cycle cost, each/)).toBeInTheDocument()
+    await expect.element(page.getByRole('columnheader', { name: /^Loss\s*W$/ })).toBeVisible()
+  })
+
+  test('a buried run: the ground over it, and no hot day', async () => {
+    await render(RunSheet, sheetOf(demoRun('LH-414')))
+    await expect
+      .element(page.getByRole('img', { name: /buried, 0\.80\sm to the axis/ }))
+      .toBeVisible()
+    await expect.element(page.getByText('Surface, hot day')).not.toBeInTheDocument()
+    await expect.element(page.getByText('Arrives at')).toBeVisible()
+    await expect
+      .element(page.getByRole('table', { name: 'Limits at this thickness' }))
+      .toHaveTextContent(/Arrival[\s\S]*at most 1\sK/)
+  })
+
+  test('frost: hours to freeze, and that lagging only delays it', async () => {
+    await render(RunSheet, sheetOf(demoRun('CW-433')))
+    await expect.element(page.getByText('Time to freeze')).toBeVisible()
+    await expect
+      .element(page.getByRole('table', { name: 'Limits at this thickness' }))
+      .toHaveTextContent(/Frost[\s\S]*at least 8\sh/)
+    await expect.element(page.getByText(/delays freezing/)).toBeVisible()
+  })
+
+  test('fittings and the steam that condenses', async () => {
+    await render(RunSheet, sheetOf(demoRun('ST-101')))
+    await expect.element(page.getByText('Of it, fittings')).toBeVisible()
+    await expect.element(page.getByText(/\d\skg\/h$/)).toBeVisible()
+  })
+
+  test('what moves the answer, by keyboard: a line for each end of each range', async () => {
+    const values = demoRun('ST-104')
+    await render(RunSheet, sheetOf(values))
+    page.getByRole('tab', { name: 'Ladder' }).element().focus()
+    await userEvent.keyboard('{ArrowRight}{ArrowRight}{ArrowRight}')
+    const table = page.getByRole('table', { name: 'What moves the answer' })
+    await expect.element(table).toBeVisible()
+    const ends = detailRun(values, {}, index)?.sensitivity.flatMap((one) => one.ends) ?? []
+    expect(table.getByRole('row').elements()).toHaveLength(ends.length + 1)
+    await expect.element(table.getByRole('rowheader', { name: 'Conductivity' })).toBeVisible()
+  })
+
   test('an answer on its way is said to be so', async () => {
     await render(RunSheet, { ...sheetOf(demoRun('ST-104')), outcome: null })
     await expect.element(page.getByRole('status')).toBeVisible()

@@ -110,6 +110,62 @@ describe('the form of a run', () => {
       .toBeVisible()
   })
 
+  test('asks of a shape what it needs, and nothing else', async () => {
+    const { session, form } = await openForm()
+    await expect.element(form.getByLabelText('Heads')).not.toBeInTheDocument()
+    await form.getByLabelText('Shape').selectOptions('sphere')
+    await expect.element(form.getByLabelText('Outside diameter mm')).toBeVisible()
+    await expect.element(form.getByLabelText('Length m')).not.toBeInTheDocument()
+    await expect.element(form.getByLabelText('Valves')).not.toBeInTheDocument()
+    await form.getByLabelText('Shape').selectOptions('vessel')
+    await form.getByLabelText('Heads').selectOptions('flat')
+    await expect.element(form.getByLabelText('Length m')).toBeVisible()
+    expect(session.job.runs[0]?.values).toMatchObject({ shape: 'vessel', heads: 'flat' })
+  })
+
+  test('a survey is asked for once a surface was measured', async () => {
+    const { form } = await openForm()
+    await expect.element(form.getByLabelText('Air that day °C')).not.toBeInTheDocument()
+    await form.getByLabelText('Surface, measured °C').fill('48')
+    await expect
+      .element(form.getByLabelText('Thermometer, ± K'))
+      .toHaveAttribute('placeholder', '2')
+    await expect
+      .element(form.getByLabelText('Air that day °C'))
+      .toHaveAttribute('placeholder', 'as the air')
+  })
+
+  test('frost is asked for water in pipes, its day once hours are given', async () => {
+    const { form } = await openForm()
+    await form.getByLabelText('Must not freeze for h').fill('12')
+    await expect.element(form.getByLabelText('Air, coldest °C')).toBeVisible()
+    await form.getByLabelText('Must not freeze for h').fill('')
+    await userEvent.tab()
+    await form.getByLabelText('What flows').selectOptions('oil')
+    await expect.element(form.getByLabelText('Must not freeze for h')).not.toBeInTheDocument()
+  })
+
+  test('a code is chosen by name and edition, and its factors are offered with what for', async () => {
+    const { session, form } = await openForm()
+    const code = form.getByLabelText('Code table')
+    await code.selectOptions('geg-2024-heating')
+    expect(session.job.runs[0]?.values.codeTable).toBe('geg-2024-heating')
+    await expect.element(code).toHaveDisplayValue(/2024.*heat distribution/)
+    const list = form.getByLabelText('Factor on the code').element().getAttribute('list')
+    const options = document.querySelectorAll<HTMLOptionElement>(`[id="${list}"] option`)
+    expect([...options].map(({ value }) => value)).toContain('0.5')
+    expect(options[0]?.label).toMatch(/penetrations/)
+  })
+
+  test('a buried run is asked nothing of the weather', async () => {
+    const { form } = await openForm([{ ...run, buryDepthM: 0.8, maxLossWPerM: 20 }])
+    await expect
+      .element(form.getByLabelText('Soil conducts W/mK'))
+      .toHaveAttribute('placeholder', '1.5')
+    for (const label of ['Wind m/s', 'Humidity %', 'Within reach', 'Lies'])
+      await expect.element(form.getByLabelText(label)).not.toBeInTheDocument()
+  })
+
   test('a choice from a list is one step', async () => {
     const { session, form } = await openForm()
     const before = session.job
