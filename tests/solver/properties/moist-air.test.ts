@@ -86,7 +86,11 @@ describe('dewPointC', () => {
     },
     ...[
       [25, '23.3'],
+      [(82 - 32) / 1.8, '26.1'],
       [(81 - 32) / 1.8, '25.6'],
+      [(80 - 32) / 1.8, '25.0'],
+      [(79 - 32) / 1.8, '24.4'],
+      [(76 - 32) / 1.8, '22.8'],
       [(63 - 32) / 1.8, '15.6'],
     ].map(([airC, printed]) => ({
       from: 'ASHRAE Handbook Fundamentals 2021, ch. 23, table 5',
@@ -147,12 +151,28 @@ describe('thickness against condensation', () => {
     { from, given: 0.3, printed: '2.5' },
     {
       from,
+      given: 0.4,
+      printed: '5.0',
+      within: { absolute: 0.2, because: 'printed to half a millimetre' },
+    },
+    {
+      from,
       given: 0.5,
       printed: '7.5',
       within: { absolute: 0.2, because: 'printed to half a millimetre' },
     },
     { from, given: 0.6, printed: '13' },
+    { from, given: 0.7, printed: '18' },
     { from, given: 0.8, printed: '33' },
     { from, given: 0.9, printed: '74' },
+    {
+      from,
+      given: 0.95,
+      printed: '150',
+      within: {
+        fraction: 0.06,
+        because: 'so near saturation 0.05 K of dew point are 6 % of the thickness',
+      },
+    },
   ])
 })
