@@ -105,12 +105,11 @@ describe('what is wrong with a list', () => {
         ),
       ),
     ).toEqual([
-      'row 2, column shape: found "tube"; allowed: one of pipe, round-duct, rect-duct, flat',
+      'row 2, column shape: found "tube"; allowed: one of pipe, round-duct, rect-duct, flat, sphere, vessel',
       'row 2, column air_c: found "warm"; allowed: a number from -70 to 200 °C',
       'row 2, column humidity_pct: found "120"; allowed: a number from 1 to 100 %',
       'row 2, column money: found "maybe"; allowed: yes or no',
       'row 2, column life_years: found "1.5"; allowed: a whole number from 1 to 100 years',
-      'row 3, column shape: found "sphere"; allowed: one of pipe, round-duct, rect-duct, flat (sphere is not yet supported)',
       'row 3, column air_c: found "NaN"; allowed: a number from -70 to 200 °C',
       'row 4, column tag: found "A", as in row 2; allowed: a tag of its own for every run',
       'row 5, column air_c: found "1e999"; allowed: a number from -70 to 200 °C',
