@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import type { Figure } from '#catalogue/figure.ts'
+import { saturationTemperatureC } from '#catalogue/lookup.ts'
 import {
   densityOf,
   heatCapacityOf,
@@ -148,6 +149,29 @@ describe('latent heat of steam', () => {
         from: 'steam tables, saturation at 180 °C, from memory',
         given: { temperatureC: 180 },
         printed: '2014',
+        within: { fraction: 1e-3, because: 'linear between tabled pressures' },
+      },
+      {
+        from: 'Moran and Shapiro, Fundamentals of Engineering Thermodynamics, table A-2 quoted in example 11.4',
+        given: { temperatureC: 100 },
+        printed: '2257.0',
+        within: { fraction: 1e-3, because: 'linear between tabled pressures' },
+      },
+    ],
+  )
+
+  // Figures in Btu per pound at pounds per square inch; the state is found by its pressure, as for a run of steam.
+  published<{ psia: number }>(
+    ({ psia }) => {
+      const saturation = saturationTemperatureC(catalogue.steam, psia * 6894.757 - 101_325)
+      if (!saturation.ok) throw new Error(saturation.message)
+      return value(latentHeatJPerKg(catalogue.steam, saturation.temperatureC)) / 2326
+    },
+    [
+      {
+        from: 'Granet and Bluestein, Thermodynamics and Heat Power, problem 5.4',
+        given: { psia: 115 },
+        printed: '881.1',
         within: { fraction: 1e-3, because: 'linear between tabled pressures' },
       },
     ],
