@@ -256,12 +256,12 @@ function interfaces(
   surfaceC: number,
   flux: number,
 ): number[] {
-  const tempsC = [surfaceC]
+  const tempsC = new Array<number>(layers.length + 1).fill(surfaceC)
   let tempC = surfaceC
   for (let index = layers.length - 1; index >= 0; index -= 1) {
     const layer = layers[index] as Layer
     tempC += layerDifferenceK(layer.conductivity, tempC, flux * (formsM[index] as number))
-    tempsC.unshift(tempC)
+    tempsC[index] = tempC
   }
   return tempsC
 }
