@@ -29,6 +29,8 @@ const screens: readonly { readonly name: string; readonly go: (page: Page) => Pr
   {
     name: 'the form of a buried run',
     go: async (page) => {
+      // Far down: only the lines in sight are there to be clicked.
+      await page.getByPlaceholder(/^Filter/).fill('LH-414')
       await cell(page, 'LH-414', 'description').click()
       await page.getByText('Inputs', { exact: true }).click()
     },
