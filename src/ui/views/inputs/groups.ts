@@ -118,11 +118,11 @@ function inOrder(keys: readonly FieldKey[]): readonly FieldKey[] {
 }
 
 /** Things that are counted by the piece. */
-export const isPiece = (shape: RunValues['shape']): boolean =>
+const isPiece = (shape: RunValues['shape']): boolean =>
   shape === 'sphere' || shape === 'vessel'
 
 /** Whether a field has a say for this run. What has a value is always shown. */
-export function isRelevant(key: FieldKey, values: RunValues): boolean {
+function isRelevant(key: FieldKey, values: RunValues): boolean {
   if (values[key] !== undefined) return true
   const has = sayOf[key]
   return has === undefined || has(asked(values))

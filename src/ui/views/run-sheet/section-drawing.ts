@@ -9,7 +9,7 @@ const LABEL = { width: 88, height: 36 }
 const SHELLS = 48
 /** How much of the wall behind a slab is shown, and the room for the dimension beside a lying one. */
 const SLAB = { wall: 34, beside: 48, air: 16 }
-export interface Outline {
+interface Outline {
   readonly x: number
   readonly y: number
   readonly width: number
