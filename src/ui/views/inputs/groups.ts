@@ -118,8 +118,7 @@ function inOrder(keys: readonly FieldKey[]): readonly FieldKey[] {
 }
 
 /** Things that are counted by the piece. */
-const isPiece = (shape: RunValues['shape']): boolean =>
-  shape === 'sphere' || shape === 'vessel'
+const isPiece = (shape: RunValues['shape']): boolean => shape === 'sphere' || shape === 'vessel'
 
 /** Whether a field has a say for this run. What has a value is always shown. */
 function isRelevant(key: FieldKey, values: RunValues): boolean {
