@@ -60,6 +60,16 @@ describe('round trip', () => {
     expect(closing(JobFile.open(path, dbFolder)).read()).toEqual({ job: sampleJob(), revision: 0 })
   })
 
+  test('a file of the first version is opened, and its runs are as they were', () => {
+    const olderDb = temporaryFolder()
+    mkdirSync(join(olderDb, 'job'))
+    copyFileSync(join(jobMigrations, '0001_job.sql'), join(olderDb, 'job', '0001_job.sql'))
+    const path = join(temporaryFolder(), 'old.lagjob')
+    JobFile.create(path, sampleJob(), olderDb).close()
+    expect(closing(JobFile.open(path, dbFolder)).read()).toEqual({ job: sampleJob(), revision: 0 })
+    expect(failureOf(() => JobFile.open(path, olderDb)).code).toBe('job/too-new')
+  })
+
   test('an empty job, and every kind of text', () => {
     const path = join(temporaryFolder(), 'Straße 1 – 蒸気.LAGJOB')
     const job: Job = {
