@@ -1,8 +1,10 @@
 /** What each note says: the figures that a reader needs stand in it, and it stands only where it is true. */
 import { describe, expect, test } from 'vitest'
+import { nusseltSlenderCylinder, nusseltVerticalPlate } from '#solver/convection/natural.ts'
 import { notesOf } from '#solver/notes.ts'
 import { solve } from '#solver/solve.ts'
 import type { Shape, System } from '#solver/types.ts'
+import { filmNumbers } from './oracle.ts'
 import { constant, lying, plainFilm, still } from './systems.ts'
 
 const base: Omit<System, 'shape' | 'layers'> = { ...plainFilm, mediumC: 60, around: still(20) }
@@ -207,4 +209,100 @@ test.each([
 ])('bare at %d °C in air of %d °C the film says %j', (mediumC, airC, expected) => {
   const system: System = { ...base, shape: lying(0.1), layers: [], mediumC, around: still(airC) }
   expect(textsOf(system, 'film-range')).toEqual(expected)
+})
+
+describe('a step of the detailed set', () => {
+  const bare = (shape: Shape, excessK: number, film: System['film'] = 'detailed'): System => ({
+    ...base,
+    shape,
+    film,
+    layers: [],
+    mediumC: 20 + excessK,
+  })
+  /** As long as brings the Rayleigh number there: it goes with the third power of the length. */
+  const longAs = (make: (lengthM: number) => Shape, rayleigh: number): number =>
+    Math.cbrt(rayleigh / filmNumbers(bare(make(1), 10), 0, 30).rayleigh)
+
+  const plate = (characteristicLengthM: number): Shape => ({
+    kind: 'flat',
+    facing: 'up',
+    characteristicLengthM,
+  })
+
+  // 0.54 Ra^(1/4) becomes 0.15 Ra^(1/3) at Ra 8e6: 28.72 and 30.00.
+  test.each([
+    [0.94, 0],
+    [0.96, 1],
+    [1.04, 1],
+    [1.06, 0],
+  ])('of a plate is told at %d of its Rayleigh number: %d notes', (share, count) => {
+    const texts = textsOf(bare(plate(longAs(plate, share * 8e6)), 10), 'film-jump')
+    expect(texts).toHaveLength(count)
+    for (const text of texts) {
+      expect(text).toContain(`All round: the Rayleigh number of free convection, ${share * 8e6},`)
+      expect(text).toMatch(/is near 8000000, where the formula steps by 4 %\.$/)
+    }
+  })
+
+  test('is told of a plate under the simplified set too, which has no formula of its own for it', () => {
+    const shape = plate(longAs(plate, 8e6))
+    expect(textsOf(bare(shape, 10, 'simplified'), 'film-jump')).toHaveLength(1)
+    expect(textsOf(bare(shape, 10, { fixedWPerM2K: 9 }), 'film-jump')).toEqual([])
+  })
+
+  const upright =
+    (orientation: 'vertical' | 'inclined', slenderness: number) =>
+    (riseM: number): Shape => ({
+      kind: 'pipe',
+      outerDiameterM: riseM / slenderness,
+      orientation,
+      riseM,
+    })
+
+  // At Ra 1e9 a plate has Nu 121 (Pr 0.71); a cylinder 100 times as high as wide 4/3 (7 · 7.1e8/(5 · 34.9))^(1/4) +
+  // 4 · 495.7 · 100/(35 · 108.7) = 150.
+  test.each(['vertical', 'inclined'] as const)('of a thin %s pipe is told', (orientation) => {
+    const make = upright(orientation, 100)
+    const shape = make(longAs(make, 1e9))
+    const [text = '', ...more] = textsOf(bare(shape, 10), 'film-jump')
+    expect(more).toEqual([])
+    const { prandtl } = filmNumbers(bare(shape, 10), 0, 30)
+    const atStep = { rayleigh: 1e9, prandtl, slenderness: 100 }
+    const share = nusseltVerticalPlate(atStep) / nusseltSlenderCylinder(atStep) - 1
+    expect(text).toContain(
+      `is near 1000000000, where the formula steps by ${(100 * share).toFixed(0)} %.`,
+    )
+    // The simplified set changes over near there too, and speaks for itself.
+    for (const other of textsOf(bare(shape, 10, 'simplified'), 'film-jump')) {
+      expect(other).not.toContain('Rayleigh')
+    }
+  })
+
+  test('of a thick pipe, which is a plate on both sides of it, is not', () => {
+    const make = upright('vertical', 2)
+    expect(textsOf(bare(make(longAs(make, 1e9)), 10), 'film-jump')).toEqual([])
+  })
+})
+
+test('a conductivity that falls too steeply is told', () => {
+  const system: System = {
+    ...base,
+    shape: { kind: 'flat', facing: 'vertical', characteristicLengthM: 1 },
+    layers: [
+      {
+        thicknessM: 0.01,
+        conductivity: {
+          kind: 'curve',
+          basis: 'mean',
+          pointsC: [20, 60],
+          valuesWPerMK: [0.02, 0.0001],
+        },
+      },
+    ],
+    mediumC: 50,
+  }
+  expect(textsOf(system, 'conductivity-steep')).toEqual([
+    'The conductivity falls so steeply with temperature that more than one state would fit: do not rely on this result.',
+  ])
+  expect(textsOf({ ...system, layers: [constant(0.01, 0.02)] }, 'conductivity-steep')).toEqual([])
 })
