@@ -17,7 +17,8 @@ export function notesOf(system: System, solution: Solution): Note[] {
     notes.push(...filmNotes(shape, weather, system.film, excessK), ...closureNotes(face))
     if (face.closure === 'closed') notes.push(...stepNotes(shape, weather, system.film, excessK))
   })
-  if (system.film === 'simplified') {
+  // Soil stands in place of a film.
+  if (system.film === 'simplified' && system.shape.kind !== 'buried-pipe') {
     const all = shapes.every(({ flow }) => isSimplified(flow))
     notes.push({
       code: 'film-method',

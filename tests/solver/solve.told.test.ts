@@ -106,7 +106,9 @@ describe('the simplified set', () => {
     expect(text.includes('there the detailed film stands')).toBe(lacks)
   })
 
-  test('is not spoken of where another film was chosen', () => {
+  test('is not spoken of where another film was chosen, nor of a pipe in the soil, which has none', () => {
+    const shape = { kind: 'buried-pipe', outerDiameterM: 0.2, depthM: 1, soilWPerMK: 1.5 } as const
+    expect(textsOf(simplified(shape), 'film-method')).toEqual([])
     expect(textsOf(simplified(lying(0.1), 'detailed'), 'film-method')).toEqual([])
     expect(textsOf(simplified(lying(0.1), { fixedWPerM2K: 9 }), 'film-method')).toEqual([])
   })
