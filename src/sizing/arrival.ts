@@ -8,9 +8,11 @@ import { runLoss } from './run-loss.ts'
 import { type States, systemOf } from './states.ts'
 
 export interface Arrival {
+  /** Lost by the whole run [W]. */
+  readonly heatFlowW: number
   /** Null where all steam has condensed on the way. */
   readonly arrivalTempC: number | null
-  /** Of steam; null elsewhere [kg/s]. */
+  /** Of steam, no more than flows; null elsewhere [kg/s]. */
   readonly condensateKgPerS: number | null
 }
 
@@ -26,10 +28,11 @@ export function arrival(
   if (limit === null || heatFlowW === undefined) return null
   if (limit.kind === 'drop') {
     const arrivesC = streamEndC(problem, settled, limit, heatFlowW)
-    return { arrivalTempC: arrivesC, condensateKgPerS: null }
+    return { heatFlowW, arrivalTempC: arrivesC, condensateKgPerS: null }
   }
   const condensedKgPerS = condensed(limit, heatFlowW)
   return {
+    heatFlowW,
     arrivalTempC: condensedKgPerS < limit.flowKgPerS ? problem.conditions.loss.mediumC : null,
     condensateKgPerS: Math.min(condensedKgPerS, limit.flowKgPerS),
   }
@@ -82,18 +85,14 @@ const condensed = ({ latentHeatJPerKg }: Condensate, heatFlowW: number): number 
   Math.max(0, condensateKgPerS({ heatFlowW, latentHeatJPerKg }))
 
 export function arrivalLimits(
-  problem: Problem,
-  settled: Settled,
-  states: States,
-  bareStates: States,
+  { limits, conditions }: Problem,
+  arrives: Arrival | null,
 ): LimitResult[] {
-  const limit = problem.limits.arrival
-  if (limit === null || limit.maxDropK === null) return []
-  const heatFlowW = runLoss(problem, settled, states.loss, bareStates.loss)?.totalW
-  if (heatFlowW === undefined) return []
+  const limit = limits.arrival
+  if (limit === null || limit.maxDropK === null || arrives === null) return []
   const common = { limit: 'arrival', rule: 'at most', condition: 'loss' } as const
   if (limit.kind === 'condensate') {
-    const value = condensed(limit, heatFlowW)
+    const value = condensed(limit, arrives.heatFlowW)
     const pass = value <= limit.flowKgPerS
     return [
       {
@@ -108,8 +107,8 @@ export function arrivalLimits(
       },
     ]
   }
-  const startC = problem.conditions.loss.mediumC
-  const endC = streamEndC(problem, settled, limit, heatFlowW)
+  const startC = conditions.loss.mediumC
+  const endC = arrives.arrivalTempC ?? startC
   const value = Math.abs(startC - endC)
   return [
     {

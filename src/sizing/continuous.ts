@@ -1,7 +1,8 @@
 /** Exact thickness at which a limit begins to pass, between and beyond the rungs. */
 import { bracketedRoot } from '#solver/index.ts'
+import { arrival } from './arrival.ts'
 import { bare, type Settled, settle } from './build-up.ts'
-import { judge } from './limits.ts'
+import { judgeBy } from './limits.ts'
 import type { Limits, Problem } from './problem.ts'
 import type { LimitEnd, LimitName, LimitResult } from './result.ts'
 import { overallSizeM } from './space.ts'
@@ -21,14 +22,20 @@ function settledAt(problem: Problem, thicknessM: number): Settled {
   return settle(problem.layers, { thicknessM, nominalThicknessM: null, piecesM: [thicknessM] })
 }
 
-/** The worst shortfall of the limits of one name; negative where that limit is not judged. */
-function shortfallAt(problem: Problem, limit: LimitName, thicknessM: number): number {
-  const settled = settledAt(problem, thicknessM)
+/**
+ * The worst shortfall of the limits of one name by the thickness of the sized layer; negative where that limit is not
+ * judged. The bare run is solved once, and no month: no limit looks at them.
+ */
+function shortfallOf(given: Problem, limit: LimitName): (thicknessM: number) => number {
+  const problem: Problem = { ...given, conditions: { ...given.conditions, months: [] } }
   const bareStates = solveStates(problem, bare)
-  const judged = judge(problem, settled, solveStates(problem, settled), bareStates).filter(
-    (result) => result.limit === limit,
-  )
-  return Math.max(Number.NEGATIVE_INFINITY, ...judged.map(shortfall))
+  return (thicknessM) => {
+    const settled = settledAt(problem, thicknessM)
+    const states = solveStates(problem, settled)
+    const arrives = () => arrival(problem, settled, states, bareStates)
+    const judged = judgeBy(limit, { problem, settled, states, arrives })
+    return Math.max(Number.NEGATIVE_INFINITY, ...judged.map(shortfall))
+  }
 }
 
 /** Where a limit begins to pass, between a thickness of the sized layer that fails it and one that passes [m]. */
@@ -37,8 +44,9 @@ export function passesFromM(
   limit: LimitName,
   between: { readonly failsM: number; readonly passesM: number },
 ): number {
+  const shortfallAt = shortfallOf(problem, limit)
   return bracketedRoot(
-    (thicknessM) => -shortfallAt(problem, limit, thicknessM),
+    (thicknessM) => -shortfallAt(thicknessM),
     { low: between.failsM, high: between.passesM },
     { width: EXACT_M, value: 0 },
   ).at
@@ -51,9 +59,8 @@ export function passesFromM(
  */
 function continuousThicknessM(problem: Problem, limit: LimitName): number | null {
   const thicknessesM = [THINNEST_M, ...problem.steps.map((step) => step.thicknessM), THICKEST_M]
-  const last = thicknessesM.findLastIndex(
-    (thicknessM) => shortfallAt(problem, limit, thicknessM) > 0,
-  )
+  const shortfallAt = shortfallOf(problem, limit)
+  const last = thicknessesM.findLastIndex((thicknessM) => shortfallAt(thicknessM) > 0)
   const failsM = thicknessesM[last]
   if (failsM === undefined) return 0
   const passesM = thicknessesM[last + 1]

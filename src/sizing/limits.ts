@@ -1,33 +1,41 @@
 /** The limits of a run, each judged at its own condition; touch, loss and damp here, on the worst face, the others beside. */
 import type { Face, Solution } from '#solver/types.ts'
-import { arrivalLimits } from './arrival.ts'
+import { type Arrival, arrivalLimits } from './arrival.ts'
 import type { Settled } from './build-up.ts'
 import { codeLimits } from './code.ts'
 import { frostLimits } from './frost.ts'
 import type { Limits, Problem } from './problem.ts'
-import type { LimitResult } from './result.ts'
+import type { LimitName, LimitResult } from './result.ts'
 import { serviceLimits } from './service.ts'
 import { spaceLimits } from './space.ts'
 import { hottestFace, type States } from './states.ts'
 
-/** Every limit of a run, judged on one solved build-up; the bare run's states are those of its bare fittings. */
-export function judge(
-  problem: Problem,
-  settled: Settled,
-  states: States,
-  bareStates: States,
-): LimitResult[] {
-  return [
-    ...touchLimits(problem.limits, states.touch, settled.layers.length === 0),
-    ...lossLimits(problem.limits, states.loss),
-    ...dampLimits(problem.limits, states.damp),
-    ...frostLimits(problem, settled),
-    ...arrivalLimits(problem, settled, states, bareStates),
-    ...codeLimits(problem, settled),
-    ...spaceLimits(problem, settled, states.loss),
-    ...serviceLimits(problem, settled, states),
-  ]
+/** One solved build-up, as its limits ask about it. */
+export interface Judged {
+  readonly problem: Problem
+  readonly settled: Settled
+  readonly states: States
+  /** How the medium arrives: a search, and gone through only for the limit that asks. */
+  readonly arrives: () => Arrival | null
 }
+
+/** In the order of the results; none where the run does not ask for the limit. */
+const judges: Readonly<Record<LimitName, (judged: Judged) => LimitResult[]>> = {
+  touch: ({ problem, settled, states }) =>
+    touchLimits(problem.limits, states.touch, settled.layers.length === 0),
+  loss: ({ problem, states }) => lossLimits(problem.limits, states.loss),
+  damp: ({ problem, states }) => dampLimits(problem.limits, states.damp),
+  frost: ({ problem, settled }) => frostLimits(problem, settled),
+  arrival: ({ problem, arrives }) => arrivalLimits(problem, arrives()),
+  code: ({ problem, settled }) => codeLimits(problem, settled),
+  space: ({ problem, settled, states }) => spaceLimits(problem, settled, states.loss),
+  service: ({ problem, settled, states }) => serviceLimits(problem, settled, states),
+}
+
+export const judge = (judged: Judged): LimitResult[] =>
+  Object.values(judges).flatMap((limitsOf) => limitsOf(judged))
+
+export const judgeBy = (limit: LimitName, judged: Judged): LimitResult[] => judges[limit](judged)
 
 const isColder = (a: Face, b: Face): Face => (b.surfaceTempC < a.surfaceTempC ? b : a)
 

@@ -3,7 +3,6 @@ import { notesOf as solverNotes } from '#solver/index.ts'
 import { arrival } from './arrival.ts'
 import type { Settled } from './build-up.ts'
 import { rungMoney } from './cost.ts'
-import { timeToFreezeH } from './frost.ts'
 import { judge } from './limits.ts'
 import type { Condition, Problem } from './problem.ts'
 import type { Note, Rating } from './result.ts'
@@ -28,11 +27,11 @@ export function rate(problem: Problem, settled: Settled, bareStates: States | nu
   const states = solveStates(problem, settled)
   const { loss, touch, damp } = states
   const asBare = bareStates ?? states
-  const limits = judge(problem, settled, states, asBare)
+  const arrives = arrival(problem, settled, states, asBare)
+  const limits = judge({ problem, settled, states, arrives: () => arrives })
   const total = runLoss(problem, settled, loss, asBare.loss)
   const yearlyMeanLossW = yearlyRunLossW(problem, settled, states, asBare)
   const flow = yearlyFlowPerUnit(states)
-  const arrives = arrival(problem, settled, states, asBare)
   return {
     rating: {
       thicknessM: settled.thicknessM,
@@ -53,7 +52,7 @@ export function rate(problem: Problem, settled: Settled, bareStates: States | nu
       radiationWPerM2K: loss.radiationWPerM2K,
       interfaceTempsC: loss.interfaceTempsC,
       touchSurfaceC: hottestFace(touch).surfaceTempC,
-      timeToFreezeH: timeToFreezeH(problem, settled),
+      timeToFreezeH: limits.find(({ limit }) => limit === 'frost')?.value ?? null,
       arrivalTempC: arrives?.arrivalTempC ?? null,
       condensateKgPerS: arrives?.condensateKgPerS ?? null,
       limits,

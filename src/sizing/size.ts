@@ -100,9 +100,7 @@ function mattThicknessM(
     ...problem,
     conditions: { ...problem.conditions, damp: { ...damp, emissivity: MATT_EMISSIVITY } },
   }
-  const found = rungsOf(matt)
-    .map((settled) => rate(matt, settled, bareStates).rating)
-    .find(({ pass }) => pass)
+  const found = rungsOf(matt).find((settled) => rate(matt, settled, bareStates).rating.pass)
   return found?.thicknessM ?? null
 }
 
