@@ -8,6 +8,7 @@ import { writeWorkingText } from '#report/working-text.ts'
 import type { RunResult } from '#sizing/result.ts'
 import type { Working } from '#sizing/working/types.ts'
 import { shippedCatalogue } from '../catalogue/shipped-catalogue.ts'
+import { once } from '../once.ts'
 import { demoFile } from './demo-runs.ts'
 import { agrees, inexact, repeated } from './repeated.ts'
 import { numberOf, type PageSection, readPage } from './working-page.ts'
@@ -43,7 +44,7 @@ const throughWords = /through the (layers|film inside)/
 
 const runs = [...demoRuns(), ...workingRuns]
 
-describe.each(runs)('the working of $tag', (values) => {
+function workedOut(values: RunValues) {
   const working = workingOf(values)
   const text = writeWorkingText(working)
   const sections = readPage(text)
@@ -53,18 +54,26 @@ describe.each(runs)('the working of $tag', (values) => {
   const isBare = shown.thicknessM === 0
   const title = isBare ? 'Bare run' : 'Loss condition'
   const at = (section: string, symbol: string): number => printed(sections, section, symbol)
+  return { working, text, sections, result, bare, shown, isBare, title, at }
+}
+
+describe.each(runs)('the working of $tag', (values) => {
+  const worked = once(() => workedOut(values))
 
   test('repeats line by line from the page alone', () => {
+    const { sections } = worked()
     const all = sections.map(repeated)
     expect(all.flatMap(({ wrong }) => wrong)).toEqual([])
     expect(all.reduce((sum, { formulas }) => sum + formulas, 0)).toBeGreaterThan(12)
   })
 
   test('shows formulas that are the program’s own', () => {
+    const { working } = worked()
     expect(working.sections.flatMap(inexact)).toEqual([])
   })
 
   test('fits a page and hides nothing', () => {
+    const { text, result } = worked()
     expect(text.split('\n').filter((row) => [...row].length > 100)).toEqual([])
     expect(text).not.toMatch(/NaN|Infinity|undefined|null/)
     for (const note of result.notes) {
@@ -73,6 +82,7 @@ describe.each(runs)('the working of $tag', (values) => {
   })
 
   test('closes its balances: layers carry what the film gives off', () => {
+    const { sections, isBare, at } = worked()
     const layered = sections.filter((section) => throughWords.test(section.title))
     if (!isBare) expect(layered.length).toBeGreaterThan(1)
     for (const { title: of } of layered) {
@@ -84,6 +94,7 @@ describe.each(runs)('the working of $tag', (values) => {
   })
 
   test('ends at the figures of the schedule', () => {
+    const { bare, result, shown, title, at } = worked()
     const pairs: [string, number, number | null | undefined][] = [
       ['flux', at(`${title}: the whole run`, 'q'), shown.heatFluxWPerM2],
       ['total', at(`${title}: the whole run`, 'Q'), shown.heatLossW],
@@ -108,6 +119,7 @@ describe.each(runs)('the working of $tag', (values) => {
   })
 
   test('judges every limit as the schedule does', () => {
+    const { sections, shown } = worked()
     const verdicts = sections.flatMap(({ lines }) =>
       lines.filter(({ symbol }) => /^X(_\d)?$/.test(symbol)),
     )

@@ -2,6 +2,7 @@
 import { describe, expect, test } from 'vitest'
 import { workRun } from '#model/size-run.ts'
 import type { Step } from '#sizing/working/types.ts'
+import { once } from '../../once.ts'
 import { workingRuns } from '../../report/working-runs.ts'
 import { index } from '../catalogue.ts'
 
@@ -35,18 +36,18 @@ const stepsOf = (tag: string | undefined): readonly Step[] => {
 }
 
 describe.each(workingRuns)('the lines of $tag', ({ tag }) => {
-  const steps = stepsOf(tag)
+  const steps = once(() => stepsOf(tag))
 
   test('say in words what they are', () => {
-    expect(steps.length).toBeGreaterThan(20)
-    for (const { words, symbol } of steps) {
+    expect(steps().length).toBeGreaterThan(20)
+    for (const { words, symbol } of steps()) {
       expect(words, symbol).toMatch(/^\p{Lu}.*[^.]$/u)
       expect(words, symbol).not.toMatch(/ {2}|undefined/)
     }
   })
 
   test('carry the unit of what they are', () => {
-    for (const { symbol, unit, words } of steps) {
+    for (const { symbol, unit, words } of steps()) {
       const [, units] = unitOf.find(([pattern]) => pattern.test(symbol)) ?? []
       if (units) expect(units, `${symbol}: ${words}`).toContain(unit)
     }
@@ -54,7 +55,7 @@ describe.each(workingRuns)('the lines of $tag', ({ tag }) => {
 
   test('name the source of every empirical formula', () => {
     const empirical = /^(Nu|Nu_[wpcD]|λ_a|λ_a_w|c|p|h_r)$/
-    for (const { symbol, formula, source, unit } of steps) {
+    for (const { symbol, formula, source, unit } of steps()) {
       if (formula === null || !empirical.test(symbol) || unit.includes('/kWh')) continue
       // The larger of two stands on theirs.
       if (formula.startsWith('max(Nu')) continue
