@@ -1,9 +1,10 @@
 /** Backwards from a surface temperature: what the surface gives off, what its layers carry, how well they conduct. */
 import { filmOf, radiates } from './film.ts'
 import { type FaceShape, type Wall, wallOf } from './geometry.ts'
+import { acrossLayersK, insideM2KPerW } from './layers.ts'
 import { radiationWPerM2K } from './radiation.ts'
 import { bracketedRoot } from './root.ts'
-import { acrossLayersK, weatherOf } from './solve.ts'
+import { weatherOf } from './solve.ts'
 import type { System, Unit } from './types.ts'
 
 /** Area mean over the faces, heat flow positive outwards. */
@@ -57,7 +58,7 @@ export function fluxOf(system: System, surfaceTempC: number): SurfaceFlux {
 export function conductionFluxWPerM2(system: System, surfaceTempC: number): number | null {
   const { faces } = wallOf(system.shape, system.layers)
   const differenceK = system.mediumC - surfaceTempC
-  if (faces.some((face) => insideResistance(system, face) + formOf(face) === 0)) return null
+  if (faces.some((face) => insideM2KPerW(system, face) + formOf(face) === 0)) return null
   if (differenceK === 0) return 0
   let flux = 0
   for (const face of faces) flux += face.share * faceFlux(system, face, surfaceTempC, differenceK)
@@ -70,10 +71,10 @@ function faceFlux(
   surfaceTempC: number,
   differenceK: number,
 ): number {
-  const insideKPerWPerM2 = insideResistance(system, face)
+  const insideFilmM2KPerW = insideM2KPerW(system, face)
   const short = (flux: number): number =>
     acrossLayersK(system.layers, face.formsM, surfaceTempC, flux) +
-    flux * insideKPerWPerM2 -
+    flux * insideFilmM2KPerW -
     differenceK
   let far = differenceK
   while (short(far) * differenceK < 0) far *= 4
@@ -82,9 +83,6 @@ function faceFlux(
 }
 
 const formOf = ({ formsM }: FaceShape): number => formsM.reduce((sumM, formM) => sumM + formM, 0)
-
-const insideResistance = (system: System, face: FaceShape): number =>
-  system.insideFilmWPerM2K === null ? 0 : face.outerOverInner / system.insideFilmWPerM2K
 
 /** Conductivities that are looked for [W/(m·K)]: far below any lagging, and far above any metal. */
 const LEAST_W_PER_M_K = 1e-5
@@ -119,7 +117,7 @@ export function effectiveConductivityWPerMK(
 function conductanceWPerM2K(system: System, { faces }: Wall, conductivityWPerMK: number): number {
   let conductance = 0
   for (const face of faces) {
-    conductance += face.share / (formOf(face) / conductivityWPerMK + insideResistance(system, face))
+    conductance += face.share / (formOf(face) / conductivityWPerMK + insideM2KPerW(system, face))
   }
   return conductance
 }

@@ -1,10 +1,10 @@
-import { layerDifferenceK } from './conductivity.ts'
-import { filmOf, radiates, roughFilmOf, type Weather } from './film.ts'
+import { Balance } from './balance.ts'
+import type { Weather } from './film.ts'
 import { type FaceShape, type Wall, wallOf } from './geometry.ts'
+import { interfacesC } from './layers.ts'
 import { standardPressurePa } from './properties/air.ts'
-import { radiationSlopeWPerM2K, radiationWPerM2K, radiativeC } from './radiation.ts'
-import { bracketedRoot, risingRoot } from './root.ts'
-import type { Closure, Face, Layer, Solution, System } from './types.ts'
+import { bracketedRoot, type Root, risingRoot } from './root.ts'
+import type { Closure, Face, Solution, System } from './types.ts'
 
 /**
  * Steady heat balance of a lagged or bare surface.
@@ -74,6 +74,38 @@ function areaMean(
   }
 }
 
+interface SolvedFace {
+  readonly face: Face
+  readonly filmEvaluations: number
+}
+
+function solveFace(system: System, shape: FaceShape, weather: Weather): SolvedFace {
+  const balance = new Balance(system, shape, weather)
+  const { excessK, fluxWPerM2, convectionWPerM2K, closure } = closed(balance)
+  const surfaceTempC = system.around.airC + excessK
+  return {
+    face: {
+      side: shape.side,
+      surfaceTempC,
+      heatFluxWPerM2: fluxWPerM2,
+      convectionWPerM2K,
+      radiationWPerM2K: balance.radiationWPerM2K(excessK),
+      interfaceTempsC: interfacesC(system.layers, shape.formsM, surfaceTempC, fluxWPerM2),
+      share: shape.share,
+      closure,
+    },
+    filmEvaluations: balance.filmEvaluations,
+  }
+}
+
+/** Where a balance closes, and how. */
+interface Closed {
+  readonly excessK: number
+  readonly fluxWPerM2: number
+  readonly convectionWPerM2K: number
+  readonly closure: Closure
+}
+
 /** The balance counts as closed when film and conduction differ by less than this share of the driving difference. */
 const CLOSED = 1e-11
 /** More than this share left over means that the search ended on a jump of a correlation. */
@@ -81,140 +113,85 @@ const JUMP = 1e-9
 /** And never less than this is left over [K]: a difference of almost nothing has no share to judge by. */
 const NOTHING_K = 1e-12
 
-interface SolvedFace {
-  readonly face: Face
-  readonly filmEvaluations: number
-}
-
-function solveFace(system: System, face: FaceShape, weather: Weather): SolvedFace {
-  const { layers, emissivity, sunAbsorbedWPerM2 } = system
-  const { airC, surroundingsC } = system.around
-  const mediumExcessK = system.mediumC - airC
-  const hasRadiation = radiates(face, system.film)
-  const surroundingsExcessK = hasRadiation ? surroundingsC - airC : 0
-  const insideKPerWPerM2 =
-    system.insideFilmWPerM2K === null ? 0 : face.outerOverInner / system.insideFilmWPerM2K
-  const film = filmOf(face, weather, system.film, system.inclinedFilm)
-
-  let filmEvaluations = 0
-  // The last film is kept: the search ends where it looked last, and its film is that of the answer.
-  let filmAtK = Number.NaN
-  let convection = 0
-  const convectionAt = (excessK: number): number => {
-    if (excessK !== filmAtK) {
-      filmEvaluations += 1
-      filmAtK = excessK
-      convection = film(excessK)
-    }
-    return convection
-  }
-  const radiationAt = (excessK: number): number =>
-    hasRadiation ? radiationWPerM2K(emissivity, airC + excessK, surroundingsC) : 0
-  const fluxAt = (excessK: number): number =>
-    (excessK === 0 ? 0 : convectionAt(excessK) * excessK) +
-    radiationAt(excessK) * (excessK - surroundingsExcessK) -
-    sunAbsorbedWPerM2
-  // The sun can heat a surface above medium, air and surroundings, until radiation alone gives off all of it.
-  const sunlitExcessK = (): number =>
-    hasRadiation
-      ? radiativeC(emissivity, surroundingsC, sunAbsorbedWPerM2) - airC
-      : sunAbsorbedWPerM2 / film(1)
-  const drivenK = (excessK: number, flux: number): number =>
-    acrossLayersK(layers, face.formsM, airC + excessK, flux) + flux * insideKPerWPerM2
-
-  const finished = (
-    excessK: number,
-    flux: number,
-    convectionWPerM2K: number,
-    closure: Closure,
-  ): SolvedFace => ({
-    face: {
-      side: face.side,
-      surfaceTempC: airC + excessK,
-      heatFluxWPerM2: flux,
-      convectionWPerM2K,
-      radiationWPerM2K: radiationAt(excessK),
-      interfaceTempsC: interfaces(layers, face.formsM, airC + excessK, flux),
-      share: face.share,
-      closure,
-    },
-    filmEvaluations,
-  })
-
-  if (layers.length === 0 && insideKPerWPerM2 === 0) {
-    const flux = fluxAt(mediumExcessK)
-    return finished(mediumExcessK, flux, convectionAt(mediumExcessK), 'closed')
-  }
-
-  const balance = (excessK: number): number =>
-    excessK + drivenK(excessK, fluxAt(excessK)) - mediumExcessK
-  const low = Math.min(mediumExcessK, surroundingsExcessK, 0)
-  const high = Math.max(
-    mediumExcessK,
-    surroundingsExcessK,
-    0,
-    sunAbsorbedWPerM2 === 0 ? 0 : sunlitExcessK(),
-  )
-
-  // A first guess from a rough film: the layers' own resistance is known.
-  const rough = roughFilmOf(face, weather, system.film)
-  const resistanceAt = (excessK: number): number =>
-    drivenK(excessK, TRIAL_W_PER_M2) / TRIAL_W_PER_M2
-  const resistance = resistanceAt(mediumExcessK / 2)
-  let guessK = mediumExcessK / 2
-  for (let round = 0; round < GUESS_ROUNDS; round += 1) {
-    const radiation = radiationAt(guessK)
-    guessK =
-      (mediumExcessK + resistance * (radiation * surroundingsExcessK + sunAbsorbedWPerM2)) /
-      (1 + resistance * (rough.film(guessK) + radiation))
-  }
+function closed(balance: Balance): Closed {
+  if (balance.isOpen) return closedBy(balance, balance.mediumExcessK, null)
+  const { low, high } = balance.bracketK()
   // ∫λ dT over the layers is the flux times their form: more of it is felt at the inner end, by the λ there.
-  const innerResistance = resistanceAt(mediumExcessK)
-  const slopeAt = (trialK: number): number =>
-    innerResistance / resistanceAt(trialK) +
-    innerResistance *
-      (convectionAt(trialK) * rough.stiffening +
-        (hasRadiation ? radiationSlopeWPerM2K(emissivity, airC + trialK) : 0))
+  const innerM2KPerW = balance.resistanceM2KPerW(balance.mediumExcessK)
   // What drives the heat: the temperatures, or what sun and surroundings would drive through the layers.
   const drivingK = Math.max(
     high - low,
-    innerResistance * Math.max(sunAbsorbedWPerM2, Math.abs(radiationAt(0) * surroundingsExcessK)),
+    innerM2KPerW *
+      Math.max(
+        balance.sunAbsorbedWPerM2,
+        Math.abs(balance.radiationWPerM2K(0) * balance.surroundingsExcessK),
+      ),
   )
-  const root = risingRoot(balance, {
+  const root = risingRoot((excessK) => balance.missingK(excessK, balance.fluxWPerM2(excessK)), {
     low,
     high,
-    guess: { at: guessK, slopeAt },
+    guess: {
+      at: guessedExcessK(balance),
+      slopeAt: (excessK) =>
+        innerM2KPerW / balance.resistanceM2KPerW(excessK) +
+        innerM2KPerW *
+          (balance.convectionWPerM2K(excessK) * balance.rough.stiffening +
+            balance.radiationSlopeWPerM2K(excessK)),
+    },
     value: CLOSED * drivingK,
   })
-  const excessK = root.at
-  if (Math.abs(root.value) <= Math.max(JUMP * drivingK, NOTHING_K)) {
-    const filmFlux = fluxAt(excessK)
-    // Behind much lagging the last digits of the film's flux are kelvins at the medium: there the layers tell the flux.
-    const flux =
-      Math.abs(root.value) <= CLOSED * (high - low)
-        ? filmFlux
-        : secant(
-            (trial) => excessK + drivenK(excessK, trial) - mediumExcessK,
-            filmFlux,
-            filmFlux - root.value / innerResistance,
-          )
-    return finished(excessK, flux, convectionAt(excessK), 'closed')
-  }
+  if (Math.abs(root.value) > Math.max(JUMP * drivingK, NOTHING_K)) return onJump(balance, root)
+  const isExact = Math.abs(root.value) <= CLOSED * (high - low)
+  return closedBy(balance, root.at, isExact ? null : root.value / innerM2KPerW)
+}
 
-  // The bracket closed in on a jump between two ranges of a correlation: the flux that the layers carry lies between
-  // the fluxes of the two sides, and that flux closes the balance.
-  const fluxHere = fluxAt(excessK)
-  const fluxBeyond = fluxAt(root.otherEnd)
-  if (Math.abs(fluxHere - fluxBeyond) <= JUMP * Math.abs(fluxHere)) {
-    return finished(excessK, fluxAt(excessK), convectionAt(excessK), 'steep')
+/** How often the first guess is put into its own rough film; only speed depends on it. */
+const GUESS_ROUNDS = 2
+
+/** Where the balance may close, by a rough film: the layers' own resistance is known. */
+function guessedExcessK(balance: Balance): number {
+  const { mediumExcessK, surroundingsExcessK, sunAbsorbedWPerM2, rough } = balance
+  const resistanceM2KPerW = balance.resistanceM2KPerW(mediumExcessK / 2)
+  let guessK = mediumExcessK / 2
+  for (let round = 0; round < GUESS_ROUNDS; round += 1) {
+    const radiation = balance.radiationWPerM2K(guessK)
+    guessK =
+      (mediumExcessK + resistanceM2KPerW * (radiation * surroundingsExcessK + sunAbsorbedWPerM2)) /
+      (1 + resistanceM2KPerW * (rough.film(guessK) + radiation))
   }
-  const flux = bracketedRoot(
-    (trial) => excessK + drivenK(excessK, trial) - mediumExcessK,
+  return guessK
+}
+
+/** By the flux of the film; where that is off by so much, by the flux that the layers carry. */
+function closedBy(balance: Balance, excessK: number, offWPerM2: number | null): Closed {
+  const filmFlux = balance.fluxWPerM2(excessK)
+  // Behind much lagging the last digits of the film's flux are kelvins at the medium: there the layers tell the flux.
+  const fluxWPerM2 =
+    offWPerM2 === null
+      ? filmFlux
+      : secant((trial) => balance.missingK(excessK, trial), filmFlux, filmFlux - offWPerM2)
+  const convectionWPerM2K = balance.convectionWPerM2K(excessK)
+  return { excessK, fluxWPerM2, convectionWPerM2K, closure: 'closed' }
+}
+
+/**
+ * The bracket closed in on a jump between two ranges of a correlation: the flux that the layers carry lies between the
+ * fluxes of the two sides, and that flux closes the balance.
+ */
+function onJump(balance: Balance, { at: excessK, otherEnd }: Root): Closed {
+  const fluxHere = balance.fluxWPerM2(excessK)
+  const fluxBeyond = balance.fluxWPerM2(otherEnd)
+  if (Math.abs(fluxHere - fluxBeyond) <= JUMP * Math.abs(fluxHere)) {
+    return { ...closedBy(balance, excessK, null), closure: 'steep' }
+  }
+  const fluxWPerM2 = bracketedRoot(
+    (trial) => balance.missingK(excessK, trial),
     { low: Math.min(fluxHere, fluxBeyond), high: Math.max(fluxHere, fluxBeyond) },
     { width: 0, value: 0 },
   ).at
-  const radiated = radiationAt(excessK) * (excessK - surroundingsExcessK) - sunAbsorbedWPerM2
-  return finished(excessK, flux, (flux - radiated) / excessK, 'on-jump')
+  const radiated = balance.radiatedWPerM2(excessK) - balance.sunAbsorbedWPerM2
+  const convectionWPerM2K = (fluxWPerM2 - radiated) / excessK
+  return { excessK, fluxWPerM2, convectionWPerM2K, closure: 'on-jump' }
 }
 
 /** One step of the rule of false position from two points that are near a root. */
@@ -222,46 +199,4 @@ function secant(f: (x: number) => number, x0: number, x1: number): number {
   const f0 = f(x0)
   const f1 = f(x1)
   return f1 === f0 ? x1 : x1 - (f1 * (x1 - x0)) / (f1 - f0)
-}
-
-/** So little that the layers stay at one temperature. */
-const TRIAL_W_PER_M2 = 1e-3
-
-/** How often the first guess is put into its own rough film; only speed depends on it. */
-const GUESS_ROUNDS = 2
-
-/** Inner minus outer temperature over all layers [K], for a flux on the outer area. */
-export function acrossLayersK(
-  layers: readonly Layer[],
-  formsM: readonly number[],
-  surfaceC: number,
-  flux: number,
-): number {
-  let differenceK = 0
-  for (let index = layers.length - 1; index >= 0; index -= 1) {
-    const layer = layers[index] as Layer
-    differenceK += layerDifferenceK(
-      layer.conductivity,
-      surfaceC + differenceK,
-      flux * (formsM[index] as number),
-    )
-  }
-  return differenceK
-}
-
-/** Temperatures from the bare thing's surface to the outer surface [°C]. */
-function interfaces(
-  layers: readonly Layer[],
-  formsM: readonly number[],
-  surfaceC: number,
-  flux: number,
-): number[] {
-  const tempsC = new Array<number>(layers.length + 1).fill(surfaceC)
-  let tempC = surfaceC
-  for (let index = layers.length - 1; index >= 0; index -= 1) {
-    const layer = layers[index] as Layer
-    tempC += layerDifferenceK(layer.conductivity, tempC, flux * (formsM[index] as number))
-    tempsC[index] = tempC
-  }
-  return tempsC
 }
