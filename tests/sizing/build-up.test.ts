@@ -1,35 +1,41 @@
 import { describe, expect, test } from 'vitest'
 import { bare, rungsOf, settle, solverLayers } from '#sizing/build-up.ts'
 import { installedCostOf } from '#sizing/cost.ts'
-import type { MoneyTerms } from '#sizing/problem.ts'
+import type { MoneyTerms, Problem } from '#sizing/problem.ts'
 import { problemOf } from '../model/resolve/problem.ts'
+import { once } from '../once.ts'
 import { sized, steamRun } from './catalogue.ts'
 
 const { material: _material, ...without } = steamRun
 const weighed = { fuel: 'natural_gas', hoursPerYear: 8000 }
 
 describe('same material in two layers', () => {
-  const twice = problemOf({
-    ...without,
-    ...weighed,
-    layers: 'stone_wool_pipe_section:40;stone_wool_pipe_section:50',
-  })
-  const once = problemOf({ ...steamRun, ...weighed, thicknessM: 0.09 })
+  const twice = once(() =>
+    problemOf({
+      ...without,
+      ...weighed,
+      layers: 'stone_wool_pipe_section:40;stone_wool_pipe_section:50',
+    }),
+  )
+  const single = once(() => problemOf({ ...steamRun, ...weighed, thicknessM: 0.09 }))
 
   test('is one conduction layer', () => {
-    const [rung] = rungsOf(twice)
+    const [rung] = rungsOf(twice())
     expect(rung && solverLayers(rung)).toEqual([
-      { thicknessM: expect.closeTo(0.09, 12), conductivity: once.layers[0]?.material.conductivity },
+      {
+        thicknessM: expect.closeTo(0.09, 12),
+        conductivity: single().layers[0]?.material.conductivity,
+      },
     ])
     expect(rung?.piecesM).toEqual([0.04, 0.05])
   })
 
   test('priced by the layer factor, like the rung of 40 + 50 mm', () => {
-    const cost = (problem: typeof once): number | null => {
+    const cost = (problem: Problem): number | null => {
       const [rung] = rungsOf(problem)
       return rung ? installedCostOf(problem, rung, problem.money as MoneyTerms) : null
     }
-    expect(cost(twice)).toBeCloseTo(cost(once) ?? 0, 9)
+    expect(cost(twice())).toBeCloseTo(cost(single()) ?? 0, 9)
   })
 
   test('fixed and sized of one material too', () => {
@@ -42,7 +48,7 @@ describe('same material in two layers', () => {
   })
 
   test('one name with two curves is two materials', () => {
-    const [layer] = once.layers
+    const [layer] = single().layers
     if (!layer) throw new Error('No layer')
     const other = { ...layer.material, conductivity: { ...layer.material.conductivity } }
     expect(settle([layer, { ...layer, material: other }], null).layers).toHaveLength(2)

@@ -7,6 +7,7 @@ import { writeReason } from '#sizing/reason.ts'
 import type { LimitName, LimitResult, Rating, RunResult } from '#sizing/result.ts'
 import { siWords } from '#sizing/words.ts'
 import { usualValues } from '../model/any-values.ts'
+import { once } from '../once.ts'
 import { coldRun, index, sized, steamRun } from './catalogue.ts'
 
 const weighed: RunValues = { fuel: 'natural_gas', hoursPerYear: 8000 }
@@ -89,12 +90,12 @@ describe('other answers', () => {
 })
 
 describe('numbers that tie at one decimal are told apart', () => {
-  const base = sized({ ...steamRun, mediumC: 350 })
-  const chosenC = base.chosen?.touchSurfaceC ?? Number.NaN
-  const thinnerC = thinnerOf(base)?.touchSurfaceC ?? Number.NaN
+  const base = once(() => sized({ ...steamRun, mediumC: 350 }))
+  const chosenC = (): number => base().chosen?.touchSurfaceC ?? Number.NaN
+  const thinnerC = (): number => thinnerOf(base())?.touchSurfaceC ?? Number.NaN
 
   test.each([0.04, 0.004])('%d K below the bound', (gapK) => {
-    const { reason } = sized({ ...steamRun, mediumC: 350, maxSurfaceC: chosenC + gapK })
+    const { reason } = sized({ ...steamRun, mediumC: 350, maxSurfaceC: chosenC() + gapK })
     const [, value, bound] = /gives (\S+) °C against (\S+) °C/.exec(reason) ?? []
     expect(Number(value)).toBeLessThan(Number(bound))
     // No more digits than it takes.
@@ -103,7 +104,7 @@ describe('numbers that tie at one decimal are told apart', () => {
 
   test('a thinner rung that fails by as little just misses it', () => {
     const at = (belowK: number): string =>
-      sized({ ...steamRun, mediumC: 350, maxSurfaceC: thinnerC - belowK }).reason
+      sized({ ...steamRun, mediumC: 350, maxSurfaceC: thinnerC() - belowK }).reason
     expect(at(0.004)).toContain('50 mm would just miss it')
     const [, bound] = /against (\S+) °C/.exec(at(0.1)) ?? []
     const [, failed] = /would give (\S+) °C/.exec(at(0.1)) ?? []
