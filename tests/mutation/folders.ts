@@ -98,7 +98,11 @@ export const parts: readonly Part[] = [
   ...solver,
   rest('solver/heat', ['solver/{film,from-surface,solve}{,.*}.test.ts'], solver),
   ...sizing,
-  rest('sizing/rungs', ['sizing/*.test.ts'], sizing),
+  rest(
+    'sizing/rungs',
+    ['sizing/{build-up,continuous,ladder,money,oracle,reason,run-loss,size}{,.*}.test.ts'],
+    sizing,
+  ),
   whole('money'),
   whole('touch'),
 ]
