@@ -72,10 +72,12 @@ function streamEndC(
 /** Temperature of the medium at which the whole run, its fittings included, would lose nothing [°C]. */
 export function tendsTo(problem: Problem, settled: Settled): number {
   const condition = problem.conditions.loss
+  const { areBare, bareAreaM2, ends } = problem.fittings
+  const asksBare = settled.layers.length > 0 && areBare && (bareAreaM2 > 0 || ends > 0)
   return equilibriumC(condition, (mediumC) => {
     const state = (of: Settled) => solve(systemOf(problem, of, { ...condition, mediumC }))
     const own = state(settled)
-    const bareState = problem.fittings.bareAreaM2 > 0 ? state(bare) : own
+    const bareState = asksBare ? state(bare) : own
     return runLoss(problem, settled, own, bareState)?.totalW ?? 0
   })
 }

@@ -15,6 +15,7 @@ import {
   usualRanges,
 } from './sensitivity-moves.ts'
 import { size } from './size.ts'
+import { solveStates } from './states.ts'
 
 /** What moves the chosen rung comes first, then by influence. */
 export function sensitivityOf(
@@ -57,7 +58,7 @@ function settledAs(problem: Problem, shown: Rating | null): Settled {
 const SAME_M = 1e-9
 
 const ratedBesideBare = (problem: Problem, settled: Settled): Rated =>
-  rate(problem, settled, settled.layers.length === 0 ? null : rate(problem, bare, null).states)
+  rate(problem, settled, settled.layers.length === 0 ? null : solveStates(problem, bare))
 
 function sensitivity(given: Problem, base: Compared, { input, unit, ends }: Move): Sensitivity {
   const found = ends.map((end) => endOf(given, base, end, input === 'thickness'))

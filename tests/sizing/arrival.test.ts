@@ -200,6 +200,22 @@ describe('where the medium arrives', () => {
     expect(sized({ ...bareLine, mediumC: endC }).chosen?.heatLossWPerM).toBeCloseTo(0, 4)
   })
 
+  test('what bare ends take up of the sun counts to where it tends, without any bare fitting', () => {
+    const capped: RunValues = {
+      ...line,
+      thicknessM: 0.1,
+      fittings: 'bare',
+      ends: 2,
+      solarWPerM2: 600,
+      lengthM: 0.5,
+      flowKgPerS: 1e-6,
+    }
+    const endC = arrivesC(capped)
+    const ofLagging = arrivesC({ ...capped, ends: 0 })
+    expect(endC).toBeGreaterThan(ofLagging + 1)
+    expect(sized({ ...capped, mediumC: endC }).chosen?.heatLossW).toBeCloseTo(0, 6)
+  })
+
   test('what bare fittings lose cools it too', () => {
     const problem = problemOf(line)
     const fitted = (bareAreaM2: number, change: Partial<Problem['fittings']> = {}): number =>
