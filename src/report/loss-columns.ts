@@ -1,5 +1,6 @@
 /** The columns of a table of losses, with the totals under them. */
 import type { RunLoss, YearlyLoss } from '#model/run-loss.ts'
+import { inchName } from '#sizing/words.ts'
 import {
   ABSENT,
   formatNumber,
@@ -11,7 +12,7 @@ import {
 } from '#units/format.ts'
 import { displayUnit, type QuantityName, type UnitSystem } from '#units/quantities.ts'
 import type { LossLine } from './loss-csv.ts'
-import { inchName, sizeWords } from './run-words.ts'
+import { sizeWords } from './run-words.ts'
 import type { TextColumn } from './text-table.ts'
 
 /** Which runs each line of totals adds up. */

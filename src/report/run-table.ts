@@ -1,12 +1,12 @@
 /** The answer for people at a terminal: one line per run, what was assumed, and the cautions. */
 import type { Rating } from '#sizing/result.ts'
+import { inchName } from '#sizing/words.ts'
 import { formatQuantity, formatWithUnit, thicknessDecimals, unitLabel } from '#units/format.ts'
 import type { UnitSystem } from '#units/quantities.ts'
 import { restated } from '#units/restate.ts'
 import { cautionLines, inParts, noteLines, tagList } from './closing-lines.ts'
 import {
   governedBy,
-  inchName,
   isJudged,
   meetsLimits,
   reasonWords,

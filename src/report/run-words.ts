@@ -1,9 +1,9 @@
 /** A run in the words of tables and documents, in either system of units. */
 import type { RunValues } from '#model/fields.ts'
 import { writeReason } from '#sizing/reason.ts'
-import { type Governing, limitWords, type RunResult } from '#sizing/result.ts'
-import type { Words } from '#sizing/words.ts'
-import { formatNumber, formatQuantity, formatWithUnit } from '#units/format.ts'
+import { type Governing, type LimitUnit, limitWords, type RunResult } from '#sizing/result.ts'
+import { inchName, type Words } from '#sizing/words.ts'
+import { formatQuantity, formatWithUnit } from '#units/format.ts'
 import type { QuantityName, UnitSystem } from '#units/quantities.ts'
 import { inSentence } from '#units/restate.ts'
 
@@ -32,11 +32,6 @@ export function isJudged({ limits }: RunResult): boolean {
   return limits.length > 0
 }
 
-/** What an inch series calls a thickness: "1.5 in"; the thickness itself differs by pipe. */
-export function inchName(nominalThicknessM: number): string {
-  return `${Number((nominalThicknessM / 0.0254).toFixed(3))} in`
-}
-
 /** What decided, and whether it is not enough: "Touch", "Unmet", "Fixed, fails". */
 export function governedBy(result: RunResult): string {
   const word = governingWords[result.governing]
@@ -63,14 +58,15 @@ export function reasonWords(result: RunResult, system: UnitSystem): string {
   return system === 'si' ? result.reason : writeReason(result, usWords)
 }
 
-const quantityOf: Readonly<Record<string, QuantityName>> = {
+/** What a limit is judged in, as a quantity that is shown in either system. */
+export const limitQuantities: Readonly<Record<LimitUnit, QuantityName>> = {
   '°C': 'temperature',
   K: 'temperatureDifference',
   'W/m': 'heatLossPerLength',
   'W/m²': 'heatFlux',
-  m: 'size',
   h: 'hours',
-  'kg/s': 'massFlow',
+  m: 'size',
+  'kg/s': 'condensate',
   'm²K/W': 'resistance',
 }
 /** Inches and resistances tell nothing apart with one decimal. */
@@ -82,8 +78,7 @@ const usWords: Words = {
     return nominalThicknessM === null ? actual : `${inchName(nominalThicknessM)} (${actual})`
   },
   quantity: (value, unit, digits) => {
-    const quantity = quantityOf[unit]
-    if (!quantity) return `${formatNumber(value, Math.max(1, digits))} ${unit}`
+    const quantity = limitQuantities[unit]
     // A bound that is round in SI is not so here.
     return inSentence(value, quantity, 'us', Math.max(fewestDecimals[quantity] ?? 1, digits))
   },

@@ -1,30 +1,32 @@
 /** How numbers are said in a reason, in the units of the reader. */
-import type { LimitResult, Rating } from './result.ts'
+import type { LimitResult, LimitUnit, Rating } from './result.ts'
 
 /** How numbers are said; the window and the documents pass their own units. */
 export interface Words {
   /** A thickness, and what an inch series calls it where it is one of those. */
   thickness(thicknessM: number, nominalThicknessM: number | null): string
-  /** A number in one of the units of `LimitResult`, with its unit; `digits` after the point in SI. */
-  quantity(value: number, unit: string, digits: number): string
+  /** A number with its unit; `digits` after the point in SI. */
+  quantity(value: number, unit: LimitUnit, digits: number): string
 }
 
 /** What reads better than the SI unit: millimetres and kilograms an hour. */
-const shownUnits: Readonly<Partial<Record<string, { unit: string; per: number }>>> = {
+const shownUnits: Readonly<Partial<Record<LimitUnit, { unit: string; per: number }>>> = {
   m: { unit: 'mm', per: 0.001 },
   'kg/s': { unit: 'kg/h', per: 1 / 3600 },
 }
 
 /** A value in the unit that it is said in. */
-export const shownValue = (value: number, unit: string): number =>
+export const shownValue = (value: number, unit: LimitUnit): number =>
   value / (shownUnits[unit]?.per ?? 1)
+
+/** What an inch series calls a thickness: "1.5 in"; the thickness itself differs by pipe. */
+export const inchName = (nominalThicknessM: number): string =>
+  `${Number((nominalThicknessM / 0.0254).toFixed(3))} in`
 
 export const siWords: Words = {
   thickness: (thicknessM, nominalThicknessM) => {
     const mm = `${Number((thicknessM * 1000).toFixed(1))} mm`
-    return nominalThicknessM === null
-      ? mm
-      : `${Number((nominalThicknessM / 0.0254).toFixed(3))} in (${mm})`
+    return nominalThicknessM === null ? mm : `${inchName(nominalThicknessM)} (${mm})`
   },
   quantity: (value, unit, digits) =>
     `${minus(shownValue(value, unit).toFixed(digits))} ${shownUnits[unit]?.unit ?? unit}`,

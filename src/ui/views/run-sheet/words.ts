@@ -1,6 +1,7 @@
 /** The words of the run sheet: bounds, build-up, medium, payback. */
 import type { Catalogue } from '#catalogue/types.ts'
 import type { RunValues } from '#model/fields.ts'
+import { limitQuantities } from '#report/run-words.ts'
 import type { LimitResult, LimitUnit, Rating } from '#sizing/result.ts'
 import {
   formatNumber,
@@ -9,19 +10,8 @@ import {
   thicknessDecimals,
   unitLabel,
 } from '#units/format.ts'
-import type { QuantityName, UnitSystem } from '#units/quantities.ts'
+import type { UnitSystem } from '#units/quantities.ts'
 
-/** Quantities of the units in which limits are judged. */
-const quantityOfUnit: Readonly<Record<LimitUnit, QuantityName>> = {
-  '°C': 'temperature',
-  K: 'temperatureDifference',
-  'W/m': 'heatLossPerLength',
-  'W/m²': 'heatFlux',
-  h: 'hours',
-  m: 'size',
-  'kg/s': 'condensate',
-  'm²K/W': 'resistance',
-}
 /** Units of what people write down as whole numbers. */
 const chosenWhole: ReadonlySet<LimitUnit> = new Set(['°C', 'K', 'h', 'm'])
 
@@ -32,7 +22,7 @@ export function limitNumber(
   system: UnitSystem,
   decimals?: number,
 ): string {
-  const quantity = quantityOfUnit[unit]
+  const quantity = limitQuantities[unit]
   // Sizes are names rather than results.
   const isSize = unit === 'm' && isWhole(shownValue(value, quantity, system) ?? 0)
   return formatWithUnit(value, quantity, system, decimals ?? (isSize ? 0 : undefined))
@@ -40,7 +30,7 @@ export function limitNumber(
 
 /** `at most 57.6 °C`, and `at most 650 °C`: a bound that somebody wrote down as a whole number is said as one. */
 export function boundWords({ rule, bound, unit }: LimitResult, system: UnitSystem): string {
-  const shown = shownValue(bound, quantityOfUnit[unit], system) ?? 0
+  const shown = shownValue(bound, limitQuantities[unit], system) ?? 0
   const decimals = chosenWhole.has(unit) && isWhole(shown) ? 0 : undefined
   return `${rule} ${limitNumber(bound, unit, system, decimals)}`
 }
