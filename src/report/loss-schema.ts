@@ -1,13 +1,9 @@
 /** The schema of what `loss --json` writes; `npm run schema -- loss` prints it as JSON Schema. */
-import '#model/zod-settings.ts'
 import { z } from 'zod'
 import type { LossTotal } from '#model/loss-total.ts'
 import type { RunLoss } from '#model/run-loss.ts'
 import type { Caution } from './cautions.ts'
-
-const finite = (description: string) => z.number().describe(description)
-const orNull = (description: string) => z.number().nullable().describe(description)
-const text = (description: string) => z.string().describe(description)
+import { caution, finite, type IsSame, orNull, text } from './schema-parts.ts'
 
 const yearlyLoss = z
   .strictObject({
@@ -98,13 +94,7 @@ export const listLossSchema = z
   .strictObject({
     runs: z.array(runLoss),
     total: lossTotal,
-    cautions: z.array(
-      z.strictObject({
-        code: text('Name of the caution, stable over versions'),
-        text: text('The caution'),
-        deferTo: text('Who decides in doubt'),
-      }),
-    ),
+    cautions: z.array(caution),
   })
   .describe('What `lagwright loss --json` writes')
 
@@ -120,10 +110,6 @@ export function lossJsonSchema(): Record<string, unknown> {
   return { ...z.toJSONSchema(listLossSchema), title: 'Lagwright: losses of runs' }
 }
 
-// The schema and the types say the same, both ways: either line fails to compile where they part.
-type Plain<T> = T extends readonly unknown[] | object
-  ? { -readonly [K in keyof T]: Plain<T[K]> }
-  : T
-type Same<A, B> = (<T>() => T extends A ? 1 : 2) extends <T>() => T extends B ? 1 : 2 ? true : false
-const schemaIsType: Same<Plain<z.output<typeof listLossSchema>>, Plain<ListLoss>> = true
+// The schema and the types say the same, both ways: the line fails to compile where they part.
+const schemaIsType: IsSame<z.output<typeof listLossSchema>, ListLoss> = true
 void schemaIsType

@@ -1,12 +1,8 @@
 /** The schema of what `size --json` writes; `npm run schema` prints it as JSON Schema. */
-import '#model/zod-settings.ts'
 import { z } from 'zod'
 import type { RunResult } from '#sizing/result.ts'
 import type { Caution } from './cautions.ts'
-
-const finite = (description: string) => z.number().describe(description)
-const orNull = (description: string) => z.number().nullable().describe(description)
-const text = (description: string) => z.string().describe(description)
+import { caution, finite, type IsSame, orNull, text } from './schema-parts.ts'
 
 const note = z
   .strictObject({
@@ -179,12 +175,6 @@ export const runResultSchema = z
     description: 'The result of one run. SI units, temperatures in °C, heat flow positive outwards',
   })
 
-const caution = z.strictObject({
-  code: text('Name of the caution, stable over versions'),
-  text: text('The caution'),
-  deferTo: text('Who decides in doubt'),
-})
-
 export const sizedSchema = z
   .strictObject({ runs: z.array(runResultSchema), cautions: z.array(caution) })
   .describe('What `lagwright size --json` writes')
@@ -200,10 +190,6 @@ export function sizedJsonSchema(): Record<string, unknown> {
   return { ...z.toJSONSchema(sizedSchema), title: 'Lagwright: sized runs' }
 }
 
-// The schema and the types say the same, both ways: either line fails to compile where they part.
-type Plain<T> = T extends readonly unknown[] | object
-  ? { -readonly [K in keyof T]: Plain<T[K]> }
-  : T
-type Same<A, B> = (<T>() => T extends A ? 1 : 2) extends <T>() => T extends B ? 1 : 2 ? true : false
-const schemaIsType: Same<Plain<z.output<typeof sizedSchema>>, Plain<Sized>> = true
+// The schema and the types say the same, both ways: the line fails to compile where they part.
+const schemaIsType: IsSame<z.output<typeof sizedSchema>, Sized> = true
 void schemaIsType

@@ -1,10 +1,8 @@
 /** The schema of what `working --json` writes; `npm run schema -- working` prints it as JSON Schema. */
-import '#model/zod-settings.ts'
 import { z } from 'zod'
 import type { Working } from '#sizing/working/types.ts'
 import { type Caution, cautions } from './cautions.ts'
-
-const text = (description: string) => z.string().describe(description)
+import { caution, type IsSame, text } from './schema-parts.ts'
 
 const figureFields = {
   symbol: text('Symbol, of one meaning within its section'),
@@ -42,12 +40,6 @@ const section = z
   })
   .meta({ id: 'Section', description: 'A part of the working that stands for itself' })
 
-const caution = z.strictObject({
-  code: text('Name of the caution, stable over versions'),
-  text: text('The caution'),
-  deferTo: text('Who decides in doubt'),
-})
-
 export const workingSchema = z
   .strictObject({
     tag: text('Tag of the run'),
@@ -66,13 +58,9 @@ export function writeWorkingJson(working: Working): string {
   return `${JSON.stringify({ ...working, cautions })}\n`
 }
 
-// The schema and the types say the same, both ways: either line fails to compile where they part.
-type Plain<T> = T extends readonly unknown[] | object
-  ? { -readonly [K in keyof T]: Plain<T[K]> }
-  : T
-type Same<A, B> = (<T>() => T extends A ? 1 : 2) extends <T>() => T extends B ? 1 : 2 ? true : false
+// The schema and the types say the same, both ways: the line fails to compile where they part.
 interface Written extends Working {
   readonly cautions: readonly Caution[]
 }
-const schemaIsType: Same<Plain<z.output<typeof workingSchema>>, Plain<Written>> = true
+const schemaIsType: IsSame<z.output<typeof workingSchema>, Written> = true
 void schemaIsType
