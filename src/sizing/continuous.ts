@@ -93,7 +93,8 @@ export function limitEnds(problem: Problem): LimitEnd[] {
   return ends
 }
 
-function limitsWithLowerEnd(limits: Limits): LimitName[] {
+/** The limits a run asks for that lagging meets from some thickness on: what it can be sized by. */
+export function limitsWithLowerEnd(limits: Limits): LimitName[] {
   const set: LimitName[] = []
   if (limits.maxSurfaceC !== null || limits.burn !== null) set.push('touch')
   if (limits.maxLossWPerM !== null || limits.maxLossWPerM2 !== null) set.push('loss')

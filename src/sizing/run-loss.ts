@@ -43,7 +43,7 @@ export function runLoss(
 }
 
 /** Days of the months, January first, of a common year. */
-const MONTH_DAYS = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31]
+export const MONTH_DAYS = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31]
 const YEAR_DAYS = 365
 
 /** One part of the year: its share, and the state that stands for it, lagged and bare. */
@@ -65,8 +65,10 @@ function yearParts(states: States, bareStates: States): YearPart[] {
 }
 
 /** Heat that has to be made up flows one way; in a month in which it flows the other way nothing has to be. */
-const madeUp = (flow: number, yearlyFlow: number): number =>
-  yearlyFlow === 0 || flow > 0 === yearlyFlow > 0 ? flow : 0
+export const isMadeUp = (flow: number, yearlyFlow: number): boolean =>
+  yearlyFlow === 0 || flow > 0 === yearlyFlow > 0
+
+const madeUp = (flow: number, yearlyFlow: number): number => (isMadeUp(flow, yearlyFlow) ? flow : 0)
 
 /** Heat flow to be made up for one unit, mean of the year [W]. */
 export function yearlyFlowPerUnit(states: States): number {

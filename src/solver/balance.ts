@@ -1,7 +1,8 @@
-import { type Film, filmOf, type RoughFilm, radiates, roughFilmOf, type Weather } from './film.ts'
+import { type Film, filmOf, radiates, type Weather } from './film.ts'
 import type { FaceShape } from './geometry.ts'
 import { acrossLayersK, insideM2KPerW } from './layers.ts'
 import { radiationSlopeWPerM2K, radiationWPerM2K, radiativeC } from './radiation.ts'
+import { type RoughFilm, roughFilmOf } from './rough-film.ts'
 import type { System } from './types.ts'
 
 /**

@@ -42,6 +42,9 @@ export {
   coolingTimeS,
   FREEZING_C,
   freezingTimeS,
+  ICE_KG_PER_M3,
+  ICE_LATENT_J_PER_KG,
+  ICE_W_PER_M_K,
   wallCapacityJPerMK,
   waterCapacityJPerMK,
 } from './frost.ts'

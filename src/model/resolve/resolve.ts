@@ -1,4 +1,5 @@
 /** From the values of a run to a problem that can be sized: everything looked up, checked and, where assumed, said. */
+import { limitsWithLowerEnd } from '#sizing/continuous.ts'
 import type { Problem } from '#sizing/problem.ts'
 import type { Issue } from '#sizing/result.ts'
 import type { RunValues } from '../fields.ts'
@@ -49,7 +50,7 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
     money !== null &&
     (finish === null || finishPrice !== null) &&
     buildUp?.layers.every(({ material }) => material.price !== null)
-  const isSized = isWeighed || setsAny(limits) || isAskedInVain
+  const isSized = isWeighed || limitsWithLowerEnd(limits).length > 0 || isAskedInVain
   if (conditions && buildUp && buildUp.steps.length > 0 && !isSized) {
     findings.fault(
       'reach',
@@ -117,13 +118,3 @@ function withoutBlanks(values: RunValues): RunValues {
 /** A limit that is asked for but lacks something has its own fault: that the run has none would be no news. */
 const asksMore = ({ frostHours, maxDropK, codeTable }: RunValues): boolean =>
   frostHours !== undefined || maxDropK !== undefined || codeTable !== undefined
-
-const setsAny = (limits: Problem['limits']): boolean =>
-  limits.maxSurfaceC !== null ||
-  limits.burn !== null ||
-  limits.maxLossWPerM !== null ||
-  limits.maxLossWPerM2 !== null ||
-  limits.damp !== null ||
-  limits.frost !== null ||
-  (limits.arrival !== null && limits.arrival.maxDropK !== null) ||
-  limits.code !== null

@@ -1,5 +1,5 @@
 /** Frost: how long standing water takes to reach 0 °C and to freeze, from two steady states. */
-import { solve } from '#solver/index.ts'
+import { ICE_KG_PER_M3, ICE_LATENT_J_PER_KG, ICE_W_PER_M_K, solve } from '#solver/index.ts'
 import type { Settled } from '../build-up.ts'
 import { equilibriumC } from '../equilibrium.ts'
 import { timeToFreezeH } from '../frost.ts'
@@ -12,8 +12,7 @@ import { stateSections } from './state.ts'
 import type { Section } from './types.ts'
 
 const COOLING = 'ASHRAE Handbook Fundamentals 2021 (SI), chapter 23, eqs. (1) and (2)'
-const FREEZING =
-  'energy balance of a ring of ice, quasi-steady; ice 920 kg/m³, 334 kJ/kg and 2.2 W/(m·K), from memory'
+const FREEZING = `energy balance of a ring of ice, quasi-steady; ice ${ICE_KG_PER_M3} kg/m³, ${ICE_LATENT_J_PER_KG / 1000} kJ/kg and ${ICE_W_PER_M_K} W/(m·K), from memory`
 
 export function frostSections(problem: Problem, settled: Settled, rating: Rating): Section[] {
   const { frost } = problem.limits
@@ -64,14 +63,20 @@ export function frostSections(problem: Problem, settled: Settled, rating: Rating
       'W/m',
     )
     ledger.step('Resistance then', 'R_0', '(0 − θ_e) / Φ_0', 'm·K/W')
-    ledger.step('Heat to freeze a metre', 'H_f', '920 × 334000 × π / 4 × d^2', 'J/m', {
-      source: FREEZING,
-    })
+    ledger.step(
+      'Heat to freeze a metre',
+      'H_f',
+      `${ICE_KG_PER_M3} × ${ICE_LATENT_J_PER_KG} × π / 4 × d^2`,
+      'J/m',
+      {
+        source: FREEZING,
+      },
+    )
     const growth = frost.iceFraction < 1 ? '(f + (1 − f) × ln(1 − f))' : '1'
     ledger.step(
       'Time to freeze that share, the ice hindering its own growth',
       't_f',
-      `H_f / (0 − θ_e) × (f × R_0 + ${growth} / (4 × π × 2.2)) / 3600`,
+      `H_f / (0 − θ_e) × (f × R_0 + ${growth} / (4 × π × ${ICE_W_PER_M_K})) / 3600`,
       'h',
       { source: FREEZING },
     )

@@ -2,7 +2,7 @@
 import { yearlyEnergyCost, yearlyFuelKWh, yearlyKWh } from '#money/energy-cost.ts'
 import type { Settled } from '../build-up.ts'
 import type { Problem } from '../problem.ts'
-import { runLoss, yearlyRunLossW } from '../run-loss.ts'
+import { isMadeUp, MONTH_DAYS, runLoss, yearlyRunLossW } from '../run-loss.ts'
 import type { States } from '../states.ts'
 import { Ledger } from './ledger.ts'
 import type { Section } from './types.ts'
@@ -69,7 +69,6 @@ const MONTHS = [
   'November',
   'December',
 ]
-const MONTH_DAYS = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31]
 
 function monthSteps(
   ledger: Ledger,
@@ -83,11 +82,11 @@ function monthSteps(
   states.months.forEach((state, index) => {
     const bareState = bareStates.months[index] ?? bareStates.loss
     const lossW = runLoss(problem, settled, state, bareState)?.totalW ?? 0
-    const isMadeUp = yearlyW === 0 || lossW > 0 === yearlyW > 0
+    const counts = isMadeUp(lossW, yearlyW)
     ledger.given(
-      `${MONTHS[index] ?? 'Month'}${isMadeUp ? '' : `, in which heat flows the other way`}`,
+      `${MONTHS[index] ?? 'Month'}${counts ? '' : ', in which heat flows the other way'}`,
       `Q_${index + 1}`,
-      isMadeUp ? lossW : 0,
+      counts ? lossW : 0,
       'W',
     )
   })
