@@ -74,21 +74,11 @@ const solver: readonly Part[] = [
 ]
 
 const sizing: readonly Part[] = [
-  insideFolder('sizing', 'working', ['report/working.test.ts']),
+  insideFolder('sizing', 'working', ['report/working{,-*}.test.ts']),
   ofOneName(
     'sizing',
     'limits',
-    [
-      'arrival',
-      'code',
-      'equilibrium',
-      'frost',
-      'limits',
-      'passes-limit',
-      'service',
-      'space',
-      'states',
-    ],
+    ['arrival', 'code', 'equilibrium', 'frost', 'limits', 'passes-limit', 'service', 'space'],
     ['size'],
   ),
   ofOneName('sizing', 'inverse', ['moved', 'sensitivity', 'sensitivity-moves', 'survey']),
