@@ -21,12 +21,13 @@ export function noteConditions(
   if (judged.frost && values.frostAirC === undefined) {
     findings.note('frost-air-assumed', `Frost is judged at ${air}: no coldest air is given.`)
   }
-  if (values.filmWPerM2K !== undefined) {
+  const { film } = conditions.loss
+  if (typeof film === 'object') {
     findings.note(
       'film-fixed',
-      `The film outside is fixed at ${plain(values.filmWPerM2K, 2)} W/m²K, convection and radiation together, for loss and frost; touch and damp are judged with the film worked out.`,
+      `The film outside is fixed at ${plain(film.fixedWPerM2K, 2)} W/m²K, convection and radiation together, for loss and frost; touch and damp are judged with the film worked out.`,
     )
-  } else if (values.method === 'simplified') {
+  } else if (film === 'simplified') {
     findings.note(
       'film-simplified',
       'Loss and frost are reckoned with the simplified film; touch, damp and service with the detailed one, since the simplified makes hot surfaces too cool.',

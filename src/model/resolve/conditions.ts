@@ -33,23 +33,26 @@ export function resolveConditions(
     findings.fault('airC', 'nothing', 'the temperature of the air around the run in °C')
     return null
   }
-  const place = { ...values, airC }
-  const surfaces = resolveSurfaces(values, thing, finish, findings)
   const isBuried = thing.shape.kind === 'buried-pipe'
   if (isBuried) noteUnusedUnderground(values, findings)
+  const place = isBuried ? underground({ ...values, airC }) : { ...values, airC }
+  const surfaces = resolveSurfaces(place, thing, finish, findings)
   return {
-    loss: lossCondition(place, medium, surfaces, isBuried),
+    loss: lossCondition(place, medium, surfaces),
     touch: touchCondition(place, medium, surfaces),
     damp: dampCondition(place, medium, surfaces),
-    frost: frostCondition(place, medium, surfaces, isBuried),
-    survey: surveyCondition(place, medium, surfaces, isBuried),
-    months: months.map((monthC) =>
-      lossCondition(inMonth(place, monthC), medium, surfaces, isBuried),
-    ),
+    frost: frostCondition(place, medium, surfaces),
+    survey: surveyCondition(place, medium, surfaces),
+    months: months.map((monthC) => lossCondition(inMonth(place, monthC), medium, surfaces)),
   }
 }
 
 type Place = RunValues & { readonly airC: number }
+
+/** Neither sun nor sky reaches a buried run, and its film is the soil; wind and surroundings say nothing to that. */
+function underground({ filmWPerM2K: _, method: __, ...rest }: Place): Place {
+  return { ...rest, solarWPerM2: 0, skyView: 0 }
+}
 
 /** Touch and damp are always judged with the detailed film: the simplified one makes hot surfaces too cool. */
 const lossFilm = ({ filmWPerM2K, method }: RunValues): FilmChoice =>
@@ -68,12 +71,7 @@ function underSky({ airC, surroundingsC, windMPerS }: Weather, { skyView }: RunV
   return { airC, windMPerS, surroundingsC: radiantMixC({ skyView, skyC, surroundingsC }) }
 }
 
-function lossCondition(
-  place: Place,
-  { mediumC }: Medium,
-  { aged, bare }: Surfaces,
-  isBuried: boolean,
-): Condition {
+function lossCondition(place: Place, { mediumC }: Medium, { aged, bare }: Surfaces): Condition {
   const { airC } = place
   const weather = underSky(
     { airC, surroundingsC: place.surroundingsC ?? airC, windMPerS: place.windMPerS ?? 0 },
@@ -84,7 +82,7 @@ function lossCondition(
     mediumC,
     emissivity: aged.emissivity,
     bareEmissivity: bare.emissivity,
-    sunWPerM2: isBuried ? 0 : (place.solarWPerM2 ?? 0),
+    sunWPerM2: place.solarWPerM2 ?? 0,
     solarAbsorptance: aged.absorptance,
     bareSolarAbsorptance: bare.absorptance,
     film: lossFilm(place),
@@ -137,12 +135,7 @@ function dampCondition(place: Place, { coldestC }: Medium, surfaces: Surfaces): 
 }
 
 /** The coldest day, with wind, without sun; the medium is the water at the start. */
-function frostCondition(
-  place: Place,
-  { coldestC }: Medium,
-  surfaces: Surfaces,
-  isBuried: boolean,
-): Condition | null {
+function frostCondition(place: Place, { coldestC }: Medium, surfaces: Surfaces): Condition | null {
   if (place.frostHours === undefined) return null
   const airC = place.frostAirC ?? place.airC
   const cold: Place = {
@@ -153,16 +146,11 @@ function frostCondition(
     solarWPerM2: 0,
   }
   const mediumC = place.frostStartC ?? coldestC
-  return lossCondition(cold, { mediumC, hottestC: mediumC, coldestC: mediumC }, surfaces, isBuried)
+  return lossCondition(cold, { mediumC, hottestC: mediumC, coldestC: mediumC }, surfaces)
 }
 
 /** What it was on the day; always the detailed film, since a surface temperature is what was measured. */
-function surveyCondition(
-  place: Place,
-  medium: Medium,
-  surfaces: Surfaces,
-  isBuried: boolean,
-): Condition | null {
+function surveyCondition(place: Place, medium: Medium, surfaces: Surfaces): Condition | null {
   if (place.measuredSurfaceC === undefined) return null
   const airC = place.surveyAirC ?? place.airC
   const { filmWPerM2K: _, skyView: __, ...rest } = place
@@ -175,7 +163,7 @@ function surveyCondition(
     method: 'detailed',
   }
   const mediumC = place.surveyMediumC ?? medium.mediumC
-  const condition = lossCondition(day, { ...medium, mediumC }, surfaces, isBuried)
+  const condition = lossCondition(day, { ...medium, mediumC }, surfaces)
   const { surveyEmissivity } = place
   return surveyEmissivity === undefined
     ? condition
@@ -208,8 +196,10 @@ function noteUnusedUnderground(values: RunValues, findings: Findings): void {
   const given = [
     values.windMPerS !== undefined && values.windMPerS > 0 ? 'wind' : '',
     values.solarWPerM2 !== undefined && values.solarWPerM2 > 0 ? 'sun' : '',
+    values.skyView !== undefined && values.skyView > 0 ? 'sky' : '',
     values.surroundingsC === undefined ? '' : 'surroundings',
     values.filmWPerM2K === undefined ? '' : 'film',
+    values.method === 'simplified' ? 'the simplified method' : '',
   ].filter((word) => word !== '')
   if (given.length > 0) {
     findings.note('unused', `${given.join(', ')}: not used for a buried run.`)

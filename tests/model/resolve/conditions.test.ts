@@ -1,6 +1,13 @@
 /** The design conditions and emissivities, sentence by sentence of the contract. */
 import { describe, expect, test } from 'vitest'
-import { coldRun, noteCodes, refused, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
+import {
+  coldRun,
+  noteCodes,
+  refused,
+  refusedColumns,
+  sized,
+  steamRun,
+} from '../../sizing/catalogue.ts'
 import { problemOf } from './problem.ts'
 
 describe('defaults', () => {
@@ -194,4 +201,33 @@ describe('saturated steam by its pressure', () => {
 test('air is required', () => {
   const { airC: _, ...noAir } = steamRun
   expect(refusedColumns(noAir)).toEqual(['air_c'])
+})
+
+describe('a buried run', () => {
+  const buried = { ...steamRun, buryDepthM: 0.8, maxLossWPerM: 60 }
+  const sunny = { ...buried, solarWPerM2: 700, skyView: 0.5 }
+
+  test('is in nobody’s sun and under no sky, at no condition', () => {
+    const shaded = sized(buried)
+    const lit = sized(sunny)
+    expect(lit.ladder).toEqual(shaded.ladder)
+    expect(lit.bare).toEqual(shaded.bare)
+  })
+
+  test('is told so, and of no absorptance', () => {
+    const { notes } = problemOf(sunny)
+    expect(notes.map(({ text }) => text)).toContain('sun, sky: not used for a buried run.')
+    expect(noteCodes({ notes })).not.toContain('sun')
+  })
+
+  test.each([
+    [{ filmWPerM2K: 10 }, 'film: not used for a buried run.'],
+    [{ method: 'simplified' }, 'the simplified method: not used for a buried run.'],
+  ] as const)('has the soil for a film, whatever is given: %o', (film, text) => {
+    const { notes } = problemOf({ ...buried, ...film })
+    expect(notes.map((note) => note.text)).toContain(text)
+    expect(noteCodes({ notes })).not.toContain('film-fixed')
+    expect(noteCodes({ notes })).not.toContain('film-simplified')
+    expect(sized({ ...buried, ...film }).ladder).toEqual(sized(buried).ladder)
+  })
 })
