@@ -15,8 +15,16 @@ export function resolveMoney(
 ): MoneyTerms | null {
   const fuel = values.fuel === undefined ? null : index.fuel(values.fuel)
   if (fuel && !fuel.ok) findings.fault('fuel', values.fuel ?? '', fuel.message)
-  const canWeigh = values.fuel !== undefined && values.hoursPerYear !== undefined
-  if (!(values.money ?? canWeigh)) return null
+  noteOtherWay(values, gainsHeat, findings)
+  const missing = missingToWeigh(values, gainsHeat)
+  if (!(values.money ?? missing.length === 0)) {
+    if (values.money === undefined && namesEnergy(values))
+      findings.note(
+        'money-not-weighed',
+        `The cost is not weighed. For that, give ${missing.join(' and ')}.`,
+      )
+    return null
+  }
   if (values.hoursPerYear === undefined) {
     findings.fault(
       'hoursPerYear',
@@ -57,6 +65,32 @@ export function resolveMoney(
     lifeYears: values.lifeYears ?? usualMoney.lifeYears,
     labour: index.catalogue.labour,
   }
+}
+
+/** A price of energy stands for a fuel only with what it is turned into heat or cold by. */
+function missingToWeigh(values: RunValues, gainsHeat: boolean): readonly string[] {
+  const { fuel, fuelPricePerKWh, hoursPerYear } = values
+  const share = gainsHeat ? 'cop' : 'efficiency'
+  const missing: string[] = []
+  if (fuel === undefined && fuelPricePerKWh === undefined) missing.push('fuel')
+  else if (fuel === undefined && values[share] === undefined) missing.push(`${share} or fuel`)
+  return hoursPerYear === undefined ? [...missing, 'hours_per_year'] : missing
+}
+
+/** Hours alone serve the yearly heat, and terms of the job serve other runs: only energy is named to weigh its cost. */
+const namesEnergy = ({ fuel, fuelPricePerKWh }: RunValues): boolean =>
+  fuel !== undefined || fuelPricePerKWh !== undefined
+
+/** Beside each other they may be terms of a job, of which each run uses its own. */
+function noteOtherWay(
+  { efficiency, cop }: RunValues,
+  gainsHeat: boolean,
+  findings: Findings,
+): void {
+  if (gainsHeat && efficiency !== undefined && cop === undefined)
+    findings.note('unused', 'efficiency is not used: the run gains heat, which cop prices.')
+  if (!gainsHeat && cop !== undefined && efficiency === undefined)
+    findings.note('unused', 'cop is not used: the run loses heat, which efficiency prices.')
 }
 
 function noteTerms(

@@ -1,5 +1,6 @@
 /** Whether the cost is weighed, and on what terms. */
 import { describe, expect, test } from 'vitest'
+import type { RunValues } from '#model/fields.ts'
 import { coldRun, noteCodes, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
 import { problemOf } from './problem.ts'
 
@@ -14,6 +15,11 @@ describe('money defaults to yes when fuel and hours are given', () => {
     [{}, false],
     [{ ...gas, money: true }, true],
     [{ money: true, hoursPerYear: 8000, fuelPricePerKWh: 0.1 }, true],
+    [{ hoursPerYear: 8000, fuelPricePerKWh: 0.1, efficiency: 0.9 }, true],
+    [{ hoursPerYear: 8000, fuelPricePerKWh: 0.1, efficiency: 0.9, money: false }, false],
+    [{ hoursPerYear: 8000, fuelPricePerKWh: 0.1 }, false],
+    [{ hoursPerYear: 8000, fuelPricePerKWh: 0.1, cop: 3 }, false],
+    [{ fuelPricePerKWh: 0.1, efficiency: 0.9 }, false],
   ])('%o: %s', (own, weighed) => {
     expect(problemOf({ ...steamRun, ...own }).money !== null).toBe(weighed)
   })
@@ -23,6 +29,42 @@ describe('money defaults to yes when fuel and hours are given', () => {
     expect(refusedColumns({ ...steamRun, ...gas, fuel: 'kerosene' })).toEqual([
       'fuel_price_per_kwh',
     ])
+  })
+
+  test('a cold run is weighed by a price and a COP', () => {
+    const price = { hoursPerYear: 8000, fuelPricePerKWh: 0.1 }
+    expect(problemOf({ ...coldRun, ...price, cop: 3 }).money).not.toBeNull()
+    expect(problemOf({ ...coldRun, ...price, efficiency: 0.9 }).money).toBeNull()
+  })
+
+  test.each([
+    [{ hoursPerYear: 8000, fuelPricePerKWh: 0.1 }, 'efficiency or fuel'],
+    [{ fuelPricePerKWh: 0.1 }, 'efficiency or fuel and hours_per_year'],
+    [{ fuel: 'natural_gas' }, 'hours_per_year'],
+  ])('what is missing is said: %o', (own, missing) => {
+    const { notes } = problemOf({ ...steamRun, ...own })
+    expect(notes.find(({ code }) => code === 'money-not-weighed')?.text).toBe(
+      `The cost is not weighed. For that, give ${missing}.`,
+    )
+  })
+
+  test.each([{}, { hoursPerYear: 8000 }, { money: false, fuel: 'natural_gas' }, gas])(
+    'and only where energy is named and money not settled: %o',
+    (own) => {
+      expect(noteCodes(problemOf({ ...steamRun, ...own }))).not.toContain('money-not-weighed')
+    },
+  )
+
+  test('the term of the other way is said to be unused, unless both are given', () => {
+    const unused = (values: RunValues): string[] =>
+      problemOf(values).notes.flatMap(({ code, text }) => (code === 'unused' ? [text] : []))
+    expect(unused({ ...steamRun, cop: 4 })).toEqual([
+      'cop is not used: the run loses heat, which efficiency prices.',
+    ])
+    expect(unused({ ...coldRun, efficiency: 0.8 })).toEqual([
+      'efficiency is not used: the run gains heat, which cop prices.',
+    ])
+    expect(unused({ ...steamRun, ...gas, cop: 4, efficiency: 0.8 })).toEqual([])
   })
 
   test('hours without money still give the yearly heat', () => {
