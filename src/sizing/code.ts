@@ -1,4 +1,5 @@
 /** The code limit: thickness or resistance not less, loss not more, than a table asks. */
+import { between, type Point } from '#catalogue/figure.ts'
 import { conductivityAtWPerMK, solve } from '#solver/index.ts'
 import type { Settled } from './build-up.ts'
 import type { CodeAsk, CodeThickness, CodeThicknessRow, Problem } from './problem.ts'
@@ -13,55 +14,39 @@ export function codeLimits(problem: Problem, settled: Settled): LimitResult[] {
 /** Figures this near are the same, by share: 1.5 in is 0.0381 m, not 0.038099999999999995. */
 const SAME = 1e-9
 
-const isAtLeast = (value: number, bound: number): boolean => value >= bound * (1 - SAME)
+type Standing = Pick<LimitResult, 'pass' | 'value' | 'rule' | 'bound'>
+
+const atLeast = (value: number, bound: number): Standing => ({
+  pass: value >= bound * (1 - SAME),
+  value,
+  rule: 'at least',
+  bound,
+})
+
+const atMost = (value: number, bound: number): Standing => ({
+  pass: value <= bound * (1 + SAME),
+  value,
+  rule: 'at most',
+  bound,
+})
 
 function judged(problem: Problem, settled: Settled, table: string, ask: CodeAsk): LimitResult {
   const common = { limit: 'code', condition: 'code' } as const
   switch (ask.kind) {
     case 'thickness': {
-      const value = settled.thicknessM
       const ownWPerMK = effectiveWPerMK(settled, ask)
-      const bound = requiredThicknessM(ask, ownWPerMK)
+      const stands = atLeast(settled.thicknessM, requiredThicknessM(ask, ownWPerMK))
       const of = ownWPerMK === null ? '' : ` at ${Number(ownWPerMK.toFixed(4))} W/mK`
-      const what = `thickness${of}, ${table}`
-      return {
-        ...common,
-        pass: isAtLeast(value, bound),
-        value,
-        rule: 'at least',
-        bound,
-        unit: 'm',
-        what,
-      }
+      return { ...common, ...stands, unit: 'm', what: `thickness${of}, ${table}` }
     }
     case 'resistance': {
-      const value = resistanceM2KPerW(settled, ask.ratingMeanC)
-      const bound = ask.resistanceM2KPerW
-      const what = `resistance without films, ${table}`
-      return {
-        ...common,
-        pass: isAtLeast(value, bound),
-        value,
-        rule: 'at least',
-        bound,
-        unit: 'm²K/W',
-        what,
-      }
+      const stands = atLeast(resistanceM2KPerW(settled, ask.ratingMeanC), ask.resistanceM2KPerW)
+      return { ...common, ...stands, unit: 'm²K/W', what: `resistance without films, ${table}` }
     }
     case 'loss': {
       const state = solve(systemOf(problem, settled, ask.condition))
-      const value = Math.abs(state.heatFlowWPerUnit)
-      const bound = ask.maxLossWPerM
-      const what = `heat flow per metre, ${table}`
-      return {
-        ...common,
-        pass: value <= bound * (1 + SAME),
-        value,
-        rule: 'at most',
-        bound,
-        unit: 'W/m',
-        what,
-      }
+      const stands = atMost(Math.abs(state.heatFlowWPerUnit), ask.maxLossWPerM)
+      return { ...common, ...stands, unit: 'W/m', what: `heat flow per metre, ${table}` }
     }
   }
 }
@@ -153,14 +138,9 @@ function converted(
 
 /** Between the two rows around a conductivity; the first row's below it; null above the last. */
 function interpolatedM(rows: readonly CodeThicknessRow[], ownWPerMK: number): number | null {
-  const points = rows.flatMap(({ rangeWPerMK, thicknessM }) =>
-    rangeWPerMK === null ? [] : [{ at: rangeWPerMK[1], thicknessM }],
+  const points = rows.flatMap(({ rangeWPerMK, thicknessM }): Point[] =>
+    rangeWPerMK === null ? [] : [[rangeWPerMK[1], thicknessM]],
   )
-  const next = points.findIndex(({ at }) => at >= ownWPerMK)
-  const upper = points[next]
-  if (upper === undefined) return null
-  const lower = points[next - 1]
-  if (lower === undefined) return upper.thicknessM
-  const share = (ownWPerMK - lower.at) / (upper.at - lower.at)
-  return lower.thicknessM + share * (upper.thicknessM - lower.thicknessM)
+  const [first] = points
+  return first && ownWPerMK <= first[0] ? first[1] : between(points, ownWPerMK)
 }

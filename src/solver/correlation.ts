@@ -53,4 +53,5 @@ const symbols: Readonly<Record<string, string>> = {
   airC: 'air temperature in °C',
 }
 
-const short = (value: number): string => Number(value.toPrecision(3)).toString()
+/** To three digits, for a sentence. */
+export const short = (value: number): string => Number(value.toPrecision(3)).toString()

@@ -21,7 +21,7 @@ import {
   type TwoBranchFormula,
 } from './convection/simplified.ts'
 import { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
-import { outOfRange } from './correlation.ts'
+import { outOfRange, short } from './correlation.ts'
 import {
   isCylinder,
   isDriving,
@@ -104,7 +104,7 @@ export function stepNotes(
   }
 }
 
-const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)
+export const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)
 
 /** Where a branch of the simplified set was taken beside a step of it. */
 function simplifiedNotes(face: FaceShape, { windMPerS }: Weather, excessK: number): string[] {
@@ -126,8 +126,6 @@ function simplifiedNotes(face: FaceShape, { windMPerS }: Weather, excessK: numbe
     add(simplifiedFreeWall, { differenceK, heightM: face.freeLengthM })
   return texts
 }
-
-const short = (value: number): string => Number(value.toPrecision(3)).toString()
 
 function detailedNotes(face: FaceShape, weather: Weather, excessK: number): string[] {
   const filmC = weather.airC + 0.5 * excessK

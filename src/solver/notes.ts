@@ -1,7 +1,7 @@
 /** What a reader should know of a solved system. Worked out apart, since only results that are shown need it. */
 import { cornerExcess } from './corner.ts'
 import { isSimplified } from './film.ts'
-import { filmNotes, stepNotes } from './film-notes.ts'
+import { capital, filmNotes, stepNotes } from './film-notes.ts'
 import { wallOf } from './geometry.ts'
 import { weatherOf } from './solve.ts'
 import type { Conductivity, Face, Layer, Note, Solution, System } from './types.ts'
@@ -123,5 +123,3 @@ function curveEndsC({ pointsC }: Extract<Conductivity, { kind: 'curve' }>): [num
 function withoutRepeats(notes: readonly Note[]): Note[] {
   return notes.filter((note, index) => notes.findIndex(({ text }) => text === note.text) === index)
 }
-
-const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)
