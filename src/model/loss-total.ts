@@ -1,12 +1,15 @@
 /** The losses of a list, summed: heat lost and heat gained apart, since the one does not make up for the other. */
-import type { RunLoss } from './run-loss.ts'
+import { gainsHeat, type RunLoss } from './run-loss.ts'
 
 export interface LossSum {
   /** Runs that are in the sum. */
   readonly runs: number
-  /** Positive outwards, mean of the year [W]. */
+  /** Positive outwards, at the loss condition [W]. */
   readonly bareHeatLossW: number
   readonly asBuiltHeatLossW: number
+  /** What has to be made up, mean of the year [W]. */
+  readonly bareYearlyMeanLossW: number
+  readonly asBuiltYearlyMeanLossW: number
   readonly bareHeatKWh: number
   readonly asBuiltHeatKWh: number
   readonly savedHeatKWh: number
@@ -25,9 +28,9 @@ export interface CostSum {
 }
 
 export interface LossTotal {
-  /** Runs that lose heat when bare. */
+  /** Runs that have to be heated when bare. */
   readonly lost: LossSum
-  /** Runs that gain heat: their flows are negative. */
+  /** Runs that have to be cooled: their flows are negative. */
   readonly gained: LossSum
   /** Tags of runs without a length: in neither sum. */
   readonly withoutLength: readonly string[]
@@ -37,10 +40,9 @@ export interface LossTotal {
 
 export function totalLoss(losses: readonly RunLoss[]): LossTotal {
   const counted = losses.filter(({ bare }) => bare.heatLossW !== null)
-  const gains = ({ bare }: RunLoss): boolean => (bare.heatLossW ?? 0) < 0
   return {
-    lost: sumOf(counted.filter((loss) => !gains(loss))),
-    gained: sumOf(counted.filter(gains)),
+    lost: sumOf(counted.filter((loss) => !gainsHeat(loss))),
+    gained: sumOf(counted.filter(gainsHeat)),
     withoutLength: losses.filter(({ bare }) => bare.heatLossW === null).map(({ tag }) => tag),
     withoutFuel: counted.filter(({ fuel }) => fuel === null).map(({ tag }) => tag),
   }
@@ -53,6 +55,8 @@ function sumOf(losses: readonly RunLoss[]): LossSum {
     runs: losses.length,
     bareHeatLossW: sum(({ bare }) => bare.heatLossW),
     asBuiltHeatLossW: sum(({ asBuilt }) => asBuilt.heatLossW),
+    bareYearlyMeanLossW: sum(({ bare }) => bare.yearlyMeanLossW),
+    asBuiltYearlyMeanLossW: sum(({ asBuilt }) => asBuilt.yearlyMeanLossW),
     bareHeatKWh: sum(({ bare }) => bare.heatKWh),
     asBuiltHeatKWh: sum(({ asBuilt }) => asBuilt.heatKWh),
     savedHeatKWh: sum(({ saved }) => saved.heatKWh),

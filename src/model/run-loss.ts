@@ -3,6 +3,7 @@ import { type EnergyTerms, yearlyEnergyCost, yearlyFuelKWh, yearlyKWh } from '#m
 import type { MoneyTerms } from '#sizing/problem.ts'
 import type { Note, Rating, RunResult } from '#sizing/result.ts'
 import type { RunValues } from './fields.ts'
+import { notesOfLoss, WHOLE_YEAR_H } from './loss-notes.ts'
 import { Findings } from './resolve/findings.ts'
 import type { CatalogueIndex } from './resolve/index-catalogue.ts'
 import { resolveMoney } from './resolve/money.ts'
@@ -15,8 +16,10 @@ export interface YearlyLoss {
   /** Null for a flat surface, a sphere and a vessel. */
   readonly heatLossWPerM: number | null
   readonly heatFluxWPerM2: number
-  /** Whole run with its fittings, mean of the year [W]. */
+  /** Whole run with its fittings, at the loss condition [W]. */
   readonly heatLossW: number | null
+  /** Of it what has to be made up, mean of the year [W]: heat, cost and CO2 of the year follow from it. */
+  readonly yearlyMeanLossW: number | null
   readonly heatKWh: number | null
   readonly cost: number | null
   readonly co2Kg: number | null
@@ -43,9 +46,6 @@ export interface Saved {
   readonly co2Kg: number | null
 }
 
-/** Hours of a year, taken where none are given: the run is in service all the time. */
-export const WHOLE_YEAR_H = 8760
-
 /** The values are those the run was sized with, the defaults of the job included. */
 export function lossOfRun(values: RunValues, result: RunResult, index: CatalogueIndex): RunLoss {
   const hoursPerYear = values.hoursPerYear ?? WHOLE_YEAR_H
@@ -68,7 +68,7 @@ export function lossOfRun(values: RunValues, result: RunResult, index: Catalogue
       cost: less(bare.cost, asBuilt.cost),
       co2Kg: less(bare.co2Kg, asBuilt.co2Kg),
     },
-    notes: [...lossNotes(values, result, built), ...result.notes],
+    notes: notesOfLoss({ values, result, built, terms, bare, asBuilt }),
   }
 }
 
@@ -88,7 +88,7 @@ function builtOf(result: RunResult): { readonly rating: Rating; readonly built: 
 }
 
 function yearlyLoss(rating: Rating, hoursPerYear: number, terms: MoneyTerms | null): YearlyLoss {
-  const { heatLossWPerM, heatFluxWPerM2, yearlyMeanLossW } = rating
+  const { heatLossWPerM, heatFluxWPerM2, heatLossW, yearlyMeanLossW } = rating
   const of = (figure: (meanW: number) => number | null): number | null =>
     yearlyMeanLossW === null ? null : figure(yearlyMeanLossW)
   const energy: EnergyTerms | null = terms?.energy ?? null
@@ -96,7 +96,8 @@ function yearlyLoss(rating: Rating, hoursPerYear: number, terms: MoneyTerms | nu
   return {
     heatLossWPerM,
     heatFluxWPerM2,
-    heatLossW: yearlyMeanLossW,
+    heatLossW,
+    yearlyMeanLossW,
     heatKWh: of((meanW) => yearlyKWh(meanW, hoursPerYear)),
     cost: of((meanW) => (energy ? yearlyEnergyCost(meanW, energy) : null)),
     co2Kg: of((meanW) =>
@@ -105,28 +106,11 @@ function yearlyLoss(rating: Rating, hoursPerYear: number, terms: MoneyTerms | nu
   }
 }
 
+/**
+ * Whether the run has to be cooled to make up for what comes in. One that is hotter than its air has not, however much
+ * the sun brings.
+ */
+export const gainsHeat = ({ bare }: RunLoss): boolean => (bare.yearlyMeanLossW ?? 0) < 0
+
 const less = (bare: number | null, asBuilt: number | null): number | null =>
   bare === null || asBuilt === null ? null : bare - asBuilt
-
-function lossNotes(values: RunValues, { bare }: RunResult, built: Built): Note[] {
-  const notes: Note[] = []
-  if (values.hoursPerYear === undefined) {
-    notes.push({
-      code: 'hours-assumed',
-      text: `The hours in service are not given: ${WHOLE_YEAR_H} h are taken, the whole year.`,
-    })
-  }
-  if (bare.heatLossW === null) {
-    notes.push({
-      code: 'not-in-total',
-      text: 'The length is not given: the run is listed, and not in the total.',
-    })
-  }
-  if (built === 'thickest') {
-    notes.push({
-      code: 'built-thickest',
-      text: 'No thickness meets every limit: as built is the thickest that can be bought.',
-    })
-  }
-  return notes
-}

@@ -1,5 +1,5 @@
 /** The columns of a table of losses, with the totals under them. */
-import type { RunLoss, YearlyLoss } from '#model/run-loss.ts'
+import { gainsHeat, type RunLoss, type YearlyLoss } from '#model/run-loss.ts'
 import { inchName } from '#sizing/words.ts'
 import {
   ABSENT,
@@ -21,12 +21,10 @@ interface Group {
   readonly holds: (loss: RunLoss) => boolean
 }
 
-const gains = ({ bare }: RunLoss): boolean => (bare.heatLossW ?? 0) < 0
-
 function groupsOf(losses: readonly RunLoss[]): readonly Group[] {
   const groups: readonly Group[] = [
-    { title: 'Total lost', holds: (loss) => !gains(loss) },
-    { title: 'Total gained', holds: gains },
+    { title: 'Total lost', holds: (loss) => !gainsHeat(loss) },
+    { title: 'Total gained', holds: gainsHeat },
   ]
   const there = groups.filter(({ holds }) => losses.some(holds))
   return there.length === 1 ? there.map((group) => ({ ...group, title: 'Total' })) : there
@@ -125,6 +123,12 @@ export function lossColumns(lines: readonly LossLine[], units: UnitSystem): read
       losses.map(({ asBuilt }) => lossWords(asBuilt, units)),
     ),
     summed(`Built ${power}`, 'power', ({ asBuilt }) => asBuilt.heatLossW),
+    ...(losses.some(hasMeanOfItsOwn)
+      ? [
+          summed(`Bare ${power}, mean of year`, 'power', ({ bare }) => bare.yearlyMeanLossW),
+          summed(`Built ${power}, mean of year`, 'power', ({ asBuilt }) => asBuilt.yearlyMeanLossW),
+        ]
+      : []),
     summed('Bare kWh/yr', 'energy', ({ bare }) => bare.heatKWh),
     summed('Built kWh/yr', 'energy', ({ asBuilt }) => asBuilt.heatKWh),
     summed('Saved kWh/yr', 'energy', ({ saved }) => saved.heatKWh),
@@ -141,6 +145,10 @@ export function lossColumns(lines: readonly LossLine[], units: UnitSystem): read
       : []),
   ]
 }
+
+/** Months, or sun that brings more than goes out, part the mean of the year from the loss at the loss condition. */
+const hasMeanOfItsOwn = ({ bare, asBuilt }: RunLoss): boolean =>
+  [bare, asBuilt].some(({ heatLossW, yearlyMeanLossW }) => heatLossW !== yearlyMeanLossW)
 
 /** Costs of one currency each, since they do not add up. */
 function moneyColumns(

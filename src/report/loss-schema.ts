@@ -12,7 +12,10 @@ const yearlyLoss = z
     ),
     heatFluxWPerM2: finite('Heat flow outwards on the outer area at the loss condition [W/m²]'),
     heatLossW: orNull(
-      'Heat flow outwards of the whole run with its fittings, mean of the year [W]; null without length or area',
+      'Heat flow outwards of the whole run with its fittings at the loss condition [W]; null without length or area',
+    ),
+    yearlyMeanLossW: orNull(
+      'As `heatLossW`, mean of the months where those are given; what needs no making up counts as nothing [W]',
     ),
     heatKWh: orNull('Heat of a year, lost or gained [kWh]; null without length or area'),
     cost: orNull('Energy cost of a year [currency of the run]; null without a fuel or a length'),
@@ -65,8 +68,12 @@ const costSum = z.strictObject({
 const lossSum = z
   .strictObject({
     runs: finite('Runs in the sum [count]'),
-    bareHeatLossW: finite('Heat flow outwards, bare, mean of the year [W]'),
-    asBuiltHeatLossW: finite('Heat flow outwards, as built, mean of the year [W]'),
+    bareHeatLossW: finite('Heat flow outwards, bare, at the loss condition [W]'),
+    asBuiltHeatLossW: finite('Heat flow outwards, as built, at the loss condition [W]'),
+    bareYearlyMeanLossW: finite('Heat flow outwards to be made up, bare, mean of the year [W]'),
+    asBuiltYearlyMeanLossW: finite(
+      'Heat flow outwards to be made up, as built, mean of the year [W]',
+    ),
     bareHeatKWh: finite('Heat of a year, bare [kWh]'),
     asBuiltHeatKWh: finite('Heat of a year, as built [kWh]'),
     savedHeatKWh: finite('Heat saved in a year [kWh]'),
@@ -79,8 +86,10 @@ const lossSum = z
 
 const lossTotal = z
   .strictObject({
-    lost: lossSum.describe('Runs that lose heat when bare'),
-    gained: lossSum.describe('Runs that gain heat when bare; their heat flows are negative'),
+    lost: lossSum.describe('Runs that have to be heated when bare'),
+    gained: lossSum.describe(
+      'Runs that have to be cooled when bare; their heat flows are negative',
+    ),
     withoutLength: z
       .array(text('Tag of a run'))
       .describe('Runs without length or area: listed, and in neither sum'),

@@ -59,6 +59,7 @@ describe('lagwright loss', slow, () => {
       const result = sized.runs[at]
       expect(run.asBuilt.heatLossW).toBe(result?.chosen?.heatLossW)
       expect(run.bare.heatLossW).toBe(result?.bare.heatLossW)
+      expect(run.asBuilt.yearlyMeanLossW).toBe(result?.chosen?.yearlyMeanLossW)
       expect(run.asBuilt.heatKWh).toBe(result?.chosen?.yearlyKWh)
       expect(run.asBuilt.co2Kg).toBe(result?.money?.co2KgPerYear)
       expect(run.saved.cost).toBe(result?.money?.savingPerYearTotal)
@@ -67,6 +68,7 @@ describe('lagwright loss', slow, () => {
     expect(total.withoutFuel).toEqual([])
     expect(total.lost.runs).toBe(1)
     expect(total.lost.bareHeatLossW).toBe(runs[0]?.bare.heatLossW)
+    expect(total.lost.bareYearlyMeanLossW).toBe(runs[0]?.bare.yearlyMeanLossW)
     expect(total.gained.asBuiltHeatLossW).toBe(runs[2]?.asBuilt.heatLossW)
     expect(total.gained.asBuiltHeatLossW).toBeLessThan(0)
     expect(total.lost.costs).toHaveLength(1)

@@ -24,6 +24,13 @@ function lossOf(values: RunValues): RunLoss {
   return lossOfRun(values, outcome.result, index)
 }
 
+function fuelOfCatalogue(id: string) {
+  const found = index.fuel(id)
+  if (!found.ok) throw new Error(found.message)
+  const { pricePerKWh: price, efficiency, co2KgPerKWh: co2 } = found.item
+  return { price, efficiency, co2: Number(co2?.toFixed(3)) }
+}
+
 describe('the loss of a run', () => {
   test('is that of a whole year where no hours are given, and says so', () => {
     const { bare, hoursPerYear, notes } = lossOf(hot)
@@ -39,6 +46,50 @@ describe('the loss of a run', () => {
     expect(asBuilt.cost).toBeCloseTo(((asBuilt.heatKWh ?? 0) / 0.8) * 0.1, 9)
   })
 
+  test('says everything in its cost that was not given', () => {
+    const priced = (values: Partial<RunValues>): string | undefined =>
+      lossOf({ ...hot, hoursPerYear: 1000, ...values }).notes.find(
+        ({ code }) => code === 'energy-assumed',
+      )?.text
+    const { price, efficiency, co2 } = fuelOfCatalogue('natural_gas')
+    expect(priced({})).toBeUndefined()
+    expect(priced({ fuel: 'natural_gas', money: false })).toContain(
+      `at ${price} units/kWh (illustrative), an efficiency of ${efficiency} and ${co2} kg of CO2`,
+    )
+    expect(priced({ fuelPricePerKWh: 0.1, currency: 'EUR' })).toBe(
+      'The energy is priced with an efficiency of 1 (none is given: fuel as useful heat).',
+    )
+    expect(priced({ fuelPricePerKWh: 0.1, efficiency: 0.8, currency: 'EUR' })).toBeUndefined()
+    const cooled = { mediumC: 4, material: 'elastomeric_foam_nbr', fuelPricePerKWh: 0.3 }
+    expect(priced(cooled)).toMatch(/a cooling COP of 3\.$/)
+    expect(priced({ ...cooled, cop: 4, currency: 'EUR' })).toBeUndefined()
+  })
+
+  test('says nothing of touch, thresholds, prices and lives: it judges nothing', () => {
+    const { notes } = lossOf({
+      ...hot,
+      fuel: 'natural_gas',
+      hoursPerYear: 4000,
+      finish: 'al_painted',
+    })
+    const codes = notes.map(({ code }) => code)
+    expect(
+      codes.filter((code) => /^(touch|reach|contact|threshold|price|money)/.test(code)),
+    ).toEqual([])
+    expect(codes).toContain('energy-assumed')
+    expect(codes).toContain('inside-neglected')
+  })
+
+  test('of a hot run into which the sun brings more than goes out is nothing to be made up', () => {
+    const sunny = lossOf({ ...hot, mediumC: 25, solarWPerM2: 900, fuel: 'natural_gas' })
+    expect(sunny.bare.heatLossW).toBeLessThan(0)
+    expect(sunny.bare.yearlyMeanLossW).toBe(0)
+    expect(sunny.bare.cost).toBe(0)
+    expect(sunny.notes.map(({ code }) => code)).toContain('sun-brings-more')
+    const { lost, gained } = totalLoss([sunny])
+    expect([lost.runs, gained.runs]).toEqual([1, 0])
+  })
+
   test('saves bare less as built', () => {
     const { bare, asBuilt, saved, built } = lossOf({ ...hot, fuel: 'natural_gas' })
     expect(built).toBe('fixed')
@@ -52,7 +103,12 @@ describe('the loss of a run', () => {
     const { bare } = lossOf({ ...hot, monthlyAirC: months })
     const flow = (airC: number): number => lossOf({ ...hot, airC }).bare.heatLossW ?? 0
     // 181 days to the end of June, 184 after it.
-    expect(bare.heatLossW).toBeCloseTo((181 * flow(0) + 184 * flow(40)) / 365, 6)
+    const meanW = (181 * flow(0) + 184 * flow(40)) / 365
+    expect(bare.yearlyMeanLossW).toBeCloseTo(meanW, 6)
+    expect(bare.heatKWh).toBeCloseTo(meanW * 8.76, 6)
+    // Beside the loss per metre stands that of the run at the same condition.
+    expect(bare.heatLossW).toBeCloseTo((bare.heatLossWPerM ?? 0) * 10, 9)
+    expect(bare.heatLossW).toBe(flow(20))
   })
 
   test('is that of the thickest where nothing meets the limits', () => {

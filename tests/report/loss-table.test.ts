@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest'
 import { lossOfRun } from '#model/run-loss.ts'
+import { sizeRun } from '#model/size-run.ts'
 import { lossColumns } from '#report/loss-columns.ts'
 import { type LossLine, writeLossCsv } from '#report/loss-csv.ts'
 import { writeLossTable } from '#report/loss-table.ts'
@@ -24,7 +25,7 @@ describe.each(['si', 'us'] as const)('the table of losses in %s', (units) => {
       const [lost, gained] = cells.slice(lines.length).map(numberIn)
       const sum = (isGain: boolean): number =>
         rows
-          .filter((_, at) => (lines[at]?.loss.bare.heatLossW ?? 0) < 0 === isGain)
+          .filter((_, at) => (lines[at]?.loss.bare.yearlyMeanLossW ?? 0) < 0 === isGain)
           .map(numberIn)
           .filter((value) => Number.isFinite(value))
           .reduce((total, value) => total + value, 0)
@@ -41,6 +42,24 @@ describe.each(['si', 'us'] as const)('the table of losses in %s', (units) => {
     expect(text).toMatch(/^Total lost /m)
     expect(text).not.toMatch(/NaN|undefined|Infinity/)
   })
+})
+
+test('the mean of the year has columns of its own where months part it from the loss condition', () => {
+  const [first] = lines
+  if (!first) throw new Error('The demo list is empty')
+  const headers = (shown: readonly LossLine[]): string[] =>
+    lossColumns(shown, 'si').map(({ header }) => header)
+  expect(headers([first]).filter((header) => header.endsWith(', mean of year'))).toEqual([])
+  const values = { ...first.values, monthlyAirC: '2 3 6 10 15 21 24 23 18 12 7 3' }
+  const sized = sizeRun(values, {}, index)
+  if (!sized.ok) throw new Error(JSON.stringify(sized.issues))
+  const line = { values, loss: lossOfRun(values, sized.result, index) }
+  const columns = lossColumns([line], 'si')
+  const cell = (header: string): number =>
+    numberIn(columns.find((column) => column.header === header)?.cells[0] ?? '')
+  expect(cell('Bare W, mean of year')).toBe(Math.round(line.loss.bare.yearlyMeanLossW ?? 0))
+  expect(cell('Bare W')).toBe(Math.round(line.loss.bare.heatLossW ?? 0))
+  expect(cell('Bare W')).not.toBe(cell('Bare W, mean of year'))
 })
 
 test('as CSV every run is a row as wide as the header, in SI', () => {
