@@ -61,7 +61,9 @@ const rating = z
       'As `heatLossW`, mean of the months where those are given; months that need no making up count as nothing [W]',
     ),
     yearlyKWh: orNull('Heat of the whole run in a year [kWh]; null without hours or length'),
-    surfaceTempC: finite('Outer surface at the loss condition, mean of the faces [°C]'),
+    surfaceTempC: finite(
+      'Outer surface at the loss condition, mean of the faces; of an inclined pipe with the lower film [°C]',
+    ),
     convectionWPerM2K: finite('Convective film coefficient of the outer surface [W/(m²·K)]'),
     radiationWPerM2K: finite(
       'Radiative film coefficient: radiated flux over surface minus surroundings [W/(m²·K)]',
@@ -99,7 +101,9 @@ const runMoney = z
     presentValueFactor: finite('Present value of one unit of yearly energy cost [years]'),
     bareEnergyPerYear: finite('Cost of the energy lost bare in a year [currency, per `per`]'),
     installedTotal: orNull('Installed cost of the run [currency]'),
-    savingPerYearTotal: orNull('Energy cost saved in a year against the bare run [currency]'),
+    savingPerYearTotal: orNull(
+      'Energy cost saved in a year against the bare run, without fittings whose lagging has no price [currency]',
+    ),
     paybackYears: orNull('Installed cost over yearly saving [years]; null where nothing is saved'),
     co2KgPerYear: orNull('CO2 of the lagged run in a year [kg]'),
     co2SavedKgPerYear: orNull('CO2 saved in a year against the bare run [kg]'),

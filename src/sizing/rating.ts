@@ -31,7 +31,7 @@ export function rate(problem: Problem, settled: Settled, bareStates: States | nu
   const limits = judge({ problem, settled, states, arrives: () => arrives })
   const total = runLoss(problem, settled, loss, asBare.loss)
   const yearlyMeanLossW = yearlyRunLossW(problem, settled, states, asBare)
-  const flow = yearlyFlowPerUnit(states)
+  const flow = yearlyFlowPerUnit(problem, states)
   return {
     rating: {
       thicknessM: settled.thicknessM,
@@ -47,10 +47,10 @@ export function rate(problem: Problem, settled: Settled, bareStates: States | nu
         yearlyMeanLossW === null || problem.hoursPerYear === null
           ? null
           : yearlyKWh(yearlyMeanLossW, problem.hoursPerYear),
-      surfaceTempC: loss.surfaceTempC,
+      surfaceTempC: states.surface.surfaceTempC,
       convectionWPerM2K: loss.convectionWPerM2K,
       radiationWPerM2K: loss.radiationWPerM2K,
-      interfaceTempsC: loss.interfaceTempsC,
+      interfaceTempsC: states.surface.interfaceTempsC,
       touchSurfaceC: hottestFace(touch).surfaceTempC,
       timeToFreezeH: limits.find(({ limit }) => limit === 'frost')?.value ?? null,
       arrivalTempC: arrives?.arrivalTempC ?? null,

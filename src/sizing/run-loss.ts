@@ -65,16 +65,24 @@ function yearParts(states: States, bareStates: States): YearPart[] {
 }
 
 /** Heat that has to be made up flows one way; in a month in which it flows the other way nothing has to be. */
-export const isMadeUp = (flow: number, yearlyFlow: number): boolean =>
-  yearlyFlow === 0 || flow > 0 === yearlyFlow > 0
+export const isMadeUp = (flow: number, way: number): boolean => way === 0 || flow > 0 === way > 0
 
-const madeUp = (flow: number, yearlyFlow: number): number => (isMadeUp(flow, yearlyFlow) ? flow : 0)
+const madeUp = (flow: number, way: number): number => (isMadeUp(flow, way) ? flow : 0)
+
+/**
+ * The way in which heat has to be made up: positive outwards, for a run that is heated. The sun may turn the flow
+ * round, but a run hotter than its air is heated all the same, and what the sun brings it costs nothing.
+ */
+export function madeUpWay({ conditions: { loss } }: Problem, yearlyFlow: number): number {
+  const differenceK = loss.mediumC - loss.around.airC
+  return loss.sunWPerM2 === 0 || differenceK === 0 ? yearlyFlow : differenceK
+}
 
 /** Heat flow to be made up for one unit, mean of the year [W]. */
-export function yearlyFlowPerUnit(states: States): number {
+export function yearlyFlowPerUnit(problem: Problem, states: States): number {
+  const way = madeUpWay(problem, states.loss.heatFlowWPerUnit)
   return yearParts(states, states).reduce(
-    (sum, { share, state }) =>
-      sum + share * madeUp(state.heatFlowWPerUnit, states.loss.heatFlowWPerUnit),
+    (sum, { share, state }) => sum + share * madeUp(state.heatFlowWPerUnit, way),
     0,
   )
 }
@@ -88,10 +96,11 @@ export function yearlyRunLossW(
 ): number | null {
   const yearly = runLoss(problem, settled, states.loss, bareStates.loss)
   if (yearly === null) return null
+  const way = madeUpWay(problem, yearly.totalW)
   let sumW = 0
   for (const { share, state, bareState } of yearParts(states, bareStates)) {
     const loss = runLoss(problem, settled, state, bareState)
-    sumW += share * madeUp(loss?.totalW ?? 0, yearly.totalW)
+    sumW += share * madeUp(loss?.totalW ?? 0, way)
   }
   return sumW
 }

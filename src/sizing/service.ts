@@ -9,6 +9,9 @@ import { getsCold, hottestFace, type States } from './states.ts'
 /** A curve may be read this far beyond its ends; farther, the figure is not to be trusted. Source: data of the catalogue. */
 const CURVE_REACH_K = 20
 
+/** How a mean temperature beyond the curve is named. */
+export const curveWords = 'mean temperature against its conductivity curve'
+
 /** Differences below this are of the solver, not of the run [K]: a medium at the very maximum is within it. */
 const SOLVED_K = 1e-6
 
@@ -84,7 +87,7 @@ function standsOf(
       if (Math.abs(beyondK) > CURVE_REACH_K) {
         const sign = beyondK > 0 ? 1 : -1
         const bound = mean - beyondK + sign * CURVE_REACH_K
-        add(mean, bound, sign, `${material.name}, mean temperature against its conductivity curve`)
+        add(mean, bound, sign, `${material.name}, ${curveWords}`)
       }
     })
   }

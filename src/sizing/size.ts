@@ -1,11 +1,10 @@
-import { yearlyEnergyCost, yearlyFuelKWh } from '#money/energy-cost.ts'
-import { presentValueFactor } from '#money/present-value.ts'
 import { bare, rungsOf } from './build-up.ts'
 import { passesFromM } from './continuous.ts'
-import type { MoneyTerms, Problem } from './problem.ts'
+import type { Problem } from './problem.ts'
 import { type Rated, rate } from './rating.ts'
 import { writeReason } from './reason.ts'
-import type { Governing, Note, Rating, RunMoney, RunResult } from './result.ts'
+import type { Governing, Note, Rating, RunResult } from './result.ts'
+import { hasUnpricedFittings, runMoney } from './run-money.ts'
 import type { States } from './states.ts'
 import { surveyOf } from './survey.ts'
 import { unmetLimits } from './unmet.ts'
@@ -104,74 +103,6 @@ function mattThicknessM(
   return found?.thicknessM ?? null
 }
 
-function runMoney(
-  problem: Problem,
-  terms: MoneyTerms,
-  bareRated: Rated,
-  ladder: readonly Rating[],
-  chosenRated: Rated | null,
-): RunMoney | null {
-  const chosen = chosenRated?.rating ?? null
-  const priced = ladder.filter((rung) => rung.money !== null)
-  const cost = (rung: Rating): number => rung.money?.lifeCycle ?? Number.POSITIVE_INFINITY
-  const cheapest = priced.length > 0 ? priced.reduce((a, b) => (cost(b) < cost(a) ? b : a)) : null
-  if (!cheapest && !chosen) return null
-  const { extent } = problem
-  const bareFlow = bareRated.yearlyFlowPerUnit
-  const chosenFlow = chosenRated?.yearlyFlowPerUnit ?? null
-  const installed = chosen?.money?.installed ?? null
-  // Per unit the run is straight; its totals hold what its fittings lose too.
-  const bareTotalW = bareRated.rating.yearlyMeanLossW
-  const chosenTotalW = chosen?.yearlyMeanLossW ?? null
-  const costOf = (flow: number): number => yearlyEnergyCost(flow, terms.energy)
-  const saving = chosenFlow === null ? null : costOf(bareFlow) - costOf(chosenFlow)
-  const savingTotal =
-    chosenTotalW === null || bareTotalW === null ? null : costOf(bareTotalW) - costOf(chosenTotalW)
-  const co2KgPerYear = (totalW: number): number | null =>
-    terms.co2KgPerKWh === null ? null : yearlyFuelKWh(totalW, terms.energy) * terms.co2KgPerKWh
-  const bareCo2Kg = bareTotalW === null ? null : co2KgPerYear(bareTotalW)
-  const chosenCo2Kg = chosenTotalW === null ? null : co2KgPerYear(chosenTotalW)
-  return {
-    currency: terms.currency,
-    per: bareRated.states.loss.unit,
-    hoursPerYear: terms.energy.hoursPerYear,
-    fuel: terms.fuelName,
-    fuelPricePerKWh: terms.energy.fuelPricePerKWh,
-    efficiency: bareFlow < 0 ? terms.energy.cop : terms.energy.efficiency,
-    discount: terms.discount,
-    growth: terms.growth,
-    lifeYears: terms.lifeYears,
-    presentValueFactor: presentValueFactor(terms),
-    bareEnergyPerYear: costOf(bareFlow),
-    installedTotal: installed === null || extent === null ? null : installed * extent,
-    savingPerYearTotal: savingTotal,
-    paybackYears: paybackYears(installed, saving),
-    co2KgPerYear: chosenCo2Kg,
-    co2SavedKgPerYear: bareCo2Kg === null || chosenCo2Kg === null ? null : bareCo2Kg - chosenCo2Kg,
-    cheapestThicknessM: cheapest?.thicknessM ?? null,
-    withinTwoPercentM: chosen ? flatRange(ladder, chosen) : null,
-  }
-}
-
-/** Null where nothing is saved, or next to nothing. */
-function paybackYears(installed: number | null, saving: number | null): number | null {
-  if (installed === null || saving === null || saving <= 0) return null
-  const years = installed / saving
-  return Number.isFinite(years) ? years : null
-}
-
-/** Smallest and largest passing thickness that cost at most 2 % more than the chosen one. */
-function flatRange(ladder: readonly Rating[], chosen: Rating): readonly [number, number] | null {
-  if (!chosen.money) return null
-  const most = chosen.money.lifeCycle * 1.02
-  const near = ladder.filter(
-    (rung) => rung.pass && rung.money !== null && rung.money.lifeCycle <= most,
-  )
-  const first = near[0]
-  const last = near[near.length - 1]
-  return first && last ? [first.thicknessM, last.thicknessM] : null
-}
-
 const thinnestTaken = ' The thinnest passing thickness was taken.'
 
 function notesOf(problem: Problem, shown: Rated, governing: Governing): Note[] {
@@ -181,6 +112,12 @@ function notesOf(problem: Problem, shown: Rated, governing: Governing): Note[] {
     notes.push({
       code: 'price-missing',
       text: `No price is held for this build-up: its cost is not weighed.${taken}`,
+    })
+  }
+  if (problem.money && shown.rating.money && hasUnpricedFittings(problem)) {
+    notes.push({
+      code: 'fittings-unpriced',
+      text: 'Installed cost, saving and payback are those of the straight run: the lagging of its fittings has no price here.',
     })
   }
   return notes.filter((note, index) => notes.findIndex(({ text }) => text === note.text) === index)

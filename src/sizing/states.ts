@@ -8,7 +8,9 @@ import type { Condition, Problem } from './problem.ts'
 export interface States {
   /** Yearly mean, aged finish: loss and money. */
   readonly loss: Solution
-  /** The same in each month, January first; empty where the yearly mean stands for all. */
+  /** The same for the temperatures: an inclined pipe takes its lower film for them, all else is one with `loss`. */
+  readonly surface: Solution
+  /** As `loss` in each month, January first; empty where the yearly mean stands for all. */
   readonly months: readonly Solution[]
   /** Hottest day and medium, no wind, new finish: touch and the hot end of service. */
   readonly touch: Solution
@@ -41,10 +43,17 @@ export function getsCold(problem: Problem): boolean {
 /** The surface may also be colder than the air because it faces colder surroundings: damp asks for either. */
 const asksDamp = (problem: Problem): boolean => getsCold(problem) || problem.limits.damp !== null
 
+export const isInclined = ({ shape }: Problem): boolean =>
+  shape.kind === 'pipe' && shape.orientation === 'inclined'
+
 export function solveStates(problem: Problem, settled: Settled): States {
   const { loss, months, touch, damp } = problem.conditions
+  const lossState = solve(systemOf(problem, settled, loss))
   return {
-    loss: solve(systemOf(problem, settled, loss)),
+    loss: lossState,
+    surface: isInclined(problem)
+      ? solve(systemOf(problem, settled, { ...loss, inclinedFilm: 'lower' }))
+      : lossState,
     months: months.map((month) => solve(systemOf(problem, settled, month))),
     touch: solve(systemOf(problem, settled, touch)),
     damp: asksDamp(problem) ? solve(systemOf(problem, settled, damp)) : null,

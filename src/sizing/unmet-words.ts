@@ -1,6 +1,6 @@
 /** Why no thickness passes, in sentences. */
-import { limitNames, passesLimit } from './passes-limit.ts'
-import { type LimitName, limitWords, type Rating, type RunResult } from './result.ts'
+import { limitNames, nearestMiss, passesLimit } from './passes-limit.ts'
+import { limitWords, type Rating, type RunResult } from './result.ts'
 import { against, said, type Words } from './words.ts'
 
 type UnmetFacts = Pick<RunResult, 'ladder' | 'unmet'>
@@ -17,26 +17,15 @@ function cannotBeMet(
   { ladder }: UnmetFacts,
   words: Words,
 ): string {
-  const best = nearestTo(ladder, limit)
-  const failed = best?.limits.find((result) => result.limit === limit && !result.pass)
-  if (!best || !failed) return ''
-  const stands = `${limitWords[limit]} cannot be met: at best, ${said(best, words)}, it stands at ${against(failed, words)} (${failed.what})`
+  const miss = nearestMiss(ladder, limit)
+  if (!miss) return ''
+  const { rung: best, failed } = miss
+  // Service mostly stands at the medium, which no thickness moves: naming one would mislead.
+  const where = limit === 'service' ? 'it' : `at best, ${said(best, words)}, it`
+  const stands = `${limitWords[limit]} cannot be met: ${where} stands at ${against(failed, words)} (${failed.what})`
   return neededM === null
     ? `${stands}, because ${because ?? 'no thickness would do'}.`
     : `${stands}; it would take ${words.thickness(neededM, null)}, which is more than can be bought.`
-}
-
-/** The rung that misses a limit by least; the thinnest of equals. */
-function nearestTo(ladder: readonly Rating[], limit: LimitName): Rating | undefined {
-  const shortfall = (rung: Rating): number =>
-    Math.max(
-      ...rung.limits
-        .filter((result) => result.limit === limit && !result.pass)
-        .map(({ value, bound }) => Math.abs(value - bound)),
-    )
-  return ladder.length === 0
-    ? undefined
-    : ladder.reduce((a, b) => (shortfall(b) < shortfall(a) - 1e-9 ? b : a))
 }
 
 /** Each limit is met by some rung, but no rung meets all: the one that needs most and the one that allows least. */

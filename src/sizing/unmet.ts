@@ -1,8 +1,9 @@
 /** Why no rung passes: limits that no rung meets, and limits that exclude each other. */
 import { searchedUpToM, wholeThicknessM } from './continuous.ts'
-import { limitNames, passesLimit } from './passes-limit.ts'
+import { limitNames, nearestMiss, passesLimit } from './passes-limit.ts'
 import type { Problem } from './problem.ts'
 import type { LimitName, LimitResult, Rating, UnmetLimit } from './result.ts'
+import { curveWords } from './service.ts'
 
 /** Every limit that no rung meets, with the thickness that would and, where none would, the cause that is known. */
 export function unmetLimits(problem: Problem, ladder: readonly Rating[]): UnmetLimit[] {
@@ -17,15 +18,10 @@ export function unmetLimits(problem: Problem, ladder: readonly Rating[]): UnmetL
 /** A service range and the room there is are not met by more lagging. */
 const hasThicknessEnd = (limit: LimitName): boolean => limit !== 'service' && limit !== 'space'
 
-function causeOf(
-  { conditions, limits }: Problem,
-  limit: LimitName,
-  ladder: readonly Rating[],
-): string | null {
-  const failed = ladder
-    .flatMap((rung) => rung.limits)
-    .find((result) => result.limit === limit && !result.pass)
+function causeOf(problem: Problem, limit: LimitName, ladder: readonly Rating[]): string | null {
+  const failed = nearestMiss(ladder, limit)?.failed
   if (!failed) return null
+  const { conditions, limits } = problem
   switch (limit) {
     case 'touch':
       return touchCause(failed, conditions.touch.around.airC, conditions.touch.sunWPerM2)
@@ -34,7 +30,7 @@ function causeOf(
         ? 'the air itself is that near to its dew point'
         : 'the surface never comes nearer to the air'
     case 'service':
-      return 'that place takes the temperature of the medium whatever the thickness'
+      return serviceCause(failed, problem)
     case 'space':
       return 'even the thinnest that can be bought is too large'
     default:
@@ -47,4 +43,19 @@ function touchCause({ bound }: LimitResult, airC: number, sunWPerM2: number): st
   return sunWPerM2 > 0
     ? 'the sun alone heats the surface to that'
     : `no thickness up to ${searchedUpToM * 1000} mm would`
+}
+
+/** As near to the medium as that, a place takes its temperature at any thickness [K]. */
+const MEDIUM_NEAR_K = 0.5
+
+function serviceCause({ value, what }: LimitResult, { conditions }: Problem): string {
+  if (what.endsWith(curveWords)) {
+    return 'no conductivity is held for it there: take another material, or give conductivity_w_mk'
+  }
+  const isMedium = [conditions.touch.mediumC, conditions.damp.mediumC].some(
+    (mediumC) => Math.abs(value - mediumC) < MEDIUM_NEAR_K,
+  )
+  return isMedium
+    ? 'that is the medium itself, at any thickness'
+    : 'no thickness brings it far enough'
 }

@@ -169,3 +169,32 @@ test('energy, money and CO2 of the year hold what the fittings lose', () => {
   expect(saved(fitted)).toBeCloseTo(saved(plain), 6)
   expect(fitted.money?.bareEnergyPerYear).toBe(plain.money?.bareEnergyPerYear)
 })
+
+test('a saving leaves out the fittings whose lagging has no price', () => {
+  const weighed: RunValues = { ...run, fuel: 'natural_gas', hoursPerYear: 8000 }
+  const plain = sized(weighed)
+  const fitted = sized({ ...weighed, valves: 3, fittings: 'lagged' })
+  expect(fitted.money?.savingPerYearTotal).toBeCloseTo(plain.money?.savingPerYearTotal ?? 0, 6)
+  expect(fitted.money?.paybackYears).toBeCloseTo(
+    (fitted.money?.installedTotal ?? 0) / (fitted.money?.savingPerYearTotal ?? Number.NaN),
+    9,
+  )
+  expect(fitted.notes.map(({ code }) => code)).toContain('fittings-unpriced')
+  expect(plain.notes.map(({ code }) => code)).not.toContain('fittings-unpriced')
+})
+
+test('what the sun brings to a heated run costs nothing, and is no cooling either', () => {
+  const sunny: RunValues = {
+    ...run,
+    mediumC: 50,
+    airC: 30,
+    solarWPerM2: 800,
+    thicknessM: 0.05,
+    fuel: 'natural_gas',
+    hoursPerYear: 8000,
+  }
+  const result = sized(sunny)
+  expect(result.chosen?.heatLossW).toBeLessThan(0)
+  expect(result.chosen?.yearlyMeanLossW).toBe(0)
+  expect(result.chosen?.money?.energyPerYear).toBe(0)
+})

@@ -151,7 +151,7 @@ function costSections({ problem, settled, states, rating, result }: Shown): Sect
     settled,
     terms,
     money: rating.money,
-    yearlyFlowPerUnit: yearlyFlowPerUnit(states),
+    yearlyFlowPerUnit: yearlyFlowPerUnit(problem, states),
     ladder: result.ladder,
   })
 }
