@@ -142,7 +142,7 @@ function detailedNotes(face: FaceShape, weather: Weather, excessK: number): stri
 
 function windNotes(face: FaceShape, weather: Weather, excessK: number): string[] {
   if (face.flow === 'sphere') {
-    return outOfRange(nusseltSphereInWind, sphereWind(face, weather, excessK).wind)
+    return outOfRange(nusseltSphereInWind, sphereWind(face, weather).windAt(excessK))
   }
   const air = airAt(weather.airC + 0.5 * excessK, weather.pressurePa)
   const reynolds = (weather.windMPerS * face.windLengthM) / air.kinematicViscosityM2PerS

@@ -14,7 +14,7 @@ import {
   simplifiedWindOnPipe,
   simplifiedWindOnWall,
 } from './convection/simplified.ts'
-import { nusseltSphere, nusseltSphereInWind } from './convection/sphere.ts'
+import { nusseltSphere, nusseltSphereInWind, type SphereWind } from './convection/sphere.ts'
 import type { FaceShape, FlowKind } from './geometry.ts'
 import { type Air, airAt, airViscosityPaS } from './properties/air.ts'
 import type { FilmChoice, System } from './types.ts'
@@ -145,10 +145,8 @@ function windFilm(face: FaceShape, weather: Weather): (excessK: number, air: Air
   const { windMPerS } = weather
   const lengthM = face.windLengthM
   if (face.flow === 'sphere') {
-    return (excessK) => {
-      const { wind, conductivityWPerMK } = sphereWind(face, weather, excessK)
-      return (nusseltSphereInWind(wind) * conductivityWPerMK) / lengthM
-    }
+    const { windAt, conductivityWPerMK } = sphereWind(face, weather)
+    return (excessK) => (nusseltSphereInWind(windAt(excessK)) * conductivityWPerMK) / lengthM
   }
   const nusselt = isCylinder(face.flow) ? nusseltCylinderInWind : nusseltPlateInWind
   return (_, air) => {
@@ -157,17 +155,17 @@ function windFilm(face: FaceShape, weather: Weather): (excessK: number, air: Air
   }
 }
 
-export function sphereWind(face: FaceShape, weather: Weather, excessK: number) {
-  const { airC, windMPerS, pressurePa } = weather
-  const air = airAt(airC, pressurePa)
-  return {
-    wind: {
-      reynolds: (windMPerS * face.windLengthM) / air.kinematicViscosityM2PerS,
-      prandtl: air.prandtl,
-      viscosityRatio: airViscosityPaS(kelvin(airC)) / airViscosityPaS(kelvin(airC + excessK)),
-    },
-    conductivityWPerMK: air.conductivityWPerMK,
-  }
+/** The wind on a sphere by the excess of its surface, and the conductivity of the air that it is of. */
+export function sphereWind({ windLengthM }: FaceShape, { airC, windMPerS, pressurePa }: Weather) {
+  const { kinematicViscosityM2PerS, prandtl, conductivityWPerMK } = airAt(airC, pressurePa)
+  const reynolds = (windMPerS * windLengthM) / kinematicViscosityM2PerS
+  const viscosityPaS = airViscosityPaS(kelvin(airC))
+  const windAt = (excessK: number): SphereWind => ({
+    reynolds,
+    prandtl,
+    viscosityRatio: viscosityPaS / airViscosityPaS(kelvin(airC + excessK)),
+  })
+  return { windAt, conductivityWPerMK }
 }
 
 /**

@@ -1,7 +1,11 @@
 /** The way into the solver. Pure: no dependency, no input or output, same input, same bits. */
-export { conductivityAtWPerMK, layerDifferenceK } from './conductivity.ts'
-export { GRAVITY_M_PER_S2, kelvin, STEFAN_BOLTZMANN_W_PER_M2_K4 } from './constants.ts'
-export { nusseltCylinderInWind, nusseltPlateInWind } from './convection/forced.ts'
+export { conductivityAtWPerMK } from './conductivity.ts'
+export { kelvin, STEFAN_BOLTZMANN_W_PER_M2_K4 } from './constants.ts'
+export {
+  nusseltCylinderInWind,
+  nusseltPlateInWind,
+  TURBULENT_REYNOLDS,
+} from './convection/forced.ts'
 export { insideFilmWPerM2K } from './convection/inside.ts'
 export {
   nusseltHorizontalCylinder,
@@ -10,6 +14,7 @@ export {
   nusseltSlenderCylinder,
   nusseltVerticalCylinder,
   nusseltVerticalPlate,
+  TURBULENT_RAYLEIGH,
 } from './convection/natural.ts'
 export {
   branchUsed,
@@ -27,7 +32,6 @@ export {
   isDriving,
   isSimplified,
   radiates,
-  rayleighNumber,
   sphereWind,
   type Weather,
 } from './film.ts'

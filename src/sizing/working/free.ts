@@ -8,6 +8,7 @@ import {
   nusseltSlenderCylinder,
   nusseltSphere,
   nusseltVerticalPlate,
+  TURBULENT_RAYLEIGH,
 } from '#solver/index.ts'
 import type { Ledger } from './ledger.ts'
 import { pedigreeOf } from './pedigree.ts'
@@ -102,9 +103,6 @@ function plate(ledger: Ledger, symbol: string, free: Flow): void {
     { value: nusseltVerticalPlate(free), ...pedigreeOf(nusseltVerticalPlate, free) },
   )
 }
-
-/** Above it the form for thin cylinders ends. */
-const TURBULENT_RAYLEIGH = 1e9
 
 function uprightSteps(ledger: Ledger, shape: FaceShape, prandtl: number): void {
   const rayleigh = ledger.step('Rayleigh number on the height', 'Ra', RAYLEIGH('L'), '')

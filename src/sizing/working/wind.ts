@@ -8,6 +8,7 @@ import {
   nusseltPlateInWind,
   nusseltSphereInWind,
   sphereWind,
+  TURBULENT_REYNOLDS,
   type Weather,
 } from '#solver/index.ts'
 import { airSteps } from './air.ts'
@@ -34,7 +35,7 @@ export function windSteps(
     'Nu_w',
     isRound
       ? '0.3 + 0.62 × sqrt(Re) × cbrt(Pr) / (1 + (0.4 / Pr)^(2 / 3))^(1 / 4) × (1 + (Re / 282000)^(5 / 8))^(4 / 5)'
-      : reynolds < LAMINAR_TO
+      : reynolds < TURBULENT_REYNOLDS
         ? 'cbrt(Pr) × max(0.664 × sqrt(Re), 0.037 × Re^0.8)'
         : 'cbrt(Pr) × 0.037 × Re^0.8',
     '',
@@ -43,12 +44,9 @@ export function windSteps(
   ledger.step('Coefficient of the wind', 'h_w', `Nu_w × λ_a / ${length}`, 'W/(m²·K)')
 }
 
-/** A plate is turbulent from its edge above this Reynolds number. */
-const LAMINAR_TO = 5e5
-
 /** A sphere in wind reads the air at its own temperature, and the viscosity at the surface too. */
 function sphereSteps(ledger: Ledger, shape: FaceShape, weather: Weather, excessK: number): void {
-  const { wind } = sphereWind(shape, weather, excessK)
+  const wind = sphereWind(shape, weather).windAt(excessK)
   const surfaceC = weather.airC + excessK
   ledger.step('Absolute temperature of the air', 'T_w', 'θ_a + 273.15', 'K')
   airSteps(ledger, weather.airC, weather.pressurePa, '_w')

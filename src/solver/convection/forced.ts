@@ -23,7 +23,7 @@ export const nusseltCylinderInWind = correlation<Wind>(
 )
 
 /** Above this Reynolds number a plate is taken as turbulent from its edge. */
-const TURBULENT_REYNOLDS = 5e5
+export const TURBULENT_REYNOLDS = 5e5
 
 /** Plate along the wind, on its length: the rough form, and the laminar one where that is larger below Re 5e5. */
 export const nusseltPlateInWind = correlation<Wind>(
