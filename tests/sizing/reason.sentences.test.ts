@@ -1,0 +1,379 @@
+/** The sentences of a reason from facts made up by hand: every number in them is one that was put in. */
+import { describe, expect, test } from 'vitest'
+import { type ReasonFacts, writeReason } from '#sizing/reason.ts'
+import type { LimitName, LimitResult, LimitUnit, Rating, RunMoney } from '#sizing/result.ts'
+import { against, siWords } from '#sizing/words.ts'
+
+const limit = (
+  name: LimitName,
+  value: number,
+  bound: number,
+  own: Partial<LimitResult> & { readonly unit?: LimitUnit } = {},
+): LimitResult => ({
+  limit: name,
+  pass: value <= bound,
+  value,
+  rule: 'at most',
+  bound,
+  unit: name === 'loss' ? 'W/m' : '°C',
+  condition: name === 'touch' ? 'touch' : 'loss',
+  what: name === 'loss' ? 'heat flow per metre' : 'surface',
+  ...own,
+})
+
+const rung = (
+  thicknessMm: number,
+  limits: readonly LimitResult[],
+  lifeCycle: number | null = null,
+  nominalInch: number | null = null,
+): Rating => ({
+  thicknessM: thicknessMm / 1000,
+  nominalThicknessM: nominalInch === null ? null : nominalInch * 0.0254,
+  piecesM: [thicknessMm / 1000],
+  outerDiameterM: null,
+  heatLossWPerM: null,
+  heatFluxWPerM2: 0,
+  heatLossW: null,
+  fittingsLossW: null,
+  yearlyMeanLossW: null,
+  yearlyKWh: null,
+  surfaceTempC: 41.26,
+  convectionWPerM2K: 0,
+  radiationWPerM2K: 0,
+  interfaceTempsC: [],
+  touchSurfaceC: 0,
+  timeToFreezeH: null,
+  arrivalTempC: null,
+  condensateKgPerS: null,
+  limits,
+  pass: limits.every(({ pass }) => pass),
+  money: lifeCycle === null ? null : { installed: 0, energyPerYear: 0, lifeCycle },
+})
+
+const moneyOf = (own: Partial<RunMoney>): RunMoney => ({
+  currency: 'EUR',
+  per: 'm',
+  hoursPerYear: 8000,
+  fuel: 'gas',
+  fuelPricePerKWh: 0.1,
+  efficiency: 0.9,
+  discount: 0.05,
+  growth: 0,
+  lifeYears: 20,
+  presentValueFactor: 12,
+  bareEnergyPerYear: 1,
+  installedTotal: null,
+  savingPerYearTotal: null,
+  paybackYears: null,
+  co2KgPerYear: null,
+  co2SavedKgPerYear: null,
+  cheapestThicknessM: null,
+  withinTwoPercentM: null,
+  ...own,
+})
+
+function reason(
+  governing: ReasonFacts['governing'],
+  ladder: readonly Rating[],
+  chosenMm: number | null,
+  own: Partial<ReasonFacts> = {},
+): string {
+  const bare = rung(0, [])
+  const chosen = ladder.find(({ thicknessM }) => thicknessM * 1000 === chosenMm) ?? null
+  return writeReason({
+    bare,
+    chosen: chosenMm === 0 ? bare : chosen,
+    governing,
+    ladder,
+    limits: chosen?.limits ?? [],
+    money: null,
+    mattThicknessM: null,
+    unmet: [],
+    ...own,
+  })
+}
+
+describe('a limit decides', () => {
+  const burn = { rule: 'below', what: 'surface, smooth metal touched for 5 s' } as const
+
+  test('what the chosen rung gives, against what, and what the thinner one would', () => {
+    const ladder = [
+      rung(40, [limit('touch', 60.23, 57.27, burn)]),
+      rung(50, [limit('touch', 55.06, 57.27, burn)]),
+    ]
+    expect(reason('touch', ladder, 50)).toBe(
+      'Touch decides. 50 mm gives 55.1 °C against 57.3 °C (surface, smooth metal touched for 5 s); 40 mm would give 60.2 °C.',
+    )
+  })
+
+  test('a stated temperature needs no surface to be named', () => {
+    const ladder = [rung(40, [limit('touch', 60.2, 50)]), rung(50, [limit('touch', 48.1, 50)])]
+    expect(reason('touch', ladder, 50)).toBe(
+      'Touch decides. 50 mm gives 48.1 °C against 50 °C; 40 mm would give 60.2 °C.',
+    )
+  })
+
+  test('a thinner one that reads like its bound just misses it', () => {
+    const ladder = [rung(40, [limit('loss', 30.02, 30)]), rung(50, [limit('loss', 25, 30)])]
+    expect(reason('loss', ladder, 50)).toBe(
+      'Loss decides. 50 mm gives 25.0 W/m against 30 W/m; 40 mm would just miss it.',
+    )
+  })
+
+  test('of two bounds it is the one that the thinner rung failed', () => {
+    const ladder = [
+      rung(40, [limit('touch', 52, 60), limit('touch', 52, 50)]),
+      rung(50, [limit('touch', 48, 60), limit('touch', 48, 50)]),
+    ]
+    expect(reason('touch', ladder, 50)).toBe(
+      'Touch decides. 50 mm gives 48.0 °C against 50 °C; 40 mm would give 52.0 °C.',
+    )
+  })
+
+  test('without a thinner one it is the chosen rung alone', () => {
+    expect(reason('loss', [rung(40, [limit('loss', 20, 30)])], 40)).toBe(
+      'Loss decides. 40 mm gives 20.0 W/m against 30 W/m.',
+    )
+  })
+
+  test('service names the place that failed', () => {
+    const ladder = [
+      rung(40, [limit('service', 664.4, 650, { what: 'stone wool, hottest side' })]),
+      rung(50, [limit('service', 58, 60, { what: 'sheet, jacket' })]),
+    ]
+    expect(reason('service', ladder, 50)).toBe(
+      'Service decides. 50 mm serves; at 40 mm stone wool, hottest side would stand at 664.4 °C against 650 °C.',
+    )
+  })
+
+  test('a code that asks for a thickness is met by it', () => {
+    const asked = { rule: 'at least', unit: 'm', what: 'thickness, Table 1' } as const
+    const ladder = [
+      rung(50, [limit('code', 0.05, 0.0512, { ...asked, pass: false })]),
+      rung(60, [limit('code', 0.06, 0.0512, { ...asked, pass: true })]),
+    ]
+    expect(reason('code', ladder, 60)).toBe(
+      'Code decides. 60 mm meets the 51.2 mm asked for; 50 mm does not.',
+    )
+  })
+
+  const damp = (thicknessMm: number, value: number): Rating =>
+    rung(thicknessMm, [limit('damp', value, 14, { rule: 'at least', pass: value >= 14 })])
+  const both = [damp(40, 12), damp(50, 15)]
+
+  test('what a matt finish would do is said where that is thinner', () => {
+    const first = 'Damp decides. 50 mm gives 15.0 °C against 14 °C; 40 mm would give 12.0 °C.'
+    expect(reason('damp', both, 50, { mattThicknessM: 0.04 })).toBe(
+      `${first} Under a matt finish 40 mm would do.`,
+    )
+    expect(reason('damp', both, 50, { mattThicknessM: 0.05 })).toBe(first)
+  })
+
+  test('what cost alone would take is said where that is another thickness', () => {
+    const cheap = (cheapestThicknessM: number | null) =>
+      reason('damp', both, 50, { money: moneyOf({ cheapestThicknessM }) })
+    expect(cheap(0.04)).toMatch(/12\.0 °C\. Cost alone would take 40 mm\.$/)
+    expect(cheap(0.05)).toMatch(/12\.0 °C\.$/)
+    expect(cheap(null)).toMatch(/12\.0 °C\.$/)
+  })
+
+  test('a rung of an inch series is said by its name, wherever it is spoken of', () => {
+    const inch = [
+      rung(38.9, [limit('loss', 31, 30)], null, 1.5),
+      rung(51.2, [limit('loss', 29, 30)], null, 2),
+    ]
+    expect(reason('loss', inch, 51.2, { mattThicknessM: 0.0389 })).toBe(
+      'Loss decides. 2 in (51.2 mm) gives 29.0 W/m against 30 W/m; 1.5 in (38.9 mm) would give 31.0 W/m. Under a matt finish 1.5 in (38.9 mm) would do.',
+    )
+  })
+})
+
+describe('cost decides', () => {
+  const passing = (thicknessMm: number, lifeCycle: number): Rating =>
+    rung(thicknessMm, [limit('loss', 30 - thicknessMm / 10, 40)], lifeCycle)
+  const money = moneyOf({ lifeYears: 20 })
+  const costs = (ladder: readonly Rating[], chosenMm: number, own = money): string =>
+    reason('money', ladder, chosenMm, { money: own })
+
+  test('the limits would have allowed a thinner one, by the narrowest of them, service apart', () => {
+    const limits = [
+      limit('service', 649, 650),
+      limit('touch', 40, 57.3),
+      limit('loss', 38, 40),
+      limit('space', 0.1, 0.2, { unit: 'm' }),
+    ]
+    const ladder = [rung(30, limits, 200), rung(50, limits, 100)]
+    expect(costs(ladder, 50)).toBe(
+      'Cost decides. The limits would allow 30 mm (loss: 38.0 W/m against 40 W/m). 50 mm is the cheapest to own over 20 years; every other thickness that passes costs over 2 % more.',
+    )
+  })
+
+  test('nothing is said of limits where the first that passes is chosen, or none is set', () => {
+    expect(costs([passing(30, 100), passing(50, 200)], 30)).toBe(
+      'Cost decides. 30 mm is the cheapest to own over 20 years; every other thickness that passes costs over 2 % more.',
+    )
+    expect(costs([rung(30, [], 200), rung(50, [], 100)], 50)).toBe(
+      'Cost decides. 50 mm is the cheapest to own over 20 years; every other thickness that passes costs over 2 % more.',
+    )
+  })
+
+  const nearTo = (others: readonly [number, number][]): string =>
+    costs(
+      [passing(20, 100), ...others.map(([thicknessMm, cost]) => passing(thicknessMm, cost))],
+      20,
+    ).replace('Cost decides. 20 mm is the cheapest to own over 20 years; ', '')
+
+  test('up to 2 % dearer is near: one, two, or a range of them', () => {
+    expect(nearTo([[30, 102]])).toBe('30 mm costs within 2 % of it.')
+    expect(nearTo([[30, 102.1]])).toBe('every other thickness that passes costs over 2 % more.')
+    expect(
+      nearTo([
+        [30, 101],
+        [40, 102],
+      ]),
+    ).toBe('30 mm and 40 mm cost within 2 % of it.')
+    expect(
+      nearTo([
+        [30, 101],
+        [40, 101.5],
+        [50, 102],
+        [60, 103],
+      ]),
+    ).toBe('30 mm to 50 mm cost within 2 % of it.')
+  })
+
+  test('a range with a gap is counted', () => {
+    expect(
+      nearTo([
+        [30, 101],
+        [40, 110],
+        [50, 101],
+        [60, 102],
+      ]),
+    ).toBe('3 others from 30 mm to 60 mm cost within 2 % of it.')
+  })
+
+  test('neither what fails nor what has no price is near', () => {
+    const ladder = [
+      passing(20, 100),
+      rung(30, [limit('loss', 50, 40)], 100),
+      rung(40, [limit('loss', 30, 40)], null),
+    ]
+    expect(costs(ladder, 20)).toMatch(/; every other thickness that passes costs over 2 % more\.$/)
+  })
+
+  test('a life of a year is one year', () => {
+    expect(costs([passing(20, 100)], 20, moneyOf({ lifeYears: 1 }))).toContain('over 1 year;')
+  })
+})
+
+describe('other answers', () => {
+  test('the thinnest that can be bought', () => {
+    const ladder = [rung(20, [limit('loss', 25, 30), limit('touch', 30, 60)])]
+    expect(reason('smallest', ladder, 20)).toBe(
+      'The thinnest that can be bought passes. 20 mm gives 25.0 W/m against 30 W/m (loss).',
+    )
+    expect(reason('smallest', [rung(20, [])], 20)).toBe('The thinnest that can be bought passes.')
+  })
+
+  test('fixed: passing, rated without a limit, failing', () => {
+    const at = (...limits: LimitResult[]) => reason('fixed', [rung(50, limits)], 50)
+    expect(at(limit('loss', 25, 30), limit('touch', 30, 60))).toBe(
+      'Fixed at 50 mm. It passes every limit; the narrowest is loss, 25.0 W/m against 30 W/m.',
+    )
+    expect(at()).toBe('Fixed at 50 mm. It is rated as given.')
+    expect(at(limit('loss', 35, 30), limit('touch', 70, 60), limit('damp', 1, 2))).toBe(
+      'Fixed at 50 mm. It fails loss: 35.0 W/m against 30 W/m (heat flow per metre). It fails touch: 70.0 °C against 60 °C (surface).',
+    )
+  })
+
+  test('bare: within its limits, without any, failing', () => {
+    expect(reason('bare', [], 0, { limits: [limit('loss', 25, 30)] })).toBe(
+      'Bare. The surface is at 41.3 °C; every limit is met.',
+    )
+    expect(reason('bare', [], 0)).toBe('Bare. The surface is at 41.3 °C; no limit is set for it.')
+    const failing = rung(0, [limit('loss', 35, 30)])
+    expect(reason('bare', [], 0, { chosen: failing })).toBe(
+      'Bare. It fails loss: 35.0 W/m against 30 W/m (heat flow per metre).',
+    )
+  })
+})
+
+describe('no thickness passes', () => {
+  test('none can be bought', () => {
+    expect(reason('unmet', [], null)).toBe(
+      'No thickness of this material can be bought for this size.',
+    )
+  })
+
+  const ladder = [
+    rung(50, [limit('loss', 14, 10), limit('touch', 40, 60)]),
+    rung(100, [limit('loss', 12, 10), limit('touch', 35, 60)]),
+  ]
+
+  test('what the best comes to, and what it would take', () => {
+    expect(
+      reason('unmet', ladder, null, { unmet: [{ limit: 'loss', neededM: 0.4, because: null }] }),
+    ).toBe(
+      'No thickness passes every limit. Loss cannot be met: at best, 100 mm, it stands at 12.0 W/m against 10 W/m (heat flow per metre); it would take 400 mm, which is more than can be bought.',
+    )
+  })
+
+  test('or why none would do', () => {
+    const unmet = (because: string | null) =>
+      reason('unmet', ladder, null, { unmet: [{ limit: 'loss', neededM: null, because }] })
+    expect(unmet('the air is as hot itself')).toMatch(
+      /\(heat flow per metre\), because the air is as hot itself\.$/,
+    )
+    expect(unmet(null)).toMatch(/, because no thickness would do\.$/)
+  })
+
+  test('service stands where it stands, whatever the thickness', () => {
+    const hot = [rung(50, [limit('service', 700, 650, { what: 'wool' })])]
+    expect(
+      reason('unmet', hot, null, { unmet: [{ limit: 'service', neededM: null, because: 'so' }] }),
+    ).toBe(
+      'No thickness passes every limit. Service cannot be met: it stands at 700.0 °C against 650 °C (wool), because so.',
+    )
+  })
+
+  test('limits that exclude each other: which needs most, and which allows least', () => {
+    const exclusive = [
+      rung(20, [limit('touch', 70, 60), limit('space', 0.1, 0.14, { unit: 'm' })]),
+      rung(40, [limit('touch', 65, 60), limit('space', 0.14, 0.14, { unit: 'm' })]),
+      rung(60, [limit('touch', 58, 60), limit('space', 0.18, 0.14, { unit: 'm' })]),
+      rung(80, [limit('touch', 52, 60), limit('space', 0.22, 0.14, { unit: 'm' })]),
+    ]
+    expect(reason('unmet', exclusive, null)).toBe(
+      'No thickness passes every limit. Touch needs 60 mm or more, space allows 40 mm at most.',
+    )
+  })
+})
+
+describe('numbers', () => {
+  test('metres are said in millimetres, kilograms a second in kilograms an hour', () => {
+    expect(siWords.quantity(0.0512, 'm', 1)).toBe('51.2 mm')
+    expect(siWords.quantity(0.01, 'kg/s', 1)).toBe('36.0 kg/h')
+    expect(siWords.quantity(12, 'h', 0)).toBe('12 h')
+    expect(siWords.quantity(-7, '°C', 0)).toBe('−7 °C')
+    expect(siWords.quantity(-0, '°C', 0)).toBe('0 °C')
+  })
+
+  test('a thickness has a tenth where it needs one, and its name in an inch series', () => {
+    expect(siWords.thickness(0.05, null)).toBe('50 mm')
+    expect(siWords.thickness(0.0389, 0.0381)).toBe('1.5 in (38.9 mm)')
+  })
+
+  test('a value has as many digits as tell it from its bound, six at most; a whole bound none', () => {
+    const words = (value: number, bound: number) => against(limit('loss', value, bound), siWords)
+    expect(words(29.5, 30)).toBe('29.5 W/m against 30 W/m')
+    expect(words(29.96, 30)).toBe('29.96 W/m against 30 W/m')
+    expect(words(29.9999, 30)).toBe('29.9999 W/m against 30 W/m')
+    expect(words(30, 30)).toBe('30.000000 W/m against 30 W/m')
+    expect(words(29.5, 30.25)).toBe('29.5 W/m against 30.3 W/m')
+    expect(words(30.23, 30.24)).toBe('30.23 W/m against 30.24 W/m')
+    expect(against(limit('space', 0.139, 0.14, { unit: 'm' }), siWords)).toBe(
+      '139.0 mm against 140 mm',
+    )
+  })
+})
