@@ -53,5 +53,19 @@ const symbols: Readonly<Record<string, string>> = {
   airC: 'air temperature in °C',
 }
 
-/** To three digits, for a sentence. */
-export const short = (value: number): string => Number(value.toPrecision(3)).toString()
+/** To three digits, for a sentence: 0.71, −10, 8 × 10⁶. */
+export function short(value: number): string {
+  const [mantissa = '', exponent = '0'] = value.toExponential(2).split('e')
+  const power = Number(exponent)
+  const text =
+    value !== 0 && Math.abs(power) >= 6
+      ? `${Number(mantissa)} × 10${superscript(power)}`
+      : String(Number(value.toPrecision(3)))
+  return text.replace('-', '−')
+}
+
+const superscript = (power: number): string =>
+  [...String(power)].map((digit) => superscripts[digit] ?? digit).join('')
+const superscripts: Readonly<Record<string, string>> = Object.fromEntries(
+  [...'-0123456789'].map((digit, index) => [digit, [...'⁻⁰¹²³⁴⁵⁶⁷⁸⁹'][index] ?? digit]),
+)

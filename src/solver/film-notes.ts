@@ -80,7 +80,7 @@ export function stepNotes(
           : [
               {
                 code: 'film-jump',
-                text: `${capital(face.side)}: the Rayleigh number of free convection, ${short(rayleigh)}, is near ${short(step)}, where the formula steps by ${(100 * jump).toFixed(0)} %.`,
+                text: `${capital(face.side)}: the Rayleigh number of free convection, ${short(rayleigh)}, is near ${short(step)}, where the formula ${stepWords(jump)}.`,
               },
             ]
       })
@@ -104,6 +104,9 @@ export function stepNotes(
   }
 }
 
+const stepWords = (share: number): string =>
+  `${share < 0 ? 'drops' : 'rises'} by ${Math.abs(100 * share).toFixed(0)} %`
+
 export const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)
 
 /** Where a branch of the simplified set was taken beside a step of it. */
@@ -115,7 +118,7 @@ function simplifiedNotes(face: FaceShape, { windMPerS }: Weather, excessK: numbe
     const used = branchUsed(formula, inputs)
     if (!used.besideJump) return
     texts.push(
-      `${formula.pedigree.name}: ${used.number} is ${short(used.value)}, near ${short(used.switchValue)}, where the formula steps by ${(100 * used.jumpFraction).toFixed(0)} %; the ${used.branch} branch was taken.`,
+      `${formula.pedigree.name}: ${used.number} is ${short(used.value)}, near ${short(used.switchValue)}, where the formula ${stepWords(used.jumpFraction)}; the ${used.branch} branch was taken.`,
     )
   }
   if (windMPerS > 0 && isCylinder(face.flow)) add(simplifiedWindOnPipe, { windMPerS, diameterM })

@@ -258,11 +258,11 @@ test('what left its range is named in words, with its unit', () => {
   ]
   expect(sentences.map((text) => /: (.*) is outside its range (.*);/.exec(text)?.slice(1))).toEqual(
     [
-      ['Reynolds number 200000000', '0 to 100000000'],
+      ['Reynolds number 2 × 10⁸', '0 to 1 × 10⁸'],
       ['Prandtl number 70', '0.6 to 60'],
       ['temperature difference in K 150', '0 to 100'],
       ['wind in m/s 40', '0 to 30'],
-      ['air temperature in °C 50', '-10 to 40'],
+      ['air temperature in °C 50', '−10 to 40'],
     ],
   )
 })

@@ -130,7 +130,7 @@ describe('the jump of a plate formula', () => {
     const [note, ...more] = notesOf(system, solution)
     expect(more).toEqual([])
     expect(note?.code).toBe('film-jump')
-    expect(note?.text).toMatch(/is near 8000000, where the formula steps by 4 %\.$/)
+    expect(note?.text).toMatch(/is near 8 × 10⁶, where the formula rises by 4 %\.$/)
   })
 
   test('stands in no answer of a shape whose film has no step', () => {
