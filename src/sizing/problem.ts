@@ -17,6 +17,8 @@ export interface Condition {
   readonly solarAbsorptance: number
   readonly bareSolarAbsorptance: number
   readonly film: FilmChoice
+  /** Share of clear sky in what the surface sees, and what else it sees; null where there is none. `around` holds the mix. */
+  readonly sky: { readonly view: number; readonly groundC: number } | null
   /** For an inclined pipe: the higher film where a loss is asked, the lower where a temperature is. */
   readonly inclinedFilm: 'lower' | 'higher'
 }
@@ -63,6 +65,14 @@ export interface BurnLimit {
   /** The touched surface and the contact time in words: "smooth metal", "1 min". */
   readonly surface: string
   readonly contact: string
+  /** How it was read off its row of the burn curve; null where it stands by itself. */
+  readonly read: BurnReading | null
+}
+
+/** One cell of the row, or the two around the contact time that was looked up [s]. */
+export interface BurnReading {
+  readonly contactS: number
+  readonly cells: readonly { readonly contactS: number; readonly thresholdC: number }[]
 }
 
 export interface Limits {
@@ -93,6 +103,8 @@ export interface FrostLimit {
   /** Heat capacity of wall and water for each metre [J/(m·K)]. */
   readonly wallJPerMK: number
   readonly waterJPerMK: number
+  /** What that of the wall comes from; its outer diameter is that of the run. */
+  readonly wall: { readonly densityKgPerM3: number; readonly heatCapacityJPerKgK: number }
 }
 
 /** What flows along the run at the loss condition, and with how much less (or more) than it set out it may arrive. */
@@ -166,8 +178,28 @@ export interface Fittings {
   readonly supportShare: number
   /** Ends of the run that are closed off like its surface: discs. */
   readonly ends: number
+  /** What the areas and lengths are the sum of. */
+  readonly items: readonly FittingCount[]
   /** Where the figures come from, in words. */
   readonly convention: string
+}
+
+/** So many of one kind, each with so much bare surface, or losing as much as so much lagged run. */
+export interface FittingCount {
+  /** In the plural: "valves". */
+  readonly name: string
+  readonly count: number
+  readonly bareAreaM2: number
+  /** 0 where the fittings stay bare. */
+  readonly laggedLengthM: number
+}
+
+/** Air that flows inside of a duct, whose film was worked out by its velocity. */
+export interface InsideAir {
+  readonly velocityMPerS: number
+  /** What the velocity follows from; null where it was given itself. */
+  readonly flowKgPerS: number | null
+  readonly airC: number
 }
 
 /** What was measured on the day, besides the survey condition. */
@@ -194,6 +226,8 @@ export interface Problem {
   readonly tag: string
   readonly shape: Shape
   readonly insideFilmWPerM2K: number | null
+  /** What the film inside was worked out from; null where it was given, usual, or none. */
+  readonly insideAir: InsideAir | null
   /** Length of a pipe or duct [m], area of a flat surface [m²], or 1 for a sphere or vessel; null where not given. */
   readonly extent: number | null
   readonly layers: readonly BuildUpLayer[]

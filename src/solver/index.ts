@@ -6,7 +6,7 @@ export {
   nusseltPlateInWind,
   TURBULENT_REYNOLDS,
 } from './convection/forced.ts'
-export { insideFilmWPerM2K } from './convection/inside.ts'
+export { insideFilmWPerM2K, nusseltInside } from './convection/inside.ts'
 export {
   nusseltHorizontalCylinder,
   nusseltPlateDrivingFlow,
@@ -49,6 +49,8 @@ export {
   ICE_KG_PER_M3,
   ICE_LATENT_J_PER_KG,
   ICE_W_PER_M_K,
+  WATER_J_PER_KG_K,
+  WATER_KG_PER_M3,
   wallCapacityJPerMK,
   waterCapacityJPerMK,
 } from './frost.ts'
@@ -65,6 +67,6 @@ export {
 export { dewPointC, saturationPressurePa } from './properties/moist-air.ts'
 export { radiationWPerM2K } from './radiation.ts'
 export { bracketedRoot } from './root.ts'
-export { clearSkyC, radiantMixC } from './sky.ts'
+export { clearSky, clearSkyC, radiantMixC } from './sky.ts'
 export { solve, weatherOf } from './solve.ts'
 export { sources } from './sources.ts'

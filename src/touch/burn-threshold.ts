@@ -18,6 +18,19 @@ export interface Threshold {
   readonly confidence: Confidence
   /** Why another row than the surface's own decided; null where its own did. */
   readonly because: string | null
+  readonly read: ThresholdReading
+}
+
+/** How the threshold was read off its row: at one cell, or in between two. */
+export interface ThresholdReading {
+  /** Contact time that was looked up [s]. */
+  readonly contactS: number
+  readonly cells: readonly ThresholdCell[]
+}
+
+export interface ThresholdCell {
+  readonly contactS: number
+  readonly thresholdC: number
 }
 
 /** Contact times above eight hours have the eight-hour value. Source: ISO 13732-1, as `domain` data of the catalogue. */
@@ -101,9 +114,10 @@ interface Reading {
   readonly thresholdC: number
   readonly confidence: Confidence
   readonly confirmed: boolean
+  readonly read: ThresholdReading
 }
 
-const told = ({ thresholdC, confidence }: Reading) => ({ thresholdC, confidence })
+const told = ({ thresholdC, confidence, read }: Reading) => ({ thresholdC, confidence, read })
 
 function interpolate(cells: readonly BurnThreshold[], contactS: number): Reading | null {
   const sorted = [...cells].sort((a, b) => a.contactS - b.contactS)
@@ -111,12 +125,12 @@ function interpolate(cells: readonly BurnThreshold[], contactS: number): Reading
   const high = after < 0 ? sorted[sorted.length - 1] : sorted[after]
   const low = after <= 0 ? high : sorted[after - 1]
   if (!high || !low) return null
-  if (high === low || high.contactS === contactS) return reading(high.lowerC, [high])
+  if (high === low || high.contactS === contactS) return reading(high.lowerC, [high], contactS)
   const share = Math.log10(contactS / low.contactS) / Math.log10(high.contactS / low.contactS)
-  return reading(low.lowerC + share * (high.lowerC - low.lowerC), [low, high])
+  return reading(low.lowerC + share * (high.lowerC - low.lowerC), [low, high], contactS)
 }
 
-function reading(thresholdC: number, cells: readonly BurnThreshold[]): Reading {
+function reading(thresholdC: number, cells: readonly BurnThreshold[], contactS: number): Reading {
   const least = (['estimate', 'memory'] as const).find((confidence) =>
     cells.some((cell) => cell.confidence === confidence),
   )
@@ -124,6 +138,10 @@ function reading(thresholdC: number, cells: readonly BurnThreshold[]): Reading {
     thresholdC,
     confidence: least ?? 'found',
     confirmed: cells.every((cell) => cell.grade !== 'L'),
+    read: {
+      contactS,
+      cells: cells.map((cell) => ({ contactS: cell.contactS, thresholdC: cell.lowerC })),
+    },
   }
 }
 

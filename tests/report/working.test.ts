@@ -94,10 +94,13 @@ describe.each(runs)('the working of $tag', (values) => {
   })
 
   test('ends at the figures of the schedule', () => {
-    const { bare, result, shown, title, at } = worked()
+    const { sections, bare, result, shown, title, at } = worked()
     const pairs: [string, number, number | null | undefined][] = [
       ['flux', at(`${title}: the whole run`, 'q'), shown.heatFluxWPerM2],
       ['total', at(`${title}: the whole run`, 'Q'), shown.heatLossW],
+      ['mean of the year', at(`${title}: the year`, 'Q'), shown.yearlyMeanLossW],
+      ['surface', surfaceOf(sections, title), shown.surfaceTempC],
+      ['bare surface', surfaceOf(sections, 'Bare run'), bare.surfaceTempC],
       ['bare total', at('Bare run: the whole run', 'Q'), bare.heatLossW],
       ['year', at(`${title}: the year`, 'E'), shown.yearlyKWh],
       ['installed', at('Money: installed cost', 'C'), shown.money?.installed],
@@ -131,5 +134,67 @@ describe.each(runs)('the working of $tag', (values) => {
   })
 })
 
+/** The surface of an inclined pipe stands at its lower film; that of several faces is their mean. */
+function surfaceOf(sections: readonly PageSection[], title: string): number {
+  const titles = sections.map((section) => section.title)
+  const own = [
+    `${title}, its temperatures with the lower film: outer film`,
+    `${title}: mean of the faces`,
+    `${title}: outer film`,
+  ].find((candidate) => titles.includes(candidate))
+  return printed(sections, own ?? '', 'θ_s')
+}
+
 const condenses = ({ condensateKgPerS }: { condensateKgPerS: number | null }): boolean =>
   condensateKgPerS !== null
+
+function textOf(tag: string): string {
+  const values = workingRuns.find((run) => run.tag === tag)
+  if (!values) throw new Error(`No run ${tag}`)
+  return writeWorkingText(workingOf(values)).replace(/\s+/g, ' ')
+}
+
+describe('what a working takes apart', () => {
+  test('a burn threshold between two cells of its row', () => {
+    expect(textOf('lying')).toMatch(
+      /θ_B = θ_1 \+ \(θ_2 − θ_1\) × ln\(t \/ t_1\) \/ ln\(t_2 \/ t_1\) = \d+ \+ \(\d+ − \d+\) × ln\(5 \/ \d+\) \/ ln/,
+    )
+    expect(textOf('contact of a cell')).toContain('Burn threshold: cell of smooth metal at 60 s')
+  })
+
+  test('the clear sky in what a surface sees', () => {
+    expect(textOf('sun and sky')).toContain('T_S = 0.0552 × (θ_a + 273.15)^1.5')
+  })
+
+  test('the film inside a duct by the velocity of its air, or by what flows', () => {
+    expect(textOf('duct')).toContain('Nusselt number inside: turbulent')
+    expect(textOf('slow duct')).toContain('Nusselt number inside: laminar')
+    expect(textOf('slower duct')).toContain('on the straight line between laminar and turbulent')
+    expect(textOf('duct by flow')).toContain('v = m / (ρ × A_i)')
+  })
+
+  test('fittings by their kinds, water and wall by their measures', () => {
+    expect(textOf('strainers too')).toContain('A_F = n_1 × A_1 + n_2 × A_2 + n_3 × A_3')
+    expect(textOf('fittings lagged')).toContain('l_F = n_1 × l_1 + n_2 × l_2')
+    expect(textOf('frost')).toContain('C_p = ρ_p × c_p × π / 4 × (D^2 − d^2)')
+  })
+
+  test('months in which heat flows the other way, and sun that turns it round', () => {
+    const both = textOf('months, heat both ways')
+    expect(both).toContain('31 × max(0, Q_1)')
+    expect(both).toMatch(/July 24 31 0\.08493 −[\d.]+ 0 /)
+    expect(textOf('months, mostly cold')).toContain('31 × min(0, Q_1)')
+    expect(textOf('sun against the loss')).toContain('Q = max(0, Q_0)')
+  })
+
+  test('what is missing from a limit as a difference, what is to spare only where it is met', () => {
+    const unmet = textOf('unmet')
+    expect(unmet).toMatch(
+      /Missing: the limit is not met M\S* = X\S* − B\S* = [\d.]+ − [\d.]+ = [\d.]+ K/,
+    )
+    expect(unmet).not.toMatch(/Room to spare: the limit is not met/)
+    expect(textOf('limits that exclude each other')).toContain(
+      'the limits exclude each other, no thickness meets them all at once',
+    )
+  })
+})

@@ -14,6 +14,7 @@ const condition = (airC: number, surroundingsC: number, sunWPerM2: number): Cond
   solarAbsorptance: 0.5,
   bareSolarAbsorptance: 0.8,
   film: 'detailed',
+  sky: null,
   inclinedFilm: 'higher',
 })
 

@@ -161,6 +161,7 @@ function statedCondition(
   return {
     ...loss,
     around: { airC, surroundingsC: airC, windMPerS, altitudeM: 0 },
+    sky: null,
     mediumC,
     emissivity: emissivity ?? loss.emissivity,
     sunWPerM2: 0,

@@ -65,11 +65,17 @@ interface Weather {
 }
 
 /** Under the open sky part of what a surface sees is colder than the air. */
-function underSky({ airC, surroundingsC, windMPerS }: Weather, { skyView }: RunValues): Weather {
-  if (skyView === undefined || skyView === 0) return { airC, surroundingsC, windMPerS }
-  const skyC = clearSkyC(airC)
-  return { airC, windMPerS, surroundingsC: radiantMixC({ skyView, skyC, surroundingsC }) }
+function underSky(weather: Weather, { skyView = 0, altitudeM = 0 }: RunValues): UnderSky {
+  if (skyView === 0) return { around: { ...weather, altitudeM }, sky: null }
+  const { surroundingsC: groundC, airC } = weather
+  const mixC = radiantMixC({ skyView, skyC: clearSkyC(airC), surroundingsC: groundC })
+  return {
+    around: { ...weather, surroundingsC: mixC, altitudeM },
+    sky: { view: skyView, groundC },
+  }
 }
+
+type UnderSky = Pick<Condition, 'around' | 'sky'>
 
 function lossCondition(place: Place, { mediumC }: Medium, { aged, bare }: Surfaces): Condition {
   const { airC } = place
@@ -78,7 +84,7 @@ function lossCondition(place: Place, { mediumC }: Medium, { aged, bare }: Surfac
     place,
   )
   return {
-    around: { ...weather, altitudeM: place.altitudeM ?? 0 },
+    ...weather,
     mediumC,
     emissivity: aged.emissivity,
     bareEmissivity: bare.emissivity,
@@ -102,6 +108,7 @@ function touchCondition(place: Place, { hottestC }: Medium, surfaces: Surfaces):
       windMPerS: 0,
       altitudeM: place.altitudeM ?? 0,
     },
+    sky: null,
     mediumC: hottestC,
     emissivity: fresh.emissivity,
     bareEmissivity: bare.emissivity,
@@ -119,10 +126,7 @@ function dampCondition(place: Place, { coldestC }: Medium, surfaces: Surfaces): 
   const { bare, new: fresh } = surfaces
   const surroundingsC = Math.min(place.surroundingsC ?? airC, airC)
   return {
-    around: {
-      ...underSky({ airC, surroundingsC, windMPerS: 0 }, place),
-      altitudeM: place.altitudeM ?? 0,
-    },
+    ...underSky({ airC, surroundingsC, windMPerS: 0 }, place),
     mediumC: coldestC,
     emissivity: fresh.emissivity,
     bareEmissivity: bare.emissivity,

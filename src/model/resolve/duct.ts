@@ -128,9 +128,9 @@ function ductInside(
   bore: Bore,
   index: CatalogueIndex,
   findings: Findings,
-): Pick<Thing, 'insideFilmWPerM2K' | 'wall' | 'wallM' | 'nominalM'> {
+): Pick<Thing, 'insideFilmWPerM2K' | 'insideAir' | 'wall' | 'wallM' | 'nominalM'> {
   return {
-    insideFilmWPerM2K: ductFilm(values, bore, findings),
+    ...ductFilm(values, bore, findings),
     wall: wallOf(values, 'galvanised_steel', index, findings),
     wallM: values.wallM ?? null,
     nominalM: null,
@@ -138,9 +138,13 @@ function ductInside(
 }
 
 /** Film inside: as given, else by the velocity of the air, else of the usual velocity. */
-function ductFilm(values: RunValues, bore: Bore, findings: Findings): number {
+function ductFilm(
+  values: RunValues,
+  bore: Bore,
+  findings: Findings,
+): Pick<Thing, 'insideFilmWPerM2K' | 'insideAir'> {
   const given = givenInsideFilm(values)
-  if (given !== null) return given
+  if (given !== null) return { insideFilmWPerM2K: given }
   const airC = values.mediumC ?? USUAL_DUCT_AIR_C
   const pressurePa = standardPressurePa(values.altitudeM ?? 0)
   const velocityMPerS = ductVelocityMPerS(values, bore, airC, pressurePa)
@@ -149,7 +153,7 @@ function ductFilm(values: RunValues, bore: Bore, findings: Findings): number {
       'inside-film-assumed',
       `The film inside the duct is taken as ${DUCT_FILM_W_PER_M2_K} W/m²K, air at about 3 m/s.`,
     )
-    return DUCT_FILM_W_PER_M2_K
+    return { insideFilmWPerM2K: DUCT_FILM_W_PER_M2_K }
   }
   const hydraulicDiameterM = (4 * bore.areaM2) / bore.perimeterM
   const film = insideFilmWPerM2K({ velocityMPerS, hydraulicDiameterM, airC, pressurePa })
@@ -157,7 +161,8 @@ function ductFilm(values: RunValues, bore: Bore, findings: Findings): number {
     'inside-film',
     `The film inside the duct is ${plain(film)} W/m²K, of air at ${plain(velocityMPerS, 2)} m/s in a smooth duct.`,
   )
-  return film
+  const flowKgPerS = values.velocityMPerS === undefined ? (values.flowKgPerS ?? null) : null
+  return { insideFilmWPerM2K: film, insideAir: { velocityMPerS, flowKgPerS, airC } }
 }
 
 /** Only for the film of a duct whose air has no temperature yet: that is a fault of its own. */

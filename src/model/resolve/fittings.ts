@@ -15,6 +15,7 @@ const none: Fittings = {
   areBare: false,
   supportShare: 0,
   ends: 0,
+  items: [],
   convention: '',
 }
 
@@ -59,13 +60,14 @@ export function resolveFittings(
     areBare,
     supportShare,
     ends: ends(values, areBare, findings),
+    items: found.items,
     convention: [found.convention, supportShare > 0 ? bySupports : '']
       .filter((text) => text !== '')
       .join('; '),
   }
 }
 
-type Counted = Pick<Fittings, 'bareAreaM2' | 'laggedLengthM' | 'convention'>
+type Counted = Pick<Fittings, 'bareAreaM2' | 'laggedLengthM' | 'items' | 'convention'>
 
 /** Valves, strainers and flanges, by the outside diameter of the pipe. */
 function countedFittings(
@@ -86,20 +88,25 @@ function countedFittings(
   const areaOf = (item: FittingItem): Figure => fittingAreaM2(catalogue, item, outerDiameterM)
   const lengthOf = (item: FittingItem): Figure =>
     laggedLengthM(catalogue, item, outerDiameterM, mediumC)
-  const sum = (figureOf: (item: FittingItem) => Figure): number =>
-    given.reduce((total, { key, item }) => {
-      const figure = figureOf(item)
-      return total + (figure.ok ? figure.value * (values[key] ?? 0) : 0)
-    }, 0)
+  const figure = (of: Figure): number => (of.ok ? of.value : 0)
+  const items = given.map(({ key, item, many }) => ({
+    name: many,
+    count: values[key] ?? 0,
+    bareAreaM2: figure(areaOf(item)),
+    laggedLengthM: areBare ? 0 : figure(lengthOf(item)),
+  }))
+  const sum = (each: 'bareAreaM2' | 'laggedLengthM'): number =>
+    items.reduce((total, item) => total + item.count * item[each], 0)
   const found = {
-    bareAreaM2: sum(areaOf),
-    laggedLengthM: areBare ? 0 : sum(lengthOf),
+    bareAreaM2: sum('bareAreaM2'),
+    laggedLengthM: sum('laggedLengthM'),
+    items,
     convention: areBare ? byArea : byLength,
   }
   const what = listed(given.map(({ key, one, many }) => numbered(values[key] ?? 0, one, many)))
   noteFittings(what, found, values, mediumC, findings)
-  const items = new Set(given.map(({ item }) => item))
-  for (const item of items) noteFigure(areBare ? areaOf(item) : lengthOf(item), findings)
+  const kinds = new Set(given.map(({ item }) => item))
+  for (const item of kinds) noteFigure(areBare ? areaOf(item) : lengthOf(item), findings)
   return found
 }
 

@@ -88,6 +88,7 @@ function capacities(
     boreM,
     wallJPerMK: wallCapacityJPerMK({ outerDiameterM, boreM, densityKgPerM3, heatCapacityJPerKgK }),
     waterJPerMK: waterCapacityJPerMK(boreM),
+    wall: { densityKgPerM3, heatCapacityJPerKgK },
   }
 }
 

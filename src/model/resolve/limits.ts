@@ -132,10 +132,11 @@ function resolveBurn(
   }
 }
 
-const burnLimit = ({ thresholdC, surface }: Threshold, contactS: number): BurnLimit => ({
+const burnLimit = ({ thresholdC, surface, read }: Threshold, contactS: number): BurnLimit => ({
   thresholdC,
   surface: surfaceWords(surface),
   contact: contactWords(contactS),
+  read,
 })
 
 function touchedSurface(

@@ -87,6 +87,7 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
       tag,
       shape: thing.shape,
       insideFilmWPerM2K: thing.insideFilmWPerM2K,
+      insideAir: thing.insideAir ?? null,
       extent: thing.extent,
       layers: buildUp.layers,
       finish: finish && {

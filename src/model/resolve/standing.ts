@@ -1,5 +1,6 @@
 /** What the shapes have in common: the thing they resolve to, how it stands, its wall. */
 import type { WallMaterial } from '#catalogue/types.ts'
+import type { InsideAir } from '#sizing/problem.ts'
 import type { Shape } from '#solver/types.ts'
 import type { RunValues } from '../fields.ts'
 import { type Findings, plain } from './findings.ts'
@@ -12,6 +13,8 @@ export interface Thing {
   readonly extent: number | null
   /** Film between the medium and the wall [W/(m²·K)]; null where it is neglected. */
   readonly insideFilmWPerM2K: number | null
+  /** What that film was worked out from; null where it was not. */
+  readonly insideAir?: InsideAir | null
   readonly wall: WallMaterial | null
   /** Thickness of the wall [m]; null where neither given nor listed. */
   readonly wallM: number | null

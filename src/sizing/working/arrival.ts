@@ -25,6 +25,7 @@ export function arrivalSection(working: ArrivalWorking): Section | null {
   const arrives = arrival(problem, settled, states, bareStates)
   if (limit === null || total === null || arrives === null) return null
   const ledger = new Ledger('Arrival of what flows', null)
+  let found: string | null = null
   ledger.given('Loss of the whole run, as above', 'Q', total.totalW, 'W')
   ledger.given('Flow', 'm', limit.flowKgPerS, 'kg/s')
   if (limit.kind === 'condensate') {
@@ -34,6 +35,7 @@ export function arrivalSection(working: ArrivalWorking): Section | null {
       limit.latentHeatJPerKg,
       'J/kg',
     )
+    found = 'max(0, Q / r)'
     ledger.step(
       'Condensate, no more than the steam that flows',
       'm_c',
@@ -61,8 +63,9 @@ export function arrivalSection(working: ArrivalWorking): Section | null {
         value: arrives.arrivalTempC ?? Number.NaN,
         source: 'energy balance of plug flow',
       })
+      found = 'abs(θ_1 − θ_2)'
     }
   }
-  verdicts(ledger, 'arrival', rating.limits)
+  verdicts(ledger, 'arrival', rating.limits, { found: () => found })
   return ledger.section()
 }

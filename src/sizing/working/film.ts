@@ -1,5 +1,6 @@
 /** The outer film of one face at one condition: from the surface temperature to the flux that leaves it. */
 import {
+  clearSky,
   type FaceShape,
   isCylinder,
   isSimplified,
@@ -9,9 +10,11 @@ import {
   sources,
 } from '#solver/index.ts'
 import type { Face, System } from '#solver/types.ts'
+import type { Condition } from '../problem.ts'
 import { airSteps, pressureStep } from './air.ts'
 import { freeSteps } from './free.ts'
 import type { Ledger } from './ledger.ts'
+import { pedigreeOf } from './pedigree.ts'
 import { simplifiedSteps } from './simplified.ts'
 import { windSteps } from './wind.ts'
 
@@ -22,6 +25,7 @@ export interface FaceAt {
   /** Sun on the surface and what of it is taken up. */
   readonly sunWPerM2: number
   readonly solarAbsorptance: number
+  readonly sky: Condition['sky']
   /** Where the surface temperature was not found but measured: what it is. */
   readonly surfaceWords?: string
 }
@@ -193,9 +197,9 @@ function groundSteps(ledger: Ledger, { system, shape, face }: FaceAt): void {
   })
 }
 
-function radiationSteps(ledger: Ledger, { system, face }: FaceAt): void {
+function radiationSteps(ledger: Ledger, { system, face, sky }: FaceAt): void {
   ledger.given('Emissivity of the surface', 'ε', system.emissivity, '')
-  ledger.given('Surroundings that the surface sees', 'θ_r', system.around.surroundingsC, '°C')
+  surroundingsSteps(ledger, sky, system.around.surroundingsC)
   ledger.given('Stefan-Boltzmann constant', 'σ', STEFAN_BOLTZMANN_W_PER_M2_K4, 'W/(m²·K⁴)', {
     source: 'CODATA 2018',
   })
@@ -209,4 +213,25 @@ function radiationSteps(ledger: Ledger, { system, face }: FaceAt): void {
     { value: face.radiationWPerM2K, source: `${sources.ashrae2021ch23}, eq. (11)` },
   )
   ledger.step('Flux by radiation', 'q_r', 'h_r × (θ_s − θ_r)', W_M2)
+}
+
+/** What the surface sees, θ_r: one temperature, or sky and ground mixed as they radiate. */
+function surroundingsSteps(ledger: Ledger, sky: Condition['sky'], surroundingsC: number): void {
+  if (sky === null) {
+    ledger.given('Surroundings that the surface sees', 'θ_r', surroundingsC, '°C')
+    return
+  }
+  ledger.given('Share of clear sky in what the surface sees', 'f_S', sky.view, '')
+  ledger.given('Ground and walls, the rest of it', 'θ_g', sky.groundC, '°C')
+  ledger.step('Clear sky, absolute', 'T_S', '0.0552 × (θ_a + 273.15)^1.5', 'K', {
+    ...pedigreeOf(clearSky, { airC: ledger.valueAt('θ_a') }),
+  })
+  ledger.step('Ground and walls, absolute', 'T_g', 'θ_g + 273.15', 'K')
+  ledger.step(
+    'One temperature that radiates as both together do',
+    'θ_r',
+    '(f_S × T_S^4 + (1 − f_S) × T_g^4)^(1 / 4) − 273.15',
+    '°C',
+    { value: surroundingsC, source: 'Stefan-Boltzmann law' },
+  )
 }

@@ -1,9 +1,16 @@
 /** Frost: how long standing water takes to reach 0 °C and to freeze, from two steady states. */
-import { ICE_KG_PER_M3, ICE_LATENT_J_PER_KG, ICE_W_PER_M_K, solve } from '#solver/index.ts'
+import {
+  ICE_KG_PER_M3,
+  ICE_LATENT_J_PER_KG,
+  ICE_W_PER_M_K,
+  solve,
+  WATER_J_PER_KG_K,
+  WATER_KG_PER_M3,
+} from '#solver/index.ts'
 import type { Settled } from '../build-up.ts'
 import { equilibriumC } from '../equilibrium.ts'
 import { timeToFreezeH } from '../frost.ts'
-import type { Problem } from '../problem.ts'
+import type { FrostLimit, Problem } from '../problem.ts'
 import type { Rating } from '../result.ts'
 import { systemOf } from '../states.ts'
 import { Ledger } from './ledger.ts'
@@ -37,13 +44,13 @@ export function frostSections(problem: Problem, settled: Settled, rating: Rating
     tendsToC,
     '°C',
   )
+  ledger.given('Bore of the pipe', 'd', frost.boreM, 'm')
   const last: string[] = []
   if (startC > 0) {
     ledger.step('Water halfway between its start and 0 °C', 'θ_h', 'θ_1 / 2', '°C')
     ledger.given('Loss of a metre then', 'Φ_h', cooling.solution.heatFlowWPerUnit, 'W/m')
     ledger.step('Resistance from the water to the place', 'R_h', '(θ_h − θ_e) / Φ_h', 'm·K/W')
-    ledger.given('Heat capacity of the water in a metre', 'C_w', frost.waterJPerMK, 'J/(m·K)')
-    ledger.given('Heat capacity of the pipe wall of a metre', 'C_p', frost.wallJPerMK, 'J/(m·K)')
+    capacitySteps(ledger, problem, frost)
     ledger.step(
       'Time to cool to 0 °C',
       't_c',
@@ -55,7 +62,6 @@ export function frostSections(problem: Problem, settled: Settled, rating: Rating
   }
   if (frost.iceFraction > 0) {
     ledger.given('Share that may be ice at the end', 'f', frost.iceFraction, '')
-    ledger.given('Bore of the pipe', 'd', frost.boreM, 'm')
     ledger.given(
       'Loss of a metre with the water at 0 °C',
       'Φ_0',
@@ -83,7 +89,7 @@ export function frostSections(problem: Problem, settled: Settled, rating: Rating
     last.push('t_f')
   }
   if (last.length > 0) ledger.step('Time in all', 't', last.join(' + '), 'h', { value: hours })
-  verdicts(ledger, 'frost', rating.limits)
+  verdicts(ledger, 'frost', rating.limits, { found: () => (last.length > 0 ? 't' : null) })
   const states = [
     ...(startC > 0 ? [{ ...cooling, title: 'Frost, water cooling' }] : []),
     ...(frost.iceFraction > 0 ? [{ ...freezing, title: 'Frost, water freezing' }] : []),
@@ -92,4 +98,29 @@ export function frostSections(problem: Problem, settled: Settled, rating: Rating
     ...states.flatMap((state) => stateSections({ problem, settled, ...state })),
     ledger.section(),
   ]
+}
+
+/** What the water and the wall of a metre hold for each kelvin, from the bore `d` above. */
+function capacitySteps(ledger: Ledger, { shape }: Problem, frost: FrostLimit): void {
+  ledger.step(
+    'Heat capacity of the water in a metre',
+    'C_w',
+    `${WATER_KG_PER_M3} × ${WATER_J_PER_KG_K} × π / 4 × d^2`,
+    'J/(m·K)',
+    {
+      value: frost.waterJPerMK,
+      source: `water near 0 °C, rounded: ${WATER_KG_PER_M3} kg/m³ and ${WATER_J_PER_KG_K} J/(kg·K)`,
+    },
+  )
+  if (!('outerDiameterM' in shape)) return
+  ledger.given('Outer diameter of the pipe', 'D', shape.outerDiameterM, 'm')
+  ledger.given('Density of the wall', 'ρ_p', frost.wall.densityKgPerM3, 'kg/m³')
+  ledger.given('Its heat capacity', 'c_p', frost.wall.heatCapacityJPerKgK, 'J/(kg·K)')
+  ledger.step(
+    'Heat capacity of the pipe wall of a metre',
+    'C_p',
+    'ρ_p × c_p × π / 4 × (D^2 − d^2)',
+    'J/(m·K)',
+    { value: frost.wallJPerMK },
+  )
 }

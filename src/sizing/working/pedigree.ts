@@ -9,6 +9,7 @@ const symbols: Readonly<Record<string, string>> = {
   differenceK: 'ΔT in K',
   windMPerS: 'v in m/s',
   slenderness: 'H/D',
+  airC: 'θ_a in °C',
 }
 
 /** Source and range of a correlation at these inputs, for `Ledger.step`. */

@@ -34,6 +34,7 @@ export function stateSections(state: StateWorking): Section[] {
       shape,
       face,
       sunWPerM2: condition.sunWPerM2,
+      sky: condition.sky,
       solarAbsorptance: isBare ? condition.bareSolarAbsorptance : condition.solarAbsorptance,
     }
     const film = new Ledger(`${title}: outer film${of}`, words)

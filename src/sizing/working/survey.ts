@@ -49,6 +49,7 @@ function filmSections(system: System, condition: Condition, measuredC: number): 
       shape,
       face,
       sunWPerM2: condition.sunWPerM2,
+      sky: condition.sky,
       solarAbsorptance: isBare ? condition.bareSolarAbsorptance : condition.solarAbsorptance,
       surfaceWords: 'Surface, as measured',
     })

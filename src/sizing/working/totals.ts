@@ -1,7 +1,7 @@
 /** From the flux to the loss of a metre and of the whole run with what is on it. */
 import type { Solution } from '#solver/types.ts'
 import type { Settled } from '../build-up.ts'
-import type { Problem } from '../problem.ts'
+import type { Fittings, Problem } from '../problem.ts'
 import { runLoss } from '../run-loss.ts'
 import { Ledger } from './ledger.ts'
 import { endSteps } from './sizes.ts'
@@ -66,17 +66,11 @@ function fittingSteps(
     ledger.given('Flux of the bare run', 'q_b', bareState.heatFluxWPerM2, 'W/m²')
   }
   if (areBare && fittings.bareAreaM2 > 0) {
-    ledger.given('Surface of the bare fittings', 'A_F', fittings.bareAreaM2, 'm²', { source })
+    itemSteps(ledger, fittings, 'bareAreaM2')
     ledger.step('Bare fittings lose the flux of the bare run', 'Q_F', 'A_F × q_b', 'W')
     added.push('Q_F')
   } else if (!areBare && fittings.laggedLengthM > 0) {
-    ledger.given(
-      'Length of run that loses as much as the lagged fittings',
-      'l_F',
-      fittings.laggedLengthM,
-      'm',
-      { source },
-    )
+    itemSteps(ledger, fittings, 'laggedLengthM')
     ledger.step('Lagged fittings', 'Q_F', 'l_F × Φ', 'W')
     added.push('Q_F')
   }
@@ -92,4 +86,32 @@ function fittingSteps(
     added.push('Q_E')
   }
   return added
+}
+
+const sums = {
+  bareAreaM2: {
+    each: 'Surface of each',
+    all: 'Surface of the bare fittings',
+    letter: 'A',
+    unit: 'm²',
+  },
+  laggedLengthM: {
+    each: 'Length of run that loses as much as each',
+    all: 'Length of run that loses as much as the lagged fittings',
+    letter: 'l',
+    unit: 'm',
+  },
+} as const
+
+/** Surface or length of all fittings, A_F or l_F: so many of each kind. */
+function itemSteps(ledger: Ledger, fittings: Fittings, by: keyof typeof sums): void {
+  const { each, all, letter, unit } = sums[by]
+  const source = fittings.convention
+  fittings.items.forEach((item, index) => {
+    const at = index + 1
+    ledger.given(`Number of ${item.name}`, `n_${at}`, item.count, '')
+    ledger.given(each, `${letter}_${at}`, item[by], unit, { source })
+  })
+  const terms = fittings.items.map((_, index) => `n_${index + 1} × ${letter}_${index + 1}`)
+  ledger.step(all, `${letter}_F`, terms.join(' + '), unit, { value: fittings[by] })
 }

@@ -4,11 +4,12 @@ import type { Problem } from '../problem.ts'
 import type { Rating, RunResult } from '../result.ts'
 import { yearlyFlowPerUnit } from '../run-loss.ts'
 import { size } from '../size.ts'
-import { type States, solveStates } from '../states.ts'
+import { isInclined, type States, solveStates } from '../states.ts'
 import { arrivalSection } from './arrival.ts'
 import { codeSections } from './code.ts'
 import { frostSections } from './frost.ts'
-import { dewSteps, limitSection } from './limits.ts'
+import { insideSection } from './inside.ts'
+import { burnSteps, dewSteps, limitSection } from './limits.ts'
 import { moneySections } from './money.ts'
 import { runSection } from './run.ts'
 import { stateSections } from './state.ts'
@@ -32,6 +33,7 @@ export function workingOf(problem: Problem): Working {
   const isBare = shown.settled.layers.length === 0
   const sections = [
     runSection(problem, shown.settled),
+    ...present([insideSection(problem)]),
     ...lossSections(shown, isBare ? 'Bare run' : 'Loss condition'),
     ...(isBare ? [] : bareSections(shown)),
     ...touchSections(shown),
@@ -62,9 +64,12 @@ function shownBuildUp(problem: Problem): Shown {
 function titleOf({ problem, result, rating }: Shown): string {
   const thickness = `${Number((rating.thicknessM * 1000).toPrecision(6))} mm`
   if (rating.thicknessM === 0) return `${problem.tag}: bare`
-  return result.chosen
-    ? `${problem.tag}: ${thickness}`
-    : `${problem.tag}: no thickness meets the limits; the thickest, ${thickness}`
+  if (result.chosen) return `${problem.tag}: ${thickness}`
+  const none =
+    result.unmet.length > 0
+      ? 'no thickness meets the limits'
+      : 'the limits exclude each other, no thickness meets them all at once'
+  return `${problem.tag}: ${none}; the thickest, ${thickness}`
 }
 
 function lossSections(shown: Shown, title: string): Section[] {
@@ -78,9 +83,27 @@ function lossSections(shown: Shown, title: string): Section[] {
       solution: states.loss,
       title,
     }),
+    ...surfaceSections(problem, settled, states, title),
     totalsSection(problem, settled, states.loss, bareStates.loss, title),
     ...(year ? [year] : []),
   ]
+}
+
+/** An inclined pipe lies between two films: the higher one is asked for its loss, the lower one for its temperatures. */
+function surfaceSections(
+  problem: Problem,
+  settled: Settled,
+  states: States,
+  title: string,
+): Section[] {
+  if (!isInclined(problem) || states.surface.surfaceTempC === states.loss.surfaceTempC) return []
+  return stateSections({
+    problem,
+    settled,
+    condition: { ...problem.conditions.loss, inclinedFilm: 'lower' },
+    solution: states.surface,
+    title: `${title}, its temperatures with the lower film`,
+  })
 }
 
 function bareSections({ problem, bareStates }: Shown): Section[] {
@@ -96,6 +119,7 @@ function bareSections({ problem, bareStates }: Shown): Section[] {
       solution: bareStates.loss,
       title,
     }),
+    ...surfaceSections(problem, bare, bareStates, title),
     totalsSection(problem, bare, bareStates.loss, bareStates.loss, title),
     ...(year ? [year] : []),
   ]
@@ -113,7 +137,11 @@ function touchSections({ problem, settled, states, rating }: Shown): Section[] {
       solution: states.touch,
       title: 'Touch condition',
     }),
-    ...present([limitSection('touch', rating.limits)]),
+    ...present([
+      limitSection('touch', rating.limits, (ledger) =>
+        burnSteps(ledger, problem, settled.layers.length === 0),
+      ),
+    ]),
   ]
 }
 

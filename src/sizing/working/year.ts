@@ -2,8 +2,9 @@
 import { yearlyEnergyCost, yearlyFuelKWh, yearlyKWh } from '#money/energy-cost.ts'
 import type { Settled } from '../build-up.ts'
 import type { Problem } from '../problem.ts'
-import { isMadeUp, MONTH_DAYS, runLoss, yearlyRunLossW } from '../run-loss.ts'
+import { isMadeUp, MONTH_DAYS, madeUpWay, runLoss, yearlyRunLossW } from '../run-loss.ts'
 import type { States } from '../states.ts'
+import { printNumber } from './digits.ts'
 import { Ledger } from './ledger.ts'
 import type { Section } from './types.ts'
 
@@ -22,7 +23,7 @@ export function yearSection(working: YearWorking): Section | null {
   if (meanW === null) return null
   const ledger = new Ledger(`${title}: the year`, null)
   if (states.months.length === 0) {
-    ledger.given('Loss of the run, which stands for the whole year', 'Q', meanW, 'W')
+    wholeYearSteps(ledger, working, meanW)
   } else monthSteps(ledger, working, meanW)
   const { hoursPerYear, money } = problem
   if (hoursPerYear === null) {
@@ -70,26 +71,59 @@ const MONTHS = [
   'December',
 ]
 
-function monthSteps(
-  ledger: Ledger,
-  { problem, settled, states, bareStates }: YearWorking,
-  meanW: number,
-): void {
-  const yearlyW = runLoss(problem, settled, states.loss, bareStates.loss)?.totalW ?? 0
+/** The loss at the loss condition stands for the whole year, as far as it has to be made up. */
+function wholeYearSteps(ledger: Ledger, working: YearWorking, meanW: number): void {
+  const lossW = lossAtCondition(working)
+  if (lossW === meanW) {
+    ledger.given('Loss of the run, which stands for the whole year', 'Q', meanW, 'W')
+    return
+  }
   ledger.say(
-    'Each month is solved like the loss condition, with the air of that month. A month in which heat flows the other way needs no making up and counts as nothing.',
+    'The sun turns the flow of heat round. What it brings needs no making up and counts as nothing.',
   )
-  states.months.forEach((state, index) => {
-    const bareState = bareStates.months[index] ?? bareStates.loss
-    const lossW = runLoss(problem, settled, state, bareState)?.totalW ?? 0
-    const counts = isMadeUp(lossW, yearlyW)
-    ledger.given(
-      `${MONTHS[index] ?? 'Month'}${counts ? '' : ', in which heat flows the other way'}`,
-      `Q_${index + 1}`,
-      counts ? lossW : 0,
-      'W',
-    )
+  ledger.given('Loss of the run, as above', 'Q_0', lossW, 'W')
+  ledger.step('What of it has to be made up', 'Q', `${lossW < 0 ? 'max' : 'min'}(0, Q_0)`, 'W', {
+    value: meanW,
   })
-  const terms = states.months.map((_, index) => `${MONTH_DAYS[index]} × Q_${index + 1}`)
+}
+
+const lossAtCondition = ({ problem, settled, states, bareStates }: YearWorking): number =>
+  runLoss(problem, settled, states.loss, bareStates.loss)?.totalW ?? 0
+
+function monthSteps(ledger: Ledger, working: YearWorking, meanW: number): void {
+  const { problem, settled, states, bareStates } = working
+  const way = madeUpWay(problem, lossAtCondition(working))
+  ledger.say(
+    'Each month is solved like the loss condition, with the air of that month; surroundings stay as far from the air as they are over the year. A month in which heat flows the other way needs no making up and counts as nothing.',
+  )
+  const losses = states.months.map(
+    (state, index) =>
+      runLoss(problem, settled, state, bareStates.months[index] ?? bareStates.loss)?.totalW ?? 0,
+  )
+  losses.forEach((lossW, index) => {
+    const other = isMadeUp(lossW, way) ? '' : ', in which heat flows the other way'
+    ledger.given(`${MONTHS[index] ?? 'Month'}${other}`, `Q_${index + 1}`, lossW, 'W')
+  })
+  const isMixed = losses.some((lossW) => !isMadeUp(lossW, way))
+  const only = way < 0 ? 'min' : 'max'
+  const terms = losses.map((_, index) => {
+    const symbol = `Q_${index + 1}`
+    return `${MONTH_DAYS[index]} × ${isMixed ? `${only}(0, ${symbol})` : symbol}`
+  })
   ledger.step('Mean of the year', 'Q', `(${terms.join(' + ')}) / 365`, 'W', { value: meanW })
+  ledger.table({
+    headers: ['Month', 'Air °C', 'Days', 'Share', 'Loss W', 'Counts as W'],
+    rows: losses.map((lossW, index) => {
+      const days = MONTH_DAYS[index] ?? 0
+      const airC = problem.conditions.months[index]?.around.airC ?? 0
+      return [
+        MONTHS[index] ?? '',
+        printNumber(airC, 4),
+        String(days),
+        printNumber(days / 365, 4),
+        printNumber(lossW, 5),
+        printNumber(isMadeUp(lossW, way) ? lossW : 0, 5),
+      ]
+    }),
+  })
 }
