@@ -23,8 +23,10 @@ const besideTheLoss: ReadonlySet<string> = new Set([
   // Damp and vapour.
   'cold-projections',
   'damp-air-assumed',
+  'damp-not-judged',
   'damp-surroundings',
   'dew-margin-assumed',
+  'humidity-over-ice',
   'vapour-open',
   'vapour-stops',
   'vapour-thin',
@@ -49,6 +51,7 @@ const besideTheLoss: ReadonlySet<string> = new Set([
   'service-unknown',
   // The cost as it is weighed; what the energy is priced with has a note of its own.
   'money-assumed',
+  'money-not-weighed',
   'price-missing',
   'prices-illustrative',
   // How to lay it.

@@ -36,6 +36,9 @@ export interface ThresholdCell {
 /** Contact times above eight hours have the eight-hour value. Source: ISO 13732-1, as `domain` data of the catalogue. */
 const LONGEST_CONTACT_S = 8 * 3600
 
+/** The lowest of the table, at eight hours: no surface below it burns [°C]. Source: ISO 13732-1, as in the catalogue. */
+export const LEAST_BURN_THRESHOLD_C = 43
+
 /** Who decides where a class has no confirmed cell: always the next stricter one. */
 const stricter: Readonly<Record<string, string>> = {
   wood: 'plastic',
@@ -152,9 +155,20 @@ export function surfaceWords(row: string): string {
   return row === 'ceramic-glass-stone' ? 'ceramic, glass or stone' : row.replace('-', ' ')
 }
 
-/** A contact time in words: "5 s", "1 min", "8 h". */
+/** A contact time in words: "5 s", "1 min", "8 h", "4.5 days (the threshold of 8 h)". */
 export function contactWords(contactS: number): string {
-  if (contactS >= 3600 && contactS % 3600 === 0) return `${contactS / 3600} h`
-  if (contactS >= 60 && contactS % 60 === 0) return `${contactS / 60} min`
-  return `${contactS} s`
+  return contactS > LONGEST_CONTACT_S
+    ? `${timeWords(contactS)} (the threshold of ${timeWords(LONGEST_CONTACT_S)})`
+    : timeWords(contactS)
+}
+
+const DAY_S = 24 * 3600
+
+function timeWords(timeS: number): string {
+  const rounded = (units: number): number =>
+    units < 100 ? Number(units.toPrecision(units < 10 ? 2 : 3)) : Math.round(units)
+  if (timeS >= 2 * DAY_S) return `${rounded(timeS / DAY_S)} days`
+  if (timeS >= 3600 && (timeS % 3600 === 0 || timeS > 2 * 3600)) return `${rounded(timeS / 3600)} h`
+  if (timeS >= 60 && (timeS % 60 === 0 || timeS > 600)) return `${rounded(timeS / 60)} min`
+  return `${timeS < 10 ? Number(timeS.toPrecision(3)) : rounded(timeS)} s`
 }

@@ -6,6 +6,7 @@ import type { BurnThreshold } from '#catalogue/types.ts'
 import {
   burnThreshold,
   contactWords,
+  LEAST_BURN_THRESHOLD_C,
   surfaceWords,
   type TouchedSurface,
 } from '#touch/burn-threshold.ts'
@@ -272,6 +273,10 @@ describe('every threshold', () => {
 
 test('a table without rows gives no threshold', () => {
   expect(burnThreshold([], plain('wood'), 5)).toBeNull()
+})
+
+test('no row of the table burns below the least threshold', () => {
+  expect(Math.min(...table.map(({ lowerC }) => lowerC))).toBe(LEAST_BURN_THRESHOLD_C)
 })
 
 describe('words', () => {

@@ -83,6 +83,7 @@ describe('where the own row is not confirmed', () => {
       surface: 'smooth-metal',
       confidence: 'estimate',
       because: null,
+      read: { contactS: 1, cells: [{ contactS: 1, thresholdC: 65 }] },
     })
   })
 })
@@ -153,7 +154,15 @@ test.each([
   [3600, '1 h'],
   [5400, '90 min'],
   [7200, '2 h'],
-  [3661, '3661 s'],
+  [3661, '61 min'],
+  [118.252555, '118 s'],
+  [0.5312, '0.531 s'],
+  [1234, '20.6 min'],
+  [10_000, '2.8 h'],
+  [28_800, '8 h'],
+  [86_400, '24 h (the threshold of 8 h)'],
+  [387_193.438053, '4.5 days (the threshold of 8 h)'],
+  [2_592_000, '30 days (the threshold of 8 h)'],
 ])('%d s of contact is said as %s', (contactS, words) => {
   expect(contactWords(contactS)).toBe(words)
 })

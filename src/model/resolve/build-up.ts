@@ -44,14 +44,20 @@ export function resolveBuildUp(
     return { layers: [fixedLayer(material.layer, values.thicknessM, steps)], steps: [] }
   }
   if (steps.length === 0) {
-    findings.fault('thicknessM', 'nothing', noSteps(material.catalogued, values))
+    findings.fault(
+      'thicknessM',
+      'nothing',
+      `a thickness in mm: ${noSteps(material.catalogued, values)}`,
+    )
     return null
   }
   return { layers: [{ material: material.layer, thicknessM: null, piecesM: [] }], steps }
 }
 
-const noSteps = (material: Material | null, values: RunValues): string =>
-  `a thickness in mm: the catalogue holds no ${values.steps ?? 'metric'} steps for ${material?.name ?? 'this material'}`
+function noSteps(material: Material | null, { steps = 'metric' }: RunValues): string {
+  const none = steps === 'both' ? 'no steps, metric or inch,' : `no ${steps} steps`
+  return `the catalogue holds ${none} for ${material?.name ?? 'this material'}`
+}
 
 interface Single {
   readonly layer: LayerMaterial
@@ -181,7 +187,11 @@ function layered(
       steps = ladder
       layers.push({ material: layer, thicknessM: null, piecesM: [] })
       if (ladder.length === 0) {
-        findings.fault('layers', text, `a thickness in place of ?: ${noSteps(material, values)}`)
+        findings.fault(
+          'layers',
+          text,
+          `a thickness in mm in place of ?: ${noSteps(material, values)}`,
+        )
       }
     } else {
       layers.push(fixedLayer(layer, thicknessM, ladder))

@@ -5,7 +5,7 @@ import type { Condition } from '#sizing/problem.ts'
 import { clearSkyC, radiantMixC } from '#solver/index.ts'
 import type { FilmChoice } from '#solver/types.ts'
 import type { RunValues } from '../fields.ts'
-import type { Findings } from './findings.ts'
+import { type Findings, plain } from './findings.ts'
 import type { Medium } from './medium.ts'
 import { type MonthlyAir, parseMonthlyAir } from './monthly-air.ts'
 import type { Thing } from './standing.ts'
@@ -174,6 +174,9 @@ function surveyCondition(place: Place, medium: Medium, surfaces: Surfaces): Cond
     : { ...condition, emissivity: surveyEmissivity, bareEmissivity: surveyEmissivity }
 }
 
+/** Months and air_c may both be given if they agree within this [K]. */
+const SAME_MEAN_K = 1
+
 function resolveMonths(values: RunValues, findings: Findings): MonthlyAir | readonly [] {
   if (values.monthlyAirC === undefined) return []
   const parsed = parseMonthlyAir(values.monthlyAirC)
@@ -181,10 +184,19 @@ function resolveMonths(values: RunValues, findings: Findings): MonthlyAir | read
     findings.fault('monthlyAirC', values.monthlyAirC, parsed.allowed)
     return []
   }
+  const meanC = parsed.monthsC.reduce((sumC, monthC) => sumC + monthC, 0) / parsed.monthsC.length
+  const { airC = meanC } = values
+  const isMean = Math.abs(meanC - airC) <= SAME_MEAN_K
   findings.note(
     'by-the-month',
-    'The loss of the year is that of its twelve months, the hours in service spread evenly over them; the loss shown beside it stands at the yearly mean.',
+    `The loss of the year is that of its twelve months, the hours in service spread evenly over them; months in which heat flows the other way count as nothing.${isMean ? ' The loss shown beside it stands at the yearly mean.' : ''}`,
   )
+  if (!isMean) {
+    findings.note(
+      'monthly-mean',
+      `The twelve months have a mean of ${plain(meanC)} °C; the loss shown stands at air_c, ${plain(airC)} °C.`,
+    )
+  }
   return parsed.monthsC
 }
 

@@ -7,6 +7,7 @@ import {
   differs,
   givenInsideFilm,
   lying,
+  noteUnusedRise,
   riseOf,
   type Thing,
   wallOf,
@@ -105,6 +106,7 @@ export function rectangularDuct(
     )
   }
   const riseM = lies === 'vertical' ? riseOf(values, findings) : null
+  if (lies === 'horizontal') noteUnusedRise(values, findings)
   return {
     shape: { kind: 'rect-duct', widthM, heightM, riseM },
     extent: values.lengthM ?? null,
@@ -144,10 +146,18 @@ function ductFilm(
   findings: Findings,
 ): Pick<Thing, 'insideFilmWPerM2K' | 'insideAir'> {
   const given = givenInsideFilm(values)
-  if (given !== null) return { insideFilmWPerM2K: given }
+  if (given !== null) {
+    if (values.velocityMPerS !== undefined)
+      findings.note(
+        'unused',
+        'velocity_m_s is not used for the film inside: inside_film_w_m2k is given.',
+      )
+    return { insideFilmWPerM2K: given }
+  }
   const airC = values.mediumC ?? USUAL_DUCT_AIR_C
   const pressurePa = standardPressurePa(values.altitudeM ?? 0)
   const velocityMPerS = ductVelocityMPerS(values, bore, airC, pressurePa)
+  noteContradiction(values, bore, airC, pressurePa, findings)
   if (velocityMPerS === null) {
     findings.note(
       'inside-film-assumed',
@@ -177,4 +187,24 @@ function ductVelocityMPerS(
   if (velocityMPerS !== undefined) return velocityMPerS
   if (flowKgPerS === undefined || (medium !== undefined && medium !== 'air')) return null
   return flowKgPerS / (airDensityKgPerM3(airC, pressurePa) * areaM2)
+}
+
+/** Flow and velocity are rounded, and the bore is that of the outside: within this share they agree. */
+const SAME_FLOW_SHARE = 0.1
+
+function noteContradiction(
+  values: RunValues,
+  bore: Bore,
+  airC: number,
+  pressurePa: number,
+  findings: Findings,
+): void {
+  const { velocityMPerS, ...others } = values
+  const byFlowMPerS = ductVelocityMPerS(others, bore, airC, pressurePa)
+  if (velocityMPerS === undefined || byFlowMPerS === null) return
+  if (Math.abs(byFlowMPerS / velocityMPerS - 1) <= SAME_FLOW_SHARE) return
+  findings.note(
+    'flow-velocity',
+    `flow_kg_s and velocity_m_s do not agree: ${plain(values.flowKgPerS ?? 0, 3)} kg/s of air would flow at ${plain(byFlowMPerS, 2)} m/s, not ${plain(velocityMPerS, 2)} m/s. The film inside goes by the velocity, the arrival by the flow. Check both.`,
+  )
 }

@@ -17,6 +17,12 @@ export class Findings {
   }
 }
 
+/** "a", "a and b", "a, b and c". */
+export function listed(parts: readonly string[]): string {
+  const last = parts.at(-1) ?? ''
+  return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')} and ${last}`
+}
+
 /** A number as people read it, without trailing zeros. */
 export const plain = (value: number, digits = 1): string =>
   String(Number(value.toFixed(digits))).replace('-', '−')

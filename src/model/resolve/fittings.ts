@@ -4,7 +4,7 @@ import { fittingAreaM2, laggedLengthM, supportFraction } from '#catalogue/fittin
 import type { FittingItem } from '#catalogue/types.ts'
 import type { Fittings } from '#sizing/problem.ts'
 import { type FieldKey, fieldOf, type RunValues } from '../fields.ts'
-import { type Findings, plain } from './findings.ts'
+import { type Findings, listed, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import type { Medium } from './medium.ts'
 import type { Thing } from './standing.ts'
@@ -131,12 +131,6 @@ function noteUnused(
 
 const numbered = (count: number, one: string, many: string): string =>
   `${count} ${count === 1 ? one : many}`
-
-/** "a", "a and b", "a, b and c". */
-function listed(parts: readonly string[]): string {
-  const last = parts.at(-1) ?? ''
-  return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')} and ${last}`
-}
 
 function noteFittings(
   what: string,

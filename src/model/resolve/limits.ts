@@ -1,10 +1,11 @@
 /** The limits of a run: touch, loss and damp, with the assumptions behind them. */
 import type { Finish, TouchClass } from '#catalogue/types.ts'
-import type { BurnLimit, Limits } from '#sizing/problem.ts'
+import type { BurnLimit, Condition, Limits } from '#sizing/problem.ts'
 import { dewPointC } from '#solver/index.ts'
 import {
   burnThreshold,
   contactWords,
+  LEAST_BURN_THRESHOLD_C,
   surfaceWords,
   type Threshold,
   type TouchedSurface,
@@ -13,10 +14,10 @@ import type { RunValues } from '../fields.ts'
 import { resolveArrival } from './arrival.ts'
 import { resolveCode } from './code.ts'
 import type { Conditions } from './conditions.ts'
-import { type Findings, plain } from './findings.ts'
+import { Findings, plain } from './findings.ts'
 import { resolveFrost } from './frost.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
-import type { Thing } from './standing.ts'
+import { differs, type Thing } from './standing.ts'
 
 /** What a limit takes where nothing is given; each is said in a note, and the form shows it. */
 export const usualLimits = {
@@ -51,7 +52,8 @@ export function resolveLimits(
       'nothing for a flat surface: it has no diameter',
     )
   }
-  const { burn, bareBurn } = resolveBurn(values, thing, finish, index, findings)
+  noteOverallSize(values, thing, findings)
+  const { burn, bareBurn } = resolveBurn(values, thing, finish, conditions, index, findings)
   return {
     maxSurfaceC: values.maxSurfaceC ?? null,
     burn,
@@ -66,10 +68,35 @@ export function resolveLimits(
   }
 }
 
+/** No lagging makes a thing smaller than it is. */
+function noteOverallSize(
+  { maxOuterDiameterM, shape: word }: RunValues,
+  thing: Thing | null,
+  findings: Findings,
+): void {
+  if (maxOuterDiameterM === undefined || !thing) return
+  const { shape } = thing
+  if (shape.kind === 'flat') return
+  const ownM =
+    shape.kind === 'rect-duct' ? Math.max(shape.widthM, shape.heightM) : shape.outerDiameterM
+  if (maxOuterDiameterM >= ownM || !differs(maxOuterDiameterM, ownM)) return
+  const name = word?.replace('-', ' ').replace('rect ', '') ?? 'run'
+  findings.fault(
+    'maxOuterDiameterM',
+    `${plain(maxOuterDiameterM * 1000)} mm`,
+    `more than ${plain(ownM * 1000)} mm: the ${name} alone measures ${plain(ownM * 1000)} mm`,
+  )
+}
+
+/** False where nothing around a run gets as hot as what burns at the longest contact. */
+export const canBurn = ({ mediumC, around, sunWPerM2 }: Condition): boolean =>
+  sunWPerM2 > 0 || Math.max(mediumC, around.airC, around.surroundingsC) >= LEAST_BURN_THRESHOLD_C
+
 function resolveBurn(
   values: RunValues,
   thing: Thing | null,
   finish: Finish | null,
+  conditions: Conditions | null,
   index: CatalogueIndex,
   findings: Findings,
 ): Pick<Limits, 'burn' | 'bareBurn'> {
@@ -88,6 +115,10 @@ function resolveBurn(
     return { burn: null, bareBurn: null }
   }
   const contactS = values.contactS ?? usualLimits.contactS
+  // Touch is judged all the same, but what was assumed for it decides nothing.
+  if (conditions && !canBurn(conditions.touch)) {
+    return burnOf(values, thing, finish, contactS, index, new Findings())
+  }
   if (values.contactS === undefined && values.reach === undefined) {
     findings.note(
       'reach-assumed',
@@ -99,6 +130,17 @@ function resolveBurn(
       `Touch is judged for ${usualLimits.contactS} s of contact, where adults work.`,
     )
   }
+  return burnOf(values, thing, finish, contactS, index, findings)
+}
+
+function burnOf(
+  values: RunValues,
+  thing: Thing | null,
+  finish: Finish | null,
+  contactS: number,
+  index: CatalogueIndex,
+  findings: Findings,
+): Pick<Limits, 'burn' | 'bareBurn'> {
   const surface = touchedSurface(values, thing, finish, findings)
   const threshold = burnThreshold(index.catalogue.burnThresholds, surface, contactS)
   if (!threshold) {
@@ -169,13 +211,30 @@ function resolveDamp(
   { damp }: Conditions,
   findings: Findings,
 ): Limits['damp'] {
-  if (values.humidity === undefined || thing?.shape.kind === 'buried-pipe') return null
+  if (thing?.shape.kind === 'buried-pipe') return null
+  if (values.humidity === undefined) {
+    if (damp.mediumC < damp.around.airC) {
+      findings.note(
+        'damp-not-judged',
+        'Damp is not judged: no humidity_pct is given. The surface may drip.',
+      )
+    }
+    if (values.dewMarginK !== undefined)
+      findings.note('unused', 'dew_margin_k is not used: no humidity_pct is given.')
+    return null
+  }
   // No surface gets colder than the coldest of medium, air and surroundings.
   if (Math.min(damp.mediumC, damp.around.surroundingsC) >= damp.around.airC) return null
   if (values.dewMarginK === undefined) {
     findings.note(
       'dew-margin-assumed',
       `The surface is kept ${usualLimits.dewMarginK} K above the dew point: no other margin is given.`,
+    )
+  }
+  if (damp.around.airC < 0) {
+    findings.note(
+      'humidity-over-ice',
+      'Below 0 °C humidity is taken over ice, as ASHRAE does; over water, as weather services give it, the dew point would be higher.',
     )
   }
   return {

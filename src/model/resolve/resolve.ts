@@ -10,11 +10,12 @@ import { Findings } from './findings.ts'
 import { resolveFittings } from './fittings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import { noteLayering } from './layering.ts'
-import { resolveLimits } from './limits.ts'
+import { canBurn, resolveLimits } from './limits.ts'
 import { resolveMedium } from './medium.ts'
 import { resolveMoney } from './money.ts'
 import { resolveSurvey } from './survey.ts'
 import { resolveThing } from './thing.ts'
+import { withinGround } from './underground.ts'
 import { noteVapour } from './vapour.ts'
 
 export type Resolved =
@@ -37,9 +38,11 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   if (!conditions && values.airC === undefined && !(thing && medium)) {
     findings.fault('airC', 'nothing', 'the temperature of the air around the run in °C')
   }
-  const buildUp = resolveBuildUp(values, thing, index, findings)
+  const asGiven = resolveBuildUp(values, thing, index, findings)
+  const buildUp = asGiven && thing ? withinGround(asGiven, thing.shape, findings) : asGiven
   const gainsHeat = conditions !== null && conditions.loss.mediumC < conditions.loss.around.airC
   const money = resolveMoney(values, gainsHeat, index, findings)
+  const isBuried = thing?.shape.kind === 'buried-pipe'
   const faultsBefore = findings.issues.length
   const limits = resolveLimits(values, thing, finish, conditions, index, findings)
   const isAskedInVain = findings.issues.length > faultsBefore && asksMore(values)
@@ -53,9 +56,9 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   const isSized = isWeighed || limitsWithLowerEnd(limits).length > 0 || isAskedInVain
   if (conditions && buildUp && buildUp.steps.length > 0 && !isSized) {
     findings.fault(
-      'reach',
+      isBuried ? 'maxLossWPerM' : 'reach',
       money === null ? 'no limit and no money' : 'no limit, and no price to weigh the cost with',
-      'something to size by: reach yes, a limit such as max_loss_w_m, or fuel and hours_per_year; or a thickness_mm to rate',
+      `something to size by: ${isBuried ? '' : 'reach yes, '}a limit such as ${thing?.shape.kind === 'flat' ? 'max_loss_w_m2' : 'max_loss_w_m'}, or fuel and hours_per_year; or a thickness_mm to rate`,
     )
   }
   if (findings.issues.length > 0 || !tag || !thing || !conditions || !buildUp) {
@@ -71,13 +74,13 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
     values,
     conditions,
     {
-      touch: limits.burn !== null || limits.maxSurfaceC !== null,
+      touch: limits.maxSurfaceC !== null || (limits.burn !== null && canBurn(conditions.touch)),
       damp: limits.damp !== null,
       frost: limits.frost !== null,
     },
     findings,
   )
-  if (thing.shape.kind !== 'buried-pipe') {
+  if (!isBuried) {
     noteVapour(buildUp, finish, conditions, limits.damp?.dewPointC ?? null, findings)
   }
   noteLayering(values, thing, buildUp, finish, conditions, index, findings)

@@ -33,7 +33,10 @@ export function cylinder(
 ): Shape | null {
   if (values.buryDepthM !== undefined) return buried(values, outerDiameterM, findings)
   const orientation = lying(values, findings)
-  if (orientation === 'horizontal') return { kind: 'pipe', outerDiameterM, orientation }
+  if (orientation === 'horizontal') {
+    noteUnusedRise(values, findings)
+    return { kind: 'pipe', outerDiameterM, orientation }
+  }
   const riseM = riseOf(values, findings)
   return riseM === null ? null : { kind: 'pipe', outerDiameterM, orientation, riseM }
 }
@@ -47,6 +50,7 @@ function buried(values: RunValues, outerDiameterM: number, findings: Findings): 
   if (orientation !== undefined && orientation !== 'horizontal') {
     findings.fault('orientation', orientation, 'horizontal, or nothing: the run is buried')
   }
+  noteUnusedRise(values, findings)
   if (depthM <= outerDiameterM / 2) {
     findings.fault(
       'buryDepthM',
@@ -71,6 +75,11 @@ function buried(values: RunValues, outerDiameterM: number, findings: Findings): 
     depthM,
     soilWPerMK: values.soilWPerMK ?? SOIL_W_PER_M_K,
   }
+}
+
+/** What lies does not rise. */
+export function noteUnusedRise({ riseM }: RunValues, findings: Findings): void {
+  if (riseM !== undefined) findings.note('unused', 'rise_m is not used: the run is horizontal.')
 }
 
 /** Pipes and ducts lie, stand or slope; only a flat surface faces up or down. */
@@ -111,6 +120,15 @@ export function riseOf(values: RunValues, findings: Findings): number | null {
       `the height of the vertical run, from ${LEAST_RISE_M} to ${MOST_RISE_M} m`,
     )
     return null
+  }
+  // A length of 0 stands for fittings alone, of a run that rises all the same.
+  const { lengthM } = values
+  if (lengthM !== undefined && lengthM > 0 && riseM > lengthM) {
+    findings.fault(
+      'riseM',
+      `${plain(riseM, 3)} m over a length of ${plain(lengthM, 3)} m`,
+      'at most the length of the run: it cannot rise by more',
+    )
   }
   if (values.riseM === undefined) {
     findings.note(

@@ -29,6 +29,8 @@ function shaped(values: RunValues, index: CatalogueIndex, findings: Findings): T
     if (values[key] !== undefined)
       findings.note('unused', `${fieldOf(key).column} is not used for a ${shape}.`)
   }
+  if (values.soilWPerMK !== undefined && (values.buryDepthM === undefined || !canBeBuried(shape)))
+    findings.note('unused', 'soil_w_mk is not used: the run is not buried.')
   switch (shape) {
     case 'pipe':
       return pipe(values, index, findings)
@@ -44,6 +46,9 @@ function shaped(values: RunValues, index: CatalogueIndex, findings: Findings): T
       return vessel(values, index, findings)
   }
 }
+
+const canBeBuried = (shape: NonNullable<RunValues['shape']>): boolean =>
+  !unused[shape].includes('buryDepthM')
 
 /** What says nothing about a shape: given all the same, a reader is told that it was not used. */
 const unused: Readonly<Record<NonNullable<RunValues['shape']>, readonly FieldKey[]>> = {

@@ -3,7 +3,7 @@ import type { Finish } from '#catalogue/types.ts'
 import type { BuildUpLayer, LayerMaterial } from '#sizing/problem.ts'
 import type { ResolvedBuildUp } from './build-up.ts'
 import type { Conditions } from './conditions.ts'
-import { type Findings, plain } from './findings.ts'
+import { type Findings, listed, plain } from './findings.ts'
 
 /** Vapour permeability of still air [kg/(m·s·Pa)]. Source: EN ISO 12572, 23 °C, from memory. */
 const AIR_PERMEABILITY = 1.95e-10
@@ -110,7 +110,7 @@ function noteOpen(bands: readonly Band[], { mediumC, barrier }: ColdWork, findin
   if (unknown.length > 0) {
     findings.note(
       'vapour-unknown',
-      `Cold work at ${plain(mediumC)} °C: how much vapour ${named(unknown)} lets through is not held. Unless it is closed to vapour, ${cure}.`,
+      `Cold work at ${plain(mediumC)} °C: how much vapour ${named(unknown)} ${lets(unknown)} through is not held. Unless it is closed to vapour, ${cure}.`,
     )
     return
   }
@@ -127,7 +127,7 @@ function noteOpen(bands: readonly Band[], { mediumC, barrier }: ColdWork, findin
   }
   findings.note(
     'vapour-open',
-    `Cold work at ${plain(mediumC)} °C: ${named(bands)} lets vapour through to where it condenses or freezes. To keep it dry, ${cure}.`,
+    `Cold work at ${plain(mediumC)} °C: ${named(bands)} ${lets(bands)} vapour through to where it condenses or freezes. To keep it dry, ${cure}.`,
   )
 }
 
@@ -147,5 +147,8 @@ function noteWrongSide(bands: readonly Band[], { barrier }: ColdWork, findings: 
   }
 }
 
-const named = (bands: readonly Band[]): string =>
-  bands.map(({ material }) => material.name).join(' with ')
+const named = (bands: readonly Band[]): string => listed(namesOf(bands))
+const lets = (bands: readonly Band[]): string => (namesOf(bands).length > 1 ? 'let' : 'lets')
+const namesOf = (bands: readonly Band[]): readonly string[] => [
+  ...new Set(bands.map(({ material }) => material.name)),
+]

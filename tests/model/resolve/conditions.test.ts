@@ -1,5 +1,6 @@
 /** The design conditions and emissivities, sentence by sentence of the contract. */
 import { describe, expect, test } from 'vitest'
+import type { RunValues } from '#model/fields.ts'
 import {
   coldRun,
   noteCodes,
@@ -18,7 +19,7 @@ describe('defaults', () => {
   })
 
   test('the air of touch and damp is that of the run, said in a note', () => {
-    const problem = problemOf({ ...coldRun, reach: true })
+    const problem = problemOf({ ...coldRun, mediumMaxC: 60, reach: true })
     expect(problem.conditions.touch.around.airC).toBe(27)
     expect(problem.conditions.damp.around.airC).toBe(27)
     expect(noteCodes(problem)).toEqual(
@@ -27,7 +28,7 @@ describe('defaults', () => {
   })
 
   test('air given for a question is not an assumption', () => {
-    const problem = problemOf({ ...coldRun, touchAirC: 35, dampAirC: 30 })
+    const problem = problemOf({ ...coldRun, mediumMaxC: 60, touchAirC: 35, dampAirC: 30 })
     expect(problem.conditions.touch.around.airC).toBe(35)
     expect(problem.conditions.damp.around.airC).toBe(30)
     expect(noteCodes(problem)).not.toContain('touch-air-assumed')
@@ -71,7 +72,7 @@ describe('defaults', () => {
   ] as const)(
     'given as %o, those of %s are %d: never milder than its own air',
     (own, question, tempC) => {
-      const problem = problemOf({ ...coldRun, ...own })
+      const problem = problemOf({ ...coldRun, mediumMaxC: 60, ...own })
       expect(problem.conditions[question].around.surroundingsC).toBe(tempC)
       expect(noteCodes(problem).includes(`${question}-surroundings`)).toBe(
         tempC !== own.surroundingsC,
@@ -203,8 +204,54 @@ test('air is required', () => {
   expect(refusedColumns(noAir)).toEqual(['air_c'])
 })
 
+describe('twelve months', () => {
+  const months = '2;3;6;9;13;16;18;18;15;10;6;3'
+  // Their mean is 9.9 °C.
+  const told = (airC: number): string[] =>
+    problemOf({ ...steamRun, airC, monthlyAirC: months }).notes.flatMap(({ code, text }) =>
+      code === 'by-the-month' || code === 'monthly-mean' ? [text] : [],
+    )
+  const year =
+    'The loss of the year is that of its twelve months, the hours in service spread evenly over them; months in which heat flows the other way count as nothing.'
+
+  test.each([9.2, 10.8])('whose mean is near the air of %d °C stand for its year', (airC) => {
+    expect(told(airC)).toEqual([`${year} The loss shown beside it stands at the yearly mean.`])
+  })
+
+  test.each([8.8, 11, 20])('far from the air of %d °C are told apart from it', (airC) => {
+    expect(told(airC)).toEqual([
+      year,
+      `The twelve months have a mean of 9.9 °C; the loss shown stands at air_c, ${airC} °C.`,
+    ])
+  })
+})
+
+describe('the sun', () => {
+  const sun = (values: RunValues): string =>
+    problemOf({ ...values, solarWPerM2: 700 }).notes.find(({ code }) => code === 'sun')?.text ?? ''
+
+  test('on a round run leaves one side in shadow; on a flat one it does not', () => {
+    const { size: _, ...plain } = steamRun
+    expect(sun(steamRun)).toMatch(/about a third of what falls square on it\.$/)
+    expect(sun({ ...plain, shape: 'sphere', outerDiameterM: 2 })).toMatch(/about a quarter of/)
+    for (const flat of [
+      { shape: 'flat', areaM2: 4, heightM: 2 },
+      { shape: 'rect-duct', widthM: 0.6, heightM: 0.4 },
+    ] as const)
+      expect(sun({ ...plain, ...flat })).toMatch(/judged at night\.$/)
+  })
+})
+
 describe('a buried run', () => {
   const buried = { ...steamRun, buryDepthM: 0.8, maxLossWPerM: 60 }
+
+  test('has no emissivity to be assumed', () => {
+    const { finish: _, ...plain } = buried
+    const codes = noteCodes(problemOf(plain))
+    expect(codes).not.toContain('finish-assumed')
+    expect(codes).not.toContain('bare-emissivity-assumed')
+  })
+
   const sunny = { ...buried, solarWPerM2: 700, skyView: 0.5 }
 
   test('is in nobody’s sun and under no sky, at no condition', () => {

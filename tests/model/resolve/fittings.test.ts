@@ -25,7 +25,9 @@ describe('valves, strainers and flange pairs', () => {
   })
 
   test('a strainer counts as a valve', () => {
-    expect(fittingsOf({ ...run, strainers: 1 })).toEqual(fittingsOf({ ...run, valves: 1 }))
+    const { items, ...sums } = fittingsOf({ ...run, strainers: 1 })
+    expect(items.map(({ name }) => name)).toEqual(['strainers'])
+    expect(fittingsOf({ ...run, valves: 1 })).toMatchObject(sums)
   })
 
   test('bare on a lagged run they have an area only', () => {

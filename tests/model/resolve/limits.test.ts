@@ -1,5 +1,6 @@
 /** Touch, loss and damp as they are asked for, with the assumptions behind them. */
 import { describe, expect, test } from 'vitest'
+import type { RunValues } from '#model/fields.ts'
 import { runValuesSchema } from '#model/job.ts'
 import { coldRun, noteCodes, refused, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
 import { problemOf } from './problem.ts'
@@ -108,6 +109,70 @@ describe('touch', () => {
   })
 })
 
+describe('touch of a run that nothing heats to 43 °C', () => {
+  // The lowest burn threshold, of eight hours' contact: ISO 13732-1, as the catalogue holds it.
+  const { finish: _, ...unfinished } = coldRun
+  const loud = ['reach-assumed', 'touch-air-assumed', 'touch-class-assumed', 'threshold-recalled']
+  const heard = (values: RunValues): string[] =>
+    noteCodes(problemOf(values)).filter((code) => loud.includes(code))
+
+  test('is judged without a word', () => {
+    const problem = problemOf(unfinished)
+    expect(problem.limits.burn?.thresholdC).toBeGreaterThan(43)
+    expect(problem.limits.bareBurn).not.toBeNull()
+    expect(heard(unfinished)).toEqual([])
+  })
+
+  test.each([{ mediumMaxC: 43 }, { touchAirC: 43 }, { surroundingsC: 43 }, { solarWPerM2: 1 }])(
+    'with %o it is told as ever',
+    (own) => {
+      const isGiven = 'touchAirC' in own
+      expect(heard({ ...unfinished, ...own }).toSorted()).toEqual(
+        loud.filter((code) => !isGiven || code !== 'touch-air-assumed').toSorted(),
+      )
+    },
+  )
+
+  test.each([{ mediumMaxC: 42.9 }, { touchAirC: 42.9 }, { solarWPerM2: 0 }])(
+    'with %o it is not',
+    (own) => {
+      expect(heard({ ...unfinished, ...own })).toEqual([])
+    },
+  )
+
+  test('a stated limit has its air told', () => {
+    expect(heard({ ...unfinished, maxSurfaceC: 30 })).toEqual(['touch-air-assumed'])
+  })
+
+  test('out of reach asks for its reason all the same', () => {
+    expect(refusedColumns({ ...coldRun, reach: false })).toEqual(['reach_reason'])
+  })
+})
+
+describe('an overall size', () => {
+  // DN 50 measures 60.3 mm: EN 10220.
+  test('smaller than the pipe is refused with what that measures', () => {
+    expect(refused({ ...steamRun, maxOuterDiameterM: 0.05 })).toEqual([
+      {
+        column: 'max_od_mm',
+        found: '50 mm',
+        allowed: 'more than 60.3 mm: the pipe alone measures 60.3 mm',
+      },
+    ])
+    expect(problemOf({ ...steamRun, maxOuterDiameterM: 0.0603 }).limits.maxOuterDiameterM).toBe(
+      0.0603,
+    )
+  })
+
+  test('of a rectangular duct is that of its larger side', () => {
+    const { size: _, ...plain } = steamRun
+    const duct: RunValues = { ...plain, shape: 'rect-duct', widthM: 0.4, heightM: 0.6 }
+    expect(refused({ ...duct, maxOuterDiameterM: 0.5 })[0]?.allowed).toContain(
+      'the duct alone measures 600 mm',
+    )
+  })
+})
+
 describe('damp', () => {
   test('judged if humidity is given, margin 1 K with a note', () => {
     const problem = problemOf(coldRun)
@@ -117,8 +182,36 @@ describe('damp', () => {
 
   test('not judged without', () => {
     const { humidity: _, ...dry } = coldRun
-    expect(problemOf(dry).limits.damp).toBeNull()
-    expect(problemOf({ ...dry, dewMarginK: 2 }).limits.damp).toBeNull()
+    const problem = problemOf({ ...dry, dewMarginK: 2 })
+    expect(problem.limits.damp).toBeNull()
+    const texts = problem.notes.map(({ text }) => text)
+    expect(texts).toContain('Damp is not judged: no humidity_pct is given. The surface may drip.')
+    expect(texts).toContain('dew_margin_k is not used: no humidity_pct is given.')
+  })
+
+  test('that it is not, is no news of a hot run, nor of one in the ground', () => {
+    const { humidity: _, ...dry } = coldRun
+    expect(noteCodes(problemOf(dry))).toContain('damp-not-judged')
+    for (const other of [
+      { ...dry, mediumC: 27 },
+      { ...dry, buryDepthM: 1, maxLossWPerM: 20 },
+      coldRun,
+    ])
+      expect(noteCodes(problemOf(other))).not.toContain('damp-not-judged')
+    expect(noteCodes(problemOf({ ...dry, mediumC: 30, mediumMinC: 10 }))).toContain(
+      'damp-not-judged',
+    )
+  })
+
+  test('below 0 °C the convention of its humidity is said', () => {
+    const frozen = { ...coldRun, mediumC: -40 }
+    for (const [dampAirC, isSaid] of [
+      [-1, true],
+      [0, false],
+    ] as const)
+      expect(noteCodes(problemOf({ ...frozen, dampAirC })).includes('humidity-over-ice')).toBe(
+        isSaid,
+      )
   })
 
   test('a margin that is given, 0 too', () => {

@@ -1,7 +1,11 @@
 /** Shape, size and extent of a run. */
 import { describe, expect, test } from 'vitest'
+import type { RunValues } from '#model/fields.ts'
 import { noteCodes, refused, refusedColumns, steamRun } from '../../sizing/catalogue.ts'
 import { problemOf } from './problem.ts'
+
+const unusedTexts = (values: RunValues): string[] =>
+  problemOf(values).notes.flatMap(({ code, text }) => (code === 'unused' ? [text] : []))
 
 const { size: _size, ...unsized } = steamRun
 
@@ -58,6 +62,45 @@ describe('pipe', () => {
     expect(noteCodes(given)).not.toContain('rise-assumed')
   })
 
+  test('a rise beyond the length is refused; fittings alone have a length of 0 and rise', () => {
+    const tall = { ...steamRun, orientation: 'vertical' as const, riseM: 3 }
+    expect(refused({ ...tall, lengthM: 2 })).toEqual([
+      {
+        column: 'rise_m',
+        found: '3 m over a length of 2 m',
+        allowed: 'at most the length of the run: it cannot rise by more',
+      },
+    ])
+    for (const lengthM of [0, 3]) expect(problemOf({ ...tall, lengthM }).extent).toBe(lengthM)
+  })
+
+  test('a rise of what lies is told as unused', () => {
+    for (const lying of [
+      steamRun,
+      { ...steamRun, orientation: 'horizontal' as const },
+      { ...steamRun, buryDepthM: 1, maxLossWPerM: 40 },
+      { ...steamRun, shape: 'rect-duct' as const, size: '600 x 400' },
+    ])
+      expect(unusedTexts({ ...lying, riseM: 3 })).toContain(
+        'rise_m is not used: the run is horizontal.',
+      )
+  })
+
+  test('soil of a run that is not buried is told as unused', () => {
+    const text = 'soil_w_mk is not used: the run is not buried.'
+    expect(unusedTexts({ ...steamRun, soilWPerMK: 1 })).toEqual([text])
+    expect(unusedTexts({ ...steamRun, soilWPerMK: 1, buryDepthM: 1, maxLossWPerM: 40 })).toEqual([])
+    expect(
+      unusedTexts({
+        ...steamRun,
+        shape: 'rect-duct',
+        size: '600 x 400',
+        soilWPerMK: 1,
+        buryDepthM: 1,
+      }),
+    ).toContain(text)
+  })
+
   test.each([undefined, 0, 1e-9, 4000])(
     'vertical without a rise, length %s: an issue',
     (lengthM) => {
@@ -72,6 +115,31 @@ describe('pipe', () => {
     const problem = problemOf(steamRun)
     expect(problem.insideFilmWPerM2K).toBeNull()
     expect(noteCodes(problem)).toContain('inside-neglected')
+  })
+})
+
+describe('air in a duct', () => {
+  const duct: RunValues = { ...steamRun, shape: 'round-duct', size: 'D 250', mediumC: 20, airC: 5 }
+  // Of dry air at 20 °C and sea level, 1.204 kg/m³, 0.3 kg/s go through Ø 250 at 5.08 m/s.
+  const disagreement = (own: RunValues): string[] =>
+    problemOf({ ...duct, ...own }).notes.flatMap(({ code, text }) =>
+      code === 'flow-velocity' ? [text] : [],
+    )
+
+  test('flow and velocity that contradict each other are told, with which is used', () => {
+    expect(disagreement({ flowKgPerS: 0.3, velocityMPerS: 3 })).toEqual([
+      'flow_kg_s and velocity_m_s do not agree: 0.3 kg/s of air would flow at 5.08 m/s, not 3 m/s. The film inside goes by the velocity, the arrival by the flow. Check both.',
+    ])
+    for (const velocityMPerS of [4.7, 5.08, 5.5])
+      expect(disagreement({ flowKgPerS: 0.3, velocityMPerS })).toEqual([])
+    expect(disagreement({ velocityMPerS: 3 })).toEqual([])
+    expect(disagreement({ flowKgPerS: 0.3, velocityMPerS: 3, medium: 'oil' })).toEqual([])
+  })
+
+  test('a velocity beside a film is told as unused', () => {
+    const text = 'velocity_m_s is not used for the film inside: inside_film_w_m2k is given.'
+    expect(unusedTexts({ ...duct, velocityMPerS: 3, insideFilmWPerM2K: 20 })).toEqual([text])
+    expect(unusedTexts({ ...duct, velocityMPerS: 3 })).toEqual([])
   })
 })
 
