@@ -294,6 +294,11 @@ const runs: Readonly<Record<string, Varied>> = {
     thicknessM: 0.05,
     surveySurroundingsC: 15,
   },
+  'survey, vessel with a film inside': {
+    ...vessel,
+    insideFilmWPerM2K: 40,
+    measuredSurfaceC: 38,
+  },
   'survey, vessel': { ...vessel, measuredSurfaceC: 38 },
   'survey, duct': { ...duct, measuredSurfaceC: 26, surveyWindMPerS: 1 },
   'survey, thickness unknown': { ...hot, measuredSurfaceC: 48 },

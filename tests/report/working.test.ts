@@ -187,6 +187,16 @@ describe('what a working takes apart', () => {
     expect(textOf('sun against the loss')).toContain('Q = max(0, Q_0)')
   })
 
+  test('how far a survey may be off, from the readings at both ends of what is believed', () => {
+    const survey = textOf('survey')
+    expect(survey).toContain('Survey, thermometer high: outer film')
+    expect(survey).toContain('λ_1l = q_1l × F / (θ_i − θ_l)')
+    expect(survey).toContain('u_λ = sqrt((w_1 × (λ_1h − λ_1l))^2')
+    expect(textOf('survey, film inside')).toContain('λ_3h = F / ((θ_i − θ_s) / q_3h − a / h_i)')
+    expect(textOf('survey, vessel')).toContain('G = a_1 / F_1 + a_2 / F_2')
+    expect(textOf('survey, vessel with a film inside')).toContain('F_1 / λ + o_1 / h_i')
+  })
+
   test('what is missing from a limit as a difference, what is to spare only where it is met', () => {
     const unmet = textOf('unmet')
     expect(unmet).toMatch(
