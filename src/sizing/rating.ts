@@ -3,6 +3,7 @@ import { notesOf as solverNotes } from '#solver/index.ts'
 import { arrival } from './arrival.ts'
 import type { Settled } from './build-up.ts'
 import { rungMoney } from './cost.ts'
+import { curveNotes, EXTRAPOLATED } from './curve-notes.ts'
 import { judge } from './limits.ts'
 import type { Condition, Problem } from './problem.ts'
 import type { Note, Rating } from './result.ts'
@@ -64,11 +65,14 @@ export function rate(problem: Problem, settled: Settled, bareStates: States | nu
     notes: () => {
       const { conditions } = problem
       const said = (condition: Condition, state: typeof loss): readonly Note[] =>
-        solverNotes(systemOf(problem, settled, condition), state)
+        solverNotes(systemOf(problem, settled, condition), state).filter(
+          ({ code }) => code !== EXTRAPOLATED,
+        )
       return [
         ...said(conditions.loss, loss),
         ...said(conditions.touch, touch),
         ...(damp ? said(conditions.damp, damp) : []),
+        ...curveNotes(settled, damp ? [loss, touch, damp] : [loss, touch]),
         ...serviceHeeds(problem, settled, states),
       ]
     },

@@ -1,4 +1,5 @@
 /** Why the chosen rung is as thick as it is: a few plain sentences with the numbers that decided. */
+import { LEAST_BURN_THRESHOLD_C } from '#touch/burn-threshold.ts'
 import {
   type LimitName,
   type LimitResult,
@@ -7,7 +8,7 @@ import {
   type RunResult,
 } from './result.ts'
 import { unmetWords } from './unmet-words.ts'
-import { against, said, shownValue, siWords, type Words } from './words.ts'
+import { against, enoughDigits, said, shownValue, sides, siWords, type Words } from './words.ts'
 
 export type ReasonFacts = Pick<
   RunResult,
@@ -23,12 +24,12 @@ export function writeReason(facts: ReasonFacts, words: Words = siWords): string 
     case 'fixed':
       return sentences(
         `Fixed at ${said(chosen, words)}.`,
-        failures(chosen, words) || passes(chosen, words),
+        failures(chosen, words) || passes(chosen, facts, words),
       )
     case 'money':
       return sentences('Cost decides.', allowed(facts, words), cheapest(facts, words))
     case 'smallest':
-      return sentences('The thinnest that can be bought passes.', standing(chosen, words))
+      return sentences('The thinnest that can be bought passes.', standing(chosen, facts, words))
     case 'unmet':
       return unmet(facts, words)
     default:
@@ -79,11 +80,13 @@ function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
 const touched = ({ limit, rule, what }: LimitResult): string =>
   limit === 'touch' && rule === 'below' ? ` (${what})` : ''
 
-/** What a failed rung gives; where one decimal does not tell it from its bound, that it just misses. */
+/** What a failed rung gives; where its digits do not tell it from its bound, that it just misses. */
 function missed({ value, bound, unit }: LimitResult, words: Words): string {
-  return shownValue(value, unit).toFixed(1) === shownValue(bound, unit).toFixed(1)
+  const [shown, shownBound] = [shownValue(value, unit), shownValue(bound, unit)]
+  const digits = enoughDigits(shown, unit)
+  return shown.toFixed(digits) === shownBound.toFixed(digits)
     ? 'just miss it'
-    : `give ${words.quantity(value, unit, 1)}`
+    : `give ${words.quantity(value, unit, digits)}`
 }
 
 function matt(facts: ReasonFacts, words: Words): string {
@@ -100,20 +103,30 @@ function dearer(facts: ReasonFacts, words: Words): string {
 }
 
 /** The thinnest rung that passes, where cost took a thicker one. */
-function allowed({ ladder, chosen }: ReasonFacts, words: Words): string {
+function allowed({ ladder, chosen, bare }: ReasonFacts, words: Words): string {
   const first = ladder.find((rung) => rung.pass)
   if (!first || !chosen || first.thicknessM >= chosen.thicknessM) return ''
-  const limit = nearest(first.limits)
+  const limit = nearest(first.limits, bare)
   if (!limit) return ''
   return `The limits would allow ${said(first, words)} (${limit.limit}: ${against(limit, words)}).`
 }
 
-/** The asked limit that a rung passes most narrowly, by its share of the bound; service is not asked for. */
-function nearest(limits: readonly LimitResult[]): LimitResult | undefined {
+/**
+ * The asked limit that a rung passes most narrowly, by its share of the bound; service is not asked for, nor is the
+ * burn threshold of a run that even bare burns nobody.
+ */
+function nearest(limits: readonly LimitResult[], bare: Rating): LimitResult | undefined {
   const share = ({ value, bound }: LimitResult): number =>
     Math.abs(bound - value) / Math.max(1, Math.abs(bound))
-  return limits.filter(({ limit }) => limit !== 'service').sort((a, b) => share(a) - share(b))[0]
+  return limits
+    .filter((limit) => limit.limit !== 'service' && !isIdle(limit, bare))
+    .sort((a, b) => share(a) - share(b))[0]
 }
+
+const isIdle = ({ limit, rule, value }: LimitResult, bare: Rating): boolean =>
+  limit === 'touch' &&
+  rule === 'below' &&
+  Math.max(value, bare.touchSurfaceC) < LEAST_BURN_THRESHOLD_C
 
 function cheapest({ chosen, ladder, money }: ReasonFacts, words: Words): string {
   if (!chosen || !money) return ''
@@ -141,20 +154,49 @@ function cheapest({ chosen, ladder, money }: ReasonFacts, words: Words): string 
 }
 
 /** How the narrowest limit stands. */
-function standing(chosen: Rating, words: Words): string {
-  const limit = nearest(chosen.limits)
+function standing(chosen: Rating, { bare }: ReasonFacts, words: Words): string {
+  const limit = nearest(chosen.limits, bare)
   return limit ? `${said(chosen, words)} gives ${against(limit, words)} (${limit.limit}).` : ''
 }
 
+/** One sentence for each limit that is failed, however often it is judged. */
 function failures(rating: Rating, words: Words): string {
-  return rating.limits
-    .filter(({ pass }) => !pass)
-    .map((limit) => `It fails ${limit.limit}: ${against(limit, words)} (${limit.what}).`)
+  const failed = Map.groupBy(
+    rating.limits.filter(({ pass }) => !pass),
+    ({ limit }) => limit,
+  )
+  return [...failed]
+    .map(([name, limits]) => `It fails ${name}${times(limits.length)}: ${eachOf(limits, words)}.`)
     .join(' ')
 }
 
-function passes(rating: Rating, words: Words): string {
-  const limit = nearest(rating.limits)
+const times = (count: number): string =>
+  count < 2 ? '' : count === 2 ? ' twice' : ` ${count} times`
+
+/** Of several, each by what tells it from the others; a value that all have in common is said once. */
+function eachOf(limits: readonly LimitResult[], words: Words): string {
+  const told = limits.map((limit) => {
+    const [value, bound] = sides(limit, words)
+    return { value, bound: `${bound} (${limits.length > 1 ? asked(limit) : limit.what})` }
+  })
+  const [first] = told
+  const parts = told.map(({ value, bound }, index) =>
+    index > 0 && value === first?.value ? bound : `${value} against ${bound}`,
+  )
+  const last = parts.at(-1) ?? ''
+  return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')} and ${last}`
+}
+
+/** Which of several: a touched surface is judged as given, or by its burn threshold. */
+function asked({ limit, rule, what }: LimitResult): string {
+  if (limit !== 'touch') return what
+  const place = what.replace(/^surface(, )?/, '')
+  if (rule === 'below') return `burn, ${place}`
+  return place === '' ? 'as given' : `as given, ${place}`
+}
+
+function passes(rating: Rating, { bare }: ReasonFacts, words: Words): string {
+  const limit = nearest(rating.limits, bare)
   return limit
     ? `It passes every limit; the narrowest is ${limit.limit}, ${against(limit, words)}.`
     : 'It is rated as given.'

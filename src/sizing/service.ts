@@ -124,6 +124,6 @@ export function serviceHeeds(problem: Problem, settled: Settled, states: States)
     )
     .map(({ what, value, bound }) => ({
       code: 'service-heed',
-      text: `${what}: ${value.toFixed(0)} °C is above 90 % of the ${bound.toFixed(0)} °C it stands.`,
+      text: `${what}: ${value.toFixed(0)} °C is above 90 % of the ${bound.toFixed(0)} °C it can stand.`,
     }))
 }

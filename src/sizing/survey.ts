@@ -163,6 +163,8 @@ function readingNotes(problem: Problem, condition: Condition, reading: SurveyRea
 }
 
 const short = (value: number): string => String(Number(value.toFixed(3)))
+const degrees = (tempC: number): string =>
+  `${String(Number(tempC.toFixed(1))).replace('-', '−')} °C`
 
 function tellingNotes(
   { system, surfaceTempC }: Day,
@@ -195,7 +197,7 @@ function tellingNotes(
     {
       code: 'survey-contradiction',
       text: isAgainst
-        ? 'The medium of that day is not on the far side of the surface from the air: heat would flow against the difference. Check the medium, the thermometer and the sun; no conductivity can be told.'
+        ? `The surface read is not between medium (${degrees(system.mediumC)}) and air (${degrees(system.around.airC)}): heat would flow against the difference. Check the medium, the thermometer and the sun; no conductivity can be told.`
         : 'Between medium and surface too little is left to tell a conductivity within what the readings may be off.',
     },
   ]

@@ -40,20 +40,40 @@ function minus(text: string): string {
 export const said = (rung: Rating, words: Words): string =>
   words.thickness(rung.thicknessM, rung.nominalThicknessM)
 
+/** Units of which one decimal tells enough, however small the number. */
+const oneDecimal: ReadonlySet<LimitUnit> = new Set(['°C', 'm'])
+const MOST_DIGITS = 6
+
+/** Digits that say enough of a value as it is shown: one, or those of three significant figures. */
+export function enoughDigits(shown: number, unit: LimitUnit): number {
+  if (shown === 0 || oneDecimal.has(unit)) return 1
+  return Math.min(MOST_DIGITS, Math.max(1, 2 - Math.floor(Math.log10(Math.abs(shown)))))
+}
+
 /** As many digits as tell a value from its bound, at least one. */
-function tellingDigits({ value, bound, unit }: LimitResult): number {
-  const [shown, shownBound] = [shownValue(value, unit), shownValue(bound, unit)]
+function tellingDigits(shown: number, shownBound: number): number {
   return (
-    [1, 2, 3, 4, 5, 6].find((digits) => shown.toFixed(digits) !== shownBound.toFixed(digits)) ?? 6
+    [1, 2, 3, 4, 5].find((digits) => shown.toFixed(digits) !== shownBound.toFixed(digits)) ??
+    MOST_DIGITS
   )
 }
 
 /** A bound that somebody wrote down as a whole number, millimetres kept in metres included. */
 const isWhole = (value: number): boolean => Math.abs(value - Math.round(value)) < 1e-9
 
-export function against(limit: LimitResult, words: Words): string {
-  const { value, bound, unit } = limit
-  const digits = tellingDigits(limit)
-  const boundDigits = isWhole(shownValue(bound, unit)) ? 0 : digits
-  return `${words.quantity(value, unit, digits)} against ${words.quantity(bound, unit, boundDigits)}`
+/** A value and its bound, each with its unit. */
+export function sides(
+  { value, bound, unit }: LimitResult,
+  words: Words,
+): readonly [string, string] {
+  const [shown, shownBound] = [shownValue(value, unit), shownValue(bound, unit)]
+  const telling = tellingDigits(shown, shownBound)
+  const boundDigits = isWhole(shownBound) ? 0 : Math.max(telling, enoughDigits(shownBound, unit))
+  return [
+    words.quantity(value, unit, Math.max(telling, enoughDigits(shown, unit))),
+    words.quantity(bound, unit, boundDigits),
+  ]
 }
+
+export const against = (limit: LimitResult, words: Words): string =>
+  sides(limit, words).join(' against ')

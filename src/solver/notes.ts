@@ -1,5 +1,6 @@
 /** What a reader should know of a solved system. Worked out apart, since only results that are shown need it. */
 import { cornerExcess } from './corner.ts'
+import { short } from './correlation.ts'
 import { isSimplified } from './film.ts'
 import { capital, filmNotes, stepNotes } from './film-notes.ts'
 import { wallOf } from './geometry.ts'
@@ -101,7 +102,7 @@ function conductivityNotes(layers: readonly Layer[], faces: readonly Face[]): No
       const [first, last] = curveEndsC(conductivity)
       notes.push({
         code: 'conductivity-extrapolated',
-        text: `Layer ${index + 1}: its mean temperature is ${Math.max(1, Math.abs(beyondK)).toFixed(0)} K ${beyondK > 0 ? 'above' : 'below'} the conductivity curve, which holds from ${first} to ${last} °C.`,
+        text: `Layer ${index + 1}: its mean temperature is ${Math.max(1, Math.abs(beyondK)).toFixed(0)} K ${beyondK > 0 ? 'above' : 'below'} the conductivity curve, which holds from ${short(first)} to ${short(last)} °C.`,
       })
       return
     }

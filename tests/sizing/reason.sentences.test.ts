@@ -287,6 +287,49 @@ describe('other answers', () => {
     )
   })
 
+  test('a limit that is failed more than once is named once, a value they share too', () => {
+    const at = (...limits: LimitResult[]) => reason('fixed', [rung(50, limits)], 50)
+    const burn = { rule: 'below', what: 'surface, smooth metal touched for 8 h' } as const
+    expect(at(limit('touch', 84.8, 41.9), limit('touch', 84.8, 43, burn))).toBe(
+      'Fixed at 50 mm. It fails touch twice: 84.8 °C against 41.9 °C (as given) and 43 °C (burn, smooth metal touched for 8 h).',
+    )
+    const top = { ...burn, what: 'surface, top, smooth metal touched for 8 h' }
+    expect(
+      at(limit('touch', 84.8, 41.9, { what: 'surface, top' }), limit('touch', 84.8, 43, top)),
+    ).toBe(
+      'Fixed at 50 mm. It fails touch twice: 84.8 °C against 41.9 °C (as given, top) and 43 °C (burn, top, smooth metal touched for 8 h).',
+    )
+    const flux = { unit: 'W/m²', what: 'heat flux' } as const
+    const code = limit('loss', 40, 20, { what: 'by the code' })
+    expect(at(limit('loss', 35, 30), limit('loss', 90, 80, flux), code)).toBe(
+      'Fixed at 50 mm. It fails loss 3 times: 35.0 W/m against 30 W/m (heat flow per metre), 90.0 W/m² against 80 W/m² (heat flux) and 40.0 W/m against 20 W/m (by the code).',
+    )
+  })
+
+  describe('the burn threshold of what burns nobody even bare', () => {
+    const burn = { rule: 'below', what: 'surface, smooth metal touched for 5 s' } as const
+    const cold = limit('touch', 9.1, 57.3, burn)
+    const hot: Rating = { ...rung(0, []), touchSurfaceC: 43 }
+
+    test('is not what stands narrowest', () => {
+      const near = limit('loss', 1, 30)
+      expect(reason('fixed', [rung(50, [cold, near])], 50)).toContain('the narrowest is loss')
+      expect(reason('fixed', [rung(50, [cold])], 50)).toBe('Fixed at 50 mm. It is rated as given.')
+      expect(reason('smallest', [rung(50, [cold])], 50)).toBe(
+        'The thinnest that can be bought passes.',
+      )
+    })
+
+    test('but is where the bare run would burn, or a limit is stated', () => {
+      expect(reason('fixed', [rung(50, [cold])], 50, { bare: hot })).toContain('narrowest is touch')
+      expect(reason('fixed', [rung(50, [limit('touch', 9.1, 57.3)])], 50)).toContain(
+        'narrowest is touch',
+      )
+      const warm = limit('touch', 43, 57.3, burn)
+      expect(reason('fixed', [rung(50, [warm])], 50)).toContain('narrowest is touch')
+    })
+  })
+
   test('bare: within its limits, without any, failing', () => {
     expect(reason('bare', [], 0, { limits: [limit('loss', 25, 30)] })).toBe(
       'Bare. The surface is at 41.3 °C; every limit is met.',
@@ -371,6 +414,18 @@ describe('numbers', () => {
     expect(words(29.9999, 30)).toBe('29.9999 W/m against 30 W/m')
     expect(words(30, 30)).toBe('30.000000 W/m against 30 W/m')
     expect(words(29.5, 30.25)).toBe('29.5 W/m against 30.3 W/m')
+    // Three figures of what is small, but for temperatures and millimetres.
+    expect(words(2.9512, 3)).toBe('2.95 W/m against 3 W/m')
+    expect(words(0.04512, 0.3)).toBe('0.0451 W/m against 0.300 W/m')
+    expect(words(0, 3)).toBe('0.0 W/m against 3 W/m')
+    expect(words(0.000000123, 3)).toBe('0.000000 W/m against 3 W/m')
+    const code = { unit: 'm²K/W', rule: 'at least' } as const
+    expect(against(limit('code', 1.312, 1.0567, code), siWords)).toBe(
+      '1.31 m²K/W against 1.06 m²K/W',
+    )
+    const condensed = limit('arrival', 0.000002, 0.01, { unit: 'kg/s' })
+    expect(against(condensed, siWords)).toBe('0.00720 kg/h against 36 kg/h')
+    expect(against(limit('touch', 4.04, 57.27), siWords)).toBe('4.0 °C against 57.3 °C')
     expect(words(30.23, 30.24)).toBe('30.23 W/m against 30.24 W/m')
     expect(against(limit('space', 0.139, 0.14, { unit: 'm' }), siWords)).toBe(
       '139.0 mm against 140 mm',

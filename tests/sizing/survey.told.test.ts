@@ -102,7 +102,7 @@ describe('notes', () => {
   test('say where heat would flow against the difference', () => {
     const against = { ...found, mediumC: 10, measuredSurfaceC: 42 }
     expect(textOf(against, 'survey-contradiction')).toMatch(
-      /^The medium of that day is not on the far side/,
+      /^The surface read is not between medium \(/,
     )
     expect(surveyed(against).effectiveWPerMK).toBeNull()
   })
