@@ -149,7 +149,9 @@ function rangeIn(field: NumberField, inTwin: boolean): string {
     ? [insideTwin(twin, field.min, Math.ceil), insideTwin(twin, field.max, Math.floor)]
     : [formatCell(field, field.min), formatCell(field, field.max)]
   const unit = twin ? twin.unit : quantities[field.quantity].unit
-  return `from ${ends.join(' to ')}${unit ? ` ${unit}` : ''}`
+  // Read by people, who write −200 with a minus; a cell takes a hyphen as well.
+  const said = ends.map((end) => end.replace('-', '−'))
+  return `from ${said.join(' to ')}${unit ? ` ${unit}` : ''}`
 }
 
 /** An end of the range in the US unit, rounded to the inside, so that what is named is accepted. */

@@ -25,10 +25,10 @@ const badLists: readonly (readonly [
     'bad cells in several rows',
     `${sized}\n${run('A', 'DN 50', 'hot', '20', 'x', '1e999')}\n${run('A', 'DN 50', '80', 'NaN', 'x', '5')}\n`,
     [
-      'row 2, column medium_c: found "hot"; allowed: a number from -200 to 1000 °C',
+      'row 2, column medium_c: found "hot"; allowed: a number from −200 to 1000 °C',
       'row 2, column max_loss_w_m: found "1e999"; allowed: a number from 0.01 to 1000000 W/m',
       expect.stringMatching(/^row 2, column material: found x; allowed: a material of/),
-      'row 3, column air_c: found "NaN"; allowed: a number from -70 to 200 °C',
+      'row 3, column air_c: found "NaN"; allowed: a number from −70 to 200 °C',
       'row 3, column tag: found "A", as in row 2; allowed: a tag of its own for every run',
       expect.stringMatching(/^row 3, column material: found x; allowed: a material of/),
     ],
@@ -41,7 +41,7 @@ const badLists: readonly (readonly [
       expect.stringMatching(/^row 3, column size: found DN 81; allowed: a DN of the table; /),
       expect.stringMatching(/^row 3, column material: found nope; allowed: a material of /),
       'row 4, column medium_c: found nothing; allowed: the temperature of the medium in °C, or pressure_bar_g if it is saturated steam',
-      'row 5, column air_c: found "x"; allowed: a number from -70 to 200 °C',
+      'row 5, column air_c: found "x"; allowed: a number from −70 to 200 °C',
     ],
   ],
   [
@@ -66,7 +66,7 @@ const badLists: readonly (readonly [
     'tag,shape,od_mm,air_c,pressure_bar_g,thickness_mm\nA,pipe,wide,20,high,none\n',
     [
       'row 2, column od_mm: found "wide"; allowed: a number from 1 to 20000 mm',
-      'row 2, column pressure_bar_g: found "high"; allowed: a number from -0.95 to 217 bar g',
+      'row 2, column pressure_bar_g: found "high"; allowed: a number from −0.95 to 217 bar g',
       expect.stringMatching(/^row 2, column thickness_mm: found "none"; allowed: a number/),
     ],
   ],

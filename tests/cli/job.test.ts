@@ -42,7 +42,7 @@ describe('lagwright size with a job', slow, () => {
     const { code, out, err } = await lagwright('size', keep(folder, runs))
     expect(err).toEqual([
       'run 1 (J-1), column length_m: found "long"; allowed: a number from 0 to 1000000 m',
-      'run 2 (J-2), column medium_c: found "hot"; allowed: a number from -200 to 1000 °C',
+      'run 2 (J-2), column medium_c: found "hot"; allowed: a number from −200 to 1000 °C',
       expect.stringMatching(
         /^run 3 \(J-3\), column size: found DN 81; allowed: a DN of the table; /,
       ),

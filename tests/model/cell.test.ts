@@ -106,10 +106,10 @@ describe('a number cell', () => {
   })
 
   it('names the range in the unit that was typed', () => {
-    expect(allowed('airC', '400')).toBe('a number from -70 to 200 °C')
-    expect(allowed('airC', '400', { ...point, twin: true })).toBe('a number from -94 to 392 °F')
+    expect(allowed('airC', '400')).toBe('a number from −70 to 200 °C')
+    expect(allowed('airC', '400', { ...point, twin: true })).toBe('a number from −94 to 392 °F')
     expect(allowed('humidity', '120')).toBe('a number from 1 to 100 %')
-    expect(allowed('pressureGaugePa', '300')).toBe('a number from -0.95 to 217 bar g')
+    expect(allowed('pressureGaugePa', '300')).toBe('a number from −0.95 to 217 bar g')
     expect(allowed('emissivity', '2')).toBe('a number from 0.01 to 1')
     expect(allowed('outerDiameterM', '9999', { ...point, twin: true })).toBe(
       'a number from 0.0393701 to 787.401 in',

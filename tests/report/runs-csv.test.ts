@@ -106,13 +106,13 @@ describe('what is wrong with a list', () => {
       ),
     ).toEqual([
       'row 2, column shape: found "tube"; allowed: one of pipe, round-duct, rect-duct, flat, sphere, vessel',
-      'row 2, column air_c: found "warm"; allowed: a number from -70 to 200 °C',
+      'row 2, column air_c: found "warm"; allowed: a number from −70 to 200 °C',
       'row 2, column humidity_pct: found "120"; allowed: a number from 1 to 100 %',
       'row 2, column money: found "maybe"; allowed: yes or no',
       'row 2, column life_years: found "1.5"; allowed: a whole number from 1 to 100 years',
-      'row 3, column air_c: found "NaN"; allowed: a number from -70 to 200 °C',
+      'row 3, column air_c: found "NaN"; allowed: a number from −70 to 200 °C',
       'row 4, column tag: found "A", as in row 2; allowed: a tag of its own for every run',
-      'row 5, column air_c: found "1e999"; allowed: a number from -70 to 200 °C',
+      'row 5, column air_c: found "1e999"; allowed: a number from −70 to 200 °C',
       'row 5, column humidity_pct: found "0x10"; allowed: a number from 1 to 100 %',
       'row 5, column tag: found nothing; allowed: a tag of its own for every run',
     ])
@@ -165,7 +165,7 @@ describe('what is wrong with a list', () => {
     [
       'a decimal comma between commas',
       'tag,air_c\nA,"20,5"\n',
-      'row 2, column air_c: found "20,5"; allowed: a number from -70 to 200 °C',
+      'row 2, column air_c: found "20,5"; allowed: a number from −70 to 200 °C',
     ],
   ])('names %s', (_name, text, problem) => {
     expect(problems(text)).toEqual([problem])
@@ -227,7 +227,7 @@ describe('what is wrong with a list', () => {
 
   it('keeps each problem on one line, whatever the cell holds', () => {
     expect(problems('tag,air_c\nA,"\u001b[31m\n2"\n')).toEqual([
-      'row 2, column air_c: found "\\u001b[31m\\u000a2"; allowed: a number from -70 to 200 °C',
+      'row 2, column air_c: found "\\u001b[31m\\u000a2"; allowed: a number from −70 to 200 °C',
     ])
   })
 })

@@ -47,7 +47,7 @@ describe('the form of a run', () => {
     await expect.element(medium).toHaveValue('1200')
     await expect.element(medium).toHaveAttribute('aria-invalid', 'true')
     await expect
-      .element(form.getByText('"1200" does not fit. Allowed: a number from -200 to 1000 °C.'))
+      .element(form.getByText('"1200" does not fit. Allowed: a number from −200 to 1000 °C.'))
       .toBeVisible()
   })
 

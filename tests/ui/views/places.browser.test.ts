@@ -40,7 +40,7 @@ describe('the job', () => {
     await air.fill('mild')
     await userEvent.tab()
     await expect.element(air).toHaveValue('mild')
-    await expect.element(page.getByText('Give a number from -70 to 200 °C.')).toBeVisible()
+    await expect.element(page.getByText('Give a number from −70 to 200 °C.')).toBeVisible()
     expect(session.job.defaults.airC).toBe(25)
     session.undo()
     expect(session.job.defaults.airC).toBe(20)

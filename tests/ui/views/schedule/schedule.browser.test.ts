@@ -94,7 +94,7 @@ describe('the schedule', () => {
     await expect.poll(() => shown('ST-2', 'mediumC')).toBe('hot')
     expect(cell('ST-2', 'mediumC').getAttribute('aria-invalid')).toBe('true')
     await expect
-      .element(page.getByText('"hot" does not fit. Allowed: a number from -200 to 1000 °C.'))
+      .element(page.getByText('"hot" does not fit. Allowed: a number from −200 to 1000 °C.'))
       .toBeVisible()
     expect(workspace.session.job.runs[1]?.drafts).toEqual({ mediumC: 'hot' })
     await userEvent.keyboard('150{Enter}')
