@@ -26,6 +26,15 @@ export function between(points: readonly Point[], at: number): number | null {
   return lower[1] + ((upper[1] - lower[1]) * (at - lower[0])) / (upper[0] - lower[0])
 }
 
+/** What `between` reads: the point that is meant, or the two around it; none beyond the ends. */
+export function readAt(points: readonly Point[], at: number): readonly Point[] {
+  const next = points.findIndex(([end]) => end >= at)
+  const [lower, upper] = [points[next - 1], points[next]]
+  if (!upper) return []
+  if (upper[0] === at) return [upper]
+  return lower ? [lower, upper] : []
+}
+
 /** The point within the ends that is nearest. */
 export function clamped(points: readonly Point[], at: number): number {
   const ends = points.map(([end]) => end)

@@ -224,20 +224,29 @@ export function saturationTemperatureC(
   steam: readonly SteamState[],
   gaugePressurePa: number,
 ): Saturation {
-  const pressurePa = gaugePressurePa + atmospherePa
-  const above = steam.findIndex((state) => state.pressureAbsolutePa >= pressurePa)
-  const upper = steam[above]
-  const lower = steam[above - 1]
-  // The gauge form of a tabulated pressure may miss the end of the table by a rounding.
-  if (upper && upper.pressureAbsolutePa - pressurePa < 1e-6 * pressurePa)
-    return { ok: true, temperatureC: upper.temperatureC }
-  if (!upper || !lower) return { ok: false, message: outOfRange(steam) }
+  const [lower, upper] = saturationCells(steam, gaugePressurePa)
+  if (!lower) return { ok: false, message: outOfRange(steam) }
+  if (!upper) return { ok: true, temperatureC: lower.temperatureC }
   const share =
-    Math.log(pressurePa / lower.pressureAbsolutePa) /
+    Math.log((gaugePressurePa + atmospherePa) / lower.pressureAbsolutePa) /
     Math.log(upper.pressureAbsolutePa / lower.pressureAbsolutePa)
   const inverseK =
     (1 - share) / (lower.temperatureC + zeroCelsiusK) + share / (upper.temperatureC + zeroCelsiusK)
   return { ok: true, temperatureC: 1 / inverseK - zeroCelsiusK }
+}
+
+/** The states that `saturationTemperatureC` reads: the one of that pressure, the two around it, or none. */
+export function saturationCells(
+  steam: readonly SteamState[],
+  gaugePressurePa: number,
+): readonly SteamState[] {
+  const pressurePa = gaugePressurePa + atmospherePa
+  const above = steam.findIndex((state) => state.pressureAbsolutePa >= pressurePa)
+  const [lower, upper] = [steam[above - 1], steam[above]]
+  if (!upper) return []
+  // The gauge form of a tabulated pressure may miss the end of the table by a rounding.
+  if (upper.pressureAbsolutePa - pressurePa < 1e-6 * pressurePa) return [upper]
+  return lower ? [lower, upper] : []
 }
 
 function outOfRange(steam: readonly SteamState[]): string {

@@ -1,5 +1,14 @@
 /** Heat capacity, density and latent heat of what flows, linear between the states of the catalogue. */
-import { between, type Figure, figureText, known, type Point, rising, unknown } from './figure.ts'
+import {
+  between,
+  type Figure,
+  figureText,
+  known,
+  type Point,
+  readAt,
+  rising,
+  unknown,
+} from './figure.ts'
 import type { Catalogue, SteamState } from './types.ts'
 
 export type MediumWord = 'water' | 'steam' | 'air' | 'glycol' | 'oil' | 'other'
@@ -11,12 +20,11 @@ export interface MediumAt {
 
 /** Specific heat at constant pressure [J/(kg·K)]. */
 export const heatCapacityOf = (catalogue: Catalogue, at: MediumAt): Figure =>
-  figureOf(catalogue, at, {
-    what: 'heat capacity',
-    ofMedium: ({ specificHeatJPerKgK }) => specificHeatJPerKgK,
-    ofSteam: ({ specificHeatVapourJPerKgK }) => specificHeatVapourJPerKgK,
-    airIs: 'Air is taken as dry.',
-  })
+  figureOf(catalogue, at, heatCapacity)
+
+/** The states that `heatCapacityOf` reads: temperature [°C] and heat capacity [J/(kg·K)], one or the two around it. */
+export const heatCapacityCells = (catalogue: Catalogue, at: MediumAt): readonly Point[] =>
+  readAt(rising(tableOf(catalogue, at.medium, heatCapacity).points), at.temperatureC)
 
 /** Density [kg/m³]. */
 export const densityOf = (catalogue: Catalogue, at: MediumAt): Figure =>
@@ -28,10 +36,17 @@ export const densityOf = (catalogue: Catalogue, at: MediumAt): Figure =>
   })
 
 /** Heat of vaporisation of saturated steam [J/kg]. */
-export function latentHeatJPerKg(steam: readonly SteamState[], temperatureC: number): Figure {
-  const points = steam.map((state): Point => [state.temperatureC, state.latentHeatJPerKg])
-  return read(points, temperatureC, 'latent heat', 'steam', null)
-}
+export const latentHeatJPerKg = (steam: readonly SteamState[], temperatureC: number): Figure =>
+  read(latentHeats(steam), temperatureC, 'latent heat', 'steam', null)
+
+/** The states that `latentHeatJPerKg` reads: temperature [°C] and heat [J/kg], one or the two around it. */
+export const latentHeatCells = (
+  steam: readonly SteamState[],
+  temperatureC: number,
+): readonly Point[] => readAt(rising(latentHeats(steam)), temperatureC)
+
+const latentHeats = (steam: readonly SteamState[]): Point[] =>
+  steam.map((state) => [state.temperatureC, state.latentHeatJPerKg])
 
 type MediumState = Catalogue['media'][number]
 
@@ -40,6 +55,13 @@ interface Property {
   readonly ofMedium: (state: MediumState) => number | null
   readonly ofSteam: (state: SteamState) => number
   readonly airIs: string
+}
+
+const heatCapacity: Property = {
+  what: 'heat capacity',
+  ofMedium: ({ specificHeatJPerKgK }) => specificHeatJPerKgK,
+  ofSteam: ({ specificHeatVapourJPerKgK }) => specificHeatVapourJPerKgK,
+  airIs: 'Air is taken as dry.',
 }
 
 /** Which rows stand for the word, and what that assumes. A mixture has to be named by its share by mass. */
@@ -59,19 +81,35 @@ const rowsFor = {
 } as const
 
 function figureOf(
-  { media, steam }: Catalogue,
+  catalogue: Catalogue,
   { medium, temperatureC }: MediumAt,
   property: Property,
 ): Figure {
-  const { what, ofMedium, ofSteam, airIs } = property
+  const { what } = property
   if (medium === 'other')
     return unknown(
       `The ${what} of a medium given as "other" is not known: name water, steam, air, glycol or oil if it is one of them.`,
     )
+  const { points, assumption } = tableOf(catalogue, medium, property)
+  return read(points, temperatureC, what, medium, assumption)
+}
+
+interface PropertyTable {
+  readonly points: readonly Point[]
+  readonly assumption: string | null
+}
+
+function tableOf(
+  { media, steam }: Catalogue,
+  medium: MediumWord,
+  { ofMedium, ofSteam, airIs }: Property,
+): PropertyTable {
+  if (medium === 'other') return { points: [], assumption: null }
   if (medium === 'steam') {
-    const points = steam.map((state): Point => [state.temperatureC, ofSteam(state)])
-    const assumption = 'Steam is taken as dry and saturated at its temperature.'
-    return read(points, temperatureC, what, medium, assumption)
+    return {
+      points: steam.map((state): Point => [state.temperatureC, ofSteam(state)]),
+      assumption: 'Steam is taken as dry and saturated at its temperature.',
+    }
   }
   const { id, massFraction, assumption } =
     medium === 'air' ? { id: 'air', massFraction: null, assumption: airIs } : rowsFor[medium]
@@ -80,7 +118,7 @@ function figureOf(
     const isMeant = state.mediumId === id && state.massFraction === massFraction
     return isMeant && value !== null ? [[state.temperatureC, value]] : []
   })
-  return read(points, temperatureC, what, medium, assumption)
+  return { points, assumption }
 }
 
 function read(

@@ -115,6 +115,8 @@ export type ArrivalLimit =
       readonly maxDropK: number | null
       readonly flowKgPerS: number
       readonly heatCapacityJPerKgK: number
+      /** What it was read off, straight between two; empty where it was given. */
+      readonly cells: readonly TableCell[]
     }
   /** Saturated steam condenses at its temperature: as long as some is left it arrives as it set out. */
   | {
@@ -122,6 +124,7 @@ export type ArrivalLimit =
       readonly maxDropK: number | null
       readonly flowKgPerS: number
       readonly latentHeatJPerKg: number
+      readonly cells: readonly TableCell[]
     }
 
 /** What the rows of a code table ask of this run: each is judged. */
@@ -222,9 +225,23 @@ export interface MoneyTerms {
   readonly labour: LabourTerms
 }
 
+/** A state of a table of the catalogue: what it holds at a temperature. */
+export interface TableCell {
+  readonly tempC: number
+  readonly value: number
+}
+
+/** Saturated steam that was given by its pressure: the state of the table that has it, or the two around it. */
+export interface SteamReading {
+  readonly gaugePressurePa: number
+  readonly cells: readonly { readonly pressureAbsolutePa: number; readonly temperatureC: number }[]
+}
+
 export interface Problem {
   readonly tag: string
   readonly shape: Shape
+  /** Null where the medium was given by its temperature. */
+  readonly steam: SteamReading | null
   readonly insideFilmWPerM2K: number | null
   /** What the film inside was worked out from; null where it was given, usual, or none. */
   readonly insideAir: InsideAir | null

@@ -262,6 +262,19 @@ const runs: Readonly<Record<string, Varied>> = {
     flowKgPerS: 0.2,
     maxDropK: 1,
   },
+  'steam of a pressure of the table': {
+    ...hot,
+    medium: 'steam',
+    mediumC: undefined,
+    pressureGaugePa: 1.01e6 - 101_325,
+  },
+  'steam by temperature': { ...hot, medium: 'steam', mediumC: 180, flowKgPerS: 0.2 },
+  'heat capacity given': {
+    ...hot,
+    mediumC: 90,
+    flowKgPerS: 0.3,
+    heatCapacityJPerKgK: 3600,
+  },
   'code, thickness': { ...hot, mediumC: 60, codeTable: 'geg-2024-heating' },
   'code, conversion': {
     ...hot,

@@ -197,6 +197,12 @@ describe('what a working takes apart', () => {
     expect(textOf('survey, vessel with a film inside')).toContain('F_1 / λ + o_1 / h_i')
   })
 
+  test('steam and heat capacities by the states of their tables', () => {
+    const steam = textOf('condensate')
+    expect(steam).toContain('x = ln(p_S / p_1) / ln(p_2 / p_1)')
+    expect(steam).toContain('r = r_a + (r_b − r_a) × (θ_1 − θ_a) / (θ_b − θ_a)')
+  })
+
   test('what is missing from a limit as a difference, what is to spare only where it is met', () => {
     const unmet = textOf('unmet')
     expect(unmet).toMatch(

@@ -1,6 +1,13 @@
 /** What flows, how much of it, and how much colder it may arrive. */
-import { heatCapacityOf, latentHeatJPerKg, type MediumWord } from '#catalogue/media.ts'
-import type { ArrivalLimit } from '#sizing/problem.ts'
+import type { Point } from '#catalogue/figure.ts'
+import {
+  heatCapacityCells,
+  heatCapacityOf,
+  latentHeatCells,
+  latentHeatJPerKg,
+  type MediumWord,
+} from '#catalogue/media.ts'
+import type { ArrivalLimit, TableCell } from '#sizing/problem.ts'
 import { airDensityKgPerM3, standardPressurePa } from '#solver/index.ts'
 import type { RunValues } from '../fields.ts'
 import type { Conditions } from './conditions.ts'
@@ -86,9 +93,13 @@ function ductAreaM2({ shape: word, medium }: RunValues, { shape }: Thing): numbe
   return (Math.PI / 4) * shape.outerDiameterM ** 2
 }
 
-type Carrier =
+type Carrier = { readonly cells: readonly TableCell[] } & (
   | { readonly kind: 'drop'; readonly heatCapacityJPerKgK: number }
   | { readonly kind: 'condensate'; readonly latentHeatJPerKg: number }
+)
+
+const asCells = (points: readonly Point[]): readonly TableCell[] =>
+  points.map(([tempC, value]) => ({ tempC, value }))
 
 /** What the medium gives off its heat by: its heat capacity, or that of condensing. */
 function carrierOf(
@@ -107,7 +118,7 @@ function carrierOf(
         'With a heat capacity given the steam is taken as superheated: it cools along the run and does not condense.',
       )
     }
-    return { kind: 'drop', heatCapacityJPerKgK }
+    return { kind: 'drop', heatCapacityJPerKgK, cells: [] }
   }
   if (medium === 'steam') return condensing(values, mediumC, index, findings)
   if (medium === null) {
@@ -135,7 +146,8 @@ function carrierOf(
     'heat-capacity',
     `The heat capacity of ${medium} at ${plain(mediumC)} °C is taken as ${plain(found.value, 0)} J/kgK.${found.assumption === null ? '' : ` ${found.assumption}`}`,
   )
-  return { kind: 'drop', heatCapacityJPerKgK: found.value }
+  const cells = heatCapacityCells(index.catalogue, { medium, temperatureC: mediumC })
+  return { kind: 'drop', heatCapacityJPerKgK: found.value, cells: asCells(cells) }
 }
 
 function condensing(
@@ -167,7 +179,8 @@ function condensing(
   } else if (values.heatCapacityJPerKgK !== undefined) {
     findings.note('unused', 'heat_capacity_j_kgk is not used: saturated steam condenses.')
   }
-  return { kind: 'condensate', latentHeatJPerKg: found.value }
+  const cells = asCells(latentHeatCells(catalogue.steam, mediumC))
+  return { kind: 'condensate', latentHeatJPerKg: found.value, cells }
 }
 
 /** Ducts carry air, and what is given by a pressure is steam; of a pipe nothing is taken for granted. */

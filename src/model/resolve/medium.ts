@@ -1,5 +1,6 @@
 /** The temperatures of the medium: as given, or of saturated steam at its pressure. */
-import { saturationTemperatureC } from '#catalogue/lookup.ts'
+import { saturationCells, saturationTemperatureC } from '#catalogue/lookup.ts'
+import type { SteamReading } from '#sizing/problem.ts'
 import type { RunValues } from '../fields.ts'
 import { type Findings, plain } from './findings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
@@ -86,4 +87,20 @@ function mediumTemperatureC(
     `Steam of ${plain(values.pressureGaugePa / 1e5, 2)} bar g is saturated at ${plain(steam.temperatureC)} °C.`,
   )
   return steam.temperatureC
+}
+
+/** What the temperature of steam given by its pressure was read off; null where it was not. */
+export function steamReading(
+  { pressureGaugePa }: RunValues,
+  { catalogue }: CatalogueIndex,
+): SteamReading | null {
+  if (pressureGaugePa === undefined) return null
+  const cells = saturationCells(catalogue.steam, pressureGaugePa)
+  return {
+    gaugePressurePa: pressureGaugePa,
+    cells: cells.map(({ pressureAbsolutePa, temperatureC }) => ({
+      pressureAbsolutePa,
+      temperatureC,
+    })),
+  }
 }

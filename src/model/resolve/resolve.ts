@@ -11,7 +11,7 @@ import { resolveFittings } from './fittings.ts'
 import type { CatalogueIndex } from './index-catalogue.ts'
 import { noteLayering } from './layering.ts'
 import { canBurn, resolveLimits } from './limits.ts'
-import { resolveMedium } from './medium.ts'
+import { resolveMedium, steamReading } from './medium.ts'
 import { resolveMoney } from './money.ts'
 import { resolveSurvey } from './survey.ts'
 import { resolveThing } from './thing.ts'
@@ -89,6 +89,7 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
     problem: {
       tag,
       shape: thing.shape,
+      steam: steamReading(values, index),
       insideFilmWPerM2K: thing.insideFilmWPerM2K,
       insideAir: thing.insideAir ?? null,
       extent: thing.extent,

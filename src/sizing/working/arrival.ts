@@ -7,6 +7,7 @@ import { runLoss } from '../run-loss.ts'
 import type { States } from '../states.ts'
 import { Ledger } from './ledger.ts'
 import { verdicts } from './limits.ts'
+import { tabledStep } from './medium.ts'
 import type { Section } from './types.ts'
 
 export interface ArrivalWorking {
@@ -28,13 +29,16 @@ export function arrivalSection(working: ArrivalWorking): Section | null {
   let found: string | null = null
   ledger.given('Loss of the whole run, as above', 'Q', total.totalW, 'W')
   ledger.given('Flow', 'm', limit.flowKgPerS, 'kg/s')
+  ledger.given('Medium as it sets out', 'θ_1', problem.conditions.loss.mediumC, '°C')
   if (limit.kind === 'condensate') {
-    ledger.given(
-      'Heat that a kilogram of the steam gives off as it condenses',
-      'r',
-      limit.latentHeatJPerKg,
-      'J/kg',
-    )
+    tabledStep(ledger, {
+      words: 'Heat that a kilogram of the steam gives off as it condenses',
+      symbol: 'r',
+      unit: 'J/kg',
+      value: limit.latentHeatJPerKg,
+      cells: limit.cells,
+      at: 'θ_1',
+    })
     found = 'max(0, Q / r)'
     ledger.step(
       'Condensate, no more than the steam that flows',
@@ -47,8 +51,14 @@ export function arrivalSection(working: ArrivalWorking): Section | null {
       },
     )
   } else {
-    ledger.given('Heat capacity', 'c', limit.heatCapacityJPerKgK, 'J/(kg·K)')
-    ledger.given('Medium as it sets out', 'θ_1', problem.conditions.loss.mediumC, '°C')
+    tabledStep(ledger, {
+      words: 'Heat capacity',
+      symbol: 'c_m',
+      unit: 'J/(kg·K)',
+      value: limit.heatCapacityJPerKgK,
+      cells: limit.cells,
+      at: 'θ_1',
+    })
     const tendsToC =
       total.totalW === 0 ? problem.conditions.loss.around.airC : tendsTo(problem, settled)
     ledger.given(
@@ -59,7 +69,7 @@ export function arrivalSection(working: ArrivalWorking): Section | null {
     )
     if (arrives.arrivalTempC !== problem.conditions.loss.mediumC) {
       ledger.step('Heat transfer of the run', 'U', 'Q / (θ_1 − θ_e)', 'W/K')
-      ledger.step('Medium as it arrives', 'θ_2', 'θ_e + (θ_1 − θ_e) × exp(−U / (m × c))', '°C', {
+      ledger.step('Medium as it arrives', 'θ_2', 'θ_e + (θ_1 − θ_e) × exp(−U / (m × c_m))', '°C', {
         value: arrives.arrivalTempC ?? Number.NaN,
         source: 'energy balance of plug flow',
       })

@@ -10,6 +10,7 @@ import { codeSections } from './code.ts'
 import { frostSections } from './frost.ts'
 import { insideSection } from './inside.ts'
 import { burnSteps, dewSteps, limitSection } from './limits.ts'
+import { steamSection } from './medium.ts'
 import { moneySections } from './money.ts'
 import { runSection } from './run.ts'
 import { stateSections } from './state.ts'
@@ -33,7 +34,7 @@ export function workingOf(problem: Problem): Working {
   const isBare = shown.settled.layers.length === 0
   const sections = [
     runSection(problem, shown.settled),
-    ...present([insideSection(problem)]),
+    ...present([steamSection(problem), insideSection(problem)]),
     ...lossSections(shown, isBare ? 'Bare run' : 'Loss condition'),
     ...(isBare ? [] : bareSections(shown)),
     ...touchSections(shown),
