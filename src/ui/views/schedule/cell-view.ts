@@ -104,9 +104,9 @@ function composedSize(run: Run, key: string, units: UnitSystem): string {
 export function lossText(brief: SizedBrief, units: UnitSystem): string {
   if (brief.heatLossWPerM !== null)
     return formatWithUnit(brief.heatLossWPerM, 'heatLossPerLength', units)
-  return brief.isPiece
-    ? formatWithUnit(brief.laggedLossW, units === 'us' ? 'plantPower' : 'power', units)
-    : formatWithUnit(brief.heatFluxWPerM2, 'heatFlux', units, 0)
+  if (!brief.isPiece) return formatWithUnit(brief.heatFluxWPerM2, 'heatFlux', units, 0)
+  const isLarge = units === 'us' || Math.abs(brief.laggedLossW ?? 0) >= 1000
+  return formatWithUnit(brief.laggedLossW, isLarge ? 'plantPower' : 'power', units)
 }
 
 function resultText(brief: RunBrief | undefined, column: Column, { units }: Showing): string {
