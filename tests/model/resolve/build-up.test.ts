@@ -118,6 +118,21 @@ describe('rungs', () => {
     expect(problemOf({ ...values, thicknessM: 0.08 }).layers[0]?.thicknessM).toBe(0.08)
   })
 
+  test.each([
+    ['metric', 'no metric steps'],
+    ['inch', 'no inch steps'],
+    ['both', 'no steps, metric or inch,'],
+  ] as const)('which steps there are none of is said: %s', (steps, none) => {
+    const [alone] = refused({ ...without, steps, material: 'perlite_loose' })
+    expect(alone?.allowed).toMatch(
+      new RegExp(`^a thickness in mm: the catalogue holds ${none} for \\S.*`),
+    )
+    const [layered] = refused({ ...without, steps, layers: 'perlite_loose:?' })
+    expect(layered?.allowed).toMatch(
+      new RegExp(`^a thickness in mm in place of \\?: the catalogue holds ${none} for \\S.*`),
+    )
+  })
+
   test('a fixed thickness of a rung has the pieces of that rung, for the price', () => {
     expect(problemOf({ ...steamRun, thicknessM: 0.09 }).layers[0]?.piecesM).toEqual([0.04, 0.05])
     expect(problemOf({ ...steamRun, thicknessM: 0.045 }).layers[0]?.piecesM).toEqual([0.045])

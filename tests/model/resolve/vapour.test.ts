@@ -59,6 +59,15 @@ describe('open to vapour', () => {
     expect(noteOf(sheeted, 'vapour-open')).toContain('seal every lap and end of the finish')
   })
 
+  test('layers are listed, each material once', () => {
+    const layers =
+      'stone_wool_pipe_section:30;glass_wool_pipe_section:30;stone_wool_pipe_section:30'
+    expect(noteOf({ ...unlagged, layers }, 'vapour-open')).toMatch(
+      /: Stone [^,]+ pipe section and [^,]+ pipe section let vapour through to /,
+    )
+    expect(noteOf(fibre, 'vapour-open')).toContain(' pipe section lets vapour through to ')
+  })
+
   test('the colder the work, the tighter the barrier', () => {
     expect(noteOf({ ...fibre, mediumC: -22 }, 'vapour-open')).toContain('0.001 g/(s·MN)')
   })
