@@ -3,7 +3,7 @@ import type { MoneyTerms } from '#sizing/problem.ts'
 import type { Note, RunResult } from '#sizing/result.ts'
 import type { RunValues } from './fields.ts'
 import { plain } from './resolve/findings.ts'
-import type { Built, YearlyLoss } from './run-loss.ts'
+import type { Built, YearlyLoss } from './yearly-loss.ts'
 
 /** Hours of a year, taken where none are given: the run is in service all the time. */
 export const WHOLE_YEAR_H = 8760

@@ -1,5 +1,6 @@
 /** The columns of a table of losses, with the totals under them. */
-import { gainsHeat, type RunLoss, type YearlyLoss } from '#model/run-loss.ts'
+import { gainsHeat, type RunLoss } from '#model/run-loss.ts'
+import type { YearlyLoss } from '#model/yearly-loss.ts'
 import { inchName } from '#sizing/words.ts'
 import {
   ABSENT,

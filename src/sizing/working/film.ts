@@ -1,25 +1,12 @@
 /** The outer film of one face at one condition: from the surface temperature to the flux that leaves it. */
 import { type FaceShape, isCylinder, isSimplified, kelvin, radiates } from '#solver/index.ts'
-import type { Face, System } from '#solver/types.ts'
-import type { Condition } from '../problem.ts'
 import { airSteps, pressureStep } from './air.ts'
+import type { FaceAt } from './face.ts'
 import { freeSteps } from './free.ts'
 import type { Ledger } from './ledger.ts'
 import { radiationSteps } from './radiation.ts'
 import { simplifiedSteps } from './simplified.ts'
 import { windSteps } from './wind.ts'
-
-export interface FaceAt {
-  readonly system: System
-  readonly shape: FaceShape
-  readonly face: Face
-  /** Sun on the surface and what of it is taken up. */
-  readonly sunWPerM2: number
-  readonly solarAbsorptance: number
-  readonly sky: Condition['sky']
-  /** Where the surface temperature was not found but measured: what it is. */
-  readonly surfaceWords?: string
-}
 
 const W_M2K = 'W/(m²·K)'
 const W_M2 = 'W/m²'

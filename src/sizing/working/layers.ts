@@ -2,7 +2,7 @@
 import { sources } from '#solver/index.ts'
 import type { Settled } from '../build-up.ts'
 import { conductivitySteps } from './conductivity.ts'
-import type { FaceAt } from './film.ts'
+import type { FaceAt } from './face.ts'
 import type { Ledger } from './ledger.ts'
 
 /** Symbol of the interface outside layer j: the last is the surface. */

@@ -1,7 +1,7 @@
 /** Radiation of one face, as lines: what it sees, and what passes between. */
 import { clearSky, STEFAN_BOLTZMANN_W_PER_M2_K4, sources } from '#solver/index.ts'
 import type { Condition } from '../problem.ts'
-import type { FaceAt } from './film.ts'
+import type { FaceAt } from './face.ts'
 import type { Ledger } from './ledger.ts'
 import { pedigreeOf } from './pedigree.ts'
 
