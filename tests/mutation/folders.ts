@@ -41,20 +41,17 @@ const insideFolder = (folder: Folder, name: string, others: readonly string[] = 
   tests: [`${folder}/${name}/**/*.test.ts`, ...others],
 })
 
-/** The workings are text upon text: in parts, so that one of them is soon tried again. */
-const working = (name: string, names: readonly string[]): Part => ({
-  folder: 'sizing',
-  name: `sizing/working-${name}`,
-  sources: files('sizing/working', names, '.ts'),
-  tests: ['sizing/working/**/*.test.ts', 'report/working{,-*}.test.ts'],
-})
-
-/** What the other parts of the folder have not taken. */
-const rest = (name: string, tests: readonly string[], others: readonly Part[]): Part => {
+/** What other parts have not taken of a folder, or of one inside it. */
+const rest = (
+  name: string,
+  within: string,
+  tests: readonly string[],
+  others: readonly Part[],
+): Part => {
   const folder = others[0]?.folder
   if (!folder) throw new Error(`${name} is the rest of nothing`)
-  const taken = others.flatMap(({ sources }) => sources).map((glob) => `!${glob}`)
-  return { folder, name, sources: [`${folder}/**/*.ts`, ...taken], tests }
+  const taken = others.flatMap(({ sources }) => sources).filter((glob) => !glob.startsWith('!'))
+  return { folder, name, sources: [`${within}/**/*.ts`, ...taken.map((glob) => `!${glob}`)], tests }
 }
 
 const whole = (folder: Folder): Part => ({
@@ -81,19 +78,25 @@ const solver: readonly Part[] = [
   ),
 ]
 
+const workingTests = ['sizing/working/**/*.test.ts', 'report/working{,-*}.test.ts']
+
+/** The workings are text upon text: in parts, so that one of them is soon tried again. */
+const working = (name: string, names: readonly string[]): Part => ({
+  folder: 'sizing',
+  name: `sizing/working-${name}`,
+  sources: files('sizing/working', names, '.ts'),
+  tests: workingTests,
+})
+
+const workings: readonly Part[] = [
+  working('heat', ['air', 'conductivity', 'film', 'free', 'geometry', 'simplified', 'wind']),
+  working('limits', ['arrival', 'code', 'frost', 'limits', 'survey']),
+  working('money', ['money', 'totals', 'year']),
+]
+
 const sizing: readonly Part[] = [
-  working('heat', [
-    'air',
-    'conductivity',
-    'film',
-    'free',
-    'geometry',
-    'simplified',
-    'state',
-    'wind',
-  ]),
-  working('page', ['digits', 'formula', 'layers', 'ledger', 'pedigree', 'run', 'sizes', 'working']),
-  working('answers', ['arrival', 'code', 'frost', 'limits', 'money', 'survey', 'totals', 'year']),
+  ...workings,
+  rest('sizing/working', 'sizing/working', workingTests, workings),
   ofOneName(
     'sizing',
     'limits',
@@ -107,10 +110,11 @@ const sizing: readonly Part[] = [
 
 export const parts: readonly Part[] = [
   ...solver,
-  rest('solver/heat', ['solver/{film,from-surface,solve}{,.*}.test.ts'], solver),
+  rest('solver/heat', 'solver', ['solver/{film,from-surface,solve}{,.*}.test.ts'], solver),
   ...sizing,
   rest(
     'sizing/rungs',
+    'sizing',
     ['sizing/{continuous,money,oracle,run-loss,size,unmet}{,.*}.test.ts'],
     sizing,
   ),
