@@ -100,7 +100,17 @@ const sizing: readonly Part[] = [
   ofOneName(
     'sizing',
     'limits',
-    ['arrival', 'code', 'equilibrium', 'frost', 'limits', 'passes-limit', 'service', 'space'],
+    [
+      'arrival',
+      'code',
+      'curve-notes',
+      'equilibrium',
+      'frost',
+      'limits',
+      'passes-limit',
+      'service',
+      'space',
+    ],
     ['size'],
   ),
   ofOneName('sizing', 'ladder', ['build-up', 'ladder']),
