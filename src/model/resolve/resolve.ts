@@ -68,7 +68,7 @@ export function resolve(given: RunValues, index: CatalogueIndex): Resolved {
   if (values.thicknessM === 0 && finish) {
     findings.note(
       'unused',
-      `The finish is not used for a bare run: give its emissivity as bare_emissivity if the surface is not ${thing.wall?.name.toLowerCase() ?? 'steel'} as found in service.`,
+      `The finish is not used for a bare run${isBuried ? '' : `: give its emissivity as bare_emissivity if the surface is not ${thing.wall?.name.toLowerCase() ?? 'steel'} as found in service`}.`,
     )
   }
   noteConditions(

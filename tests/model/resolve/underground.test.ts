@@ -49,6 +49,11 @@ test('a fixed thickness that reaches out of the ground is refused', () => {
   expect(problemOf({ ...buried, thicknessM: 0 }).layers).toEqual([])
 })
 
+test('a finish over a bare run in the ground has no emissivity to be given', () => {
+  const { notes } = problemOf({ ...buried, thicknessM: 0 })
+  expect(notes.map(({ text }) => text)).toContain('The finish is not used for a bare run.')
+})
+
 test('fixed layers beside the sized one count', () => {
   const { material: _, ...plain } = buried
   const layers = 'stone_wool_pipe_section:20;stone_wool_pipe_section:?'

@@ -7,6 +7,8 @@ const lookCodes: ReadonlySet<string> = new Set([
   'conductivity-extrapolated',
   'conductivity-steep',
   'soil-shallow',
+  'damp-not-judged',
+  'flow-velocity',
   'vapour-open',
   'vapour-wrong-side',
   'form-unusual',
