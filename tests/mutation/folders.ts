@@ -125,7 +125,7 @@ export const parts: readonly Part[] = [
   rest(
     'sizing/rungs',
     'sizing',
-    ['sizing/{continuous,money,oracle,run-loss,size,unmet}{,.*}.test.ts'],
+    ['sizing/{money,oracle,reason,run-loss,size}{,.*}.test.ts'],
     sizing,
   ),
   whole('money'),
