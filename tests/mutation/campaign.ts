@@ -30,12 +30,20 @@ export async function mutate(given: readonly string[]): Promise<number> {
   const chosen = words.length > 0 ? words.flatMap(partsOf) : parts
   process.chdir(program)
   const trials: Trial[] = []
+  const untried: string[] = []
   for (const part of parts.filter((any) => chosen.includes(any))) {
-    trials.push(await trialOf(part, given.includes(BUSY)))
+    try {
+      trials.push(await trialOf(part, given.includes(BUSY)))
+    } catch (error) {
+      // Most of all where its tests fail as they are: the other parts are tried all the same.
+      untried.push(
+        `${part.name} could not be tried: ${error instanceof Error ? error.message : error}`,
+      )
+    }
   }
   const report = reportOf(trials)
-  console.log(`\n${report.lines.join('\n')}`)
-  return report.isEnough ? 0 : 1
+  console.log(`\n${[...report.lines, ...untried].join('\n')}`)
+  return report.isEnough && untried.length === 0 ? 0 : 1
 }
 
 interface Trial {
