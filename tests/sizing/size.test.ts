@@ -213,7 +213,10 @@ describe('where a limit passes', () => {
 
   test('the burn curve only below it, unrounded', () => {
     const at = (thresholdC: number): boolean | undefined =>
-      rung(size(withLimits(hot(), { burn: { thresholdC, contact: '5 s', surface: 's', read: null } })), 50).pass
+      rung(
+        size(withLimits(hot(), { burn: { thresholdC, contact: '5 s', surface: 's', read: null } })),
+        50,
+      ).pass
     expect(at(at50().touchSurfaceC)).toBe(false)
     expect(at(at50().touchSurfaceC + 1e-9)).toBe(true)
   })
