@@ -11,12 +11,21 @@ import { solveStates } from './states.ts'
 const THINNEST_M = 1e-4
 /** Where the search ends: well beyond what is bought as lagging [m]. */
 const THICKEST_M = 0.6
-export const searchedUpToM = THICKEST_M
 const EXACT_M = 1e-7
 
 /** How far one limit is from its bound, in its own unit: negative passes, on whichever side of it that is. */
 const shortfall = ({ pass, value, bound }: LimitResult): number =>
   (pass ? -1 : 1) * Math.abs(value - bound)
+
+/** The thickest sized layer that is looked at [m]: a buried run has to stay under the ground. */
+export function searchedUpToM({ shape, layers }: Problem): number {
+  if (shape.kind !== 'buried-pipe') return THICKEST_M
+  const roomM = shape.depthM - shape.outerDiameterM / 2 - fixedThicknessM(layers)
+  return Math.min(THICKEST_M, Math.max(THINNEST_M, roomM - THINNEST_M))
+}
+
+const fixedThicknessM = (layers: Problem['layers']): number =>
+  layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
 
 function settledAt(problem: Problem, thicknessM: number): Settled {
   return settle(problem.layers, { thicknessM, nominalThicknessM: null, piecesM: [thicknessM] })
@@ -58,7 +67,9 @@ export function passesFromM(
  * none: the limit may pass, fail and pass again.
  */
 function continuousThicknessM(problem: Problem, limit: LimitName): number | null {
-  const thicknessesM = [THINNEST_M, ...problem.steps.map((step) => step.thicknessM), THICKEST_M]
+  const thickestM = searchedUpToM(problem)
+  const stepsM = problem.steps.map((step) => step.thicknessM).filter((stepM) => stepM < thickestM)
+  const thicknessesM = [THINNEST_M, ...stepsM, thickestM]
   const shortfallAt = shortfallOf(problem, limit)
   const last = thicknessesM.findLastIndex((thicknessM) => shortfallAt(thicknessM) > 0)
   const failsM = thicknessesM[last]
@@ -71,7 +82,7 @@ function continuousThicknessM(problem: Problem, limit: LimitName): number | null
 export function wholeThicknessM(problem: Problem, limit: LimitName): number | null {
   const sizedM = continuousThicknessM(problem, limit)
   if (sizedM === null || sizedM === 0) return sizedM
-  return sizedM + problem.layers.reduce((sum, layer) => sum + (layer.thicknessM ?? 0), 0)
+  return sizedM + fixedThicknessM(problem.layers)
 }
 
 /**

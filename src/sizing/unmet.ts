@@ -24,7 +24,7 @@ function causeOf(problem: Problem, limit: LimitName, ladder: readonly Rating[]):
   const { conditions, limits } = problem
   switch (limit) {
     case 'touch':
-      return touchCause(failed, conditions.touch.around.airC, conditions.touch.sunWPerM2)
+      return touchCause(failed, problem)
     case 'damp':
       return limits.damp && failed.bound >= conditions.damp.around.airC
         ? 'the air itself is that near to its dew point'
@@ -34,15 +34,18 @@ function causeOf(problem: Problem, limit: LimitName, ladder: readonly Rating[]):
     case 'space':
       return 'even the thinnest that can be bought is too large'
     default:
-      return `no thickness up to ${searchedUpToM * 1000} mm would`
+      return noneWould(problem)
   }
 }
 
-function touchCause({ bound }: LimitResult, airC: number, sunWPerM2: number): string {
-  if (airC >= bound) return 'the air of the hottest day is as hot itself'
-  return sunWPerM2 > 0
-    ? 'the sun alone heats the surface to that'
-    : `no thickness up to ${searchedUpToM * 1000} mm would`
+/** As far as it was looked: under the ground no farther than the run fits. */
+const noneWould = (problem: Problem): string =>
+  `no thickness up to ${(searchedUpToM(problem) * 1000).toFixed(0)} mm would`
+
+function touchCause({ bound }: LimitResult, problem: Problem): string {
+  const { around, sunWPerM2 } = problem.conditions.touch
+  if (around.airC >= bound) return 'the air of the hottest day is as hot itself'
+  return sunWPerM2 > 0 ? 'the sun alone heats the surface to that' : noneWould(problem)
 }
 
 /** As near to the medium as that, a place takes its temperature at any thickness [K]. */

@@ -102,3 +102,20 @@ test('nothing is unmet where a rung passes, nor where limits only exclude each o
     /^No thickness passes every limit\. Touch needs \d+ mm or more, space allows 20 mm at most\.$/,
   )
 })
+
+test('a buried run is looked at no thicker than the ground over it lets it be', () => {
+  // Axis 150 mm down, pipe of 60.3 mm: 119.85 mm of room, less a hair.
+  const { unmet, reason } = sized({
+    ...steamRun,
+    size: 'DN 50',
+    mediumC: 90,
+    airC: 10,
+    buryDepthM: 0.15,
+    soilWPerMK: 1.5,
+    maxLossWPerM: 3,
+  })
+  expect(unmet).toEqual([
+    { limit: 'loss', neededM: null, because: 'no thickness up to 120 mm would' },
+  ])
+  expect(reason).toContain('no thickness up to 120 mm would')
+})
