@@ -65,7 +65,7 @@ function decided(facts: ReasonFacts, limit: LimitName, words: Words): string {
   }
   // A code that asks for a thickness is met or not by the thickness itself.
   if (thinner && failed && failed.unit === 'm') {
-    const asked = words.quantity(failed.bound, failed.unit, 1)
+    const [, asked] = sides(failed, words)
     return `${said(chosen, words)} meets the ${asked} asked for; ${said(thinner, words)} does not.`
   }
   // Touch may be judged twice: the chosen rung is shown against the bound that the thinner one failed.
