@@ -104,6 +104,7 @@ const sizing: readonly Part[] = [
       'arrival',
       'code',
       'continuous',
+      'curve-notes',
       'equilibrium',
       'frost',
       'limits',
