@@ -33,12 +33,12 @@ const sets: { readonly [S in ColumnSet]: readonly Placed[] } = {
     { key: 'tag', widthPx: 86 },
     { key: 'description', widthPx: 70 },
     { key: 'size', widthPx: 106 },
-    { key: 'lengthM', widthPx: 64, fromPx: 764 },
+    { key: 'lengthM', widthPx: 64, fromPx: 780 },
     { key: 'mediumC', widthPx: 80, fromPx: 564 },
-    { key: 'place', widthPx: 104, fromPx: 868 },
+    { key: 'place', widthPx: 104, fromPx: 884 },
     { key: 'lagging', widthPx: 78 },
-    { key: 'loss', widthPx: 68, fromPx: 632 },
-    { key: 'surface', widthPx: 68, fromPx: 700 },
+    { key: 'loss', widthPx: 84, fromPx: 632 },
+    { key: 'surface', widthPx: 68, fromPx: 716 },
     { key: 'governed', widthPx: 104 },
   ],
   'take-off': [
@@ -94,7 +94,7 @@ function column(key: FieldKey | ResultName, widthPx: number, system: UnitSystem)
         key,
         'Loss',
         unitLabel('heatLossPerLength', system),
-        widthPx + (system === 'us' ? 28 : 0),
+        widthPx + (system === 'us' ? 12 : 0),
       )
     case 'surface':
       return result(key, 'Surface', unitLabel('temperature', system), widthPx)
